@@ -1,0 +1,191 @@
+import { z } from 'zod';
+import { contract, permitted } from './contract.ts';
+import { id, line, text, timestamp, version } from './fields.ts';
+import { problemPlace } from './problems.ts';
+
+/** Where a given value comes from, as the form holds it. Empty fields are allowed while typing. */
+export const draftSource = z.discriminatedUnion('kind', [
+  z.object({ kind: z.literal('typed'), note: text(400).optional() }),
+  z.object({
+    kind: z.literal('file'),
+    file: line(200),
+    row: line(40),
+    sha256: line(64).optional(),
+    note: text(400).optional(),
+  }),
+  z.object({
+    kind: z.literal('drawing'),
+    drawing: line(80),
+    revision: line(20),
+    detail: line(80).optional(),
+    note: text(400).optional(),
+  }),
+  z.object({ kind: z.literal('assumption'), reason: text(400) }),
+]);
+export type DraftSource = z.infer<typeof draftSource>;
+
+/** A quantity as typed, such as `22 ft`; empty while it is not given. */
+export const draftQuantity = z.object({
+  text: line(60),
+  source: draftSource.optional(),
+  confirmed: z.boolean(),
+});
+export type DraftQuantity = z.infer<typeof draftQuantity>;
+
+export const actionNames = ['P', 'MxA', 'MxB', 'MyA', 'MyB', 'MxMax', 'MyMax'] as const;
+export type ActionName = (typeof actionNames)[number];
+
+/** One row of member forces. `id` is made by the client and stays with the row; `name` is a label. */
+export const draftCombination = z.object({
+  id: line(40).min(1),
+  name: line(120),
+  P: draftQuantity,
+  MxA: draftQuantity,
+  MxB: draftQuantity,
+  MyA: draftQuantity,
+  MyB: draftQuantity,
+  MxMax: draftQuantity,
+  MyMax: draftQuantity,
+});
+export type DraftCombination = z.infer<typeof draftCombination>;
+
+export const lengthNames = ['length', 'Lcx', 'Lcy', 'Lcz', 'Lb'] as const;
+export type LengthName = (typeof lengthNames)[number];
+
+/**
+ * A member as its form holds it: text as typed, valid or not, so that nothing typed is ever lost.
+ * What is valid is decided by the input schema of `shared/members`.
+ */
+export const memberDraft = z.object({
+  mark: line(40),
+  /** Where it stands, such as `grid 4/B`; a label. */
+  place: line(120),
+  section: line(60),
+  material: line(120),
+  /** How the ends are held: `held`; anything else is outside the book's scope. */
+  ends: line(40),
+  length: draftQuantity,
+  Lcx: draftQuantity,
+  Lcy: draftQuantity,
+  Lcz: draftQuantity,
+  Lb: draftQuantity,
+  /** A number, `auto`, or empty for 1. */
+  Cb: draftQuantity,
+  /** Which sense the end moments' signs follow; empty until chosen. */
+  endMomentSign: z.enum(['bending', 'joint', '']),
+  combinations: z.array(draftCombination).max(500, 'at most 500 combinations'),
+});
+export type MemberDraft = z.infer<typeof memberDraft>;
+
+export const verdicts = ['OK', 'NOT CHECKED', 'NOT OK', 'FAILED'] as const;
+export const verdict = z.enum(verdicts);
+
+/** What a list shows of a member: the server's run of its stored draft. */
+export const memberSummary = z.object({
+  verdict,
+  /** Null for FAILED and NOT CHECKED. */
+  ratio: z.number().nullable(),
+  governing: z
+    .object({ address: z.string(), clause: z.string(), combination: z.string() })
+    .nullable(),
+  unconfirmed: z.int(),
+  /** Why the draft is not a valid input; the verdict is then NOT CHECKED. */
+  problems: z.array(problemPlace),
+});
+export type MemberSummary = z.infer<typeof memberSummary>;
+
+export const member = z.object({
+  id,
+  version,
+  draft: memberDraft,
+  summary: memberSummary,
+  changedBy: z.string(),
+  changedAt: timestamp,
+});
+export type Member = z.infer<typeof member>;
+
+export const memberRow = z.object({
+  id,
+  version,
+  mark: z.string(),
+  place: z.string(),
+  section: z.string(),
+  material: z.string(),
+  length: z.string(),
+  combinations: z.int(),
+  summary: memberSummary,
+});
+export type MemberRow = z.infer<typeof memberRow>;
+
+export const deletedMemberRow = z.object({
+  id,
+  mark: z.string(),
+  section: z.string(),
+  deletedBy: z.string(),
+  deletedAt: timestamp,
+});
+
+const ofCalculation = z.object({ calculationId: id });
+const ofMember = z.object({ calculationId: id, memberId: id });
+const edit = permitted('member.edit');
+
+export const members = {
+  createMember: contract({
+    method: 'POST',
+    path: '/api/calculations/:calculationId/members',
+    access: edit,
+    params: ofCalculation,
+    body: z.object({ draft: memberDraft }),
+    answer: member,
+  }),
+  showMember: contract({
+    method: 'GET',
+    path: '/api/calculations/:calculationId/members/:memberId',
+    access: permitted('calculation.view'),
+    params: ofMember,
+    body: null,
+    answer: member,
+  }),
+  /** A conflict's `theirs` is a `member`. */
+  updateMember: contract({
+    method: 'PUT',
+    path: '/api/calculations/:calculationId/members/:memberId',
+    access: edit,
+    params: ofMember,
+    body: z.object({ version, draft: memberDraft }),
+    answer: member,
+  }),
+  duplicateMember: contract({
+    method: 'POST',
+    path: '/api/calculations/:calculationId/members/:memberId/duplicate',
+    access: edit,
+    params: ofMember,
+    body: z.object({}),
+    answer: member,
+  }),
+  deleteMember: contract({
+    method: 'DELETE',
+    path: '/api/calculations/:calculationId/members/:memberId',
+    access: edit,
+    params: ofMember,
+    body: null,
+    answer: deletedMemberRow,
+  }),
+  restoreMember: contract({
+    method: 'POST',
+    path: '/api/calculations/:calculationId/members/:memberId/restore',
+    access: edit,
+    params: ofMember,
+    body: z.object({}),
+    answer: member,
+  }),
+  /** All present members' ids in their new order; a conflict if a member came or went. */
+  reorderMembers: contract({
+    method: 'PUT',
+    path: '/api/calculations/:calculationId/member-order',
+    access: edit,
+    params: ofCalculation,
+    body: z.object({ memberIds: z.array(id).max(1000) }),
+    answer: z.object({ memberIds: z.array(id) }),
+  }),
+};
