@@ -1,8 +1,9 @@
 import { z } from 'zod';
+import { verdictSchema } from '#shared/calc/line.ts';
 import { roles } from '#shared/policy/permissions.ts';
 import { contract, permitted } from './contract.ts';
 import { id, line, name, text, timestamp, version } from './fields.ts';
-import { deletedMemberRow, memberRow, verdict } from './members.ts';
+import { deletedMemberRow, memberRow } from './members.ts';
 
 /** A calculation's basis of design, as its form holds it. */
 export const basisDraft = z.object({
@@ -41,9 +42,10 @@ export const calculationRow = z.object({
   design: basisDraft.shape.design,
   units: basisDraft.shape.units,
   /** The worst verdict of its members; null without members. */
-  verdict: verdict.nullable(),
+  verdict: verdictSchema.nullable(),
   /** The largest ratio of members that have one. */
   ratio: z.number().nullable(),
+  ratioText: z.string().nullable(),
   members: z.int(),
   unconfirmed: z.int(),
   roles: z.array(z.enum(roles)),

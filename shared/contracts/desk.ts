@@ -17,7 +17,7 @@ export const waitingItem = z.object({
   reason: z.enum(waitingReasons),
   calculation: z.object({ id, number: z.string(), title: z.string() }),
   member: z.object({ id, mark: z.string(), section: z.string() }),
-  ratio: z.number().nullable(),
+  ratioText: z.string().nullable(),
   /** How many inputs are not confirmed, or not valid. */
   count: z.int(),
 });

@@ -1,26 +1,28 @@
 import { z } from 'zod';
+import { summarySchema } from '#shared/calc/record.ts';
 import { contract, permitted } from './contract.ts';
-import { id, line, text, timestamp, version } from './fields.ts';
+import { id, line, timestamp, version } from './fields.ts';
 import { problemPlace } from './problems.ts';
 
-/** Where a given value comes from, as the form holds it. Empty fields are allowed while typing. */
+/**
+ * Where a given value comes from, as the form holds it: the fields of `shared/calc`'s source, each
+ * of which may still be empty while typing.
+ */
 export const draftSource = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('typed'), note: text(400).optional() }),
+  z.object({ kind: z.literal('typed'), note: line(200).optional() }),
   z.object({
     kind: z.literal('file'),
     file: line(200),
-    row: line(40),
+    row: line(12).optional(),
     sha256: line(64).optional(),
-    note: text(400).optional(),
   }),
   z.object({
     kind: z.literal('drawing'),
-    drawing: line(80),
+    number: line(60),
     revision: line(20),
-    detail: line(80).optional(),
-    note: text(400).optional(),
+    detail: line(120).optional(),
   }),
-  z.object({ kind: z.literal('assumption'), reason: text(400) }),
+  z.object({ kind: z.literal('assumption'), basis: line(400) }),
 ]);
 export type DraftSource = z.infer<typeof draftSource>;
 
@@ -63,7 +65,7 @@ export const memberDraft = z.object({
   section: line(60),
   material: line(120),
   /** How the ends are held: `held`; anything else is outside the book's scope. */
-  ends: line(40),
+  ends: draftQuantity,
   length: draftQuantity,
   Lcx: draftQuantity,
   Lcy: draftQuantity,
@@ -77,17 +79,8 @@ export const memberDraft = z.object({
 });
 export type MemberDraft = z.infer<typeof memberDraft>;
 
-export const verdicts = ['OK', 'NOT CHECKED', 'NOT OK', 'FAILED'] as const;
-export const verdict = z.enum(verdicts);
-
-/** What a list shows of a member: the server's run of its stored draft. */
-export const memberSummary = z.object({
-  verdict,
-  /** Null for FAILED and NOT CHECKED. */
-  ratio: z.number().nullable(),
-  governing: z
-    .object({ address: z.string(), clause: z.string(), combination: z.string() })
-    .nullable(),
+/** What a list shows of a member: the summary of the server's run of its stored draft. */
+export const memberSummary = summarySchema.extend({
   unconfirmed: z.int(),
   /** Why the draft is not a valid input; the verdict is then NOT CHECKED. */
   problems: z.array(problemPlace),
