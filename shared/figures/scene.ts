@@ -3,7 +3,16 @@
  * = 1/96 in at the size it is meant for). A record goes in, a scene comes out; the browser draws it
  * as SVG, the report as PDF vectors.
  */
-export type Ink = 'ink' | 'zinc7' | 'zinc5' | 'zinc3' | 'zinc1' | 'oxide' | 'oxide3' | 'oxide2' | 'paper';
+export type Ink =
+  | 'ink'
+  | 'zinc7'
+  | 'zinc5'
+  | 'zinc3'
+  | 'zinc1'
+  | 'oxide'
+  | 'oxide3'
+  | 'oxide2'
+  | 'paper';
 
 export interface Stroke {
   readonly ink: Ink;

@@ -1,0 +1,60 @@
+/**
+ * What the figures draw: quantities read from a record, each with its value in base units (for the
+ * geometry) and its printed form (for the label).
+ */
+export interface Drawn {
+  readonly value: number;
+  /** Printed form with unit, as the sheet prints it: `134.4 kip ft`. */
+  readonly text: string;
+}
+
+export interface NamedDrawn extends Drawn {
+  readonly symbol: string;
+}
+
+export type Plane = 'major' | 'minor';
+
+/** Moments of one plane. Values are in the bending sense: equal signs are single curvature. */
+export interface PlaneDrawing {
+  readonly plane: Plane;
+  readonly endA: NamedDrawn;
+  readonly endB: NamedDrawn;
+  /** Axial parameter kL of the exact solution, null where none exists or none is wanted. */
+  readonly kL: number | null;
+  /** Largest second-order moment and its distance from end A. */
+  readonly largest: (NamedDrawn & { readonly place: Drawn | null }) | null;
+}
+
+export interface MemberDrawing {
+  readonly mark: string;
+  readonly section: string;
+  readonly length: Drawn;
+  /** Depth and flange width of the section, mm; null where the record has none. */
+  readonly depth: number | null;
+  readonly width: number | null;
+  /** Buckling and unbraced lengths. */
+  readonly lengths: readonly NamedDrawn[];
+  /** Compression positive. */
+  readonly axial: NamedDrawn | null;
+  readonly planes: readonly PlaneDrawing[];
+}
+
+/** Outline of a W shape, mm. */
+export interface SectionDrawing {
+  readonly section: string;
+  readonly depth: NamedDrawn;
+  readonly flangeWidth: NamedDrawn;
+  readonly webThickness: NamedDrawn;
+  readonly flangeThickness: NamedDrawn;
+}
+
+/** One combination in the interaction diagram. */
+export interface InteractionPoint {
+  readonly combination: string;
+  /** Pr/Pc. */
+  readonly axial: number;
+  /** Mrx/Mcx + Mry/Mcy. */
+  readonly moment: number;
+  readonly ratio: number;
+  readonly ratioText: string;
+}

@@ -1,0 +1,122 @@
+import { scaleLinear } from 'd3-scale';
+import type { InteractionPoint } from './drawing.ts';
+import type { Point, Scene, Shape } from './scene.ts';
+import { label, PENS, path } from './shapes.ts';
+
+const WIDTH = 640;
+const HEIGHT = 320;
+const PLOT = { left: 56, right: 366, top: 28, bottom: 276 };
+const LISTED = 12;
+
+/** ANSI/AISC 360-22 H1-1a and H1-1b as a line of moment utilisation against Pr/Pc. */
+const ENVELOPE: readonly Point[] = [
+  [0, 1],
+  [0.9, 0.2],
+  [1, 0],
+];
+
+/**
+ * Every combination as a point of the interaction diagram: across, the sum of the moment ratios;
+ * upwards, Pr/Pc. Null where no combination has reached the interaction.
+ */
+export function interactionDiagram(points: readonly InteractionPoint[]): Scene | null {
+  if (points.length === 0) return null;
+  const worstFirst = [...points].sort((a, b) => b.ratio - a.ratio);
+  const reach = Math.max(1.1, ...points.flatMap((p) => [p.axial, p.moment])) * 1.04;
+  const x = scaleLinear().domain([0, reach]).range([PLOT.left, PLOT.right]);
+  const y = scaleLinear().domain([0, reach]).range([PLOT.bottom, PLOT.top]);
+  const limit = ENVELOPE.map(([m, p]): Point => [x(m), y(p)]);
+  const shapes: Shape[] = [
+    { kind: 'area', points: [[x(0), y(0)], ...limit], fill: 'zinc1' },
+    ...frame(x.ticks(5), x, y),
+    path(limit, { ink: 'ink', width: 1.5 }),
+    label('limit H1-1a, H1-1b', [x(0.45) + 10, y(0.6) - 6], { ink: 'zinc7' }),
+    ...worstFirst.flatMap((p, index) => mark(p, index, x(p.moment), y(p.axial))),
+    ...list(worstFirst),
+  ];
+  return { width: WIDTH, height: HEIGHT, shapes, description: describe(worstFirst) };
+}
+
+function frame(
+  ticks: readonly number[],
+  x: (value: number) => number,
+  y: (value: number) => number,
+): Shape[] {
+  const cross = (value: number): Shape[] => [
+    path(
+      [
+        [PLOT.left - 4, y(value)],
+        [PLOT.left, y(value)],
+      ],
+      PENS.rule,
+    ),
+    label(String(value), [PLOT.left - 8, y(value) + 4], { anchor: 'end', ink: 'zinc7' }),
+    path(
+      [
+        [x(value), PLOT.bottom],
+        [x(value), PLOT.bottom + 4],
+      ],
+      PENS.rule,
+    ),
+    label(String(value), [x(value), PLOT.bottom + 16], { anchor: 'middle', ink: 'zinc7' }),
+  ];
+  return [
+    path(
+      [
+        [PLOT.left, PLOT.top],
+        [PLOT.left, PLOT.bottom],
+        [PLOT.right, PLOT.bottom],
+      ],
+      PENS.rule,
+    ),
+    ...ticks.flatMap(cross),
+    label('Pr / Pc', [PLOT.left - 8, PLOT.top - 12], { weight: 600 }),
+    label('Mrx / Mcx + Mry / Mcy', [PLOT.right, PLOT.bottom + 34], {
+      anchor: 'end',
+      weight: 600,
+    }),
+  ];
+}
+
+/** The worst twelve carry the number they have in the list; over the limit is filled with oxide. */
+function mark(point: InteractionPoint, index: number, x: number, y: number): Shape[] {
+  const over = point.ratio > 1;
+  const dot: Shape = {
+    kind: 'circle',
+    center: [x, y],
+    radius: index === 0 ? 4 : 3,
+    fill: over ? 'oxide' : 'ink',
+    stroke: { ink: 'paper', width: 1 },
+  };
+  if (index >= LISTED) return [dot];
+  return [dot, label(String(index + 1), [x + 6, y - 4], { weight: index === 0 ? 600 : 400 })];
+}
+
+function list(points: readonly InteractionPoint[]): Shape[] {
+  const left = PLOT.right + 34;
+  const rest = points.length - LISTED;
+  const rows = points.slice(0, LISTED).flatMap((point, index): Shape[] => {
+    const y = PLOT.top + 8 + index * 18;
+    const weight = index === 0 ? 600 : 400;
+    return [
+      label(String(index + 1), [left + 12, y], { anchor: 'end', weight }),
+      label(point.combination, [left + 22, y], { weight, within: WIDTH - left - 80 }),
+      label(point.ratioText, [WIDTH, y], { anchor: 'end', weight, ...overInk(point) }),
+    ];
+  });
+  if (rest <= 0) return rows;
+  const y = PLOT.top + 8 + LISTED * 18;
+  const words = rest === 1 ? 'one more, lower' : `${rest} more, all lower`;
+  return [...rows, label(words, [left + 22, y], { ink: 'zinc7' })];
+}
+
+const overInk = (point: InteractionPoint): { ink?: 'oxide' } =>
+  point.ratio > 1 ? { ink: 'oxide' } : {};
+
+function describe(points: readonly InteractionPoint[]): string {
+  const each = points
+    .slice(0, LISTED)
+    .map((p) => `${p.combination} ${p.ratioText}${p.ratio > 1 ? ', over the limit' : ''}`);
+  const count = points.length === 1 ? 'one combination' : `${points.length} combinations`;
+  return `Interaction diagram of Pr/Pc against the sum of the moment ratios with the limit of H1-1a and H1-1b, ${count}: ${each.join('; ')}.`;
+}

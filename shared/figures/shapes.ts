@@ -1,0 +1,84 @@
+import type { Ink, Point, Shape, Stroke } from './scene.ts';
+
+/** The text sizes and pens of all figures. */
+export const TEXT = 11;
+export const PENS = {
+  outline: { ink: 'ink', width: 1 },
+  rule: { ink: 'zinc5', width: 0.75 },
+  hair: { ink: 'zinc3', width: 0.75 },
+  axis: { ink: 'zinc3', width: 0.75, dash: [8, 2, 2, 2] },
+  force: { ink: 'oxide', width: 1.5 },
+  second: { ink: 'oxide', width: 1.75 },
+  first: { ink: 'zinc7', width: 1, dash: [4, 3] },
+} as const satisfies Record<string, Stroke>;
+
+export const path = (points: readonly Point[], stroke: Stroke): Shape => ({
+  kind: 'line',
+  points,
+  stroke,
+});
+
+export const label = (
+  text: string,
+  at: Point,
+  options: {
+    anchor?: 'start' | 'middle' | 'end';
+    weight?: 400 | 600;
+    ink?: Ink;
+    /** Width the text must keep to; longer text is set smaller. */
+    within?: number;
+  } = {},
+): Shape => ({
+  kind: 'text',
+  at,
+  text,
+  size: options.within === undefined ? TEXT : fittedSize(text, options.within),
+  weight: options.weight ?? 400,
+  anchor: options.anchor ?? 'start',
+  ink: options.ink ?? 'ink',
+});
+
+/** Generous estimate of a text's width: the figures know no fonts. */
+export const textWidth = (text: string, size = TEXT): number => [...text].length * size * 0.56;
+
+const fittedSize = (text: string, within: number): number =>
+  Math.max(6, Math.min(TEXT, (TEXT * within) / Math.max(textWidth(text), 1)));
+
+/** A filled head at `tip`, pointing along `angle` (radians, clockwise from +x). */
+export function arrowHead(tip: Point, angle: number, fill: Ink, size = 8): Shape {
+  const wing = (turn: number): Point => [
+    tip[0] - size * Math.cos(angle + turn),
+    tip[1] - size * Math.sin(angle + turn),
+  ];
+  return { kind: 'area', points: [tip, wing(0.38), wing(-0.38)], fill };
+}
+
+/** A straight arrow; the shaft stops inside the head. */
+export function arrow(from: Point, tip: Point, stroke: Stroke): Shape[] {
+  const angle = Math.atan2(tip[1] - from[1], tip[0] - from[0]);
+  const end: Point = [tip[0] - 5 * Math.cos(angle), tip[1] - 5 * Math.sin(angle)];
+  return [path([from, end], stroke), arrowHead(tip, angle, stroke.ink)];
+}
+
+/** A curved arrow about `center` from angle `from` to `to`; clockwise where `to` is larger. */
+export function turnArrow(
+  center: Point,
+  radius: number,
+  from: number,
+  to: number,
+  stroke: Stroke,
+): Shape[] {
+  const way = Math.sign(to - from);
+  const tip: Point = [center[0] + radius * Math.cos(to), center[1] + radius * Math.sin(to)];
+  const stop = to - (way * 5) / radius;
+  const arc: Shape = {
+    kind: 'arc',
+    center,
+    radius,
+    from: Math.min(from, stop),
+    to: Math.max(from, stop),
+    stroke,
+  };
+  // The head follows the chord of its own length, so it sits on the curve.
+  return [arc, arrowHead(tip, to + way * (Math.PI / 2 - 4 / radius), stroke.ink)];
+}
