@@ -25,7 +25,10 @@ const digitsSchema = z.union([
 ]);
 
 /** The forms a value prints in; null where that form is not printed. */
-const printSchema = z.object({ working: digitsSchema.nullable(), display: digitsSchema.nullable() });
+const printSchema = z.object({
+  working: digitsSchema.nullable(),
+  display: digitsSchema.nullable(),
+});
 
 export const sourceSchema = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('typed'), note: z.string().max(200).optional() }),
@@ -33,7 +36,10 @@ export const sourceSchema = z.discriminatedUnion('kind', [
     kind: z.literal('file'),
     file: z.string().min(1).max(200),
     row: z.number().int().positive().optional(),
-    sha256: z.string().regex(/^[0-9a-f]{64}$/).optional(),
+    sha256: z
+      .string()
+      .regex(/^[0-9a-f]{64}$/)
+      .optional(),
   }),
   z.object({
     kind: z.literal('drawing'),

@@ -31,7 +31,8 @@ const grouped = (plain: string, gap: string): string => {
 export function printNumber(value: number, digits: Digits): PrintedNumber {
   if (!Number.isFinite(value)) throw new Error(`cannot print ${value}`);
   const size = Math.abs(value);
-  if (size === 0) return plainForm('0', false, 'sig' in digits ? 10 ** -digits.sig : 10 ** -digits.dec);
+  if (size === 0)
+    return plainForm('0', false, 'sig' in digits ? 10 ** -digits.sig : 10 ** -digits.dec);
   if ('dec' in digits) {
     const fixed = size.toFixed(Math.min(digits.dec, 20));
     return plainForm(fixed, value < 0, 10 ** -digits.dec);
@@ -41,7 +42,8 @@ export function printNumber(value: number, digits: Digits): PrintedNumber {
   const step = Number(`1e${exponent - digits.sig + 1}`);
   if (size < LARGE && size >= SMALL) {
     const decimals = digits.sig - 1 - exponent;
-    const plain = decimals >= 0 ? Number(rounded).toFixed(Math.min(decimals, 20)) : String(Number(rounded));
+    const plain =
+      decimals >= 0 ? Number(rounded).toFixed(Math.min(decimals, 20)) : String(Number(rounded));
     return plainForm(plain, value < 0, step);
   }
   const mantissa = rounded.slice(0, rounded.indexOf('e'));
@@ -80,6 +82,7 @@ export function printTyped(numberText: string): PrintedNumber {
     return plainForm(bare, negative, 10 ** -decimals);
   }
   const canonical = String(Math.abs(value));
-  if (/e/.test(canonical)) return printNumber(value, { sig: Math.max(1, canonical.replace(/e.*|\./g, '').length) });
-  return plainForm(canonical, negative, 10 ** -((canonical.split('.')[1] ?? '').length));
+  if (/e/.test(canonical))
+    return printNumber(value, { sig: Math.max(1, canonical.replace(/e.*|\./g, '').length) });
+  return plainForm(canonical, negative, 10 ** -(canonical.split('.')[1] ?? '').length);
 }

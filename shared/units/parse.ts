@@ -87,7 +87,10 @@ export function parseQuantity(input: string, dimension: DimensionName): Parsed {
     return refuse(`needs a unit (${unitsOf(dimension)})`);
   }
   const unit = unitSpelled(rest);
-  if (!unit) return refuse(`"${short(rest.trim())}" is not a unit known here (${unitsOf(dimension) || 'no unit is wanted'})`);
+  if (!unit)
+    return refuse(
+      `"${short(rest.trim())}" is not a unit known here (${unitsOf(dimension) || 'no unit is wanted'})`,
+    );
   if (unit.dimension !== dimension)
     return refuse(
       `is ${DIMENSION_WORDS[unit.dimension]}; ${DIMENSION_WORDS[dimension]} is wanted` +
@@ -99,7 +102,8 @@ export function parseQuantity(input: string, dimension: DimensionName): Parsed {
 function found(value: number, text: string, unitName: string): Parsed {
   const unit = UNITS.get(unitName);
   if (!unit || !Number.isFinite(value)) return refuse('is too large to be a number');
-  return { ok: true, quantity: { value, text, unit } };
+  // 15 digits, so that 14 ft and 168 in are the same number.
+  return { ok: true, quantity: { value: Number(value.toPrecision(15)), text, unit } };
 }
 
 const short = (text: string): string => (text.length > 24 ? `${text.slice(0, 24)}…` : text);

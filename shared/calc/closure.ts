@@ -1,0 +1,220 @@
+import { type Digits, printNumber } from '../units/format.ts';
+import { fromBase } from '../units/unit.ts';
+import type { UnitSet } from '../units/unit-set.ts';
+import { addressOf, type PlacedLine } from './address.ts';
+import {
+  agrees,
+  conditionSides,
+  reproduced,
+  residualAt,
+  type Sheet,
+  standsAsReal,
+  type Use,
+  usesOf,
+} from './closure-rules.ts';
+import { isValued, type Line, type Print, type ValuedLine } from './line.ts';
+import { type Form, formOf, formUnit, printForm, textGiven } from './printed.ts';
+
+const START: Digits = { sig: 4 };
+const RATIO: Digits = { dec: 3 };
+const PERCENT: Digits = { dec: 1 };
+/** Reaching this is a defect that a test reports. */
+export const MOST_DIGITS = 15;
+
+const more = (d: Digits): Digits => ('sig' in d ? { sig: d.sig + 1 } : { dec: d.dec + 1 });
+const count = (d: Digits): number => ('sig' in d ? d.sig : d.dec);
+
+interface Node extends PlacedLine {
+  shown: { working: Digits | null; display: Digits | null };
+}
+
+/**
+ * Fixes the printed digits of a member's lines, from the last line to the first: a line never gains
+ * digits for its own closure; while it doesn't close, the operand whose rounding moves it most
+ * prints one more. `placed` is in reading order; a line refers only to lines before it.
+ */
+export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] {
+  const nodes: Node[] = placed.map((p) => ({ ...p, shown: { working: null, display: null } }));
+  const byAddress = new Map(nodes.map((n) => [n.address, n]));
+  const nodeAt = (ref: string, from: Node): Node => {
+    const node = byAddress.get(addressOf(ref, from.combination));
+    if (!node) throw new Error(`${from.address} refers to ${ref}, which is not there`);
+    return node;
+  };
+  for (const node of nodes) showOwnForms(node, set);
+  for (const node of nodes)
+    for (const { ref, form } of usesOf(node.line, (r) => nodeAt(r, node).line, set))
+      nodeAt(ref, node).shown[form] ??= firstDigits(nodeAt(ref, node).line);
+  for (const node of nodes.toReversed()) closeNode(node, (ref) => nodeAt(ref, node), set);
+  return nodes.map((n) => ('print' in n.line ? { ...n.line, print: n.shown as Print } : n.line));
+}
+
+const firstDigits = (line: Line): Digits =>
+  line.kind === 'formula' && line.print.working !== null && 'dec' in line.print.working
+    ? RATIO
+    : START;
+
+function showOwnForms({ line, shown }: Node, set: UnitSet): void {
+  if (line.kind === 'check') shown.working = RATIO;
+  if (line.kind === 'comparison') shown.working = PERCENT;
+  if (!isValued(line)) return;
+  if (textGiven(line) !== null) {
+    // A given value prints as typed; the form of its unit set that the trade reads stands by it.
+    shown[formOf(line, 'display', set)] = START;
+    return;
+  }
+  const asked: Form =
+    line.kind === 'formula' ? line.prints : line.kind === 'root' ? 'working' : 'display';
+  shown[formOf(line, asked, set)] = firstDigits(line);
+  if (set.display[line.dimension]) shown.display ??= firstDigits(line);
+}
+
+function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
+  const { line } = node;
+  const print = (n: Node, form: Form) =>
+    printForm(n.line as ValuedLine, form, n.shown[form] ?? START, set);
+  const sheet: Sheet = {
+    set,
+    valued: (ref) => at(ref).line as ValuedLine,
+    printed: (ref, form) => print(at(ref), form),
+    own: (form) => print(node, form),
+  };
+  const raise = (n: Node, form: Form): boolean => {
+    const digits = n.shown[form] ?? START;
+    if (count(digits) >= MOST_DIGITS) return false;
+    n.shown[form] = more(digits);
+    return true;
+  };
+  const raiseMostMoving = (effect: (ref: string) => number): boolean => {
+    const uses = usesOf(line, (ref) => at(ref).line, set);
+    const ranked = uses
+      .map((use) => ({ use, moves: effect(use.ref) }))
+      .filter(({ use, moves }) => moves > 0 && isRounded(use, sheet, set))
+      .sort((a, b) => b.moves - a.moves);
+    return ranked.some(({ use }) => raise(at(use.ref), use.form));
+  };
+
+  switch (line.kind) {
+    case 'formula':
+    case 'governing':
+    case 'root': {
+      closeForms(node, sheet, raise, set);
+      if (line.kind === 'formula') {
+        const form = formOf(line, line.prints, set);
+        const plain = () => reproduced(line, sheet);
+        while (!agrees(plain(), sheet.own(form).number))
+          if (!raiseMostMoving((ref) => Math.abs(reproduced(line, sheet, ref) - plain()))) return;
+      } else if (line.kind === 'root') {
+        while (residualAt(line, sheet, -1) * residualAt(line, sheet, 1) > 0)
+          if (
+            !raiseMostMoving((ref) =>
+              Math.abs(residualAt(line, sheet, 0, ref) - residualAt(line, sheet, 0)),
+            )
+          )
+            return;
+      } else closeGoverning(line, node, sheet, at, raise, set);
+      return;
+    }
+    case 'choice':
+      for (const condition of line.tried) {
+        for (;;) {
+          const sides = conditionSides(condition, sheet);
+          if (!sides) break;
+          const [l, r] = sides;
+          if (standsAsReal(l.real, r.real, l.printed, r.printed)) break;
+          const worst = [l, r]
+            .filter((s) => s.use !== null && isRounded(s.use, sheet, set))
+            .sort((a, b) => Math.abs(b.printed - b.real) - Math.abs(a.printed - a.real));
+          if (!worst.some((s) => s.use && raise(at(s.use.ref), s.use.form))) break;
+        }
+      }
+      return;
+    case 'check': {
+      while (hidesSide(line.ratio, node.shown.working ?? RATIO))
+        node.shown.working = more(node.shown.working ?? RATIO);
+      const own = () => printNumber(line.ratio, node.shown.working ?? RATIO);
+      while (!agrees(reproduced(line, sheet), own()))
+        if (
+          !raiseMostMoving((ref) =>
+            Math.abs(reproduced(line, sheet, ref) - reproduced(line, sheet)),
+          )
+        )
+          return;
+      // Printed demand and capacity stand on the side of the limit that the verdict says.
+      for (;;) {
+        const printed = reproduced(line, sheet);
+        if (printed <= 1 === line.ratio <= 1) return;
+        if (!raiseMostMoving((ref) => Math.abs(reproduced(line, sheet, ref) - printed))) return;
+      }
+    }
+    case 'comparison': {
+      const own = () => printNumber(line.difference * 100, node.shown.working ?? PERCENT);
+      while (!agrees(reproduced(line, sheet), own()))
+        if (
+          !raiseMostMoving((ref) =>
+            Math.abs(reproduced(line, sheet, ref) - reproduced(line, sheet)),
+          )
+        )
+          return;
+      return;
+    }
+    default:
+  }
+}
+
+/** Rounding must not put a ratio on the other side of its limit, nor on it. */
+export const hidesSide = (ratio: number, digits: Digits): boolean => {
+  if (count(digits) >= MOST_DIGITS) return false;
+  return Math.sign(printNumber(ratio, digits).value - 1) !== Math.sign(ratio - 1);
+};
+
+const isRounded = (use: Use, sheet: Sheet, set: UnitSet): boolean => {
+  const line = sheet.valued(use.ref);
+  const exact = fromBase(line.value, formUnit(line, use.form, set));
+  const printed = sheet.printed(use.ref, use.form).number.value;
+  return Math.abs(printed - exact) > 1e-14 * Math.abs(exact);
+};
+
+/** The second printed form of a value follows from the first one as printed. */
+function closeForms(
+  node: Node,
+  sheet: Sheet,
+  raise: (n: Node, form: Form) => boolean,
+  set: UnitSet,
+): void {
+  const line = node.line as ValuedLine;
+  if (!node.shown.working || !node.shown.display || !set.display[line.dimension]) return;
+  const first: Form = line.kind === 'formula' ? formOf(line, line.prints, set) : 'working';
+  const second: Form = first === 'working' ? 'display' : 'working';
+  const factor = formUnit(line, first, set).factor / formUnit(line, second, set).factor;
+  while (!agrees(sheet.own(first).number.value * factor, sheet.own(second).number))
+    if (!raise(node, first)) return;
+}
+
+/** The printed extreme is the printed value of the candidate that governs, and no other passes it. */
+function closeGoverning(
+  line: Extract<Line, { kind: 'governing' }>,
+  node: Node,
+  sheet: Sheet,
+  at: (ref: string) => Node,
+  raise: (n: Node, form: Form) => boolean,
+  set: UnitSet,
+): void {
+  const form = formOf(sheet.valued(line.governs), 'display', set);
+  const digits = node.shown[form];
+  const winner = at(line.governs);
+  const rounded = (ref: string) => isRounded({ ref, form }, sheet, set);
+  while (digits && rounded(line.governs) && count(winner.shown[form] ?? START) < count(digits))
+    if (!raise(winner, form)) break;
+  const sign = line.sense === 'min' ? 1 : -1;
+  for (const other of line.candidates) {
+    while (
+      sign *
+        (sheet.printed(line.governs, form).number.value - sheet.printed(other, form).number.value) >
+      0
+    ) {
+      const lifted = [line.governs, other].filter(rounded).map((ref) => raise(at(ref), form));
+      if (!lifted.some(Boolean)) break;
+    }
+  }
+}

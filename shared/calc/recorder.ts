@@ -1,0 +1,372 @@
+import type { DimensionName } from '../units/dimension.ts';
+import type { Formula } from './formula.ts';
+import type { Clause, Line, LineOf, Print, Severity, Side, Source, ValuedLine } from './line.ts';
+import { solveBracketed } from './solve.ts';
+
+/**
+ * The recorder writes typed lines as a procedure runs. It knows kinds of lines, never clauses. A
+ * quantity it hands out is a number with the reference of its line; only such quantities enter
+ * formulas, so every number on a sheet has a line.
+ */
+export interface Quantity {
+  readonly ref: string;
+  readonly symbol: string;
+  readonly value: number;
+  readonly dimension: DimensionName;
+}
+
+/** A value somebody gave: base units, as typed, with its source and state. */
+export interface GivenValue {
+  readonly value: number;
+  readonly text: string;
+  readonly source: Source;
+  readonly confirmed: boolean;
+}
+
+/** Ends a run whose formula has no finite value; the notice that says so is already written. */
+export class NotComputable extends Error {}
+
+interface Titled {
+  readonly title: string;
+  readonly clause?: Clause | null;
+}
+
+export interface Tried {
+  readonly left: Quantity | number | string;
+  readonly relation: '<' | '<=' | '>' | '>=' | '=' | 'is';
+  readonly right: Quantity | number | string;
+  readonly outcome: string;
+}
+
+const UNPRINTED: Print = { working: null, display: null };
+
+const side = (s: Quantity | number | string): Side =>
+  typeof s === 'number' ? { constant: s } : typeof s === 'string' ? { words: s } : { ref: s.ref };
+
+const number = (s: Quantity | number | string): number =>
+  typeof s === 'number' ? s : typeof s === 'string' ? Number.NaN : s.value;
+
+/** Compared in plain JavaScript, without a tolerance. */
+function holds({ left, relation, right }: Tried): boolean {
+  if (relation === 'is') return left === right;
+  const [l, r] = [number(left), number(right)];
+  return { '<': l < r, '<=': l <= r, '>': l > r, '>=': l >= r, '=': l === r }[relation];
+}
+
+export type Recorder = ReturnType<typeof createRecorder>;
+
+/** A recorder of one scope: '' for member lines, ':' for the lines of one combination. */
+export function createRecorder(prefix: '' | ':') {
+  const lines: Line[] = [];
+  const keys = new Set<string>();
+
+  const add = <L extends Line>(line: L): L => {
+    if (keys.has(line.key)) throw new Error(`two lines with the key ${line.key}`);
+    keys.add(line.key);
+    lines.push(Object.freeze(line));
+    return line;
+  };
+  const quantity = (line: ValuedLine): Quantity =>
+    Object.freeze({
+      ref: prefix + line.key,
+      symbol: line.symbol,
+      value: line.value,
+      dimension: line.dimension,
+    });
+
+  const notice = (
+    key: string,
+    severity: Severity,
+    code: string,
+    text: string,
+    more: Titled,
+  ): void => {
+    add({
+      kind: 'notice',
+      key,
+      title: more.title,
+      clause: more.clause ?? null,
+      severity,
+      code,
+      text,
+    });
+  };
+
+  return {
+    lines: lines as readonly Line[],
+
+    section(key: string, title: string, clause: Clause | null = null): void {
+      add({ kind: 'section', key, title, clause });
+    },
+
+    given(
+      key: string,
+      symbol: string,
+      dimension: DimensionName,
+      given: GivenValue,
+      more: Titled,
+    ): Quantity {
+      const { value, text, source, confirmed } = given;
+      return quantity(
+        add({
+          kind: 'given',
+          key,
+          title: more.title,
+          clause: more.clause ?? null,
+          symbol,
+          value,
+          dimension,
+          print: UNPRINTED,
+          typed: text,
+          source,
+          confirmed,
+        }),
+      );
+    },
+
+    statement(key: string, words: string, source: Source, confirmed: boolean, more: Titled): void {
+      add({
+        kind: 'statement',
+        key,
+        title: more.title,
+        clause: more.clause ?? null,
+        statement: words,
+        source,
+        confirmed,
+      });
+    },
+
+    lookup(
+      key: string,
+      symbol: string,
+      dimension: DimensionName,
+      found: {
+        value: number;
+        published: string;
+        table: string;
+        row: string;
+        column: string;
+        tableSource: string;
+      },
+      more: Titled,
+    ): Quantity {
+      return quantity(
+        add({
+          kind: 'lookup',
+          key,
+          title: more.title,
+          clause: more.clause ?? null,
+          symbol,
+          dimension,
+          print: UNPRINTED,
+          ...found,
+        }),
+      );
+    },
+
+    /** One step by a formula of a book. A result that isn't a finite number becomes a failed notice. */
+    formula(
+      formula: Formula,
+      key: string,
+      operands: Readonly<Record<string, Quantity>>,
+      more: { title?: string; symbol?: string } = {},
+    ): Quantity {
+      const clause: Clause = {
+        book: formula.book,
+        clause: formula.clause,
+        equation: formula.equation,
+      };
+      const title = more.title ?? formula.title;
+      for (const [name, dimension] of Object.entries(formula.operands))
+        if (operands[name]?.dimension !== dimension)
+          throw new Error(
+            `${formula.id}: ${name} is ${operands[name]?.dimension}, not ${dimension}`,
+          );
+      const value = formula.expression.evaluate(
+        Object.fromEntries(Object.entries(operands).map(([name, q]) => [name, q.value])),
+      );
+      if (!Number.isFinite(value)) {
+        notice(
+          `${key}/failed`,
+          'failed',
+          'not-a-number',
+          `${title} has no finite value for these inputs.`,
+          { title, clause },
+        );
+        throw new NotComputable(key);
+      }
+      return quantity(
+        add({
+          kind: 'formula',
+          key,
+          title,
+          clause,
+          symbol: more.symbol ?? formula.symbol,
+          value: value === 0 ? 0 : value,
+          dimension: formula.dimension,
+          print: formula.ratio ? { working: { dec: 3 }, display: null } : UNPRINTED,
+          formula: formula.id,
+          expression: formula.expression.text,
+          operands: Object.fromEntries(
+            Object.keys(formula.operands).map((name) => {
+              const q = operands[name] as Quantity;
+              return [name, { ref: q.ref, symbol: q.symbol }];
+            }),
+          ),
+          prints: formula.prints,
+        }),
+      );
+    },
+
+    /** Tries conditions in order; answers the index of the first that holds, or -1 for otherwise. */
+    choice(
+      key: string,
+      tried: readonly Tried[],
+      otherwise: string,
+      more: Titled & { because?: string },
+    ): number {
+      const taken = tried.findIndex(holds);
+      const read = taken < 0 ? tried : tried.slice(0, taken + 1);
+      add({
+        kind: 'choice',
+        key,
+        title: more.title,
+        clause: more.clause ?? null,
+        tried: read.map((t) => ({
+          left: side(t.left),
+          relation: t.relation,
+          right: side(t.right),
+          holds: holds(t),
+          outcome: t.outcome,
+        })),
+        otherwise,
+        outcome: taken < 0 ? otherwise : (tried[taken]?.outcome ?? otherwise),
+        because: more.because ?? '',
+      });
+      return taken;
+    },
+
+    /** The least or the greatest of candidates; the first of equals governs. */
+    governing(
+      key: string,
+      sense: 'min' | 'max',
+      candidates: readonly Quantity[],
+      more: Titled & { symbol: string },
+    ): Quantity {
+      const best = candidates.reduce((a, b) =>
+        (sense === 'min' ? b.value < a.value : b.value > a.value) ? b : a,
+      );
+      return quantity(
+        add({
+          kind: 'governing',
+          key,
+          title: more.title,
+          clause: more.clause ?? null,
+          symbol: more.symbol,
+          value: best.value,
+          dimension: best.dimension,
+          print: UNPRINTED,
+          sense,
+          candidates: candidates.map((c) => c.ref),
+          governs: best.ref,
+        }),
+      );
+    },
+
+    /** Demand against capacity, or a utilisation against 1. OK means the unrounded ratio is at most 1. */
+    check(key: string, demand: Quantity, capacity: Quantity | 1, more: Titled): LineOf<'check'> {
+      const ratio = demand.value / (capacity === 1 ? 1 : capacity.value);
+      if (!Number.isFinite(ratio)) {
+        notice(
+          `${key}/failed`,
+          'failed',
+          'no-capacity',
+          `${more.title}: the capacity is zero.`,
+          more,
+        );
+        throw new NotComputable(key);
+      }
+      return add({
+        kind: 'check',
+        key,
+        title: more.title,
+        clause: more.clause ?? null,
+        demand: demand.ref,
+        capacity: capacity === 1 ? 1 : capacity.ref,
+        ratio,
+        print: UNPRINTED,
+        verdict: ratio <= 1 ? 'OK' : 'NOT OK',
+      });
+    },
+
+    /** The same quantity by another route; `other` must not be zero. */
+    comparison(key: string, used: Quantity, other: Quantity, words: string, more: Titled): number {
+      const difference = used.value / other.value - 1;
+      add({
+        kind: 'comparison',
+        key,
+        title: more.title,
+        clause: more.clause ?? null,
+        used: used.ref,
+        other: other.ref,
+        difference,
+        print: UNPRINTED,
+        words,
+      });
+      return difference;
+    },
+
+    /**
+     * The root of a formula's expression in one of its symbols, inside a bracket at whose ends it
+     * has opposite signs. Dimension of the root and its print are those of `unknown`.
+     */
+    root(
+      formula: Formula,
+      key: string,
+      unknown: { symbol: string; dimension: DimensionName; bracket: readonly [number, number] },
+      operands: Readonly<Record<string, Quantity>>,
+      more: { title?: string } = {},
+    ): Quantity {
+      const clause: Clause = {
+        book: formula.book,
+        clause: formula.clause,
+        equation: formula.equation,
+      };
+      const title = more.title ?? formula.title;
+      const fixed = Object.fromEntries(
+        Object.entries(operands).map(([name, q]) => [name, q.value]),
+      );
+      const at = (x: number) => formula.expression.evaluate({ ...fixed, [unknown.symbol]: x });
+      const value = solveBracketed(at, unknown.bracket[0], unknown.bracket[1]);
+      if (value === null) {
+        notice(`${key}/failed`, 'failed', 'no-root', `${title} has no root between its bounds.`, {
+          title,
+          clause,
+        });
+        throw new NotComputable(key);
+      }
+      return quantity(
+        add({
+          kind: 'root',
+          key,
+          title,
+          clause,
+          symbol: unknown.symbol,
+          value,
+          dimension: unknown.dimension,
+          print: UNPRINTED,
+          formula: formula.id,
+          expression: formula.expression.text,
+          unknown: unknown.symbol,
+          operands: Object.fromEntries(
+            Object.entries(operands).map(([name, q]) => [name, { ref: q.ref, symbol: q.symbol }]),
+          ),
+          bracket: [unknown.bracket[0], unknown.bracket[1]],
+          residual: at(value),
+        }),
+      );
+    },
+
+    notice,
+  };
+}

@@ -1,0 +1,150 @@
+import {
+  absDependencies,
+  acosDependencies,
+  addDependencies,
+  atan2Dependencies,
+  cosDependencies,
+  create,
+  divideDependencies,
+  type FactoryFunctionMap,
+  type MathNode,
+  multiplyDependencies,
+  parseDependencies,
+  powDependencies,
+  sinDependencies,
+  sqrtDependencies,
+  subtractDependencies,
+  tanDependencies,
+  unaryMinusDependencies,
+  unaryPlusDependencies,
+} from 'mathjs/number';
+
+// Number-only, and only the functions that the books use: no constants and no units, so that E, A,
+// J, L, b, h, phi, tau stay symbols. The names are mathjs's own.
+const used = {
+  parseDependencies,
+  addDependencies,
+  subtractDependencies,
+  multiplyDependencies,
+  divideDependencies,
+  powDependencies,
+  unaryMinusDependencies,
+  unaryPlusDependencies,
+  sqrtDependencies,
+  sinDependencies,
+  cosDependencies,
+  tanDependencies,
+  acosDependencies,
+  atan2Dependencies,
+  absDependencies,
+};
+const math = create(used as FactoryFunctionMap);
+
+/** Functions a formula may call. */
+export const FUNCTIONS = ['sqrt', 'sin', 'cos', 'tan', 'acos', 'atan2', 'abs'] as const;
+export type FunctionName = (typeof FUNCTIONS)[number];
+
+/** The parsed form of a formula's text: plain data, from which value, TeX and text are all made. */
+export type Expr =
+  | { readonly kind: 'number'; readonly text: string; readonly value: number }
+  | { readonly kind: 'symbol'; readonly name: string }
+  | { readonly kind: 'negative'; readonly of: Expr }
+  | { readonly kind: 'binary'; readonly op: BinaryOp; readonly left: Expr; readonly right: Expr }
+  | { readonly kind: 'call'; readonly fn: FunctionName; readonly args: readonly Expr[] };
+export type BinaryOp = '+' | '-' | '*' | '/' | '^';
+
+interface ConstantLike {
+  value: unknown;
+}
+interface SymbolLike {
+  name: string;
+}
+interface OperatorLike {
+  op: string;
+  fn: string;
+  args: MathNode[];
+  implicit: boolean;
+}
+interface FunctionLike {
+  fn: { name: string };
+  args: MathNode[];
+}
+interface ParenthesisLike {
+  content: MathNode;
+}
+
+export interface ParsedExpression {
+  readonly text: string;
+  readonly tree: Expr;
+  /** Symbols used, in order of first appearance; `pi` is not among them. */
+  readonly symbols: readonly string[];
+  /** Value at these operands; not a finite number where the formula has none. */
+  evaluate(operands: Readonly<Record<string, number>>): number;
+}
+
+const cache = new Map<string, ParsedExpression>();
+
+/** Parses a formula's text once; throws on a syntax or a function the books don't use. */
+export function parseExpression(text: string): ParsedExpression {
+  const known = cache.get(text);
+  if (known) return known;
+  const node = math.parse(text);
+  const tree = Object.freeze(fromNode(node, text));
+  const code = node.compile();
+  const parsed: ParsedExpression = Object.freeze({
+    text,
+    tree,
+    symbols: Object.freeze([...symbolsOf(tree)]),
+    evaluate: (operands: Readonly<Record<string, number>>) =>
+      Number(code.evaluate({ ...operands, pi: Math.PI })),
+  });
+  cache.set(text, parsed);
+  return parsed;
+}
+
+function fromNode(node: MathNode, text: string): Expr {
+  switch (node.type) {
+    case 'ConstantNode': {
+      const { value } = node as unknown as ConstantLike;
+      return { kind: 'number', text: String(value), value: Number(value) };
+    }
+    case 'SymbolNode':
+      return { kind: 'symbol', name: (node as unknown as SymbolLike).name };
+    case 'ParenthesisNode':
+      return fromNode((node as unknown as ParenthesisLike).content, text);
+    case 'OperatorNode': {
+      const { op, fn, args, implicit } = node as unknown as OperatorLike;
+      if (implicit) throw new Error(`implicit multiplication in "${text}"`);
+      const [left, right] = args;
+      if (fn === 'unaryMinus' && left) return { kind: 'negative', of: fromNode(left, text) };
+      if (left && right && (op === '+' || op === '-' || op === '*' || op === '/' || op === '^'))
+        return { kind: 'binary', op, left: fromNode(left, text), right: fromNode(right, text) };
+      throw new Error(`operator ${op} in "${text}"`);
+    }
+    case 'FunctionNode': {
+      const { fn, args } = node as unknown as FunctionLike;
+      const name = FUNCTIONS.find((f) => f === fn.name);
+      if (!name) throw new Error(`function ${fn.name} in "${text}"`);
+      return { kind: 'call', fn: name, args: args.map((a) => fromNode(a, text)) };
+    }
+    default:
+      throw new Error(`${node.type} in "${text}"`);
+  }
+}
+
+function* walk(tree: Expr): Generator<Expr> {
+  yield tree;
+  if (tree.kind === 'negative') yield* walk(tree.of);
+  if (tree.kind === 'binary') {
+    yield* walk(tree.left);
+    yield* walk(tree.right);
+  }
+  if (tree.kind === 'call') for (const arg of tree.args) yield* walk(arg);
+}
+
+const symbolsOf = (tree: Expr): Set<string> => {
+  const names = new Set<string>();
+  for (const part of walk(tree))
+    if (part.kind === 'symbol' && part.name !== 'pi') names.add(part.name);
+  return names;
+};
