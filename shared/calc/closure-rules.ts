@@ -26,7 +26,7 @@ export interface Sheet {
 }
 
 /** The form in which `line` prints its operand `operand`. */
-export function useForm(line: Line, operand: ValuedLine, set: UnitSet): Form {
+export function formUsed(line: Line, operand: ValuedLine, set: UnitSet): Form {
   if (line.kind === 'formula') return formOf(operand, line.prints, set);
   if (line.kind === 'root') return 'working';
   return formOf(operand, 'display', set);
@@ -45,7 +45,7 @@ const operandValues = (
   Object.fromEntries(
     Object.entries(line.operands).map(([symbol, { ref }]) => {
       const operand = sheet.valued(ref);
-      const form = useForm(line, operand, sheet.set);
+      const form = formUsed(line, operand, sheet.set);
       const value =
         ref === exact
           ? fromBase(operand.value, formUnit(operand, form, sheet.set))
@@ -132,7 +132,7 @@ export function conditionSides(
 export function usesOf(line: Line, valued: (ref: string) => Line, set: UnitSet): Use[] {
   const use = (ref: string): Use[] => {
     const operand = valued(ref);
-    return isValued(operand) ? [{ ref, form: useForm(line, operand, set) }] : [];
+    return isValued(operand) ? [{ ref, form: formUsed(line, operand, set) }] : [];
   };
   switch (line.kind) {
     case 'formula':

@@ -63,7 +63,8 @@ export function createRecorder(prefix: '' | ':') {
   const add = <L extends Line>(line: L): L => {
     if (keys.has(line.key)) throw new Error(`two lines with the key ${line.key}`);
     keys.add(line.key);
-    lines.push(Object.freeze(line));
+    Object.freeze(line);
+    lines.push(line);
     return line;
   };
   const quantity = (line: ValuedLine): Quantity =>
