@@ -1,5 +1,5 @@
-import type { Scene } from '../figures/scene.ts';
 import type { Verdict } from '../calc/line.ts';
+import type { Scene } from '../figures/scene.ts';
 
 /**
  * The document tree: what a template and a record become, and what the web page and the PDF both
@@ -8,7 +8,12 @@ import type { Verdict } from '../calc/line.ts';
 
 /** A run of text inside a paragraph, a cell or a sentence. */
 export type Inline =
-  | { readonly kind: 'text'; readonly text: string; readonly strong?: boolean; readonly quiet?: boolean }
+  | {
+      readonly kind: 'text';
+      readonly text: string;
+      readonly strong?: boolean;
+      readonly quiet?: boolean;
+    }
   | { readonly kind: 'math'; readonly tex: string; readonly text: string }
   /** A printed value that is a link to its line. */
   | { readonly kind: 'value'; readonly text: string; readonly address: string };
@@ -54,9 +59,18 @@ export interface TableCell {
 }
 
 export type Block =
-  | { readonly kind: 'heading'; readonly level: 1 | 2 | 3; readonly text: string; readonly id?: string }
+  | {
+      readonly kind: 'heading';
+      readonly level: 1 | 2 | 3;
+      readonly text: string;
+      readonly id?: string;
+    }
   | { readonly kind: 'paragraph'; readonly content: readonly Inline[] }
-  | { readonly kind: 'list'; readonly ordered: boolean; readonly items: readonly (readonly Inline[])[] }
+  | {
+      readonly kind: 'list';
+      readonly ordered: boolean;
+      readonly items: readonly (readonly Inline[])[];
+    }
   | {
       readonly kind: 'table';
       readonly caption: string;
@@ -71,7 +85,11 @@ export type Block =
       readonly title: string;
       readonly number: string;
       readonly project: string;
-      readonly fields: readonly { readonly label: string; readonly value: string; readonly tone?: 'plain' | 'over' }[];
+      readonly fields: readonly {
+        readonly label: string;
+        readonly value: string;
+        readonly tone?: 'plain' | 'over';
+      }[];
       readonly notices: readonly string[];
     }
   /** Starts a member's sheet: a title block with mark, section, material. */
@@ -88,14 +106,23 @@ export type Block =
       readonly verdict: Verdict;
       readonly ratioText: string | null;
       readonly address: string | null;
-      readonly terms: readonly { readonly label: string; readonly value: number; readonly text: string }[];
+      readonly terms: readonly {
+        readonly label: string;
+        readonly value: number;
+        readonly text: string;
+      }[];
       readonly limit: string;
       readonly governs: string;
       readonly combination: string;
     }
   | { readonly kind: 'figure'; readonly scene: Scene; readonly caption: string }
   /** A section's head inside a sheet, in serif, with its clause at the left. */
-  | { readonly kind: 'lineSection'; readonly reference: string; readonly title: string; readonly address: string }
+  | {
+      readonly kind: 'lineSection';
+      readonly reference: string;
+      readonly title: string;
+      readonly address: string;
+    }
   | LineBlock
   | { readonly kind: 'cautions'; readonly items: readonly string[] }
   | { readonly kind: 'pageBreak' };
