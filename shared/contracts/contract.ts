@@ -2,10 +2,17 @@ import type { z } from 'zod';
 import type { Permission } from '#shared/policy/permissions.ts';
 
 /** Who may call a route: anyone, any signed-in person, or a person with a permission. */
-export type Access =
-  | { readonly who: 'anyone' }
-  | { readonly who: 'signed-in' }
-  | { readonly who: 'permitted'; readonly permission: Permission };
+export type Access = AnyoneAccess | SignedInAccess | PermittedAccess;
+export interface AnyoneAccess {
+  readonly who: 'anyone';
+}
+export interface SignedInAccess {
+  readonly who: 'signed-in';
+}
+export interface PermittedAccess<Needed extends Permission = Permission> {
+  readonly who: 'permitted';
+  readonly permission: Needed;
+}
 
 /** An answer that is a download and not JSON. */
 export interface FileAnswer {
@@ -22,10 +29,11 @@ export interface Contract<
   Params extends z.ZodType = z.ZodType,
   Body extends z.ZodType | null = z.ZodType | null,
   Answer extends z.ZodType | FileAnswer = z.ZodType | FileAnswer,
+  Allowed extends Access = Access,
 > {
   readonly method: Method;
   readonly path: string;
-  readonly access: Access;
+  readonly access: Allowed;
   readonly params: Params;
   readonly body: Body;
   readonly answer: Answer;
@@ -36,13 +44,16 @@ export function contract<
   Params extends z.ZodType,
   Body extends z.ZodType | null,
   Answer extends z.ZodType | FileAnswer,
->(route: Contract<Params, Body, Answer>): Contract<Params, Body, Answer> {
+  Allowed extends Access,
+>(route: Contract<Params, Body, Answer, Allowed>): Contract<Params, Body, Answer, Allowed> {
   return Object.freeze(route);
 }
 
-export const anyone: Access = { who: 'anyone' };
-export const signedIn: Access = { who: 'signed-in' };
-export const permitted = (permission: Permission): Access => ({ who: 'permitted', permission });
+export const anyone: AnyoneAccess = { who: 'anyone' };
+export const signedIn: SignedInAccess = { who: 'signed-in' };
+export const permitted = <Needed extends Permission>(
+  permission: Needed,
+): PermittedAccess<Needed> => ({ who: 'permitted', permission });
 
 export type ParamsOf<C extends Contract> = z.output<C['params']>;
 export type BodyOf<C extends Contract> = C['body'] extends z.ZodType ? z.output<C['body']> : null;

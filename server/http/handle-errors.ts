@@ -1,0 +1,29 @@
+import type { ErrorRequestHandler } from 'express';
+import type { Logger } from 'pino';
+import { AppError, problemDetailsOf } from './app-error.ts';
+
+/** What Express and its body parser throw, as an error of ours. */
+function known(error: unknown): AppError | null {
+  if (error instanceof AppError) return error;
+  const type = (error as { type?: unknown } | null)?.type;
+  if (type === 'entity.too.large') return new AppError('too-large');
+  if (type === 'entity.parse.failed') {
+    return new AppError('invalid-request', { detail: 'The body is not JSON.' });
+  }
+  const unsupported = ['charset.unsupported', 'encoding.unsupported'];
+  if (unsupported.includes(String(type))) return new AppError('wrong-media-type');
+  if (error instanceof URIError) return new AppError('not-found');
+  return null;
+}
+
+/** Answers every error as problem details; what we do not know is logged and told as a failure. */
+export function handleErrors(log: Logger): ErrorRequestHandler {
+  return (thrown: unknown, _req, res, next) => {
+    const error = known(thrown) ?? new AppError('failed');
+    if (error.code === 'failed') log.error({ err: thrown, route: res.locals.route }, 'failed');
+    if (res.headersSent) return next(thrown);
+    const body = problemDetailsOf(error);
+    if (body.retryAfter !== undefined) res.set('Retry-After', String(body.retryAfter));
+    res.status(body.status).type('application/problem+json').send(JSON.stringify(body));
+  };
+}
