@@ -1,0 +1,52 @@
+import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import { clause, formula } from './writer.ts';
+
+// E4(a) torsional buckling of doubly symmetric shapes.
+export const e4Formulas = {
+  elasticStress: formula({
+    id: 'E4-2',
+    clause: 'E4',
+    equation: 'E4-2',
+    title: 'Elastic torsional buckling stress',
+    symbol: 'Fez',
+    dimension: 'stress',
+    expression: '(pi^2*E*Cw/Lcz^2+G*J)/(Ix+Iy)',
+    operands: {
+      E: 'stress',
+      Cw: 'warping',
+      Lcz: 'length',
+      G: 'stress',
+      J: 'inertia',
+      Ix: 'inertia',
+      Iy: 'inertia',
+    },
+  }),
+};
+
+export interface TorsionalBuckling {
+  readonly E: Quantity;
+  readonly G: Quantity;
+  readonly Cw: Quantity;
+  readonly J: Quantity;
+  readonly Ix: Quantity;
+  readonly Iy: Quantity;
+  readonly Lcy: Quantity;
+  readonly Lcz: Quantity;
+}
+
+/** E4: applies to doubly symmetric shapes when Lcz exceeds Lcy; null where it doesn't. */
+export function elasticTorsionalStress(r: Recorder, q: TorsionalBuckling): Quantity | null {
+  const taken = r.choice(
+    'E4/applies',
+    [{ left: q.Lcz, relation: '>', right: q.Lcy, outcome: 'torsional buckling is checked' }],
+    'torsional buckling need not be checked',
+    {
+      title: 'Torsional buckling of a doubly symmetric shape',
+      clause: clause('E4'),
+      because: 'E4 applies where the torsional buckling length exceeds the lateral one.',
+    },
+  );
+  if (taken < 0) return null;
+  const { E, Cw, Lcz, G, J, Ix, Iy } = q;
+  return r.formula(e4Formulas.elasticStress, 'E4/Fe', { E, Cw, Lcz, G, J, Ix, Iy });
+}
