@@ -1,0 +1,19 @@
+import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
+import { sessionKey, signedOut } from '#client/features/account/queries.ts';
+import { isProblem } from '#client/lib/problem.ts';
+
+/** A session that ended elsewhere: the gate then asks to sign in again, where the person was. */
+const noticeSignOut = (error: unknown) => {
+  if (isProblem(error, 'signed-out')) queryClient.setQueryData(sessionKey, signedOut);
+};
+
+export const queryClient: QueryClient = new QueryClient({
+  queryCache: new QueryCache({ onError: noticeSignOut }),
+  mutationCache: new MutationCache({ onError: noticeSignOut }),
+  defaultOptions: {
+    queries: {
+      staleTime: 15_000,
+      retry: (count, error) => count < 2 && isProblem(error, 'unreachable'),
+    },
+  },
+});

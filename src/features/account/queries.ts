@@ -1,0 +1,29 @@
+import { queryOptions, useQuery } from '@tanstack/react-query';
+import { call } from '#client/lib/api.ts';
+import type { Person, SessionState } from '#shared/contracts/account.ts';
+
+export const sessionKey = ['session'] as const;
+
+/** What is known until the session is asked for again. */
+export const signedOut: SessionState = { user: null, csrfToken: '', demo: null };
+
+export const sessionQuery = queryOptions({
+  queryKey: sessionKey,
+  queryFn: ({ signal }) => call('showSession', { signal }),
+  staleTime: 5 * 60_000,
+  refetchOnWindowFocus: true,
+});
+
+export const welcomeQuery = (token: string) =>
+  queryOptions({
+    queryKey: ['welcome', token],
+    queryFn: ({ signal }) => call('showWelcome', { params: { token }, signal }),
+    staleTime: Number.POSITIVE_INFINITY,
+  });
+
+/** The person at the screen; only below the session gate. */
+export function usePerson(): Person {
+  const { data } = useQuery(sessionQuery);
+  if (!data?.user) throw new Error('no one is signed in');
+  return data.user;
+}

@@ -1,0 +1,65 @@
+import type { ReactNode } from 'react';
+import { Link } from 'react-router-dom';
+import { paths } from '#client/app/paths.ts';
+import { count } from '#client/lib/count.ts';
+import type { Calculation } from '#shared/contracts/calculations.ts';
+import type { MemberRow } from '#shared/contracts/members.ts';
+
+/** Three things to know before the list: what is over, what is open, what is never covered. */
+export function CalculationBand({ calculation }: { calculation: Calculation }) {
+  const rows = calculation.memberRows;
+  const asking = rows.filter(({ summary }) => summary.verdict !== 'OK');
+  const open = rows.filter(({ summary }) => summary.unconfirmed > 0);
+  const total = open.reduce((sum, { summary }) => sum + summary.unconfirmed, 0);
+  return (
+    <div className="grid grid-cols-3 border-b border-zinc-2">
+      <Third title={asking.length > 0 ? 'Wants attention' : 'All members checked'}>
+        {asking.length === 0
+          ? rows.length > 0 && 'Each is within its limits under every combination.'
+          : asking.map((row, index) => (
+              <span key={row.id}>
+                {index > 0 && '; '}
+                <MemberLink calculation={calculation} row={row} /> {says(row)}
+              </span>
+            ))}
+      </Third>
+      <Third title={`Not confirmed: ${total}`}>
+        {total === 0
+          ? 'Every input has a source and is confirmed.'
+          : open.map((row, index) => (
+              <span key={row.id}>
+                {index > 0 && ', '}
+                {count(row.summary.unconfirmed, 'input')} of{' '}
+                <MemberLink calculation={calculation} row={row} />
+              </span>
+            ))}
+      </Third>
+      <Third title="Never covered here">
+        Connections, base plates, bracing strength and stiffness, shear, torsion, deflection,
+        fatigue, fire, seismic detailing, erection.
+      </Third>
+    </div>
+  );
+}
+
+const says = ({ summary }: MemberRow): string =>
+  summary.problems.length > 0
+    ? `has ${count(summary.problems.length, 'input')} to correct`
+    : `${summary.verdict} ${summary.ratioText ?? ''}`.trim();
+
+function MemberLink({ calculation, row }: { calculation: Calculation; row: MemberRow }) {
+  return (
+    <Link to={paths.member(calculation.id, row.id)} className="link text-ink">
+      {row.mark || 'without a mark'}
+    </Link>
+  );
+}
+
+function Third({ title, children }: { title: string; children: ReactNode }) {
+  return (
+    <div className="border-l border-zinc-2 px-5 py-4 first:border-l-0 first:pl-0 last:pr-0">
+      <h2 className="font-semibold">{title}</h2>
+      <p className="mt-0.5 text-zinc-7">{children}</p>
+    </div>
+  );
+}

@@ -1,0 +1,59 @@
+import { Link } from 'react-router-dom';
+import { paths } from '#client/app/paths.ts';
+import { count } from '#client/lib/count.ts';
+import { Cell, Row, RowHead } from '#client/ui/ledger.tsx';
+import { RatioBar } from '#client/ui/ratio-bar.tsx';
+import { Tag } from '#client/ui/tag.tsx';
+import { VerdictText } from '#client/ui/verdict.tsx';
+import type { MemberRow } from '#shared/contracts/members.ts';
+import { MemberRowActions } from './member-row-actions.tsx';
+
+export function MemberLedgerRow(props: {
+  calculationId: string;
+  row: MemberRow;
+  onMove?: (by: -1 | 1) => void;
+}) {
+  const { calculationId, row, onMove } = props;
+  const { summary } = row;
+  const { governing } = summary;
+  return (
+    <Row>
+      <RowHead className="whitespace-nowrap">
+        <Link to={paths.member(calculationId, row.id)} className="link">
+          {row.mark || 'without a mark'}
+        </Link>
+      </RowHead>
+      <Cell className="whitespace-nowrap">{row.section || '–'}</Cell>
+      <Cell>{[row.place, row.length].filter(Boolean).join(', ')}</Cell>
+      <Cell className="align-middle">
+        <RatioBar ratio={summary.ratio} />
+      </Cell>
+      <Cell className="text-right">
+        <VerdictText verdict={summary.verdict} ratioText={summary.ratioText} />
+      </Cell>
+      <Cell>
+        {governing &&
+          [governing.clause.equation ?? governing.clause.clause, governing.combinationName]
+            .filter(Boolean)
+            .join(', ')}
+      </Cell>
+      <Cell>
+        <MemberState row={row} />
+      </Cell>
+      {onMove && (
+        <Cell className="py-1 pr-0 whitespace-nowrap">
+          <MemberRowActions calculationId={calculationId} row={row} onMove={onMove} />
+        </Cell>
+      )}
+    </Row>
+  );
+}
+
+function MemberState({ row }: { row: MemberRow }) {
+  const { problems, unconfirmed, verdict } = row.summary;
+  if (problems.length > 0)
+    return <Tag tone="asks">{count(problems.length, 'input')} to correct</Tag>;
+  if (verdict === 'NOT OK') return <Tag tone="asks">over limit</Tag>;
+  if (unconfirmed > 0) return <Tag>{unconfirmed} not confirmed</Tag>;
+  return <span className="text-zinc-7">confirmed</span>;
+}
