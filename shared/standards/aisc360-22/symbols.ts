@@ -133,8 +133,13 @@ export const symbols = {
   MA4: symbol('M_{A}', 'moment at the first quarter point', 'moment'),
   MB4: symbol('M_{B}', 'moment at the middle', 'moment'),
   MC4: symbol('M_{C}', 'moment at the third quarter point', 'moment'),
+  MA: symbol('M_{(A)}', 'moment at end A, bending sense', 'moment'),
+  MB: symbol('M_{(B)}', 'moment at end B, bending sense', 'moment'),
   PrPc: symbol('P_r/P_c', 'use of the axial strength'),
   ratio: symbol('R', 'utilisation'),
   ratiox: symbol('M_{rx}/M_{cx}', 'use of the major-axis flexural strength'),
   ratioy: symbol('M_{ry}/M_{cy}', 'use of the minor-axis flexural strength'),
+  P: symbol('P_r', 'axial force, compression positive', 'force'),
+  ratioExact: symbol('R_{exact}', 'utilisation with the exact moment'),
+  Cb2: symbol('C_{b,2}', 'modification factor from the second-order diagram'),
 } as const;

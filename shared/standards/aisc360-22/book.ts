@@ -1,0 +1,33 @@
+import { defineBook } from '../book.ts';
+import { app8Formulas } from './app8.ts';
+import { b4Formulas } from './b4.ts';
+import { c2Formulas } from './c2.ts';
+import { e3Formulas } from './e3.ts';
+import { e4Formulas } from './e4.ts';
+import { e7Formulas } from './e7.ts';
+import { f1Formulas } from './f1.ts';
+import { f2Formulas } from './f2.ts';
+import { f3Formulas } from './f3.ts';
+import { f6Formulas } from './f6.ts';
+import { h1Formulas } from './h1.ts';
+import { SPECIFICATION } from './parameters.ts';
+import { symbols } from './symbols.ts';
+import { BOOK } from './writer.ts';
+
+/** ANSI/AISC 360-22 for rolled W shapes in compression and biaxial bending. */
+export const aisc360 = defineBook(
+  { id: BOOK, name: 'ANSI/AISC 360-22', title: SPECIFICATION, symbols },
+  [
+    b4Formulas,
+    c2Formulas,
+    e3Formulas,
+    e4Formulas,
+    e7Formulas,
+    f1Formulas,
+    f2Formulas,
+    f3Formulas,
+    f6Formulas,
+    app8Formulas,
+    h1Formulas,
+  ].flatMap((group) => Object.values(group)),
+);

@@ -1,0 +1,58 @@
+import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import { formula } from './writer.ts';
+
+// F1 general: Cb from the moments at the quarter points of the unbraced segment.
+const quarter = (id: string, title: string, symbol: string, expression: string) =>
+  formula({
+    id,
+    clause: 'F1',
+    equation: 'F1-1',
+    title,
+    symbol,
+    dimension: 'moment',
+    expression,
+    operands: { MA: 'moment', MB: 'moment' },
+    prints: 'display',
+  });
+
+export const f1Formulas = {
+  quarterA: quarter(
+    'F1-MA',
+    'First-order moment at the first quarter point',
+    'MA4',
+    'abs(0.75*MA+0.25*MB)',
+  ),
+  quarterB: quarter('F1-MB', 'First-order moment at the middle', 'MB4', 'abs(0.5*MA+0.5*MB)'),
+  quarterC: quarter(
+    'F1-MC',
+    'First-order moment at the third quarter point',
+    'MC4',
+    'abs(0.25*MA+0.75*MB)',
+  ),
+  Cb: formula({
+    id: 'F1-1',
+    clause: 'F1',
+    equation: 'F1-1',
+    title: 'Lateral-torsional buckling modification factor',
+    symbol: 'Cb',
+    dimension: 'none',
+    expression: '12.5*Mmax/(2.5*Mmax+3*MA4+4*MB4+3*MC4)',
+    operands: { Mmax: 'moment', MA4: 'moment', MB4: 'moment', MC4: 'moment' },
+    prints: 'display',
+  }),
+};
+
+/** F1-1 from the largest moment and those at the quarter points of the segment, all positive. */
+export const modificationFactor = (
+  r: Recorder,
+  at: string,
+  q: { Mmax: Quantity; MA4: Quantity; MB4: Quantity; MC4: Quantity },
+  title?: string,
+): Quantity => r.formula(f1Formulas.Cb, `${at}/Cb`, { ...q }, title ? { title } : {});
+
+/** Quarter-point moments of a straight first-order diagram between the ends of the segment. */
+export const firstOrderQuarters = (r: Recorder, at: string, MA: Quantity, MB: Quantity) => ({
+  MA4: r.formula(f1Formulas.quarterA, `${at}/MA`, { MA, MB }),
+  MB4: r.formula(f1Formulas.quarterB, `${at}/MB`, { MA, MB }),
+  MC4: r.formula(f1Formulas.quarterC, `${at}/MC`, { MA, MB }),
+});
