@@ -14,6 +14,12 @@ export interface NamedDrawn extends Drawn {
 
 export type Plane = 'major' | 'minor';
 
+/** A place along the member: distance from end A, mm, and how it is said: `at 9.27 ft`, `at end A`. */
+export interface Place {
+  readonly value: number;
+  readonly words: string;
+}
+
 /** Moments of one plane. Values are in the bending sense: equal signs are single curvature. */
 export interface PlaneDrawing {
   readonly plane: Plane;
@@ -21,8 +27,8 @@ export interface PlaneDrawing {
   readonly endB: NamedDrawn;
   /** Axial parameter kL of the exact solution, null where none exists or none is wanted. */
   readonly kL: number | null;
-  /** Largest second-order moment and its distance from end A. */
-  readonly largest: (NamedDrawn & { readonly place: Drawn | null }) | null;
+  /** Largest second-order moment, signed like the larger end moment, and where it lies. */
+  readonly largest: (NamedDrawn & { readonly place: Place }) | null;
 }
 
 export interface MemberDrawing {

@@ -19,7 +19,10 @@ const plane = (over: Partial<PlaneDrawing> = {}): PlaneDrawing => ({
   endA: named('MxA', 118e6, '118 kip ft'),
   endB: named('MxB', 104e6, '104 kip ft'),
   kL: 1.2,
-  largest: { ...named('Mmax', 134.4e6, '134.4 kip ft'), place: { value: 2800, text: '9.2 ft' } },
+  largest: {
+    ...named('Mmax', 134.4e6, '134.4 kip ft'),
+    place: { value: 2800, words: 'at 9.2 ft' },
+  },
   ...over,
 });
 

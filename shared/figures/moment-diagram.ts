@@ -82,11 +82,11 @@ function largestMark(
   up: (moment: number) => number,
 ): Shape[] {
   const { largest } = plane;
-  if (!largest?.place) return [];
+  if (!largest) return [];
   const x = along(largest.place.value);
   const y = up(largest.value);
   const outward = largest.value < 0 ? 13 : -7;
-  const text = `${largest.symbol} ${largest.text} at ${largest.place.text}`;
+  const text = `${largest.symbol} ${largest.text} ${largest.place.words}`;
   const half = textWidth(text) / 2;
   const middle = Math.max(along(0) + half, Math.min(end - half, x));
   return [
@@ -132,6 +132,5 @@ function describe(plane: PlaneDrawing, second: readonly Sample[] | null): string
   if (second === null)
     return `${ends}. No second-order curve: the sheet has no stable solution for it.`;
   if (!largest) return `${ends}, with the second-order curve.`;
-  const place = largest.place ? ` at ${largest.place.text} from end A` : '';
-  return `${ends}. Largest second-order moment ${largest.text}${place}.`;
+  return `${ends}. Largest second-order moment ${largest.text} ${largest.place.words}.`;
 }

@@ -16,7 +16,13 @@ export type Inline =
     }
   | { readonly kind: 'math'; readonly tex: string; readonly text: string }
   /** A printed value that is a link to its line. */
-  | { readonly kind: 'value'; readonly text: string; readonly address: string };
+  | {
+      readonly kind: 'value';
+      readonly text: string;
+      readonly address: string;
+      /** Id of the line's member, where the block belongs to none (tables of the whole report). */
+      readonly member?: string;
+    };
 
 /**
  * One line of a sheet, in the three columns. `working` is TeX cut into chunks at which it may be

@@ -1,0 +1,104 @@
+import type {
+  CalculationRecord,
+  CombinationRecord,
+  MemberRecord,
+  Summary,
+} from '../calc/record.ts';
+import { openMember } from './open-member.ts';
+import { presentLine } from './present-line.ts';
+import type { Presenter } from './presenter.ts';
+import { shortReference } from './reference-text.ts';
+import { whyNone } from './results-block.ts';
+import { memberFigures } from './sheet-figures.ts';
+import type { Block, BlockOf } from './tree.ts';
+import { verdictTerms } from './verdict-terms.ts';
+
+/**
+ * A member's sheet: head, verdict, figures, the member's lines, then those of one combination
+ * (null: the governing one). Throws if the member or the combination is not in the record.
+ */
+export function memberSheet(
+  record: CalculationRecord,
+  memberId: string,
+  combinationId: string | null = null,
+): Block[] {
+  const { member, presenter } = openMember(record, memberId);
+  const combination = chosen(member, combinationId);
+  const summary = combination?.summary ?? member.summary;
+  return [
+    sheetHead(member),
+    verdictBlock(member, summary, combination),
+    ...memberFigures(record, member, combination),
+    ...linesOf(presenter, null),
+    ...(combination ? combinationBlocks(presenter, combination) : []),
+  ];
+}
+
+/** The sheet with every combination, the governing one first among its figures. */
+export function wholeMemberSheet(record: CalculationRecord, memberId: string): Block[] {
+  const { member, presenter } = openMember(record, memberId);
+  const governing = chosen(member, null);
+  return [
+    sheetHead(member),
+    verdictBlock(member, member.summary, governing),
+    ...memberFigures(record, member, governing),
+    ...linesOf(presenter, null),
+    ...member.combinations.flatMap((c) => combinationBlocks(presenter, c)),
+  ];
+}
+
+/** The combination asked for, else the one that governs, else the first. */
+function chosen(member: MemberRecord, id: string | null): CombinationRecord | null {
+  const wanted = id ?? member.summary.governing?.combination ?? member.combinations[0]?.id;
+  if (wanted === undefined) return null;
+  const found = member.combinations.find((c) => c.id === wanted);
+  if (!found) throw new Error(`no combination ${wanted} of member ${member.mark}`);
+  return found;
+}
+
+const sheetHead = ({ id, mark, section, material }: MemberRecord): Block => ({
+  kind: 'sheetHead',
+  member: id,
+  mark,
+  section,
+  material,
+});
+
+function verdictBlock(
+  member: MemberRecord,
+  summary: Summary,
+  combination: CombinationRecord | null,
+): BlockOf<'verdict'> {
+  const { governing } = summary;
+  return {
+    kind: 'verdict',
+    verdict: summary.verdict,
+    ratioText: summary.ratioText,
+    address: governing?.address ?? null,
+    terms: governing ? verdictTerms(member, governing) : [],
+    limit: '1.000',
+    governs: governing
+      ? `${shortReference(governing.clause)}, ${governing.title}`
+      : whyNone(member),
+    combination: governing?.combinationName ?? combination?.name ?? '',
+  };
+}
+
+const linesOf = (presenter: Presenter, combination: string | null): Block[] =>
+  presenter.placed
+    .filter((p) => p.combination === combination)
+    .map((p) => presentLine(presenter, p));
+
+/** A combination's heading carries its verdict, so that no sheet is read past it. */
+function combinationBlocks(presenter: Presenter, combination: CombinationRecord): Block[] {
+  const { verdict, ratioText } = combination.summary;
+  return [
+    {
+      kind: 'heading',
+      level: 3,
+      text: `Combination ${combination.name}: ${verdict}${ratioText === null ? '' : ` ${ratioText}`}`,
+      id: `${presenter.member.id}/${combination.id}`,
+    },
+    ...linesOf(presenter, combination.id),
+  ];
+}
