@@ -80,7 +80,7 @@ export const account = {
     access: anyone,
     params: welcomeParams,
     body: null,
-    answer: z.object({ name: z.string(), email: z.string(), firm: z.string() }),
+    answer: z.object({ name: z.string(), email: z.string(), firm: z.string().nullable() }),
   }),
   /** Sets the password and signs in. */
   acceptWelcome: contract({

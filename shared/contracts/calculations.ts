@@ -4,6 +4,7 @@ import { roles } from '#shared/policy/permissions.ts';
 import { contract, permitted } from './contract.ts';
 import { id, line, name, text, timestamp, version } from './fields.ts';
 import { deletedMemberRow, memberRow } from './members.ts';
+import { problemPlace } from './problems.ts';
 
 /** A calculation's basis of design, as its form holds it. */
 export const basisDraft = z.object({
@@ -63,6 +64,8 @@ export const calculation = calculationRow.extend({
   projectVisible: z.boolean(),
   can: permissionsHere,
   memberRows: z.array(memberRow),
+  /** Why there is no record of the whole yet, by member (`members[C-07].mark`). */
+  problems: z.array(problemPlace),
   deletedMembers: z.array(deletedMemberRow),
 });
 export type Calculation = z.infer<typeof calculation>;

@@ -26,13 +26,23 @@ export const draftSource = z.discriminatedUnion('kind', [
 ]);
 export type DraftSource = z.infer<typeof draftSource>;
 
-/** A quantity as typed, such as `22 ft`; empty while it is not given. */
+/** A quantity or word as typed, such as `22 ft` or `held`; empty while it is not given. */
 export const draftQuantity = z.object({
   text: line(60),
   source: draftSource.optional(),
   confirmed: z.boolean(),
 });
 export type DraftQuantity = z.infer<typeof draftQuantity>;
+
+/** A steel of the user's own; its source is needed. */
+export const draftSteel = z.object({
+  name: line(60),
+  Fy: line(60),
+  Fu: line(60),
+  source: draftSource.optional(),
+  confirmed: z.boolean(),
+});
+export type DraftSteel = z.infer<typeof draftSteel>;
 
 export const actionNames = ['P', 'MxA', 'MxB', 'MyA', 'MyB', 'MxMax', 'MyMax'] as const;
 export type ActionName = (typeof actionNames)[number];
@@ -41,6 +51,8 @@ export type ActionName = (typeof actionNames)[number];
 export const draftCombination = z.object({
   id: line(40).min(1),
   name: line(120),
+  /** The load level that the forces say they are of; empty where they do not say. */
+  design: z.enum(['LRFD', 'ASD', '']).optional(),
   P: draftQuantity,
   MxA: draftQuantity,
   MxB: draftQuantity,
@@ -62,8 +74,11 @@ export const memberDraft = z.object({
   mark: line(40),
   /** Where it stands, such as `grid 4/B`; a label. */
   place: line(120),
-  section: line(60),
-  material: line(120),
+  /** A designation such as `W12X79`, with where it is from. */
+  section: draftQuantity,
+  /** A grade such as `A992`; not used where the steel is the user's own. */
+  material: line(60),
+  ownSteel: draftSteel.nullable(),
   /** How the ends are held: `held`; anything else is outside the book's scope. */
   ends: draftQuantity,
   length: draftQuantity,
