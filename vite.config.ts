@@ -7,10 +7,32 @@ export default defineConfig({
   build: { outDir: 'dist/client', emptyOutDir: true, sourcemap: true },
   server: { proxy: { '/api': `http://127.0.0.1:${process.env.PORT ?? 4310}` } },
   test: {
-    include: ['{shared,server,src,tests}/**/*.test.{ts,tsx}'],
     pool: 'forks',
     maxWorkers: 2,
     testTimeout: 30_000,
     hookTimeout: 120_000,
+    allowOnly: false,
+    globalSetup: 'tests/support/template-database.ts',
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: 'unit',
+          include: ['{shared,server,src,tests}/**/*.test.{ts,tsx}'],
+          exclude: ['tests/{api,e2e}/**'],
+        },
+      },
+      { extends: true, test: { name: 'api', include: ['tests/api/**/*.test.ts'] } },
+      {
+        extends: true,
+        test: {
+          name: 'e2e',
+          include: ['tests/e2e/**/*.test.ts'],
+          // One browser at a time, after everything else.
+          maxWorkers: 1,
+          sequence: { groupOrder: 1 },
+        },
+      },
+    ],
   },
 });
