@@ -23,9 +23,11 @@ const featureOf = ({ parts }: File) =>
 
 function wrongOrder(from: File, to: File): string | undefined {
   if (from.parts[0] !== 'shared' || to.parts[0] !== 'shared') return undefined;
-  const [own, other] = [from, to].map((file) => rules.sharedOrder.indexOf(file.parts[1]!));
-  if (other === -1) return 'it lies in no folder of shared that the order knows';
-  return other! > own! ? `${from.parts[1]} stands before ${to.parts[1]}` : undefined;
+  const [own, other] = [from.parts[1]!, to.parts[1]!];
+  const [ownPlace, otherPlace] = [own, other].map((folder) => rules.sharedOrder.indexOf(folder));
+  if (otherPlace === -1) return 'it lies in no folder of shared that the order knows';
+  if (otherPlace! > ownPlace!) return `${own} stands before ${other}`;
+  return rules.sharedApart[own]?.includes(other) ? `${own} knows no ${other}` : undefined;
 }
 
 function wrongEdition(from: File, to: File): string | undefined {

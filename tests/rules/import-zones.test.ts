@@ -59,6 +59,7 @@ describe('the checker', () => {
     ['shared/calc/a.ts', 'export const a = () => Math.random();'],
     ['shared/standards/aisc360-22/E3.ts', "import { b } from '#shared/members/b.ts';"],
     ['shared/standards/aisc360-22/E3.ts', "import { b } from '../elastic-theory/b.ts';"],
+    ['shared/standards/aisc360-22/E3.ts', "import { b } from '#shared/sections/b.ts';"],
     ['shared/contracts/a.ts', "import { b } from '#server/features/b.ts';"],
     ['server/app.ts', "import { b } from '#client/lib/b.ts';"],
     ['server/app.ts', "import { b } from '../src/lib/b.ts';"],

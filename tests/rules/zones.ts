@@ -13,6 +13,11 @@ export const sharedOrder: readonly string[] = [
   ...['figures', 'report', 'policy', 'contracts'],
 ];
 
+/** Folders of `shared` that do without one before them: a book takes quantities, not sections. */
+export const sharedApart: Readonly<Record<string, readonly string[]>> = {
+  standards: ['sections'],
+};
+
 /** Editions that may build on another edition: none does. Overlays of a standard come here. */
 export const editionsUsed: Readonly<Record<string, readonly string[]>> = {};
 
