@@ -2,6 +2,7 @@ import { spawn } from 'node:child_process';
 import { cloneFolder } from './clone.mjs';
 
 const active = new Set();
+let passing = false;
 let interrupted = false;
 
 /** One line for the person at the terminal. */
@@ -9,12 +10,22 @@ export const say = (text) => process.stdout.write(`${text}\n`);
 
 export const wasInterrupted = () => interrupted;
 
+// The command and all that it started.
+function endGroup({ pid }) {
+  try {
+    process.kill(-pid, 'SIGTERM');
+  } catch {
+    // It has ended by itself.
+  }
+}
+
 /** From now on a signal ends the running command, not this process, so that it can tidy up. */
 export function passSignalsOn() {
+  passing = true;
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.on(signal, () => {
       interrupted = true;
-      for (const child of active) child.kill('SIGTERM');
+      active.forEach(endGroup);
     });
   }
 }
@@ -27,7 +38,8 @@ export function run(command, args, { cwd = cloneFolder, env = process.env, input
   const output = quiet ? 'pipe' : 'inherit';
   const stdin = input === undefined ? 'ignore' : 'pipe';
   return new Promise((resolve) => {
-    const child = spawn(command, args, { cwd, env, stdio: [stdin, output, output] });
+    const stdio = [stdin, output, output];
+    const child = spawn(command, args, { cwd, env, stdio, detached: passing });
     let text = '';
     active.add(child);
     const end = (code) => {
