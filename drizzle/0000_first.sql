@@ -18,6 +18,7 @@ CREATE TABLE "calculations" (
 	"title" text NOT NULL,
 	"revision" text NOT NULL,
 	"basis" text NOT NULL,
+	"originator_id" uuid NOT NULL,
 	"version" integer NOT NULL,
 	"changed_by" uuid NOT NULL,
 	"changed_at" timestamp with time zone NOT NULL,
@@ -114,6 +115,7 @@ CREATE TABLE "sessions" (
 );
 --> statement-breakpoint
 ALTER TABLE "calculations" ADD CONSTRAINT "calculations_project_id_projects_id_fk" FOREIGN KEY ("project_id") REFERENCES "public"."projects"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "calculations" ADD CONSTRAINT "calculations_originator_id_users_id_fk" FOREIGN KEY ("originator_id") REFERENCES "public"."users"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "calculations" ADD CONSTRAINT "calculations_changed_by_users_id_fk" FOREIGN KEY ("changed_by") REFERENCES "public"."users"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "members" ADD CONSTRAINT "members_calculation_id_calculations_id_fk" FOREIGN KEY ("calculation_id") REFERENCES "public"."calculations"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "members" ADD CONSTRAINT "members_changed_by_users_id_fk" FOREIGN KEY ("changed_by") REFERENCES "public"."users"("id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint

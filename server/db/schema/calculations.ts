@@ -15,6 +15,9 @@ export const calculations = pgTable(
     title: text('title').notNull(),
     revision: text('revision').notNull(),
     basis: text('basis').notNull(),
+    originatorId: uuid('originator_id')
+      .notNull()
+      .references(() => users.id),
     version: integer('version').notNull(),
     changedBy: uuid('changed_by')
       .notNull()

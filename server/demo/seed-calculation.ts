@@ -1,0 +1,47 @@
+import { randomUUID } from 'node:crypto';
+import { writeAudit } from '#server/audit/write-audit.ts';
+import { canonicalText } from '#server/db/canonical-text.ts';
+import { calculations, members } from '#server/db/schema/calculations.ts';
+import type { Transaction } from '#server/db/transaction.ts';
+import { draftColumns } from '#server/features/members/stored-member.ts';
+import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import type { MemberDraft } from '#shared/contracts/members.ts';
+
+export interface SeedPlace {
+  readonly firmId: string;
+  readonly projectId: string;
+  readonly engineerId: string;
+  readonly now: Date;
+}
+
+interface SeedCalculation {
+  readonly number: string;
+  readonly title: string;
+  readonly revision: string;
+  readonly basis: BasisDraft;
+  readonly members: readonly MemberDraft[];
+}
+
+/** Adds a calculation with its members to the demo's project, as if its engineer had typed it. */
+export async function seedCalculation(
+  tx: Transaction,
+  { firmId, projectId, engineerId, now }: SeedPlace,
+  { number, title, revision, basis, members: drafts }: SeedCalculation,
+): Promise<void> {
+  const calculationId = randomUUID();
+  const changed = { version: 1, changedBy: engineerId, changedAt: now };
+  const scope = { at: now, actorId: engineerId, firmId, projectId, calculationId };
+  const row = { number, title, revision, basis: canonicalText(basis), originatorId: engineerId };
+  await tx.db.insert(calculations).values({ id: calculationId, projectId, ...row, ...changed });
+  const created = { action: 'calculation.created', after: { number, title, basis } } as const;
+  await writeAudit(tx, { ...scope, subjectId: calculationId }, created);
+  for (const [index, draft] of drafts.entries()) {
+    const id = randomUUID();
+    const columns = draftColumns(basis, id, draft);
+    await tx.db
+      .insert(members)
+      .values({ id, calculationId, position: index + 1, ...columns, ...changed });
+    const added = { action: 'member.created', after: draft } as const;
+    await writeAudit(tx, { ...scope, subjectId: id }, added);
+  }
+}

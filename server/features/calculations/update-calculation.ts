@@ -1,0 +1,60 @@
+import { and, eq } from 'drizzle-orm';
+import { auditScope } from '#server/audit/scope-of.ts';
+import { writeAudit } from '#server/audit/write-audit.ts';
+import { canonicalText } from '#server/db/canonical-text.ts';
+import { calculations, members } from '#server/db/schema/calculations.ts';
+import { users } from '#server/db/schema/people.ts';
+import { type Transaction, transaction } from '#server/db/transaction.ts';
+import { draftColumns, draftOf } from '#server/features/members/stored-member.ts';
+import { AppError } from '#server/http/app-error.ts';
+import type { Handler } from '#server/http/handler.ts';
+import { refuseTakenNumber } from '#server/http/number-taken.ts';
+import type { BasisDraft, calculations as contracts } from '#shared/contracts/calculations.ts';
+import { lockCalculation } from './lock-calculation.ts';
+import { loadCalculation } from './queries.ts';
+
+/** Saves number, title and basis; every member is run again on the new basis. */
+export const updateCalculation: Handler<typeof contracts.updateCalculation> = async (context) => {
+  const { deps, viewer, scope, body } = context;
+  const { version, ...after } = body;
+  const { calculationId } = scope;
+  const change = transaction(deps.pool, async (tx) => {
+    const { number, title, basis, ...stored } = await lockCalculation(tx, calculationId);
+    const before = { number, title, basis };
+    if (canonicalText(before) === canonicalText(after)) return;
+    if (stored.version !== version) {
+      const [by] = await tx.db.select().from(users).where(eq(users.id, stored.changedBy));
+      const theirs = await loadCalculation(tx.db, viewer, calculationId);
+      const changedAt = stored.changedAt.toISOString();
+      const conflict = { theirs, changedBy: by?.name ?? '', changedAt };
+      throw new AppError('conflict', { conflict });
+    }
+    await tx.db
+      .update(calculations)
+      .set({
+        ...{ number: after.number, title: after.title, basis: canonicalText(after.basis) },
+        ...{ version: version + 1, changedBy: viewer.userId, changedAt: deps.now() },
+      })
+      .where(eq(calculations.id, calculationId));
+    await runMembersAgain(tx, calculationId, after.basis);
+    const event = { action: 'calculation.updated', before, after } as const;
+    await writeAudit(tx, auditScope(context, calculationId), event);
+  });
+  await refuseTakenNumber(
+    'calculations_number',
+    'is the number of another calculation of the project',
+    change,
+  );
+  return loadCalculation(deps.db, viewer, calculationId);
+};
+
+async function runMembersAgain(tx: Transaction, calculationId: string, basis: BasisDraft) {
+  const all = await tx.db.select().from(members).where(eq(members.calculationId, calculationId));
+  for (const member of all) {
+    const { summary, summaryEngine } = draftColumns(basis, member.id, draftOf(member));
+    await tx.db
+      .update(members)
+      .set({ summary, summaryEngine })
+      .where(and(eq(members.id, member.id)));
+  }
+}

@@ -1,0 +1,32 @@
+import { randomUUID } from 'node:crypto';
+import { eq, max } from 'drizzle-orm';
+import { auditScope } from '#server/audit/scope-of.ts';
+import { writeAudit } from '#server/audit/write-audit.ts';
+import { members } from '#server/db/schema/calculations.ts';
+import { transaction } from '#server/db/transaction.ts';
+import { lockCalculation } from '#server/features/calculations/lock-calculation.ts';
+import type { Handler } from '#server/http/handler.ts';
+import type { members as contracts } from '#shared/contracts/members.ts';
+import { draftColumns, memberOf } from './stored-member.ts';
+
+/** Adds a member at the end. */
+export const createMember: Handler<typeof contracts.createMember> = async (context) => {
+  const { deps, viewer, scope, body } = context;
+  const id = randomUUID();
+  return transaction(deps.pool, async (tx) => {
+    const { basis } = await lockCalculation(tx, scope.calculationId);
+    const [last] = await tx.db
+      .select({ position: max(members.position) })
+      .from(members)
+      .where(eq(members.calculationId, scope.calculationId));
+    const row = {
+      ...{ id, calculationId: scope.calculationId, position: (last?.position ?? 0) + 1 },
+      ...draftColumns(basis, id, body.draft),
+      ...{ version: 1, changedBy: viewer.userId, changedAt: deps.now(), deletedAt: null },
+    };
+    await tx.db.insert(members).values(row);
+    const event = { action: 'member.created', after: body.draft } as const;
+    await writeAudit(tx, auditScope(context, id), event);
+    return memberOf(row, basis, viewer.name);
+  });
+};

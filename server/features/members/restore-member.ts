@@ -1,0 +1,29 @@
+import { eq } from 'drizzle-orm';
+import { auditScope } from '#server/audit/scope-of.ts';
+import { writeAudit } from '#server/audit/write-audit.ts';
+import { members } from '#server/db/schema/calculations.ts';
+import { transaction } from '#server/db/transaction.ts';
+import type { Handler } from '#server/http/handler.ts';
+import type { members as contracts } from '#shared/contracts/members.ts';
+import { lockMember } from './lock-member.ts';
+import { draftColumns, draftOf, memberOf } from './stored-member.ts';
+
+/** Brings a deleted member back to its place. */
+export const restoreMember: Handler<typeof contracts.restoreMember> = async (context) => {
+  const { deps, viewer, scope, params } = context;
+  return transaction(deps.pool, async (tx) => {
+    const { calculationId } = scope;
+    const { stored, basis } = await lockMember(tx, calculationId, params.memberId, 'deleted');
+    const draft = draftOf(stored);
+    const set = {
+      // The basis may have changed since.
+      ...draftColumns(basis, stored.id, draft),
+      ...{ deletedAt: null, version: stored.version + 1 },
+      ...{ changedBy: viewer.userId, changedAt: deps.now() },
+    };
+    await tx.db.update(members).set(set).where(eq(members.id, stored.id));
+    const event = { action: 'member.restored', after: draft } as const;
+    await writeAudit(tx, auditScope(context, stored.id), event);
+    return memberOf({ ...stored, ...set }, basis, viewer.name);
+  });
+};
