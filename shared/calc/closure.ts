@@ -13,7 +13,7 @@ import {
   usesOf,
 } from './closure-rules.ts';
 import { isValued, type Line, type Print, type ValuedLine } from './line.ts';
-import { type Form, formOf, formUnit, printForm, textGiven } from './printed.ts';
+import { type Form, formOf, formUnit, numberTyped, printForm, textGiven } from './printed.ts';
 
 const START: Digits = { sig: 4 };
 const RATIO: Digits = { dec: 3 };
@@ -59,8 +59,11 @@ function showOwnForms({ line, shown }: Node, set: UnitSet): void {
   if (line.kind === 'comparison') shown.working = PERCENT;
   if (!isValued(line)) return;
   if (textGiven(line) !== null) {
-    // A given value prints as typed; the form of its unit set that the trade reads stands by it.
-    shown[formOf(line, 'display', set)] = START;
+    // A table value prints in working units; a given one as typed, beside the form the trade reads
+    // where it was typed in a unit of neither form.
+    const working =
+      line.kind === 'lookup' || numberTyped(line, formUnit(line, 'working', set)) !== null;
+    shown[working ? 'working' : formOf(line, 'display', set)] = START;
     return;
   }
   const asked: Form =

@@ -54,9 +54,13 @@ export function printForm(line: ValuedLine, form: Form, digits: Digits, set: Uni
   const typed = numberTyped(line, unit);
   if (typed !== null) return { number: printTyped(typed), unit: unit.name };
   const value = Number(fromBase(line.value, unit).toPrecision(15));
-  const exact = textGiven(line) === null ? null : fewestDigits(value, digits);
+  const exact = isExact(line) ? fewestDigits(value, digits) : null;
   return { number: printNumber(value, exact ?? digits), unit: unit.name };
 }
+
+/** Given and table values, and constants of an equation, are not results of rounding. */
+const isExact = (line: ValuedLine): boolean =>
+  textGiven(line) !== null || (line.kind === 'formula' && Object.keys(line.operands).length === 0);
 
 /** A converted given value that is exact with fewer digits prints without trailing zeros. */
 const fewestDigits = (value: number, digits: Digits): Digits | null => {

@@ -141,6 +141,15 @@ const parts = (given: Given): { text: string; source: Source; confirmed: boolean
       }
     : { text: String(given), source: TYPED, confirmed: false };
 
+/** A word that may carry its source and state. */
+function stateOf<T extends string>(
+  given: T | { value: T; source?: Source | undefined; confirmed?: boolean | undefined },
+): Stated<T> {
+  return typeof given === 'string'
+    ? { value: given, source: TYPED, confirmed: false }
+    : { value: given.value, source: given.source ?? TYPED, confirmed: given.confirmed ?? false };
+}
+
 function resolveMember(
   m: MemberInput,
   index: number,
@@ -175,10 +184,7 @@ function resolveMember(
   };
   const none: GivenValue = { value: 0, text: '0', source: TYPED, confirmed: false };
 
-  const section =
-    typeof m.section === 'string'
-      ? { value: m.section, source: TYPED, confirmed: false }
-      : { source: TYPED, confirmed: false, ...m.section };
+  const section = stateOf(m.section);
   const shape = findShape(section.value);
   if (!shape && !OTHER_FAMILY.test(normalDesignation(section.value)))
     problem(
@@ -259,18 +265,11 @@ function resolveMember(
   return {
     id: m.id ?? `m${index + 1}`,
     mark: m.mark,
-    section: {
-      value: shape?.designation ?? section.value,
-      source: section.source,
-      confirmed: section.confirmed,
-    },
+    section: { ...section, value: shape?.designation ?? section.value },
     shape,
     steel: resolveSteel(m, problem, quantity),
     length: length('length', false) ?? none,
-    ends:
-      typeof m.ends === 'string'
-        ? { value: m.ends, source: TYPED, confirmed: false }
-        : { source: TYPED, confirmed: false, ...m.ends },
+    ends: stateOf(m.ends),
     ...lengths,
     Cb: Cb ?? 'auto',
     endMomentSign: m.endMomentSign ?? 'bending',

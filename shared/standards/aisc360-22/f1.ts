@@ -29,6 +29,15 @@ export const f1Formulas = {
     'MC4',
     'abs(0.25*MA+0.75*MB)',
   ),
+  CbOne: formula({
+    id: 'F1-Cb-1',
+    clause: 'F1',
+    title: 'Modification factor, taken as 1',
+    symbol: 'Cb',
+    dimension: 'none',
+    expression: '1',
+    operands: {},
+  }),
   Cb: formula({
     id: 'F1-1',
     clause: 'F1',
@@ -47,8 +56,8 @@ export const modificationFactor = (
   r: Recorder,
   at: string,
   q: { Mmax: Quantity; MA4: Quantity; MB4: Quantity; MC4: Quantity },
-  title?: string,
-): Quantity => r.formula(f1Formulas.Cb, `${at}/Cb`, { ...q }, title ? { title } : {});
+  named: { title?: string; symbol?: string } = {},
+): Quantity => r.formula(f1Formulas.Cb, `${at}/Cb`, { ...q }, named);
 
 /** Quarter-point moments of a straight first-order diagram between the ends of the segment. */
 export const firstOrderQuarters = (r: Recorder, at: string, MA: Quantity, MB: Quantity) => ({

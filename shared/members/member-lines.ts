@@ -1,0 +1,195 @@
+import type { Quantity, Recorder } from '../calc/recorder.ts';
+import { PROPERTY_NAMES, type PropertyName, W_TABLE, type WShape } from '../sections/table.ts';
+import { SPECIFICATION } from '../standards/aisc360-22/parameters.ts';
+import { clause } from '../standards/aisc360-22/writer.ts';
+import { parseQuantity } from '../units/parse.ts';
+import { MODULI } from './material.ts';
+import type { ResolvedInput, ResolvedMember } from './resolve.ts';
+
+export interface SteelQuantities {
+  readonly E: Quantity;
+  readonly G: Quantity;
+  readonly Fy: Quantity;
+}
+
+export type SectionQuantities = Readonly<Record<PropertyName, Quantity>>;
+
+export interface MemberQuantities {
+  readonly L: Quantity;
+  readonly Lcx: Quantity | null;
+  readonly Lcy: Quantity | null;
+  readonly Lcz: Quantity | null;
+  readonly Lb: Quantity | null;
+}
+
+const PROPERTY_TITLES: Record<PropertyName, string> = {
+  A: 'Gross area',
+  d: 'Depth',
+  bf: 'Flange width',
+  tw: 'Web thickness',
+  tf: 'Flange thickness',
+  kdes: 'Outer face to web toe of fillet',
+  lambdaf: 'Flange width-to-thickness ratio',
+  lambdaw: 'Web width-to-thickness ratio',
+  Ix: 'Second moment of area, major axis',
+  Sx: 'Elastic modulus, major axis',
+  Zx: 'Plastic modulus, major axis',
+  rx: 'Radius of gyration, major axis',
+  Iy: 'Second moment of area, minor axis',
+  Sy: 'Elastic modulus, minor axis',
+  Zy: 'Plastic modulus, minor axis',
+  ry: 'Radius of gyration, minor axis',
+  J: 'Torsional constant',
+  Cw: 'Warping constant',
+  rts: 'Effective radius of gyration',
+  ho: 'Distance between flange centroids',
+};
+
+const METHOD_WORDS = {
+  direct: 'direct analysis method',
+  'effective-length': 'effective length method',
+  'first-order': 'first-order analysis method',
+} as const;
+
+/** Basis, restraints and lengths as given. Axis x is the major, y the minor axis. */
+export function givenLines(
+  r: Recorder,
+  member: ResolvedMember,
+  input: ResolvedInput,
+): MemberQuantities {
+  const { analysis } = input;
+  r.section('given', 'Member as given');
+  const basis = { kind: 'typed', note: 'Basis of the calculation' } as const;
+  r.statement('given/method', `${METHOD_WORDS[analysis.method]}, ${input.design}`, basis, true, {
+    title: 'Method of analysis',
+    clause: clause('C1'),
+  });
+  r.statement(
+    'given/secondOrder',
+    {
+      'from-analysis': analysis.includesMemberEffect
+        ? 'taken from the analysis, which includes the effect of the axial force between the ends'
+        : 'taken from the analysis, which leaves out the effect of the axial force between the ends',
+      amplified: 'first-order moments amplified by Appendix 8',
+      exact: 'exact elastic solution from first-order end moments',
+    }[analysis.secondOrder],
+    basis,
+    true,
+    { title: 'Second-order moments' },
+  );
+  r.statement('given/sway', 'none: the ends do not translate', basis, true, {
+    title: 'Sway',
+    clause: clause('App. 8.1'),
+  });
+  const { section, ends } = member;
+  r.statement('given/section', section.value, section.source, section.confirmed, {
+    title: 'Section',
+  });
+  r.statement(
+    'given/ends',
+    {
+      held: 'held in both planes and against twist',
+      free: 'one end free',
+      sway: 'free to sway',
+      springs: 'held by rotational springs',
+    }[ends.value],
+    ends.source,
+    ends.confirmed,
+    { title: 'Ends' },
+  );
+  const length = (symbol: 'Lcx' | 'Lcy' | 'Lcz' | 'Lb', title: string): Quantity | null => {
+    const given = member[symbol];
+    return given ? r.given(`given/${symbol}`, symbol, 'length', given, { title }) : null;
+  };
+  return {
+    L: r.given('given/L', 'L', 'length', member.length, { title: 'Length of the member' }),
+    Lcx: length('Lcx', 'Buckling length about the major axis'),
+    Lcy: length('Lcy', 'Buckling length about the minor axis'),
+    Lcz: length('Lcz', 'Torsional buckling length'),
+    Lb: length('Lb', 'Laterally unbraced length'),
+  };
+}
+
+const baseValue = (published: string, dimension: 'stress'): number => {
+  const parsed = parseQuantity(published, dimension);
+  if (!parsed.ok) throw new Error(`${published}: ${parsed.reason}`);
+  return parsed.quantity.value;
+};
+
+/** Constants of the steel: of its grade from the table, or as given; E and G of the standard. */
+export function steelLines(
+  r: Recorder,
+  member: ResolvedMember,
+  constants: 'us' | 'si',
+): SteelQuantities {
+  r.section('steel', 'Steel');
+  const { steel } = member;
+  const stress = (
+    key: string,
+    symbol: string,
+    title: string,
+    published: string,
+    table: string,
+    row: string,
+    source: string,
+  ) =>
+    r.lookup(
+      `steel/${key}`,
+      symbol,
+      'stress',
+      {
+        value: baseValue(published, 'stress'),
+        published,
+        table,
+        row,
+        column: symbol,
+        tableSource: source,
+      },
+      { title },
+    );
+  const Fy =
+    steel.kind === 'grade'
+      ? stress(
+          'Fy',
+          'Fy',
+          `Yield stress, ${steel.steel.title}`,
+          steel.steel[constants].Fy,
+          'Steels by grade',
+          steel.steel.key,
+          steel.steel.title,
+        )
+      : r.given('steel/Fy', 'Fy', 'stress', steel.Fy, { title: `Yield stress, ${steel.name}` });
+  const standard = (symbol: 'E' | 'G', title: string) =>
+    stress(
+      symbol,
+      symbol,
+      title,
+      MODULI[constants][symbol],
+      'Symbols',
+      constants === 'us' ? 'US customary' : 'SI',
+      SPECIFICATION,
+    );
+  return { Fy, E: standard('E', 'Modulus of elasticity'), G: standard('G', 'Shear modulus') };
+}
+
+/** Every property of the shape that the checks use, as published. */
+export function sectionLines(r: Recorder, shape: WShape): SectionQuantities {
+  r.section('section', `Section ${shape.designation.replace(/X/g, '×')}`);
+  return Object.fromEntries(
+    PROPERTY_NAMES.map((name) => {
+      const { value, dimension, published, column } = shape.properties[name];
+      const found = {
+        value,
+        published,
+        table: 'W shapes',
+        row: shape.designation,
+        column,
+        tableSource: `${W_TABLE.title}, ${W_TABLE.publisher}`,
+      };
+      return [
+        name,
+        r.lookup(`section/${name}`, name, dimension, found, { title: PROPERTY_TITLES[name] }),
+      ];
+    }),
+  ) as Record<PropertyName, Quantity>;
+}

@@ -1,0 +1,118 @@
+import type { Clause, Line, LineOf, Verdict } from '../calc/line.ts';
+import type { CombinationRecord, MemberRecord, Summary } from '../calc/record.ts';
+import { worstVerdict } from '../calc/verdict.ts';
+import { printNumber } from '../units/format.ts';
+import type { ResolvedCombination } from './resolve.ts';
+
+const NOWHERE: Clause = { book: 'aisc360-22', clause: 'H1', equation: null };
+
+/** Verdicts that notices and checks of some lines carry. */
+const verdictsOf = (lines: readonly Line[]): Verdict[] =>
+  lines.flatMap((l): Verdict[] => {
+    if (l.kind === 'check') return [l.verdict];
+    if (l.kind === 'notice' && l.severity === 'failed') return ['FAILED'];
+    if (l.kind === 'notice' && l.severity === 'outside scope') return ['NOT CHECKED'];
+    return [];
+  });
+
+const ratioText = (check: LineOf<'check'>): string =>
+  printNumber(check.ratio, check.print.working ?? { dec: 3 }).text;
+
+/** A member notice that nothing could be checked stops every combination. */
+const stopped = (memberLines: readonly Line[]): LineOf<'notice'> | undefined =>
+  memberLines.find(
+    (l): l is LineOf<'notice'> =>
+      l.kind === 'notice' &&
+      (l.severity === 'failed' || (l.severity === 'outside scope' && /^(B4|C2)\//.test(l.key))),
+  );
+
+/** Verdict, ratio and what governs one combination. */
+export function combinationSummary(
+  c: Pick<ResolvedCombination, 'id' | 'name'>,
+  memberLines: readonly Line[],
+  lines: readonly Line[],
+): Summary {
+  const checks = lines.filter((l): l is LineOf<'check'> => l.kind === 'check');
+  const worst = checks.reduce<LineOf<'check'> | null>(
+    (a, b) => (a && a.ratio >= b.ratio ? a : b),
+    null,
+  );
+  const halt = stopped(memberLines);
+  const quiet = lines.some((l) => l.kind === 'notice' && l.code === 'no-forces');
+  const flexureOutside = memberLines.some(
+    (l) => l.kind === 'notice' && l.code === 'web-not-compact',
+  );
+  const bentMajor = lines.some((l) => l.key === 'theory/x/absA');
+  const verdict = halt
+    ? worstVerdict(verdictsOf([halt]))
+    : quiet
+      ? 'OK'
+      : worstVerdict([
+          ...verdictsOf(lines),
+          ...(flexureOutside && bentMajor ? (['NOT CHECKED'] as const) : []),
+          ...(checks.length === 0 && verdictsOf(lines).length === 0
+            ? (['NOT CHECKED'] as const)
+            : []),
+        ]);
+  const numeric = verdict === 'OK' || verdict === 'NOT OK';
+  const reason = numeric
+    ? null
+    : (halt ??
+      lines.find(
+        (l) =>
+          l.kind === 'notice' && l.severity === (verdict === 'FAILED' ? 'failed' : 'outside scope'),
+      ) ??
+      memberLines.find((l) => l.kind === 'notice' && l.code === 'web-not-compact'));
+  const governs = numeric ? worst : reason;
+  return {
+    verdict,
+    ratio: numeric ? (worst?.ratio ?? 0) : null,
+    ratioText: numeric ? (worst ? ratioText(worst) : '0.000') : null,
+    governing: governs
+      ? {
+          address: memberLines.includes(governs) ? governs.key : `${c.id}:${governs.key}`,
+          clause: governs.clause ?? NOWHERE,
+          combination: c.id,
+          combinationName: c.name,
+          title: governs.title,
+        }
+      : null,
+  };
+}
+
+const rank = (s: Summary): number => (s.ratio === null ? -1 : s.ratio);
+
+const worstOf = <T extends { readonly summary: Summary }>(
+  parts: readonly T[],
+): { verdict: Verdict; worst: T | undefined } => {
+  const verdict = worstVerdict(parts.map((p) => p.summary.verdict));
+  const worst = parts
+    .filter((p) => p.summary.verdict === verdict)
+    .reduce<T | undefined>((a, b) => (a && rank(a.summary) >= rank(b.summary) ? a : b), undefined);
+  return { verdict, worst };
+};
+
+/** The member takes its worst combination; its ratio is the largest, null if any is FAILED or NOT CHECKED. */
+export function memberSummary(combinations: readonly CombinationRecord[]): Summary {
+  const { verdict, worst } = worstOf(combinations);
+  return {
+    verdict,
+    ratio: worst?.summary.ratio ?? null,
+    ratioText: worst?.summary.ratioText ?? null,
+    governing: worst?.summary.governing ?? null,
+  };
+}
+
+export function recordSummary(
+  members: readonly MemberRecord[],
+): Summary & { member: string | null; unconfirmed: number } {
+  const { verdict, worst } = worstOf(members);
+  return {
+    verdict,
+    ratio: worst?.summary.ratio ?? null,
+    ratioText: worst?.summary.ratioText ?? null,
+    governing: worst?.summary.governing ?? null,
+    member: worst?.id ?? null,
+    unconfirmed: members.reduce((n, m) => n + m.unconfirmed, 0),
+  };
+}
