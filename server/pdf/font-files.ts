@@ -1,5 +1,6 @@
-import { fileURLToPath } from 'node:url';
+import { readFileSync } from 'node:fs';
 import { type MathFace, mathFaces } from './math/katex-faces.ts';
+import { unpackWoff } from './unpack-woff.ts';
 
 /** The text faces; each name is also that of the file in `fonts`. */
 export const textFaces = [
@@ -21,8 +22,18 @@ export type Face = TextFace | MathFace;
 
 const isMathFace = (face: Face): face is MathFace => mathFaces.some((name) => name === face);
 
-/** The bundled font file of a face. */
-export function fontFile(face: Face): string {
-  const file = isMathFace(face) ? `katex/katex-${face}.ttf` : `${face}.woff2`;
-  return fileURLToPath(new URL(`../../fonts/${file}`, import.meta.url));
+const bytes = new Map<Face, Buffer>();
+
+/**
+ * A face's TrueType file, kept once read. The text faces come as WOFF: the subset made of a WOFF2
+ * file breaks on glyphs composed of others. (The web pages take the WOFF2 files beside them.)
+ */
+export function fontFile(face: Face): Buffer {
+  const known = bytes.get(face);
+  if (known) return known;
+  const name = isMathFace(face) ? `katex/katex-${face}.ttf` : `${face}.woff`;
+  const file = readFileSync(new URL(`../../fonts/${name}`, import.meta.url));
+  const font = isMathFace(face) ? file : unpackWoff(file);
+  bytes.set(face, font);
+  return font;
 }

@@ -33,16 +33,18 @@ export class FontSet {
     return opened;
   }
 
+  /** Whether a face has a glyph for a character. */
+  has(face: Face, character: string): boolean {
+    return this.#open(face).font.font.hasGlyphForCodePoint(character.codePointAt(0) ?? 0);
+  }
+
   /** Shapes a run. Throws if the face has no glyph for a character of it. */
   shape(face: Face, text: string): ShapedRun {
     const { font, runs } = this.#open(face);
     const known = runs.get(text);
     if (known) return known;
-    for (const character of text) {
-      if (!font.font.hasGlyphForCodePoint(character.codePointAt(0) ?? 0)) {
-        throw new Error(`no glyph for "${character}" of "${text}" in ${face}`);
-      }
-    }
+    const missing = [...text].find((character) => !this.has(face, character));
+    if (missing) throw new Error(`no glyph for "${missing}" of "${text}" in ${face}`);
     const run = shapedRun(...font.encode(text));
     runs.set(text, run);
     return run;

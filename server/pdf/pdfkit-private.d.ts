@@ -29,3 +29,20 @@ declare namespace PDFKit {
     readonly fonts: Record<string, object>;
   }
 }
+
+declare namespace PDFKit.Mixins {
+  interface PDFAttachmentOptions {
+    /** AFRelationship of PDF/A-3. */
+    relationship?: 'Data' | 'Source' | 'Supplement' | 'Unspecified';
+  }
+
+  interface AnnotationOption {
+    /** The structure element that holds the annotation. */
+    structParent?: PDFKit.PDFStructureElement;
+  }
+
+  interface StructureElementOptions {
+    /** Of a table's head cell. */
+    scope?: 'Column' | 'Row';
+  }
+}

@@ -4,7 +4,6 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import PDFDocument from 'pdfkit';
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { fontFile } from '../font-files.ts';
 import { FontSet } from '../font-set.ts';
 import { drawFormula } from './draw-formula.ts';
 import { sampleFormulas } from './sample-formulas.ts';
@@ -16,7 +15,7 @@ const tool = (name: string, ...args: string[]): string =>
   execFileSync(name, [...args], { encoding: 'utf8' });
 
 beforeAll(async () => {
-  const doc = new PDFDocument({ font: fontFile('ibm-plex-sans-regular'), size: 'A4', margin: 0 });
+  const doc = new PDFDocument({ font: '', size: 'A4', margin: 0 });
   const parts: Buffer[] = [];
   doc.on('data', (part: Buffer) => parts.push(part));
   const ended = new Promise((resolve) => doc.on('end', resolve));

@@ -1,0 +1,41 @@
+import type { LineBlock } from '#shared/report/tree.ts';
+import type { BlockContext } from '../block-context.ts';
+import { circlePath } from '../circle-path.ts';
+import type { Item } from '../items.ts';
+import { type InkName, textStyles } from '../paper.ts';
+import { sheetColumns } from './sheet-columns.ts';
+import { plain, setWords, strong, textAt } from './words.ts';
+
+const radius = 4.2;
+
+/**
+ * Where a given value comes from: its letter in a ring (dashed and in oxide for an assumption),
+ * the source, and whether it is confirmed.
+ */
+export function givenSource(
+  block: LineBlock,
+  top: number,
+  context: BlockContext,
+): { items: readonly Item[]; foot: number } {
+  if (!block.given) return { items: [], foot: top };
+  const { letter, source, confirmed } = block.given;
+  const ink: InkName = letter === 'A' || !confirmed ? 'oxide' : 'zinc7';
+  const { x } = sheetColumns.working;
+  const style = { ...textStyles.small, ink };
+  const left = x + 2 * radius + 5;
+  const state = confirmed ? plain(' · confirmed') : strong(' · not confirmed');
+  const place = { x: left, y: top + 1.5, width: context.width - left - 100 };
+  const words = setWords([...plain(source), ...state], style, place, context);
+  const middle = (words.firstBaseline ?? top) - 2.8;
+  const face = 'ibm-plex-sans-condensed-semibold';
+  const sign = textAt(context, letter, { x: 0, y: middle + 2.3, face, size: 6.4, ink });
+  const ring: Item = {
+    kind: 'path',
+    path: circlePath([x + radius, middle], radius),
+    stroke: { ink, width: 0.7, ...(letter === 'A' ? { dash: [1.6, 1.2] } : {}) },
+  };
+  return {
+    items: [ring, { ...sign, x: x + radius - sign.width / 2 }, ...words.items],
+    foot: top + 1.5 + words.height,
+  };
+}
