@@ -51,6 +51,22 @@ const METHOD_WORDS = {
   'first-order': 'first-order analysis method',
 } as const;
 
+/** What each method asks of the analysis behind the forces; taken as given, not checked here. */
+const METHOD_LIMITS = {
+  direct: [
+    'C2',
+    'The initial imperfections (C2.2) and the reduced stiffness (C2.3) are taken to be in the analysis that gave the forces; this is not checked here.',
+  ],
+  'effective-length': [
+    'App. 7.2',
+    'The method is limited to second-order drift of at most 1.5 times the first-order one, with notional loads in the analysis; this is taken as given, not checked here.',
+  ],
+  'first-order': [
+    'App. 7.3',
+    'The method is limited to second-order drift of at most 1.5 times the first-order one and to axial forces of at most half the cross-section strength, with its additional lateral loads in the analysis; this is taken as given, not checked here.',
+  ],
+} as const;
+
 /** Basis, restraints and lengths as given. Axis x is the major, y the minor axis. */
 export function givenLines(
   r: Recorder,
@@ -81,6 +97,19 @@ export function givenLines(
     title: 'Sway',
     clause: clause('App. 8.1'),
   });
+  const [limitsClause, limits] = METHOD_LIMITS[analysis.method];
+  r.notice('given/limits', 'note', 'method-limits', limits, {
+    title: 'What the method asks of the analysis',
+    clause: clause(limitsClause),
+  });
+  if (input.design === 'ASD' && analysis.secondOrder === 'from-analysis')
+    r.notice(
+      'given/level',
+      'note',
+      'asd-load-level',
+      'Forces are at the ASD load level: where the analysis ran at 1.6 times the loads, its results are already divided by 1.6.',
+      { title: 'Load level of the forces', clause: clause('C2.1') },
+    );
   const { section, ends } = member;
   r.statement('given/section', section.value, section.source, section.confirmed, {
     title: 'Section',
