@@ -72,6 +72,14 @@ function steps(
         ? 'Axial force, ASD load level, compression positive'
         : 'Axial force, compression positive',
   });
+  if (c.analysedWith !== null)
+    r.notice(
+      'given/analysed',
+      'caution',
+      'analysed-with-another-section',
+      `These forces were analysed with ${c.analysedWith}, the member is ${member.section.value}: they are not confirmed until the analysis is run again.`,
+      { title: 'Forces of another section', clause: clause('C2') },
+    );
   const noTension = r.choice(
     'given/sense',
     [

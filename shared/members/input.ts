@@ -49,6 +49,8 @@ export const combinationInputSchema = z.strictObject({
   name: label(80),
   /** Load level of the forces; it must be the calculation's. */
   design: z.enum(['LRFD', 'ASD'], 'must be "LRFD" or "ASD"').optional(),
+  /** Section that the analysis behind these forces had; another one leaves them unconfirmed. */
+  analysedWith: text(40).optional(),
   P: quantitySchema,
   MxA: quantitySchema.optional(),
   MxB: quantitySchema.optional(),

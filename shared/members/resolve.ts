@@ -23,6 +23,8 @@ export interface Stated<T> {
 export interface ResolvedCombination {
   readonly id: string;
   readonly name: string;
+  /** Section of the analysis where it is another than the member's: the forces are unconfirmed. */
+  readonly analysedWith: string | null;
   readonly P: GivenValue;
   readonly moments: Readonly<
     Record<'x' | 'y', { A: GivenValue; B: GivenValue; max: GivenValue | null }>
@@ -68,6 +70,7 @@ export type ParsedInput =
   | { readonly ok: false; readonly problems: readonly Problem[] };
 
 const TYPED: Source = { kind: 'typed' };
+const DEFAULT_CB: Source = { kind: 'typed', note: 'Not given: 1.0, on the safe side' };
 const OTHER_FAMILY = /^(HSS|PIPE|2L|WT|MT|ST|MC|HP|C|M|S|L)\d/;
 
 const pathText = (path: readonly PropertyKey[]): string =>
@@ -196,13 +199,22 @@ function resolveMember(
     const path = `combinations[${j}]`;
     for (const message of forceProblems(c, input.design))
       problem(`${path}.${message.field}`, message.message);
+    const elsewhere =
+      c.analysedWith !== undefined &&
+      normalDesignation(c.analysedWith) !== normalDesignation(section.value);
+    // Forces belong to the section they were analysed with.
+    const asAnalysed = <T extends GivenValue | null>(given: T): T =>
+      given && elsewhere ? { ...given, confirmed: false } : given;
     const force = (field: 'MxA' | 'MxB' | 'MyA' | 'MyB' | 'MxMax' | 'MyMax') =>
-      quantity(`${path}.${field}`, c[field], 'moment');
-    const zero = { ...none, text: input.units === 'us' ? '0 kip ft' : '0 kN m' };
+      asAnalysed(quantity(`${path}.${field}`, c[field], 'moment'));
+    const P = asAnalysed(quantity(`${path}.P`, c.P, 'force') ?? none);
+    // A moment left out is zero, with the source and state of the force set.
+    const zero = { ...P, value: 0, text: input.units === 'us' ? '0 kip ft' : '0 kN m' };
     return {
       id: c.id ?? `c${j + 1}`,
       name: c.name,
-      P: quantity(`${path}.P`, c.P, 'force') ?? none,
+      analysedWith: elsewhere && c.analysedWith ? normalDesignation(c.analysedWith) : null,
+      P,
       moments: {
         x: { A: force('MxA') ?? zero, B: force('MxB') ?? zero, max: force('MxMax') },
         y: { A: force('MyA') ?? zero, B: force('MyB') ?? zero, max: force('MyMax') },
@@ -255,7 +267,7 @@ function resolveMember(
 
   const Cb =
     m.Cb === undefined
-      ? { ...none, value: 1, text: '1.0' }
+      ? { ...none, value: 1, text: '1.0', source: DEFAULT_CB, confirmed: true }
       : parts(m.Cb).text.trim() === 'auto'
         ? ('auto' as const)
         : quantity('Cb', m.Cb, 'none');
