@@ -29,6 +29,8 @@ export interface PlaneDrawing {
   readonly kL: number | null;
   /** Largest second-order moment, signed like the larger end moment, and where it lies. */
   readonly largest: (NamedDrawn & { readonly place: Place }) | null;
+  /** The moment the strength check uses, signed like the larger end moment, where it is another. */
+  readonly required: NamedDrawn | null;
 }
 
 export interface MemberDrawing {

@@ -22,6 +22,7 @@ export function momentDiagram(drawing: MemberDrawing, plane: PlaneDrawing): Scen
   const length = drawing.length.value;
   const all = [...first, ...(second ?? [])].map((s) => s.moment);
   if (second && plane.largest) all.push(plane.largest.value);
+  if (plane.required) all.push(plane.required.value);
   const up = scaleLinear()
     .domain([Math.min(0, ...all), Math.max(0, ...all)])
     .range([TOP + TALL, TOP]);
@@ -40,6 +41,7 @@ export function momentDiagram(drawing: MemberDrawing, plane: PlaneDrawing): Scen
     path(points(first), PENS.first),
     ...(second ? [path(points(second), PENS.second)] : []),
     ...endLabels(plane, along(0), along(length), up),
+    ...requiredLevel(plane, along(0), along(length), up),
     ...(second ? largestMark(plane, along, along(length), up) : []),
     ...head(plane, second !== null),
   ];
@@ -86,7 +88,7 @@ function largestMark(
   const x = along(largest.place.value);
   const y = up(largest.value);
   const outward = largest.value < 0 ? 13 : -7;
-  const text = `${largest.symbol} ${largest.text} ${largest.place.words}`;
+  const text = `${largest.text} ${largest.place.words}`;
   const half = textWidth(text) / 2;
   const middle = Math.max(along(0) + half, Math.min(end - half, x));
   return [
@@ -99,6 +101,34 @@ function largestMark(
     ),
     { kind: 'circle', center: [x, y], radius: 3, fill: 'oxide' },
     label(text, [middle, y + outward], { anchor: 'middle', weight: 600 }),
+  ];
+}
+
+/** The moment of the strength check as a level, where it is not the marked one. */
+function requiredLevel(
+  { required }: PlaneDrawing,
+  from: number,
+  to: number,
+  up: (moment: number) => number,
+): Shape[] {
+  if (!required) return [];
+  const y = up(required.value);
+  return [
+    path(
+      [
+        [from, y],
+        [to, y],
+      ],
+      PENS.level,
+    ),
+    label(`check uses ${required.text}`, [WIDTH / 2 - 52, 13], { anchor: 'middle' }),
+    path(
+      [
+        [WIDTH / 2 - 128, 9],
+        [WIDTH / 2 - 154, 9],
+      ],
+      PENS.level,
+    ),
   ];
 }
 
@@ -128,9 +158,10 @@ function describe(plane: PlaneDrawing, second: readonly Sample[] | null): string
   const axis = plane.plane === 'major' ? 'major' : 'minor';
   const curvature = endA.value * endB.value < 0 ? 'reverse' : 'single';
   const shape = endA.value * endB.value === 0 ? 'one end without moment' : `${curvature} curvature`;
+  const used = plane.required ? ` The check uses ${plane.required.text}.` : '';
   const ends = `Moments about the ${axis} axis, ${shape}: ${endA.symbol} ${endA.text} at end A, ${endB.symbol} ${endB.text} at end B`;
   if (second === null)
-    return `${ends}. No second-order curve: the sheet has no stable solution for it.`;
-  if (!largest) return `${ends}, with the second-order curve.`;
-  return `${ends}. Largest second-order moment ${largest.text} ${largest.place.words}.`;
+    return `${ends}. No second-order curve: the sheet has no stable solution for it.${used}`;
+  if (!largest) return `${ends}, with the second-order curve.${used}`;
+  return `${ends}. Largest second-order moment ${largest.text} ${largest.place.words}.${used}`;
 }

@@ -3,6 +3,7 @@ import type { CombinationRecord, MemberRecord } from '../calc/record.ts';
 import { UNIT_SETS, type UnitSet, type UnitSetName } from '../units/unit-set.ts';
 import type { MemberDrawing, NamedDrawn, Place, Plane, PlaneDrawing } from './drawing.ts';
 import { drawn } from './read-line.ts';
+import { sectionText } from './section-text.ts';
 
 const LENGTHS = ['Lcx', 'Lcy', 'Lcz', 'Lb'] as const;
 const AXIS = { major: 'x', minor: 'y' } as const satisfies Record<Plane, string>;
@@ -22,7 +23,7 @@ export function readMember(
   const axial = bySymbol(lines, 'P') ?? bySymbol(lines, 'Pr');
   return {
     mark: member.mark,
-    section: member.section,
+    section: sectionText(member.section),
     length: drawn(length, set),
     depth: value('d'),
     width: value('bf'),
@@ -56,6 +57,8 @@ function readPlane(
   const atA = Math.abs(endA.value) >= Math.abs(endB.value);
   const sign = Math.sign(atA ? endA.value : endB.value);
   const zmax = byKey(lines, `theory/${axis}/zmax`);
+  const used = usedMoment(lines, axis);
+  const required = used && used.value !== largest?.value ? used : null;
   const place: Place = zmax
     ? { value: zmax.value, words: `at ${drawn(zmax, set).text} from A` }
     : { value: atA ? 0 : member.length, words: `at end ${atA ? 'A' : 'B'}` };
@@ -66,7 +69,14 @@ function readPlane(
     // Without axial force the second order is the first.
     kL: kL?.value ?? (member.force === 0 ? 0 : null),
     largest: largest ? { ...drawn(largest, set), value: sign * largest.value, place } : null,
+    required: required ? { ...drawn(required, set), value: sign * required.value } : null,
   };
+}
+
+/** The demand of the check of flexure alone. */
+function usedMoment(lines: readonly Line[], axis: 'x' | 'y'): ValuedLine | undefined {
+  const check = lines.find((line) => line.key === `H1/${axis}`);
+  return check?.kind === 'check' ? byKey(lines, check.demand.replace(/^:/, '')) : undefined;
 }
 
 const bySymbol = (lines: readonly Line[], symbol: string): ValuedLine | undefined =>

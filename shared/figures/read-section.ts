@@ -3,6 +3,7 @@ import type { MemberRecord } from '../calc/record.ts';
 import { UNIT_SETS, type UnitSetName } from '../units/unit-set.ts';
 import type { NamedDrawn, SectionDrawing } from './drawing.ts';
 import { drawn } from './read-line.ts';
+import { sectionText } from './section-text.ts';
 
 /** The member's section from the table rows its lines looked up; null where one is missing. */
 export function readSection(member: MemberRecord, units: UnitSetName): SectionDrawing | null {
@@ -15,5 +16,11 @@ export function readSection(member: MemberRecord, units: UnitSetName): SectionDr
   const [depth, flangeWidth] = [found('d'), found('bf')];
   const [webThickness, flangeThickness] = [found('tw'), found('tf')];
   if (!depth || !flangeWidth || !webThickness || !flangeThickness) return null;
-  return { section: member.section, depth, flangeWidth, webThickness, flangeThickness };
+  return {
+    section: sectionText(member.section),
+    depth,
+    flangeWidth,
+    webThickness,
+    flangeThickness,
+  };
 }

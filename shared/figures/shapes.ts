@@ -7,6 +7,7 @@ export const PENS = {
   rule: { ink: 'zinc5', width: 0.75 },
   hair: { ink: 'zinc3', width: 0.75 },
   axis: { ink: 'zinc3', width: 0.75, dash: [8, 2, 2, 2] },
+  level: { ink: 'ink', width: 0.75, dash: [1, 2] },
   force: { ink: 'oxide', width: 1.5 },
   second: { ink: 'oxide', width: 1.75 },
   first: { ink: 'zinc7', width: 1, dash: [4, 3] },

@@ -35,6 +35,7 @@ export function basisBlock(
     ['Signs', 'compression positive; x is the major axis, y the minor; z runs along the member'],
     ['Units', set.title],
     ...materialRows(record),
+    ...tableRows(record),
     ['Assumptions', stated(assumptions)],
     [
       'Program',
@@ -56,7 +57,7 @@ const CONSTANTS = ['E', 'G', 'Fy', 'Fu'];
 /** Each material with its constants as the members' lines print them. */
 function materialRows(record: CalculationRecord): [string, string][] {
   const set = UNIT_SETS[record.units];
-  const materials = new Map<string, string>();
+  const materials = new Set<string>();
   for (const member of record.members) {
     const constants = member.lines.filter(
       (line): line is ValuedLine =>
@@ -65,7 +66,20 @@ function materialRows(record: CalculationRecord): [string, string][] {
         CONSTANTS.includes(line.symbol),
     );
     const words = constants.map((line) => `${line.symbol} ${readText(line, set)}`).join(', ');
-    materials.set(`${member.material}: ${words}`, member.material);
+    if (words !== '') materials.add(`${member.material}: ${words}`);
   }
-  return [...materials.keys()].map((words, i) => [i === 0 ? 'Materials' : '', words]);
+  return [...materials].map((words, i) => [i === 0 ? 'Materials' : '', words]);
+}
+
+/** The publications that table values are from. */
+function tableRows(record: CalculationRecord): [string, string][] {
+  const lines = record.members.flatMap((member) => member.lines);
+  const tables = new Set(
+    lines.flatMap((line) =>
+      line.kind === 'lookup' && !line.table.startsWith('Clause ')
+        ? [`${line.table}: ${line.tableSource}`]
+        : [],
+    ),
+  );
+  return [...tables].map((words, i) => [i === 0 ? 'Tables' : '', words]);
 }

@@ -1,4 +1,5 @@
 import type { CalculationRecord, CoverageRow, MemberRecord } from '../calc/record.ts';
+import { sectionText } from '../figures/section-text.ts';
 import { outsideTable } from './cautions.ts';
 import { cell, ratioCell, strongCell } from './cells.ts';
 import { shortReference } from './reference-text.ts';
@@ -34,7 +35,7 @@ export function memberTable(member: MemberRecord): Block {
   );
   return {
     kind: 'table',
-    caption: `Completeness of ${member.mark}, ${member.section}`,
+    caption: `Completeness of ${member.mark}, ${sectionText(member.section)}`,
     head: ['Limit state', 'Clause', 'State', 'Combinations', 'Largest ratio', 'Because'].map(
       (words) => cell(words),
     ),

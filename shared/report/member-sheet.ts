@@ -4,6 +4,7 @@ import type {
   MemberRecord,
   Summary,
 } from '../calc/record.ts';
+import { sectionText } from '../figures/section-text.ts';
 import { openMember } from './open-member.ts';
 import { presentLine } from './present-line.ts';
 import type { Presenter } from './presenter.ts';
@@ -60,7 +61,7 @@ const sheetHead = ({ id, mark, section, material }: MemberRecord): Block => ({
   kind: 'sheetHead',
   member: id,
   mark,
-  section,
+  section: sectionText(section),
   material,
 });
 

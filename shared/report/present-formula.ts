@@ -52,9 +52,13 @@ export function symbolicStep(p: Presenter, placed: PlacedLine, line: Computed): 
     );
   const plainLeaf = (name: string): string => {
     const tex = texFor(name);
-    return isCompound(tex) ? `(${symbolText(tex)})` : symbolText(tex);
+    const words = symbolText(tex);
+    return /[/+−*]/.test(words) && !/^\|.*\|$/.test(words) ? `(${words})` : words;
   };
-  return { tex: texOf(tree, leaf), text: textOf(tree, plainLeaf) };
+  return {
+    tex: texOf(tree, leaf),
+    text: textOf(tree, plainLeaf).replace(/\(\(([^()]*)\)\)/g, '($1)'),
+  };
 }
 
 /** The same with the operands' printed values; the unknown of a root stays a symbol. */

@@ -114,7 +114,7 @@ function sample(): MemberRecord {
   c.check('H1/axial', Pr, Pc, { title: 'Compression alone', clause: clause('E1') });
   c.check('H1/check', share, 1, { title: 'Interaction', clause: clause('H1.1', 'H1-1a') });
   c.check('H1/over', Pc, Pr, { title: 'Over' });
-  c.comparison('compare', Mr, M, 'The sheet uses {used}, the other is {other}: {difference}.', {
+  c.comparison('compare', Mr, M, 'The moment used, {used}, is {difference} the other, {other}.', {
     title: 'Beside',
   });
   c.root(formulas.cube, 'root', { symbol: 'c', dimension: 'none', bracket: [0, 2] }, { B1 });
@@ -240,7 +240,7 @@ describe('a line as a block', () => {
 
   it('puts the values and the difference of a comparison into its words', () => {
     expect(words(present('c1:compare'))).toBe(
-      'The sheet uses −147.5 kip ft, the other is −118 kip ft: 25.0 %.',
+      'The moment used, −147.5 kip ft, is 25.0 % above the other, −118 kip ft.',
     );
   });
 

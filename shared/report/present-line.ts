@@ -1,9 +1,9 @@
 import type { PlacedLine } from '../calc/address.ts';
 import type { Clause, Line, LineKind, LineOf, ValuedLine } from '../calc/line.ts';
-import { textGiven } from '../calc/printed.ts';
+import { readForms } from '../figures/read-line.ts';
 import { linked, type Step, substitutedStep, symbolicStep, valueLeaf } from './present-formula.ts';
 import { choiceSentence, comparisonSentence, governingSentence } from './present-sentence.ts';
-import { formsInOrder, type Presenter, plain, printedBy, text, usedForm } from './presenter.ts';
+import { type Presenter, plain, printedBy, text, usedForm } from './presenter.ts';
 import { referenceOf } from './reference-text.ts';
 import { sourceLetter, sourceText } from './source-text.ts';
 import { symbolText } from './symbol-text.ts';
@@ -49,6 +49,9 @@ const referenceText = (clause: Clause | null): string => {
   return equation === '' ? name : `${name}, ${equation}`;
 };
 
+/** A statement of at most so many letters fits the column of results. */
+const SHORT = 16;
+
 const PRESENT = {
   given: (p, _placed, line) => ({
     ...valued(p, line, []),
@@ -60,7 +63,9 @@ const PRESENT = {
   }),
   statement: (_p, _placed, line) => ({
     text: `${line.title}: ${line.statement}`,
-    result: { value: line.statement, unit: '' },
+    ...(line.statement.length <= SHORT
+      ? { result: { value: line.statement, unit: '' } }
+      : { sentence: [text(line.statement)] }),
     given: {
       letter: sourceLetter(line.source),
       source: sourceText(line.source),
@@ -69,9 +74,7 @@ const PRESENT = {
   }),
   lookup: (p, _placed, line) => ({
     ...valued(p, line, []),
-    sentence: [
-      { kind: 'text', quiet: true, text: `${line.table}, row ${line.row}, column ${line.column}` },
-    ],
+    sentence: [{ kind: 'text', quiet: true, text: tableText(line) }],
   }),
   formula: (p, placed, line) => {
     const symbolic = symbolicStep(p, placed, line);
@@ -88,16 +91,16 @@ const PRESENT = {
   },
   check: presentCheck,
   comparison: (p, placed, line) => {
-    const difference = `${printedBy(line.difference * 100, line.print.working)} %`;
-    const sentence = comparisonSentence(p, placed, line, difference);
+    const difference = printedBy(line.difference * 100, line.print.working);
+    const sentence = comparisonSentence(p, placed, line);
     return {
       working: [
         `${quotient(p, placed, line.used, line.other, 'symbol').tex}-1`,
         `=${quotient(p, placed, line.used, line.other, 'value').tex}-1`,
       ],
       sentence,
-      text: `${quotient(p, placed, line.used, line.other, 'value').text} − 1 = ${difference}. ${plain(sentence)}`,
-      result: { value: printedBy(line.difference * 100, line.print.working), unit: '%' },
+      text: `${quotient(p, placed, line.used, line.other, 'value').text} − 1 = ${difference} %. ${plain(sentence)}`,
+      result: { value: difference, unit: '%' },
     };
   },
   root: (p, placed, line) => {
@@ -133,6 +136,10 @@ const PRESENT = {
   [K in Exclude<LineKind, 'section'>]: (p: Presenter, placed: PlacedLine, line: LineOf<K>) => Parts;
 };
 
+/** Where a value stands: `W shapes, row W12X79, column Ix_in4`; a clause has no columns. */
+const tableText = ({ table, row, column }: LineOf<'lookup'>): string =>
+  table.startsWith('Clause ') ? `${table}, ${row}` : `${table}, row ${row}, column ${column}`;
+
 /** Symbol, steps and result of a line that carries a value. */
 function valued(p: Presenter, line: ValuedLine, steps: readonly Step[]): Parts {
   const tex = p.symbolTex(line, line.symbol);
@@ -143,12 +150,7 @@ function valued(p: Presenter, line: ValuedLine, steps: readonly Step[]): Parts {
   const shown = (same ? steps.slice(1) : steps).filter(
     (step, index, all) => step.text !== all[index - 1]?.text,
   );
-  const [own, other] = formsInOrder(line, p.set).map((f) => ({
-    value: f.number.text,
-    unit: f.unit,
-  }));
-  const typed = textGiven(line);
-  const asTyped = typed !== null && own === undefined ? { value: typed, unit: '' } : null;
+  const [own, other] = readForms(line, p.set);
   const results = [own, other].filter((r) => r !== undefined).map((r) => `${r.value} ${r.unit}`);
   return {
     working: [same ? (first?.tex ?? tex) : tex, ...shown.map((s) => `=${s.tex}`)],
@@ -157,7 +159,7 @@ function valued(p: Presenter, line: ValuedLine, steps: readonly Step[]): Parts {
       ...shown.map((s) => s.text),
       ...results,
     ]),
-    result: own ?? asTyped,
+    result: own ?? null,
     also: other ?? null,
   };
 }
@@ -169,7 +171,7 @@ const equalities = (parts: readonly string[]): string =>
     .filter((part, index, all) => part !== all[index - 1])
     .join(' = ');
 
-const bare = (words: string): string => words.replace(/[\s()]/g, '');
+const bare = (words: string): string => words.replace(/[\s()·]/g, '');
 
 function presentCheck(p: Presenter, placed: PlacedLine, line: LineOf<'check'>): Parts {
   const ratio = printedBy(line.ratio, line.print.working);
@@ -219,6 +221,8 @@ function candidates(
   as: 'symbol' | 'value',
 ): Step {
   const steps = line.candidates.map((ref) => operand(p, placed, ref, as));
+  const [only] = steps;
+  if (steps.length === 1 && only) return only;
   return {
     tex: `\\${line.sense}\\left(${steps.map((s) => s.tex).join(',\\;')}\\right)`,
     text: `${line.sense}(${steps.map((s) => s.text).join(', ')})`,

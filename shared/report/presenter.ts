@@ -1,7 +1,7 @@
 import { addressOf, type PlacedLine, placedLines } from '../calc/address.ts';
 import { formUsed } from '../calc/closure-rules.ts';
 import { isValued, type Line, type ValuedLine } from '../calc/line.ts';
-import { type PrintedForm, printedForms, printForm } from '../calc/printed.ts';
+import { type PrintedForm, printForm } from '../calc/printed.ts';
 import type { MemberRecord } from '../calc/record.ts';
 import { withUnit } from '../figures/read-line.ts';
 import { printNumber } from '../units/format.ts';
@@ -63,12 +63,6 @@ export function usedForm(p: Presenter, ref: string, from: PlacedLine): PrintedFo
   if (!digits)
     throw new Error(`${ref} does not print in its ${form} unit, which ${from.address} uses`);
   return printForm(operand, form, digits, p.set);
-}
-
-/** Forms of a value in the order they are read: the trade's unit first, then the working unit. */
-export function formsInOrder(line: ValuedLine, set: UnitSet): PrintedForm[] {
-  const { working, display } = printedForms(line, set);
-  return [display, working].filter((f) => f !== null);
 }
 
 /** A ratio or a percentage by the digits its line fixed. */

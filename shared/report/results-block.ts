@@ -1,4 +1,5 @@
 import type { CalculationRecord, MemberRecord } from '../calc/record.ts';
+import { sectionText } from '../figures/section-text.ts';
 import { cell, governsText, ratioCell, strongCell, verdictCell } from './cells.ts';
 import type { Block } from './tree.ts';
 
@@ -12,7 +13,7 @@ export function resultsBlock(record: CalculationRecord): Block {
     ),
     rows: record.members.map((member) => [
       strongCell(member.mark),
-      cell(member.section),
+      cell(sectionText(member.section)),
       cell(member.material),
       verdictCell(member.summary),
       ratioCell(
