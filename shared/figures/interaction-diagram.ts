@@ -30,7 +30,7 @@ export function interactionDiagram(points: readonly InteractionPoint[]): Scene |
     { kind: 'area', points: [[x(0), y(0)], ...limit], fill: 'zinc1' },
     ...frame(x.ticks(5), x, y),
     path(limit, { ink: 'ink', width: 1.5 }),
-    label('limit H1-1a, H1-1b', [x(0.45) + 10, y(0.6) - 6], { ink: 'zinc7' }),
+    label('limit H1-1a, H1-1b', [x(0.1) + 4, y(0.96)], { ink: 'zinc7' }),
     ...worstFirst.flatMap((p, index) => mark(p, index, x(p.moment), y(p.axial))),
     ...list(worstFirst),
   ];

@@ -121,11 +121,11 @@ function requiredLevel(
       ],
       PENS.level,
     ),
-    label(`check uses ${required.text}`, [WIDTH / 2 - 52, 13], { anchor: 'middle' }),
+    label(`check uses ${required.text}`, [222, 13], { ink: 'zinc7', within: 176 }),
     path(
       [
-        [WIDTH / 2 - 128, 9],
-        [WIDTH / 2 - 154, 9],
+        [190, 9],
+        [216, 9],
       ],
       PENS.level,
     ),

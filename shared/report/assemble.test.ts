@@ -218,6 +218,14 @@ describe('member sheet', () => {
     expect(diagram?.scene.description).toContain('no stable solution');
   });
 
+  it('shows a value typed in other units as it was typed', () => {
+    const lines = of(memberSheet(record, 'm5'), 'line');
+    const length = lines.find((l) => l.address === 'given/L');
+    // 6.7 m / 0.3048 m = 21.98 ft.
+    expect(length?.result).toEqual({ value: '21.98', unit: 'ft' });
+    expect(words(length as Block)).toContain('given as 6.7 m');
+  });
+
   it('refuses a member or a combination that is not there', () => {
     expect(() => memberSheet(record, 'nobody')).toThrow('no member');
     expect(() => memberSheet(record, 'm1', 'c9')).toThrow('no combination');

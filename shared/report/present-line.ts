@@ -1,5 +1,6 @@
 import type { PlacedLine } from '../calc/address.ts';
 import type { Clause, Line, LineKind, LineOf, ValuedLine } from '../calc/line.ts';
+import { printedForms } from '../calc/printed.ts';
 import { readForms } from '../figures/read-line.ts';
 import { linked, type Step, substitutedStep, symbolicStep, valueLeaf } from './present-formula.ts';
 import { choiceSentence, comparisonSentence, governingSentence } from './present-sentence.ts';
@@ -7,7 +8,7 @@ import { type Presenter, plain, printedBy, text, usedForm } from './presenter.ts
 import { referenceOf } from './reference-text.ts';
 import { sourceLetter, sourceText } from './source-text.ts';
 import { symbolText } from './symbol-text.ts';
-import type { BlockOf, LineBlock } from './tree.ts';
+import type { BlockOf, Inline, LineBlock } from './tree.ts';
 
 type SectionBlock = BlockOf<'lineSection'>;
 type Parts = Partial<Omit<LineBlock, 'kind' | 'lineKind' | 'address' | 'member' | 'number'>>;
@@ -55,6 +56,7 @@ const SHORT = 16;
 const PRESENT = {
   given: (p, _placed, line) => ({
     ...valued(p, line, []),
+    sentence: typedElsewhere(p, line),
     given: {
       letter: sourceLetter(line.source),
       source: sourceText(line.source),
@@ -135,6 +137,13 @@ const PRESENT = {
 } as const satisfies {
   [K in Exclude<LineKind, 'section'>]: (p: Presenter, placed: PlacedLine, line: LineOf<K>) => Parts;
 };
+
+/** `given as 30 ft` where the value prints in other units than it was typed in. */
+function typedElsewhere(p: Presenter, line: LineOf<'given'>): readonly Inline[] {
+  const { working, display, typed } = printedForms(line, p.set);
+  if (typed === null || (working === null && display === null)) return [];
+  return [{ kind: 'text', quiet: true, text: `given as ${typed}` }];
+}
 
 /** Where a value stands: `W shapes, row W12X79, column Ix_in4`; a clause has no columns. */
 const tableText = ({ table, row, column }: LineOf<'lookup'>): string =>
