@@ -34,8 +34,12 @@ async function dropAll(serverUrl: string, name: string): Promise<void> {
   }
 }
 
-/** Once per run. Without a server only the tests that need a database fail. */
+/**
+ * Once per run: vitest calls it for each of its projects, which all inherit what the root provides.
+ * Without a server only the tests that need a database fail.
+ */
 export default async function setup(project: TestProject): Promise<(() => Promise<void>) | void> {
+  if (!project.isRootProject()) return;
   const serverUrl = process.env.TEST_DATABASE_URL;
   if (!serverUrl) {
     const reason = 'This test needs a database: run it with `npm test -- PATH`.';
