@@ -89,7 +89,7 @@ export function parseExpression(text: string): ParsedExpression {
   const known = cache.get(text);
   if (known) return known;
   const node = math.parse(text);
-  const tree = Object.freeze(fromNode(node, text));
+  const tree = Object.freeze(fromNode(node, text, literals(text)));
   const code = node.compile();
   const parsed: ParsedExpression = Object.freeze({
     text,
@@ -102,30 +102,43 @@ export function parseExpression(text: string): ParsedExpression {
   return parsed;
 }
 
-function fromNode(node: MathNode, text: string): Expr {
+/** Number literals as written, in order; mathjs keeps their values only, and `5.70` prints as such. */
+const literals = (text: string): string[] =>
+  text.match(/(?<![A-Za-z0-9_.])(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?/g) ?? [];
+
+/** Reads the tree in the order of the text, so that `rest` yields each constant as written. */
+function fromNode(node: MathNode, text: string, rest: string[]): Expr {
   switch (node.type) {
     case 'ConstantNode': {
       const { value } = node as unknown as ConstantLike;
-      return { kind: 'number', text: String(value), value: Number(value) };
+      const written = rest.shift();
+      if (written === undefined || Number(written) !== Number(value))
+        throw new Error(`constant ${String(value)} not found in "${text}"`);
+      return { kind: 'number', text: written, value: Number(value) };
     }
     case 'SymbolNode':
       return { kind: 'symbol', name: (node as unknown as SymbolLike).name };
     case 'ParenthesisNode':
-      return fromNode((node as unknown as ParenthesisLike).content, text);
+      return fromNode((node as unknown as ParenthesisLike).content, text, rest);
     case 'OperatorNode': {
       const { op, fn, args, implicit } = node as unknown as OperatorLike;
       if (implicit) throw new Error(`implicit multiplication in "${text}"`);
       const [left, right] = args;
-      if (fn === 'unaryMinus' && left) return { kind: 'negative', of: fromNode(left, text) };
+      if (fn === 'unaryMinus' && left) return { kind: 'negative', of: fromNode(left, text, rest) };
       if (left && right && (op === '+' || op === '-' || op === '*' || op === '/' || op === '^'))
-        return { kind: 'binary', op, left: fromNode(left, text), right: fromNode(right, text) };
+        return {
+          kind: 'binary',
+          op,
+          left: fromNode(left, text, rest),
+          right: fromNode(right, text, rest),
+        };
       throw new Error(`operator ${op} in "${text}"`);
     }
     case 'FunctionNode': {
       const { fn, args } = node as unknown as FunctionLike;
       const name = FUNCTIONS.find((f) => f === fn.name);
       if (!name) throw new Error(`function ${fn.name} in "${text}"`);
-      return { kind: 'call', fn: name, args: args.map((a) => fromNode(a, text)) };
+      return { kind: 'call', fn: name, args: args.map((a) => fromNode(a, text, rest)) };
     }
     default:
       throw new Error(`${node.type} in "${text}"`);

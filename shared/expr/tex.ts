@@ -46,7 +46,7 @@ const precedence = (e: Expr, leaf: LeafOf): number => {
   if (e.kind === 'negative') return PRECEDENCE.negative;
   const found = leafOf(e, leaf);
   if (found?.negative) return PRECEDENCE.negative;
-  if (found?.power) return PRECEDENCE['*'];
+  if (found?.power || isQuotient(e, leaf)) return PRECEDENCE['*'];
   return PRECEDENCE.leaf;
 };
 
@@ -63,7 +63,7 @@ function print(e: Expr, leaf: LeafOf, inline: boolean): string {
     case 'negative':
       return `-${within(e.of, PRECEDENCE['*'], leaf, inline)}`;
     case 'call':
-      return call(e.fn, e.args, leaf, '');
+      return call(e.fn, e.args, leaf, '', inline);
     case 'binary':
       return binary(e.op, e.left, e.right, leaf, inline);
   }
@@ -88,16 +88,23 @@ function binary(op: BinaryOp, left: Expr, right: Expr, leaf: LeafOf, inline: boo
     case '*':
       return `${factor(left, leaf, inline, true)}${join(left, right, leaf)}${factor(right, leaf, inline, false)}`;
     case '/':
-      if (!inline) return `\\frac{${print(left, leaf, false)}}{${print(right, leaf, false)}}`;
+      // A quotient inside a fraction or an exponent stands on one line.
+      if (!inline) return `\\frac{${print(left, leaf, true)}}{${print(right, leaf, true)}}`;
       return `${within(left, PRECEDENCE['*'], leaf, true)}/${within(right, PRECEDENCE['^'], leaf, true)}`;
     case '^': {
       const exponent = `{${print(right, leaf, true)}}`;
       if (left.kind === 'call' && left.fn !== 'sqrt' && left.fn !== 'abs')
-        return call(left.fn, left.args, leaf, `^${exponent}`);
+        return call(left.fn, left.args, leaf, `^${exponent}`, inline);
       return `${within(left, PRECEDENCE.leaf, leaf, inline)}^${exponent}`;
     }
   }
 }
+
+/** A symbol that is itself written as a quotient, such as h/tw. */
+const isQuotient = (e: Expr, leaf: LeafOf): boolean => {
+  const found = leafOf(e, leaf);
+  return found?.kind === 'symbol' && found.tex.includes('/');
+};
 
 const startsNegative = (e: Expr, leaf: LeafOf): boolean => {
   if (e.kind === 'negative') return true;
@@ -148,11 +155,17 @@ const join = (left: Expr, right: Expr, leaf: LeafOf): string => {
 const firstFactor = (e: Expr): Expr =>
   e.kind === 'binary' && e.op === '*' ? firstFactor(e.left) : e;
 
-function call(fn: FunctionName, args: readonly Expr[], leaf: LeafOf, power: string): string {
-  const printed = args.map((a) => print(a, leaf, false));
-  if (fn === 'sqrt') return `\\sqrt{${printed[0]}}`;
-  if (fn === 'abs') return `\\left|${printed[0]}\\right|`;
+function call(
+  fn: FunctionName,
+  args: readonly Expr[],
+  leaf: LeafOf,
+  power: string,
+  inline: boolean,
+): string {
+  if (fn === 'sqrt') return `\\sqrt{${args.map((a) => print(a, leaf, inline)).join()}}`;
+  if (fn === 'abs') return `\\left|${args.map((a) => print(a, leaf, inline)).join()}\\right|`;
+  const printed = args.map((a) => print(a, leaf, true));
   const only = args.length === 1 ? args[0] : undefined;
-  const bare = only && leafOf(only, leaf)?.kind === 'symbol';
+  const bare = only && leafOf(only, leaf)?.kind === 'symbol' && !isQuotient(only, leaf);
   return `${CALLS[fn]}${power}${bare ? ` ${printed[0]}` : brackets(printed.join(',\\,'))}`;
 }

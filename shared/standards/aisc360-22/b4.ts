@@ -41,7 +41,7 @@ export const b4Formulas = {
     'Table B4.1b, 10',
     'lambdarf',
     'Noncompact limit of the flange in flexure',
-    '1',
+    '1.0',
   ),
   minorCompact: limit(
     'B4.1b-13p',
@@ -55,7 +55,7 @@ export const b4Formulas = {
     'Table B4.1b, 13',
     'lambdarf',
     'Noncompact limit of the flange, minor-axis flexure',
-    '1',
+    '1.0',
   ),
   webCompact: limit(
     'B4.1b-15p',
