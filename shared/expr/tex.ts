@@ -130,6 +130,7 @@ function factor(e: Expr, leaf: LeafOf, inline: boolean, first: boolean): string 
   const quotient = inline && e.kind === 'binary' && e.op === '/' && !first;
   const chain = !first && e.kind === 'binary' && e.op === '*';
   return later ||
+    isQuotient(e, leaf) ||
     openCall ||
     quotient ||
     chain ||
