@@ -103,7 +103,8 @@ function binary(op: BinaryOp, left: Expr, right: Expr, leaf: LeafOf, inline: boo
 /** A symbol that is itself written as a quotient, such as h/tw. */
 const isQuotient = (e: Expr, leaf: LeafOf): boolean => {
   const found = leafOf(e, leaf);
-  return found?.kind === 'symbol' && found.tex.includes('/');
+  // The address in an \\htmlData wrap is no part of the symbol.
+  return found?.kind === 'symbol' && found.tex.replace(/\\htmlData\{[^}]*\}/g, '').includes('/');
 };
 
 const startsNegative = (e: Expr, leaf: LeafOf): boolean => {
