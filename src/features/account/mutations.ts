@@ -1,7 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
+import { keys } from '#client/lib/keys.ts';
 import type { SessionState } from '#shared/contracts/account.ts';
-import { sessionKey } from './queries.ts';
 
 /** A change of session: what was fetched for another person goes. */
 function useSessionChange<V>(change: (values: V) => Promise<SessionState>) {
@@ -9,8 +9,8 @@ function useSessionChange<V>(change: (values: V) => Promise<SessionState>) {
   return useMutation({
     mutationFn: change,
     onSuccess: (session) => {
-      client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== sessionKey[0] });
-      client.setQueryData(sessionKey, session);
+      client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== keys.session[0] });
+      client.setQueryData(keys.session, session);
     },
   });
 }
@@ -24,7 +24,7 @@ export const useChangePassword = () => {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: { current: string; next: string }) => call('changePassword', { body }),
-    onSuccess: (session) => client.setQueryData(sessionKey, session),
+    onSuccess: (session) => client.setQueryData(keys.session, session),
   });
 };
 

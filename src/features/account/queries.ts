@@ -1,14 +1,13 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
+import { keys } from '#client/lib/keys.ts';
 import type { Person, SessionState } from '#shared/contracts/account.ts';
-
-export const sessionKey = ['session'] as const;
 
 /** What is known until the session is asked for again. */
 export const signedOut: SessionState = { user: null, csrfToken: '', demo: null };
 
 export const sessionQuery = queryOptions({
-  queryKey: sessionKey,
+  queryKey: keys.session,
   queryFn: ({ signal }) => call('showSession', { signal }),
   staleTime: 5 * 60_000,
   refetchOnWindowFocus: true,

@@ -1,16 +1,14 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { deskKey } from '#client/features/desk/queries.ts';
-import { projectKey } from '#client/features/projects/queries.ts';
 import { call } from '#client/lib/api.ts';
+import { keys } from '#client/lib/keys.ts';
 import type { BasisDraft, Calculation } from '#shared/contracts/calculations.ts';
-import { calculationKey } from './queries.ts';
 
 function useKept() {
   const client = useQueryClient();
   return (calculation: Calculation) => {
-    client.setQueryData(calculationKey(calculation.id), calculation);
-    void client.invalidateQueries({ queryKey: projectKey(calculation.project.id) });
-    void client.invalidateQueries({ queryKey: deskKey });
+    client.setQueryData(keys.calculation(calculation.id), calculation);
+    void client.invalidateQueries({ queryKey: keys.project(calculation.project.id) });
+    void client.invalidateQueries({ queryKey: keys.desk });
   };
 }
 

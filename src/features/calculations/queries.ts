@@ -1,10 +1,9 @@
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
-
-export const calculationKey = (calculationId: string) => ['calculation', calculationId] as const;
+import { keys } from '#client/lib/keys.ts';
 
 export const calculationQuery = (calculationId: string) =>
   queryOptions({
-    queryKey: calculationKey(calculationId),
+    queryKey: keys.calculation(calculationId),
     queryFn: ({ signal }) => call('showCalculation', { params: { calculationId }, signal }),
   });

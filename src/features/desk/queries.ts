@@ -1,9 +1,8 @@
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
-
-export const deskKey = ['desk'] as const;
+import { keys } from '#client/lib/keys.ts';
 
 export const deskQuery = queryOptions({
-  queryKey: deskKey,
+  queryKey: keys.desk,
   queryFn: ({ signal }) => call('showDesk', { signal }),
 });

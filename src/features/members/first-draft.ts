@@ -25,8 +25,9 @@ export const firstCombination = (taken: readonly DraftCombination[]): DraftCombi
 export const firstDraft = (mark: string): MemberDraft => ({
   mark,
   place: '',
-  section: '',
+  section: notGiven,
   material: 'A992',
+  ownSteel: null,
   ends: { text: 'held', confirmed: false },
   length: notGiven,
   Lcx: notGiven,

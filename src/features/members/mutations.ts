@@ -1,11 +1,8 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { calculationKey } from '#client/features/calculations/queries.ts';
-import { deskKey } from '#client/features/desk/queries.ts';
-import { recordKey } from '#client/features/reports/queries.ts';
 import { call } from '#client/lib/api.ts';
+import { keys } from '#client/lib/keys.ts';
 import type { Calculation } from '#shared/contracts/calculations.ts';
 import type { Member, MemberDraft } from '#shared/contracts/members.ts';
-import { memberKey } from './queries.ts';
 
 /** A change of a calculation's members: its lists and its record are fetched again. */
 function useMemberChange<V, R>(calculationId: string, change: (values: V) => Promise<R>) {
@@ -13,9 +10,9 @@ function useMemberChange<V, R>(calculationId: string, change: (values: V) => Pro
   return useMutation({
     mutationFn: change,
     onSettled: () => {
-      void client.invalidateQueries({ queryKey: recordKey(calculationId) });
-      void client.invalidateQueries({ queryKey: deskKey });
-      return client.invalidateQueries({ queryKey: calculationKey(calculationId) });
+      void client.invalidateQueries({ queryKey: keys.record(calculationId) });
+      void client.invalidateQueries({ queryKey: keys.desk });
+      return client.invalidateQueries({ queryKey: keys.calculation(calculationId) });
     },
   });
 }
@@ -46,9 +43,13 @@ export function useUpdateMember(calculationId: string, memberId: string) {
     mutationFn: (body: { version: number; draft: MemberDraft }) =>
       call('updateMember', { params: { calculationId, memberId }, body }),
     onSuccess: (member: Member) => {
-      client.setQueryData(memberKey(memberId), member);
-      for (const key of [recordKey(calculationId), deskKey, calculationKey(calculationId)]) {
-        void client.invalidateQueries({ queryKey: key });
+      client.setQueryData(keys.member(memberId), member);
+      for (const queryKey of [
+        keys.record(calculationId),
+        keys.desk,
+        keys.calculation(calculationId),
+      ]) {
+        void client.invalidateQueries({ queryKey });
       }
     },
   });
@@ -57,7 +58,7 @@ export function useUpdateMember(calculationId: string, memberId: string) {
 /** Puts the members in another order, shown at once and taken back if it is refused. */
 export function useReorderMembers(calculationId: string) {
   const client = useQueryClient();
-  const key = calculationKey(calculationId);
+  const key = keys.calculation(calculationId);
   return useMutation({
     mutationFn: (memberIds: string[]) =>
       call('reorderMembers', { params: { calculationId }, body: { memberIds } }),
@@ -69,7 +70,7 @@ export function useReorderMembers(calculationId: string) {
       );
     },
     onSettled: () => {
-      void client.invalidateQueries({ queryKey: recordKey(calculationId) });
+      void client.invalidateQueries({ queryKey: keys.record(calculationId) });
       return client.invalidateQueries({ queryKey: key });
     },
   });

@@ -1,10 +1,9 @@
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
-
-export const memberKey = (memberId: string) => ['member', memberId] as const;
+import { keys } from '#client/lib/keys.ts';
 
 export const memberQuery = (calculationId: string, memberId: string) =>
   queryOptions({
-    queryKey: memberKey(memberId),
+    queryKey: keys.member(memberId),
     queryFn: ({ signal }) => call('showMember', { params: { calculationId, memberId }, signal }),
   });

@@ -1,9 +1,8 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { deskKey } from '#client/features/desk/queries.ts';
 import { call } from '#client/lib/api.ts';
+import { keys } from '#client/lib/keys.ts';
 import type { BodyInputOf } from '#shared/contracts/contract.ts';
 import type { Project, projects } from '#shared/contracts/projects.ts';
-import { projectKey } from './queries.ts';
 
 type Routes = typeof projects;
 export type ProjectValues = BodyInputOf<Routes['createProject']>;
@@ -14,8 +13,8 @@ export function useCreateProject() {
   return useMutation({
     mutationFn: (body: ProjectValues) => call('createProject', { body }),
     onSuccess: (project: Project) => {
-      client.setQueryData(projectKey(project.id), project);
-      void client.invalidateQueries({ queryKey: deskKey });
+      client.setQueryData(keys.project(project.id), project);
+      void client.invalidateQueries({ queryKey: keys.desk });
     },
   });
 }
@@ -26,8 +25,8 @@ export function useUpdateProject(projectId: string) {
     mutationFn: (body: BodyInputOf<Routes['updateProject']>) =>
       call('updateProject', { params: { projectId }, body }),
     onSuccess: (project) => {
-      client.setQueryData(projectKey(projectId), project);
-      void client.invalidateQueries({ queryKey: deskKey });
+      client.setQueryData(keys.project(projectId), project);
+      void client.invalidateQueries({ queryKey: keys.desk });
     },
   });
 }
@@ -37,7 +36,7 @@ function useDrawingChange<V, R>(change: (values: V) => Promise<R>, projectId: st
   const client = useQueryClient();
   return useMutation({
     mutationFn: change,
-    onSettled: () => client.invalidateQueries({ queryKey: projectKey(projectId) }),
+    onSettled: () => client.invalidateQueries({ queryKey: keys.project(projectId) }),
   });
 }
 

@@ -1,10 +1,9 @@
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
-
-export const projectKey = (projectId: string) => ['project', projectId] as const;
+import { keys } from '#client/lib/keys.ts';
 
 export const projectQuery = (projectId: string) =>
   queryOptions({
-    queryKey: projectKey(projectId),
+    queryKey: keys.project(projectId),
     queryFn: ({ signal }) => call('showProject', { params: { projectId }, signal }),
   });

@@ -1,0 +1,128 @@
+import { memo } from 'react';
+import { same } from '#client/lib/same.ts';
+import { classNames } from '#client/ui/class-names.ts';
+import { SourceRing } from '#client/ui/source-ring.tsx';
+import type { LineBlock as Line } from '#shared/report/tree.ts';
+import { useDocument } from './document-context.ts';
+import { Formula } from './formula.tsx';
+import { Inlines } from './inlines.tsx';
+
+/** One line of a sheet: number and clause, title and working, result. */
+export function LineBlock({ block }: { block: Line }) {
+  const { chosen, lit, current, onCurrent } = useDocument();
+  const { address } = block;
+  return (
+    <LineRow
+      block={block}
+      chosen={chosen === address}
+      lit={lit.has(address)}
+      inTabOrder={current === address}
+      onCurrent={onCurrent}
+    />
+  );
+}
+
+interface LineRowProps {
+  block: Line;
+  chosen: boolean;
+  lit: boolean;
+  inTabOrder: boolean;
+  onCurrent: ((address: string) => void) | null;
+}
+
+/** Drawn again only when something of it changed. */
+const LineRow = memo(function LineRow(props: LineRowProps) {
+  const { block, chosen, lit, inTabOrder, onCurrent } = props;
+  return (
+    // biome-ignore lint/a11y/useSemanticElements: a line is a group of what stands in its columns
+    <div
+      role="group"
+      aria-label={`Line ${block.number}, ${block.title}: ${block.text}`}
+      data-line={block.address}
+      data-kind={block.lineKind}
+      data-tone={block.tone}
+      {...(onCurrent
+        ? { tabIndex: inTabOrder ? 0 : -1, onFocus: () => onCurrent(block.address) }
+        : {})}
+      {...(chosen ? { 'aria-current': true as const } : {})}
+      className={classNames('sheet-line', chosen && 'is-chosen', lit && 'is-lit')}
+    >
+      <LineReference block={block} />
+      <p className="line-title">{block.title}</p>
+      {block.working.length > 0 && (
+        <div className="line-working">
+          {block.working.map((tex, index) => (
+            // biome-ignore lint/suspicious/noArrayIndexKey: the steps of a line in their order
+            <Formula key={index} tex={tex} className="line-step" />
+          ))}
+        </div>
+      )}
+      <LineResult block={block} />
+      <LineWords block={block} />
+    </div>
+  );
+}, same);
+
+function LineReference({ block }: { block: Line }) {
+  const { clause, equation } = block.reference;
+  return (
+    <div className="line-reference">
+      <span className="line-number">{block.number}</span>
+      {(clause || equation) && (
+        <span className="line-clause">
+          {clause} {equation && <span className="text-zinc-7">{equation}</span>}
+        </span>
+      )}
+    </div>
+  );
+}
+
+function LineResult({ block }: { block: Line }) {
+  const { result, also, verdict } = block;
+  if (!result && !verdict) return null;
+  const bad = verdict !== null && verdict !== 'OK';
+  return (
+    <div className="line-result">
+      <span className={classNames('line-value', bad && 'text-oxide')}>
+        {verdict && <span className="line-verdict">{verdict} </span>}
+        {result?.value}
+      </span>
+      {result?.unit && <span className="line-unit"> {result.unit}</span>}
+      {also && (
+        <span className="line-also">
+          = {also.value} {also.unit}
+        </span>
+      )}
+    </div>
+  );
+}
+
+const toneWords: Record<Line['tone'], string | null> = {
+  plain: null,
+  note: 'Note',
+  caution: 'Caution',
+  'outside scope': 'Outside scope',
+  failed: 'Failed',
+};
+
+function LineWords({ block }: { block: Line }) {
+  const { sentence, given } = block;
+  const tone = toneWords[block.tone];
+  if (sentence.length === 0 && !given) return null;
+  return (
+    <div className={classNames('line-words', block.lineKind === 'lookup' && 'is-source')}>
+      {tone && <strong className="line-tone">{tone}. </strong>}
+      <Inlines runs={sentence} />
+      {given && (
+        <span className="line-source">
+          <SourceRing letter={given.letter} confirmed={given.confirmed} />
+          <span>
+            {given.source}
+            {given.confirmed ? ', confirmed' : ', '}
+            {!given.confirmed && <strong className="text-oxide">not confirmed</strong>}
+          </span>
+        </span>
+      )}
+    </div>
+  );
+}

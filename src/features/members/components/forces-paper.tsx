@@ -1,0 +1,100 @@
+import { type ClipboardEvent, useState } from 'react';
+import { Formula } from '#client/document/formula.tsx';
+import { Button } from '#client/ui/button.tsx';
+import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
+import { Empty } from '#client/ui/state-panels.tsx';
+import { actionNames } from '#shared/contracts/members.ts';
+import { firstCombination } from '../first-draft.ts';
+import { actionWords } from '../member-fields.ts';
+import { ForcesRow } from './forces-row.tsx';
+import { useMemberForm } from './member-form-context.ts';
+import { PasteDialog } from './paste-dialog.tsx';
+
+/** All combinations as a table, to be typed in or pasted from a spreadsheet. */
+export function ForcesPaper({
+  units,
+  onShow,
+}: {
+  units: 'us' | 'si';
+  onShow: (id: string) => void;
+}) {
+  const { draft, edit, editable } = useMemberForm();
+  const [pasting, setPasting] = useState<string | null>(null);
+  const rows = draft.combinations;
+  const onPaste = (event: ClipboardEvent) => {
+    const text = event.clipboardData.getData('text/plain');
+    if (!editable || !/[\t\n]./.test(text)) return;
+    event.preventDefault();
+    setPasting(text);
+  };
+  return (
+    <section
+      aria-label="Forces"
+      onPaste={onPaste}
+      className="mx-auto max-w-[1080px] bg-paper px-7 pt-6 pb-9 shadow-sheet"
+    >
+      <div className="mb-3 flex flex-wrap items-end justify-between gap-3">
+        <div>
+          <h1 className="font-serif text-title font-semibold">Member forces of {draft.mark}</h1>
+          <p className="text-zinc-7">
+            Compression positive; moments at the ends A and B about x (major) and y (minor). Empty
+            is zero.
+          </p>
+        </div>
+        {editable && (
+          <div className="flex gap-2">
+            <Button onClick={() => setPasting('')}>Paste a table</Button>
+            <Button
+              onClick={() =>
+                edit({ ...draft, combinations: [...rows, firstCombination(rows)] }, 'rows/add')
+              }
+            >
+              Add a row
+            </Button>
+          </div>
+        )}
+      </div>
+      {rows.length === 0 ? (
+        <Empty>
+          No combinations yet. Copy them from a spreadsheet with their header row and paste them
+          here, or add a row.
+        </Empty>
+      ) : (
+        <Ledger
+          caption="Combinations and their forces"
+          head={
+            <>
+              <HeadCell className="w-[20%]">Combination</HeadCell>
+              {actionNames.map((action) => (
+                <HeadCell key={action} className="text-right">
+                  <Formula tex={actionWords[action].tex} />
+                  <span className="sr-only">{actionWords[action].spoken}</span>
+                </HeadCell>
+              ))}
+              <HeadCell className="w-[1%]">Source</HeadCell>
+              <HeadCell className="w-[1%]">
+                <span className="sr-only">Sheet, delete</span>
+              </HeadCell>
+            </>
+          }
+        >
+          {rows.map((row, index) => (
+            <ForcesRow key={row.id} row={row} index={index} onShow={onShow} />
+          ))}
+        </Ledger>
+      )}
+      {pasting !== null && (
+        <PasteDialog
+          text={pasting}
+          units={units}
+          present={rows}
+          onClose={() => setPasting(null)}
+          onTake={(combinations) => {
+            edit({ ...draft, combinations: [...combinations] }, 'rows/paste');
+            setPasting(null);
+          }}
+        />
+      )}
+    </section>
+  );
+}

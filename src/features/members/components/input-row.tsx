@@ -1,0 +1,54 @@
+import type { ReactNode } from 'react';
+import { Formula } from '#client/document/formula.tsx';
+import { ProblemText } from '#client/ui/field.tsx';
+import { controlId, type FieldWords } from '../member-fields.ts';
+
+export interface RowControl {
+  id: string;
+  'aria-describedby'?: string;
+  'aria-invalid'?: true;
+}
+
+/** One input of the margin: label at the left, control and its source at the right, problem below. */
+export function InputRow(props: {
+  path: string;
+  label: ReactNode;
+  problem: string | undefined;
+  source?: ReactNode;
+  children: (control: RowControl) => ReactNode;
+}) {
+  const id = controlId(props.path);
+  const control: RowControl = { id };
+  if (props.problem) {
+    control['aria-describedby'] = `${id}-problem`;
+    control['aria-invalid'] = true;
+  }
+  return (
+    <div className="input-row">
+      <label htmlFor={id}>{props.label}</label>
+      <div className="min-w-0">{props.children(control)}</div>
+      <div className="flex h-8 items-center justify-end">{props.source}</div>
+      {props.problem && (
+        <div className="col-span-3 pb-1">
+          <ProblemText id={`${id}-problem`}>{readable(props.problem)}</ProblemText>
+        </div>
+      )}
+    </div>
+  );
+}
+
+/** Problems follow a field's name in lists; beside the field they begin a sentence. */
+const readable = (problem: string): string => {
+  const text = problem.charAt(0).toUpperCase() + problem.slice(1);
+  return /[.!?)]$/.test(text) ? text : `${text}.`;
+};
+
+/** A field's name with its symbol, which is spoken in letters. */
+export function SymbolLabel({ words }: { words: FieldWords }) {
+  return (
+    <>
+      {words.label} <Formula tex={words.tex} />
+      <span className="sr-only">{words.spoken}</span>
+    </>
+  );
+}

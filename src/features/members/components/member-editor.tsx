@@ -1,0 +1,186 @@
+import { type ReactNode, useCallback, useEffect, useMemo, useRef, useState } from 'react';
+import type { VersionedDraft } from '#client/lib/draft/use-versioned-draft.ts';
+import { useAnnounce } from '#client/ui/announcements.tsx';
+import { ConflictDialog } from '#client/ui/conflict-dialog.tsx';
+import { useFormKeys } from '#client/ui/use-form-keys.ts';
+import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import type { MemberDraft } from '#shared/contracts/members.ts';
+import { firstCombination } from '../first-draft.ts';
+import { memberRules } from '../member-rules.ts';
+import { useLivePreview } from '../use-preview.ts';
+import { useSheet } from '../use-sheet.ts';
+import { focusLine, useSheetKeys } from '../use-sheet-keys.ts';
+import { useSheetPlace } from '../use-sheet-place.ts';
+import { ForcesPaper } from './forces-paper.tsx';
+import { InputsMargin } from './inputs-margin.tsx';
+import { MemberFormContext } from './member-form-context.ts';
+import { MemberStrip } from './member-strip.tsx';
+import { SheetCautions } from './sheet-cautions.tsx';
+import { SheetPaper } from './sheet-paper.tsx';
+import { goToControl, StaleNotice } from './stale-notice.tsx';
+import { TraceMargin } from './trace-margin.tsx';
+
+export type CentreView = 'sheet' | 'forces';
+
+/** A member: inputs at the left, its live sheet in the middle, the trace at the right. */
+export function MemberEditor(props: {
+  memberId: string;
+  draft: VersionedDraft<MemberDraft>;
+  basis: BasisDraft;
+  editable: boolean;
+  /** Place among the calculation's members, from 1. */
+  position: number;
+  titleFields: readonly { label: string; value: string }[];
+  basisNote: ReactNode;
+  neighbours: ReactNode;
+}) {
+  const { memberId, draft, basis, editable, position } = props;
+  const { value, edit } = draft;
+  const [view, setView] = useState<CentreView>('sheet');
+  const announce = useAnnounce();
+  const place = useSheetPlace();
+  const preview = useLivePreview(basis, memberId, value);
+  const wanted = place.combination ?? value.combinations[0]?.id;
+  const sheet = useSheet(preview.record, memberId, position, wanted, place.line);
+  const sheetElement = useRef<HTMLElement>(null);
+  const traceElement = useRef<HTMLElement>(null);
+
+  const chooseLine = place.chooseLine;
+  const pending = useRef<string | null>(place.line);
+  const follow = useCallback(
+    (address: string) => {
+      setView('sheet');
+      pending.current = address;
+      chooseLine(address);
+    },
+    [chooseLine],
+  );
+  // A line followed to, or linked to, is scrolled to once its sheet is drawn.
+  // biome-ignore lint/correctness/useExhaustiveDependencies: runs with every new sheet and line
+  useEffect(() => {
+    const address = pending.current;
+    if (address && address === place.line && focusLine(sheetElement.current, address, 'center')) {
+      pending.current = null;
+    }
+  }, [place.line, sheet.blocks, view]);
+
+  const copyLine = useCallback(
+    (address: string) => {
+      const block = sheet.blocks.find((b) => b.kind === 'line' && b.address === address);
+      if (block?.kind !== 'line') return;
+      const { number, title, text } = block;
+      copy(`${number} ${title}: ${text}`, () => announce(`Line ${number} copied as text.`));
+    },
+    [sheet.blocks, announce],
+  );
+  const copyLink = () =>
+    copy(window.location.href, () => announce('A link to this line is on the clipboard.'));
+  const sheetKeys = useSheetKeys({
+    sheet: sheetElement,
+    trace: traceElement,
+    chosen: place.line,
+    choose: chooseLine,
+    close: place.closeLine,
+    copyLine,
+  });
+  const formKeys = useFormKeys(draft);
+  const go = (path: string) => {
+    const row = /^combinations\[(\d+)\]/.exec(path)?.[1];
+    const combination = row === undefined ? undefined : value.combinations[Number(row)];
+    if (combination && combination.id !== sheet.combination) place.showCombination(combination.id);
+    requestAnimationFrame(() => requestAnimationFrame(() => goToControl(path)));
+  };
+
+  const problems = preview.problems;
+  const form = useMemo(() => {
+    const messages = new Map(problems.map(({ path, message }) => [path, message]));
+    return {
+      draft: value,
+      edit,
+      editable,
+      problemAt: (path: string) => messages.get(path),
+    };
+  }, [value, edit, editable, problems]);
+
+  return (
+    <MemberFormContext value={form}>
+      {/* biome-ignore lint/a11y/noStaticElementInteractions: undo and redo anywhere on the page of a member */}
+      <div className="member-layout" data-print-plain onKeyDown={formKeys}>
+        <InputsMargin
+          basis={basis}
+          record={preview.record?.members[0] ?? null}
+          combination={wanted}
+          note={props.basisNote}
+          restoredFrom={draft.restoredFrom}
+          onShow={place.showCombination}
+          onAdd={() => {
+            const row = firstCombination(value.combinations);
+            edit({ ...value, combinations: [...value.combinations, row] }, 'rows/add');
+            place.showCombination(row.id);
+          }}
+          onOpenTable={() => setView('forces')}
+        />
+        <div data-print-plain className="min-w-0 px-5 pt-3 pb-12">
+          <MemberStrip
+            view={view}
+            onView={setView}
+            draft={draft}
+            editable={editable}
+            neighbours={props.neighbours}
+          />
+          <StaleNotice problems={problems} hasSheet={sheet.blocks.length > 0} onGo={go} />
+          {view === 'forces' ? (
+            <ForcesPaper
+              units={basis.units}
+              onShow={(id) => {
+                place.showCombination(id);
+                setView('sheet');
+              }}
+            />
+          ) : (
+            sheet.blocks.length > 0 && (
+              <>
+                <SheetPaper
+                  sheet={sheetElement}
+                  blocks={sheet.blocks}
+                  chosen={place.line}
+                  lit={sheet.lit}
+                  titleFields={props.titleFields}
+                  onChoose={chooseLine}
+                  onFollow={follow}
+                  onKeyDown={sheetKeys}
+                />
+                <SheetCautions />
+              </>
+            )
+          )}
+        </div>
+        {/* biome-ignore lint/a11y/noStaticElementInteractions: the keys of the sheet hold in its trace too */}
+        <div className="contents" onKeyDown={sheetKeys}>
+          <TraceMargin
+            container={traceElement}
+            trace={sheet.trace}
+            lost={place.line !== null && sheet.trace === null && sheet.blocks.length > 0}
+            onFollow={follow}
+            onClose={place.closeLine}
+            onCopyLine={() => place.line && copyLine(place.line)}
+            onCopyLink={copyLink}
+          />
+        </div>
+      </div>
+      {draft.conflict && (
+        <ConflictDialog
+          what={`Member ${value.mark}`}
+          conflict={draft.conflict}
+          rules={memberRules}
+          onSettle={draft.settle}
+        />
+      )}
+    </MemberFormContext>
+  );
+}
+
+/** Puts text on the clipboard; where the browser refuses, nothing is said to have been copied. */
+function copy(text: string, done: () => void) {
+  void navigator.clipboard?.writeText(text).then(done, () => undefined);
+}

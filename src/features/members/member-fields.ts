@@ -1,0 +1,54 @@
+import type { ActionName, LengthName } from '#shared/contracts/members.ts';
+
+/** Fields of a member that are quantities or words with a source. */
+export type StatedName = LengthName | 'section' | 'ends' | 'Cb';
+
+export interface FieldWords {
+  readonly label: string;
+  readonly tex: string;
+  /** What a screen reader says in place of the symbol. */
+  readonly spoken: string;
+  readonly about: string;
+}
+
+const words = (label: string, tex: string, spoken: string, about: string): FieldWords => ({
+  ...{ label, tex, spoken, about },
+});
+
+export const lengthWords: Readonly<Record<LengthName, FieldWords>> = {
+  length: words('Length', 'L', 'L', 'Between the held ends.'),
+  Lcx: words('Buckling', 'L_{cx}', 'L c x', 'Effective length about the major axis x.'),
+  Lcy: words('Buckling', 'L_{cy}', 'L c y', 'Effective length about the minor axis y.'),
+  Lcz: words('Twisting', 'L_{cz}', 'L c z', 'Effective length for torsional buckling.'),
+  Lb: words(
+    'Unbraced',
+    'L_b',
+    'L b',
+    'Between braces of the compression flange or against twist; 0 ft where it is held all along.',
+  ),
+};
+
+export const CbWords = words('Moment factor', 'C_b', 'C b', 'A number, auto, or empty for 1.0.');
+
+export const actionWords: Readonly<Record<ActionName, FieldWords>> = {
+  P: words('Axial', 'P', 'P', 'Compression is positive.'),
+  MxA: words('Major, end A', 'M_{xA}', 'M x A', 'Moment about x at end A.'),
+  MxB: words('Major, end B', 'M_{xB}', 'M x B', 'Moment about x at end B.'),
+  MyA: words('Minor, end A', 'M_{yA}', 'M y A', 'Moment about y at end A.'),
+  MyB: words('Minor, end B', 'M_{yB}', 'M y B', 'Moment about y at end B.'),
+  MxMax: words(
+    'Major, largest',
+    'M_{x,max}',
+    'M x max',
+    'Largest moment about x from the analysis, anywhere along the member.',
+  ),
+  MyMax: words(
+    'Minor, largest',
+    'M_{y,max}',
+    'M y max',
+    'Largest moment about y from the analysis, anywhere along the member.',
+  ),
+};
+
+/** Id of the control of a field, by the path that problems carry (`combinations[0].P`). */
+export const controlId = (path: string): string => `input-${path.replace(/[^A-Za-z0-9]+/g, '-')}`;

@@ -1,0 +1,86 @@
+import { type KeyboardEvent, type RefObject, useCallback } from 'react';
+
+interface SheetKeys {
+  readonly sheet: RefObject<HTMLElement | null>;
+  readonly trace: RefObject<HTMLElement | null>;
+  readonly chosen: string | null;
+  readonly choose: (address: string) => void;
+  readonly close: () => void;
+  readonly copyLine: (address: string) => void;
+}
+
+const isTyping = (target: EventTarget): boolean =>
+  target instanceof HTMLElement && /^(INPUT|TEXTAREA|SELECT)$/.test(target.tagName);
+
+const lineAt = (target: EventTarget): HTMLElement | null =>
+  target instanceof Element ? target.closest<HTMLElement>('[data-line]') : null;
+
+/** The keys of the sheet and of the trace beside it. */
+export function useSheetKeys(keys: SheetKeys) {
+  const { sheet, trace, chosen, choose, close, copyLine } = keys;
+  return useCallback(
+    (event: KeyboardEvent) => {
+      if (event.ctrlKey || event.metaKey || event.altKey || isTyping(event.target)) return;
+      const line = lineAt(event.target);
+      const address = line?.dataset.line ?? chosen;
+      const inTrace = trace.current?.contains(event.target as Node) ?? false;
+      switch (event.key) {
+        case 'ArrowDown':
+        case 'ArrowUp': {
+          const by = event.key === 'ArrowDown' ? 1 : -1;
+          if (inTrace) step([...(trace.current?.querySelectorAll<HTMLElement>('.rung') ?? [])], by);
+          else if (line)
+            step([...(sheet.current?.querySelectorAll<HTMLElement>('[data-line]') ?? [])], by);
+          else return;
+          break;
+        }
+        case 'Enter':
+          if (!line || event.target !== line || !address) return;
+          choose(address);
+          break;
+        case 's':
+        case 'u': {
+          if (!address) return;
+          if (address !== chosen) choose(address);
+          const list = event.key === 's' ? '[data-ladder] .rung' : '[data-used-by] .rung';
+          // The trace of a line just chosen stands there after the next drawing.
+          requestAnimationFrame(() =>
+            requestAnimationFrame(() => trace.current?.querySelector<HTMLElement>(list)?.focus()),
+          );
+          break;
+        }
+        case 'c':
+          if (!address) return;
+          copyLine(address);
+          break;
+        case 'Escape':
+          if (!chosen) return;
+          focusLine(sheet.current, chosen);
+          close();
+          break;
+        default:
+          return;
+      }
+      event.preventDefault();
+    },
+    [sheet, trace, chosen, choose, close, copyLine],
+  );
+}
+
+function step(elements: readonly HTMLElement[], by: 1 | -1) {
+  const at = elements.indexOf(document.activeElement as HTMLElement);
+  elements[Math.max(0, Math.min(elements.length - 1, at + by))]?.focus();
+}
+
+/** Moves the focus to a line of the sheet; `where` it comes to stand if it is out of sight. */
+export function focusLine(
+  sheet: HTMLElement | null,
+  address: string,
+  where: ScrollLogicalPosition = 'nearest',
+): boolean {
+  const line = sheet?.querySelector<HTMLElement>(`[data-line="${CSS.escape(address)}"]`);
+  if (!line) return false;
+  line.focus({ preventScroll: true });
+  line.scrollIntoView({ block: where });
+  return true;
+}
