@@ -4,6 +4,7 @@ import { type Logger, pino } from 'pino';
 import { type Limits, makeLimits, type RateLimitSettings } from './auth/limits.ts';
 import type { Db } from './db/transaction.ts';
 import type { Env } from './env.ts';
+import { makeRuns, type Runs } from './runs/runs.ts';
 
 /** Everything a handler may use of the outside world, made once at start. */
 export interface Deps {
@@ -12,9 +13,12 @@ export interface Deps {
   readonly db: Db;
   readonly log: Logger;
   readonly limits: Limits;
+  readonly runs: Runs;
   readonly now: () => Date;
   /** The demo's accounts are shown on the sign-in page. */
   readonly demo: boolean;
+  /** Ends what was opened. */
+  close(): Promise<void>;
 }
 
 export interface DepsOptions {
@@ -23,7 +27,7 @@ export interface DepsOptions {
   readonly rateLimits?: Partial<RateLimitSettings>;
 }
 
-/** Opens the pool and makes the rest. `close` the pool when done. */
+/** Opens the pool and makes the rest; `close` when done. */
 export function makeDeps(env: Env, options: DepsOptions = {}): Deps {
   const log = pino({ level: env.logLevel });
   const pool = new pg.Pool({
@@ -33,6 +37,7 @@ export function makeDeps(env: Env, options: DepsOptions = {}): Deps {
     statement_timeout: 30_000,
   });
   pool.on('error', (error) => log.error({ err: error }, 'idle database connection lost'));
+  const runs = makeRuns();
   return {
     env,
     pool,
@@ -40,6 +45,11 @@ export function makeDeps(env: Env, options: DepsOptions = {}): Deps {
     log,
     limits: makeLimits(pool, options.rateLimits),
     now: options.now ?? (() => new Date()),
+    runs,
     demo: options.demo ?? false,
+    close: async () => {
+      await runs.close();
+      await pool.end();
+    },
   };
 }

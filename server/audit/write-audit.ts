@@ -1,6 +1,6 @@
-import { canonicalText } from '#server/db/canonical-text.ts';
 import { audit } from '#server/db/schema/audit.ts';
 import type { Transaction } from '#server/db/transaction.ts';
+import { canonicalText } from '#shared/calc/hashes.ts';
 import type { AuditEvent } from '#shared/contracts/audit-events.ts';
 
 /** Where and by whom something happened. */

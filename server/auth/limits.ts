@@ -18,7 +18,8 @@ export const rateLimitSettings = {
   signInOfAccountAnywhere: { points: 60, duration: quarter },
   passwordChange: { points: 8, duration: quarter },
   welcome: { points: 30, duration: quarter },
-  report: { points: 60, duration: 60 },
+  record: { points: 60, duration: 60 },
+  report: { points: 20, duration: 60 },
 } as const satisfies Record<string, Allowance>;
 
 export type LimitName = keyof typeof rateLimitSettings;

@@ -1,9 +1,10 @@
 import { randomUUID } from 'node:crypto';
 import { writeAudit } from '#server/audit/write-audit.ts';
-import { canonicalText } from '#server/db/canonical-text.ts';
 import { calculations, members } from '#server/db/schema/calculations.ts';
 import type { Transaction } from '#server/db/transaction.ts';
 import { draftColumns } from '#server/features/members/stored-member.ts';
+import type { Runs } from '#server/runs/runs.ts';
+import { canonicalText } from '#shared/calc/hashes.ts';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import type { MemberDraft } from '#shared/contracts/members.ts';
 
@@ -25,6 +26,7 @@ interface SeedCalculation {
 /** Adds a calculation with its members to the demo's project, as if its engineer had typed it. */
 export async function seedCalculation(
   tx: Transaction,
+  runs: Runs,
   { firmId, projectId, engineerId, now }: SeedPlace,
   { number, title, revision, basis, members: drafts }: SeedCalculation,
 ): Promise<void> {
@@ -37,7 +39,7 @@ export async function seedCalculation(
   await writeAudit(tx, { ...scope, subjectId: calculationId }, created);
   for (const [index, draft] of drafts.entries()) {
     const id = randomUUID();
-    const columns = draftColumns(basis, id, draft);
+    const columns = await draftColumns(runs, basis, id, draft);
     await tx.db
       .insert(members)
       .values({ id, calculationId, position: index + 1, ...columns, ...changed });

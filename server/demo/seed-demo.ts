@@ -38,11 +38,11 @@ export async function seedDemo(deps: Deps): Promise<void> {
     await tx.db.execute(sql`select pg_advisory_xact_lock(${lock})`);
     if ((await tx.db.select().from(firms).limit(1)).length > 0) return;
     const place = await seedProject(tx, passwordHash, deps.now());
-    await seedCalculation(tx, place, {
+    await seedCalculation(tx, deps.runs, place, {
       ...{ number: 'TQ-CAL-012', title: 'Hall columns', revision: 'B' },
       ...{ basis: hallBasis, members: hallMembers },
     });
-    await seedCalculation(tx, place, {
+    await seedCalculation(tx, deps.runs, place, {
       ...{ number: 'TQ-CAL-014', title: 'Crane bay and canopy', revision: 'A' },
       ...{ basis: craneBasis, members: craneMembers },
     });

@@ -1,6 +1,13 @@
 import { z } from 'zod';
+import { recordSchema } from '#shared/calc/record.ts';
 import { contract, permitted } from './contract.ts';
 import { id } from './fields.ts';
+
+/** A record that is made to be kept: with its hashes. */
+export const keptRecord = recordSchema.extend({
+  resultHash: z.string(),
+  snapshotHash: z.string(),
+});
 
 const params = z.object({ calculationId: id });
 const access = permitted('calculation.view');
@@ -14,7 +21,7 @@ export const reports = {
     access,
     params,
     body: null,
-    answer: z.looseObject({ format: z.literal(1), resultHash: z.string() }),
+    answer: keptRecord,
   }),
   downloadReport: contract({
     method: 'GET',

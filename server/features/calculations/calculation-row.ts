@@ -8,7 +8,7 @@ import type { VisibleCalculation } from './queries.ts';
 export function rowOf(found: VisibleCalculation): CalculationRow {
   const { stored, project, basis, members } = found;
   const present = members.filter(({ member }) => member.deletedAt === null);
-  const summaries = present.map(({ member }) => summaryOf(member, basis));
+  const summaries = present.map(({ member }) => summaryOf(member));
   const largest = largestRatio(summaries);
   const last = members.reduce(
     (a, { member, by }) => (member.changedAt > a.at ? { at: member.changedAt, by } : a),

@@ -1,11 +1,11 @@
 import { randomUUID } from 'node:crypto';
 import { auditScope } from '#server/audit/scope-of.ts';
 import { writeAudit } from '#server/audit/write-audit.ts';
-import { canonicalText } from '#server/db/canonical-text.ts';
 import { calculations } from '#server/db/schema/calculations.ts';
 import { transaction } from '#server/db/transaction.ts';
 import type { Handler } from '#server/http/handler.ts';
 import { refuseTakenNumber } from '#server/http/number-taken.ts';
+import { canonicalText } from '#shared/calc/hashes.ts';
 import type { calculations as contracts } from '#shared/contracts/calculations.ts';
 import { loadCalculation } from './queries.ts';
 

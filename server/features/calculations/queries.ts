@@ -100,7 +100,7 @@ export async function loadCalculation(
     basis: found.basis,
     projectVisible: canSee(viewer, { kind: 'project', projectId }),
     can: { edit: can(viewer, 'member.edit', resourceOf(found.stored)) },
-    memberRows: present.map((member) => memberRowOf(member, found.basis)),
+    memberRows: present.map(memberRowOf),
     problems: problemsOf(
       found.basis,
       present.map((member) => ({ id: member.id, draft: draftOf(member) })),

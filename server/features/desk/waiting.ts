@@ -7,10 +7,10 @@ import type { MemberRow } from '#shared/contracts/members.ts';
 export function waitingOf(calculations: readonly VisibleCalculation[]): WaitingItem[] {
   return calculations
     .filter(({ roles }) => roles.includes('engineer'))
-    .flatMap(({ stored: { id, number, title }, basis, members }) =>
+    .flatMap(({ stored: { id, number, title }, members }) =>
       members
         .filter(({ member }) => member.deletedAt === null)
-        .map(({ member }) => memberRowOf(member, basis))
+        .map(({ member }) => memberRowOf(member))
         .flatMap((row) =>
           reasonsOf(row).map(({ reason, count }) => ({
             reason,

@@ -21,12 +21,12 @@ export const createMember: Handler<typeof contracts.createMember> = async (conte
       .where(eq(members.calculationId, scope.calculationId));
     const row = {
       ...{ id, calculationId: scope.calculationId, position: (last?.position ?? 0) + 1 },
-      ...draftColumns(basis, id, body.draft),
+      ...(await draftColumns(deps.runs, basis, id, body.draft)),
       ...{ version: 1, changedBy: viewer.userId, changedAt: deps.now(), deletedAt: null },
     };
     await tx.db.insert(members).values(row);
     const event = { action: 'member.created', after: body.draft } as const;
     await writeAudit(tx, auditScope(context, id), event);
-    return memberOf(row, basis, viewer.name);
+    return memberOf(row, viewer.name);
   });
 };

@@ -28,11 +28,11 @@ export const duplicateMember: Handler<typeof contracts.duplicateMember> = async 
       .where(and(eq(members.calculationId, calculationId), gt(members.position, stored.position)));
     const row = {
       ...{ id, calculationId, position: stored.position + 1 },
-      ...draftColumns(basis, id, draft),
+      ...(await draftColumns(deps.runs, basis, id, draft)),
       ...{ version: 1, changedBy: viewer.userId, changedAt: deps.now(), deletedAt: null },
     };
     await tx.db.insert(members).values(row);
     await writeAudit(tx, auditScope(context, id), { action: 'member.duplicated', after: draft });
-    return memberOf(row, basis, viewer.name);
+    return memberOf(row, viewer.name);
   });
 };

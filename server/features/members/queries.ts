@@ -1,9 +1,8 @@
 import { and, asc, eq, isNull } from 'drizzle-orm';
-import { calculations, members } from '#server/db/schema/calculations.ts';
+import { members } from '#server/db/schema/calculations.ts';
 import { users } from '#server/db/schema/people.ts';
 import type { Db } from '#server/db/transaction.ts';
 import { notFound } from '#server/http/app-error.ts';
-import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import type { Member } from '#shared/contracts/members.ts';
 import { memberOf } from './stored-member.ts';
 
@@ -19,9 +18,8 @@ export const storedMembers = (db: Db, calculationId: string) =>
 /** A present member of a calculation that the person may see. */
 export async function loadMember(db: Db, calculationId: string, memberId: string): Promise<Member> {
   const [found] = await db
-    .select({ member: members, by: users.name, basis: calculations.basis })
+    .select({ member: members, by: users.name })
     .from(members)
-    .innerJoin(calculations, eq(calculations.id, members.calculationId))
     .innerJoin(users, eq(users.id, members.changedBy))
     .where(
       and(
@@ -31,5 +29,5 @@ export async function loadMember(db: Db, calculationId: string, memberId: string
       ),
     );
   if (!found) throw notFound();
-  return memberOf(found.member, JSON.parse(found.basis) as BasisDraft, found.by);
+  return memberOf(found.member, found.by);
 }

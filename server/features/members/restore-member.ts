@@ -17,13 +17,13 @@ export const restoreMember: Handler<typeof contracts.restoreMember> = async (con
     const draft = draftOf(stored);
     const set = {
       // The basis may have changed since.
-      ...draftColumns(basis, stored.id, draft),
+      ...(await draftColumns(deps.runs, basis, stored.id, draft)),
       ...{ deletedAt: null, version: stored.version + 1 },
       ...{ changedBy: viewer.userId, changedAt: deps.now() },
     };
     await tx.db.update(members).set(set).where(eq(members.id, stored.id));
     const event = { action: 'member.restored', after: draft } as const;
     await writeAudit(tx, auditScope(context, stored.id), event);
-    return memberOf({ ...stored, ...set }, basis, viewer.name);
+    return memberOf({ ...stored, ...set }, viewer.name);
   });
 };

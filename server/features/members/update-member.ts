@@ -1,11 +1,11 @@
 import { eq } from 'drizzle-orm';
 import { auditScope } from '#server/audit/scope-of.ts';
 import { writeAudit } from '#server/audit/write-audit.ts';
-import { canonicalText } from '#server/db/canonical-text.ts';
 import { members } from '#server/db/schema/calculations.ts';
 import { transaction } from '#server/db/transaction.ts';
 import { AppError } from '#server/http/app-error.ts';
 import type { Handler } from '#server/http/handler.ts';
+import { canonicalText } from '#shared/calc/hashes.ts';
 import type { members as contracts } from '#shared/contracts/members.ts';
 import { lockMember } from './lock-member.ts';
 import { loadMember } from './queries.ts';
@@ -28,7 +28,7 @@ export const updateMember: Handler<typeof contracts.updateMember> = async (conte
       throw new AppError('conflict', { conflict: { theirs, changedBy, changedAt } });
     }
     const set = {
-      ...draftColumns(basis, stored.id, body.draft),
+      ...(await draftColumns(deps.runs, basis, stored.id, body.draft)),
       ...{ version: stored.version + 1, changedBy: viewer.userId, changedAt: deps.now() },
     };
     await tx.db.update(members).set(set).where(eq(members.id, stored.id));
@@ -38,6 +38,6 @@ export const updateMember: Handler<typeof contracts.updateMember> = async (conte
       after: body.draft,
     } as const;
     await writeAudit(tx, auditScope(context, stored.id), event);
-    return memberOf({ ...stored, ...set }, basis, viewer.name);
+    return memberOf({ ...stored, ...set }, viewer.name);
   });
 };

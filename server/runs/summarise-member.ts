@@ -1,24 +1,19 @@
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
-import { inputOf } from '#shared/contracts/draft-input.ts';
+import { type DraftOfMember, inputOf } from '#shared/contracts/draft-input.ts';
 import { problemsOfMember } from '#shared/contracts/draft-problems.ts';
-import type { MemberDraft, MemberSummary } from '#shared/contracts/members.ts';
+import type { MemberSummary } from '#shared/contracts/members.ts';
 import { parseInput } from '#shared/members/resolve.ts';
 import { runMember } from '#shared/members/run.ts';
 import { unconfirmedIn } from './unconfirmed-in.ts';
 
 /** Runs one member's draft; one that is no valid input is NOT CHECKED, with the reasons. */
-export function summariseMember(
-  basis: BasisDraft,
-  memberId: string,
-  draft: MemberDraft,
-): MemberSummary {
-  const member = { id: memberId, draft };
+export function summariseMember(basis: BasisDraft, member: DraftOfMember): MemberSummary {
   const parsed = parseInput(inputOf(basis, [member]));
   const resolved = parsed.ok ? parsed.input.members[0] : undefined;
   if (!parsed.ok || !resolved) {
     return {
       ...{ verdict: 'NOT CHECKED', ratio: null, ratioText: null, governing: null },
-      unconfirmed: unconfirmedIn(draft),
+      unconfirmed: unconfirmedIn(member.draft),
       problems: problemsOfMember(basis, member),
     };
   }

@@ -1,0 +1,26 @@
+import { parentPort } from 'node:worker_threads';
+import { makeRecord } from './make-record.ts';
+import { makeReport } from './make-report.ts';
+import { summariseMember } from './summarise-member.ts';
+import type { Order } from './tasks.ts';
+
+/** The other thread: makes one thing after another, in the order of the orders. */
+
+function make(order: Order) {
+  switch (order.task) {
+    case 'summaries':
+      return order.given.members.map((member) => summariseMember(order.given.basis, member));
+    case 'record':
+      return makeRecord(order.given);
+    case 'report':
+      return makeReport(order.given);
+  }
+}
+
+parentPort?.on('message', async ({ number, order }: { number: number; order: Order }) => {
+  try {
+    parentPort?.postMessage({ number, made: await make(order) });
+  } catch (error) {
+    parentPort?.postMessage({ number, error });
+  }
+});

@@ -1,0 +1,32 @@
+import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import type { MemberDraft, MemberSummary } from '#shared/contracts/members.ts';
+import { RunThread } from './run-thread-client.ts';
+import type { Drafts, Tasks } from './tasks.ts';
+
+/** Everything that is computed of a calculation on the server. */
+export interface Runs {
+  summarise(basis: BasisDraft, id: string, draft: MemberDraft): Promise<MemberSummary>;
+  summariseAll(drafts: Drafts): Promise<MemberSummary[]>;
+  record(drafts: Drafts): Promise<Tasks['record']['made']>;
+  report(given: Tasks['report']['given']): Promise<Tasks['report']['made']>;
+  close(): Promise<void>;
+}
+
+/** One thread for what someone waits for while typing, one for what takes seconds. */
+export function makeRuns(): Runs {
+  const short = new RunThread();
+  const long = new RunThread();
+  return {
+    async summarise(basis, id, draft) {
+      const [summary] = await short.make('summaries', { basis, members: [{ id, draft }] });
+      if (!summary) throw new Error('a member was given and none was summarised');
+      return summary;
+    },
+    summariseAll: (drafts) => short.make('summaries', drafts),
+    record: (drafts) => long.make('record', drafts),
+    report: (given) => long.make('report', given),
+    close: async () => {
+      await Promise.all([short.close(), long.close()]);
+    },
+  };
+}
