@@ -44,10 +44,12 @@ export function breakWords(
   const lines: Word[][] = [];
   let room = 0;
   let glued = false;
-  for (const word of words) {
+  for (const [index, word] of words.entries()) {
     // Content without a space between two inlines stays on one line.
-    const fits =
-      word.bare <= room || (glued && word.formula === null && word.bare < 0.5 * style.size);
+    // An equals sign goes with the value after it.
+    const follower = word.text === '= ' ? (words[index + 1]?.bare ?? 0) : 0;
+    const needed = follower > 0 ? word.width + follower : word.bare;
+    const fits = needed <= room || (glued && word.formula === null && word.bare < 0.5 * style.size);
     if (lines.length === 0 || !fits) {
       if (word.text === ' ') continue;
       lines.push([]);
@@ -79,8 +81,9 @@ function wordsOf(
   const ink = quiet ? 'zinc7' : style.ink;
   const link = inline.kind === 'value' ? linkOf(inline.address, inline.member) : null;
   const widthOf = (text: string): number => setText(fonts, face, text).width * style.size;
-  return inline.text
-    .split(spaceAfter)
+  // A value stays with its unit.
+  const parts = inline.kind === 'value' ? [inline.text] : inline.text.split(spaceAfter);
+  return parts
     .flatMap((text) => cutToWidth(text, width, widthOf))
     .map((text) => ({
       text,

@@ -37,6 +37,7 @@ export const textStyles = {
   sentence: { ...serif, size: 9, leading: 12.5, ink: 'ink' },
   title: { ...sans, size: 8.5, leading: 11, ink: 'zinc7' },
   field: { ...sans, size: 9.5, leading: 12.5, ink: 'ink' },
+  fact: { ...sans, size: 8.5, leading: 11, ink: 'ink' },
   cell: { ...narrow, size: 8.5, leading: 10.5, ink: 'ink' },
   small: { ...narrow, size: 8, leading: 10, ink: 'zinc7' },
   foot: { ...narrow, size: 6.8, leading: 8.4, ink: 'zinc7' },

@@ -83,7 +83,8 @@ function fieldRows(fields: readonly Field[], context: BlockContext): Row[] {
 const hashStyle: TextStyle = {
   ...textStyles.field,
   face: 'ibm-plex-mono-regular',
-  size: 7.4,
+  // 64 digits on one line of a column of Letter or A4.
+  size: 6.1,
   leading: 11,
 };
 

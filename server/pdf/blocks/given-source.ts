@@ -3,7 +3,6 @@ import type { BlockContext } from '../block-context.ts';
 import { circlePath } from '../circle-path.ts';
 import type { Item } from '../items.ts';
 import { type InkName, textStyles } from '../paper.ts';
-import { sheetColumns } from './sheet-columns.ts';
 import { plain, setWords, strong, textAt } from './words.ts';
 
 const radius = 4.2;
@@ -14,19 +13,18 @@ const radius = 4.2;
  */
 export function givenSource(
   block: LineBlock,
-  top: number,
+  { x, y, width }: { x: number; y: number; width: number },
   context: BlockContext,
 ): { items: readonly Item[]; foot: number } {
-  if (!block.given) return { items: [], foot: top };
+  if (!block.given) return { items: [], foot: y };
   const { letter, source, confirmed } = block.given;
   const ink: InkName = letter === 'A' || !confirmed ? 'oxide' : 'zinc7';
-  const { x } = sheetColumns.working;
   const style = { ...textStyles.small, ink };
-  const left = x + 2 * radius + 5;
+  const indent = 2 * radius + 5;
   const state = confirmed ? plain(' · confirmed') : strong(' · not confirmed');
-  const place = { x: left, y: top + 1.5, width: context.width - left - 100 };
+  const place = { x: x + indent, y: y + 0.8, width: width - indent };
   const words = setWords([...plain(source), ...state], style, place, context);
-  const middle = (words.firstBaseline ?? top) - 2.8;
+  const middle = (words.firstBaseline ?? y) - 2.8;
   const face = 'ibm-plex-sans-condensed-semibold';
   const sign = textAt(context, letter, { x: 0, y: middle + 2.3, face, size: 6.4, ink });
   const ring: Item = {
@@ -36,6 +34,6 @@ export function givenSource(
   };
   return {
     items: [ring, { ...sign, x: x + radius - sign.width / 2 }, ...words.items],
-    foot: top + 1.5 + words.height,
+    foot: y + 0.8 + words.height,
   };
 }

@@ -13,12 +13,12 @@ const levels = {
     style: {
       face: 'ibm-plex-sans-semibold',
       strong: 'ibm-plex-sans-semibold',
-      size: 9.5,
-      leading: 12.5,
+      size: 11,
+      leading: 14,
       ink: 'ink',
     },
-    before: 10,
-    after: 2,
+    before: 18,
+    after: 3,
   },
 } as const satisfies Record<1 | 2 | 3, { style: TextStyle; before: number; after: number }>;
 

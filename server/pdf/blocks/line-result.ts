@@ -15,8 +15,16 @@ export interface LineResult {
 
 const gap = { unit: 3, verdict: 6 };
 
-/** Value and unit at the right edge, a verdict's word before it, the other printed form below. */
-export function lineResult(block: LineBlock, toneWord: string, context: BlockContext): LineResult {
+/**
+ * Value and unit at the right edge, a verdict's word before it; the other printed form below, or
+ * after it where the line is to stay one line high.
+ */
+export function lineResult(
+  block: LineBlock,
+  toneWord: string,
+  inOneLine: boolean,
+  context: BlockContext,
+): LineResult {
   const items: Item[] = [];
   let x = context.width;
   const put = (
@@ -33,15 +41,18 @@ export function lineResult(block: LineBlock, toneWord: string, context: BlockCon
     x -= item.width;
   };
   const ink = block.verdict ? verdictInk(block.verdict) : 'ink';
+  const also = block.also ? `= ${block.also.value} ${block.also.unit}`.trimEnd() : '';
+  if (inOneLine) put(also, 'ibm-plex-sans-regular', 8.5, 'zinc7', 0);
   if (block.result) {
     put(block.result.unit, 'ibm-plex-sans-regular', 8.5, 'zinc7', gap.unit);
     put(block.result.value, 'ibm-plex-sans-semibold', 10, ink, gap.unit);
   }
   if (block.verdict) put(block.verdict, 'ibm-plex-sans-condensed-semibold', 8.5, ink, gap.verdict);
-  if (items.length === 0) put(toneWord, 'ibm-plex-sans-condensed-semibold', 8.5, 'oxide', 0);
+  const toneInk = block.tone === 'note' ? 'zinc7' : 'oxide';
+  if (items.length === 0) put(toneWord, 'ibm-plex-sans-condensed-semibold', 8.5, toneInk, 0);
   const width = context.width - x;
-  if (!block.also) return { items, width, depth: items.length > 0 ? 2.5 : 0 };
-  const also = textAt(context, `= ${block.also.value} ${block.also.unit}`.trimEnd(), {
+  if (inOneLine || also === '') return { items, width, depth: items.length > 0 ? 2.5 : 0 };
+  const under = textAt(context, also, {
     x: context.width,
     y: 11,
     face: 'ibm-plex-sans-regular',
@@ -49,5 +60,5 @@ export function lineResult(block: LineBlock, toneWord: string, context: BlockCon
     ink: 'zinc7',
     end: 'right',
   });
-  return { items: [...items, also], width: Math.max(width, also.width), depth: 13.5 };
+  return { items: [...items, under], width: Math.max(width, under.width), depth: 13.5 };
 }

@@ -15,13 +15,13 @@ export interface Working {
   readonly foot: number;
 }
 
-const gaps = { title: 3, line: 5, inline: 8 };
+const gaps = { title: 3, line: 5 };
 /** A later line of a formula goes in by this, em. */
 const indent = 1.5;
 
 /**
  * Sets a line's working under its title: on as many lines as it needs, smaller where one part is
- * wider than the column. A formula that is no more than a symbol stands on the title's own line.
+ * wider than the column.
  */
 export function lineWorking(
   block: LineBlock,
@@ -39,22 +39,9 @@ export function lineWorking(
   });
   const widest = Math.max(...broken.map((line) => line.width));
   const size = Math.min(place.size, room / widest);
-  const [only, ...others] = broken;
-  const titleEnd = x + title.lastWidth + gaps.inline;
-  const beside =
-    only && others.length === 0 && isLow(only) && titleEnd + only.width * size <= place.right;
-  if (beside && isBareSymbol(block) && title.lastBaseline !== null) {
-    return placed(block, broken, { x: titleEnd, y: title.lastBaseline, size }, foot);
-  }
-  const first = foot + (title.height > 0 ? gaps.title : 0) + (only?.height ?? 0) * size;
+  const first = foot + (title.height > 0 ? gaps.title : 0) + (broken[0]?.height ?? 0) * size;
   return placed(block, broken, { x, y: first, size }, foot);
 }
-
-/** A line that shows no step of calculation. */
-const isBareSymbol = ({ lineKind }: LineBlock): boolean =>
-  lineKind === 'given' || lineKind === 'lookup';
-
-const isLow = (formula: Formula): boolean => formula.height < 1 && formula.depth < 0.5;
 
 function placed(
   block: LineBlock,

@@ -1,10 +1,10 @@
-import type { LineBlock } from '#shared/report/tree.ts';
+import type { Inline, LineBlock } from '#shared/report/tree.ts';
 import { anchorOf, type BlockContext, row } from '../block-context.ts';
 import { bar, type Item, moveItem, type Part, type Row, stroke, type Tag } from '../items.ts';
-import { type InkName, mathSize, type TextStyle, textStyles, weights } from '../paper.ts';
-import { givenSource } from './given-source.ts';
+import { type InkName, textStyles, weights } from '../paper.ts';
+import { factContent, isFact } from './line-fact.ts';
 import { lineResult } from './line-result.ts';
-import { lineWorking } from './line-working.ts';
+import { stepContent } from './line-step.ts';
 import { sheetColumns } from './sheet-columns.ts';
 import { plain, setWords, strong } from './words.ts';
 
@@ -27,58 +27,23 @@ const tones: Readonly<Record<LineBlock['tone'], { bar?: InkName; tint?: InkName;
 export function measureLine(block: LineBlock, context: BlockContext): Row[] {
   const tag: Tag = { type: 'P', parent: context.sect };
   const tone = tones[block.tone];
-  // Words stated in place of a value stand in the working column.
-  const isStatement = block.lineKind === 'statement';
-  const result = lineResult(isStatement ? { ...block, result: null } : block, tone.word, context);
-  const { working } = sheetColumns;
-  const right =
-    context.width - Math.max(result.width, sheetColumns.result.least) - sheetColumns.result.gap;
-  const title = setWords(
-    plain(block.title),
-    textStyles.title,
-    { x: working.x, y: padding.top, width: (result.width > 0 ? right : context.width) - working.x },
-    context,
-  );
-  const formula = lineWorking(block, title, { top: padding.top, right, size: mathSize }, context);
-  const meetsResult = result.width > 0 && (block.also !== null || title.height === 0);
-  const stated = isStatement && block.result ? strong(block.result.value) : [];
-  const words = setWords(
-    [...stated, ...block.sentence],
-    wordStyle(block, isStatement),
-    {
-      x: working.x,
-      y: formula.foot + (block.title === '' && block.working.length === 0 ? 0 : 2),
-      width: (meetsResult ? right : context.width) - working.x,
-    },
-    context,
-  );
-  const wordsFoot = words.height > 0 ? formula.foot + 2 + words.height : formula.foot;
-  const source = givenSource(block, wordsFoot, context);
-  const baseline = formula.baseline ?? title.lastBaseline ?? words.lastBaseline ?? padding.top + 8;
+  const result = lineResult(block, tone.word, isFact(block), context);
   const reference = setReference(block, context);
-  const height = Math.max(source.foot, reference.foot, baseline + result.depth) + padding.bottom;
+  const within = { top: padding.top, result };
+  const content = isFact(block)
+    ? factContent(block, tag, within, context)
+    : stepContent(block, tag, within, context);
+  const { baseline } = content;
+  const height = Math.max(content.foot, reference.foot, baseline + result.depth) + padding.bottom;
   const anchor: Item = { kind: 'anchor', name: anchorOf(block.member, block.address) };
   const parts: Part[] = [
     { tag: null, items: decoration(tone, height, context) },
     { tag, items: [anchor, ...reference.number] },
     { tag, items: reference.source },
-    { tag, items: title.items },
-    ...(formula.item
-      ? [{ tag: { type: 'Formula', parent: tag, alt: block.text } as const, items: [formula.item] }]
-      : []),
-    {
-      tag,
-      items: [...formula.links, ...words.items, ...source.items],
-    },
+    ...content.parts,
     { tag, items: result.items.map((item) => moveItem(item, 0, baseline)) },
   ];
   return [row(height, parts)];
-}
-
-function wordStyle({ sentence }: LineBlock, isStatement: boolean): TextStyle {
-  if (isStatement) return { ...textStyles.field, size: 9 };
-  const isQuiet = sentence.every((part) => part.kind === 'text' && part.quiet);
-  return isQuiet ? textStyles.small : textStyles.sentence;
 }
 
 function decoration(
@@ -103,19 +68,28 @@ function setReference(
     { ...reference, y: padding.top },
     context,
   );
-  const { clause, equation } = block.reference;
-  const source = setWords(
-    [
-      ...plain(clause === '' || equation === '' ? clause : `${clause} `),
-      ...(equation === '' ? [] : [{ kind: 'text', text: equation, quiet: true } as const]),
-    ],
-    { ...textStyles.small, ink: 'ink' },
-    { ...reference, y: padding.top + number.height },
-    context,
-  );
+  const source = setClause(block.reference, padding.top + number.height, context);
   return {
     number: number.items,
     source: source.items,
     foot: padding.top + number.height + source.height,
   };
+}
+
+/** Clause and equation side by side, the equation under the clause where that is too wide. */
+function setClause(
+  { clause, equation }: LineBlock['reference'],
+  y: number,
+  context: BlockContext,
+): { items: readonly Item[]; height: number } {
+  const place = { ...sheetColumns.reference, y };
+  const clauseStyle = { ...textStyles.small, ink: 'ink' } as const;
+  const quiet = (text: string): Inline[] =>
+    text === '' ? [] : [{ kind: 'text', text, quiet: true }];
+  const both = [...plain(clause && equation ? `${clause} ` : clause), ...quiet(equation)];
+  const beside = setWords(both, clauseStyle, place, context);
+  if (beside.height < 2 * clauseStyle.leading * 0.9) return beside;
+  const above = setWords(plain(clause), clauseStyle, place, context);
+  const below = setWords(quiet(equation), clauseStyle, { ...place, y: y + above.height }, context);
+  return { items: [...above.items, ...below.items], height: above.height + below.height };
 }

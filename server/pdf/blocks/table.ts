@@ -1,5 +1,6 @@
 import type { BlockOf, TableCell } from '#shared/report/tree.ts';
 import { type BlockContext, row } from '../block-context.ts';
+import { breakWords } from '../inline-lines.ts';
 import { type Part, type Row, stroke, type Tag } from '../items.ts';
 import { type InkName, type TextStyle, textStyles, weights } from '../paper.ts';
 import { setWords, strong } from './words.ts';
@@ -19,15 +20,49 @@ interface Column {
   readonly width: number;
 }
 
-function columnsOf(widths: readonly number[], total: number): Column[] {
-  const sum = widths.reduce((a, b) => a + b, 0);
-  const room = total - gap * (widths.length - 1);
+/** Columns by their shares; one too narrow for its longest cell takes room that others don't use. */
+function columnsOf(block: BlockOf<'table'>, context: BlockContext): Column[] {
+  const sum = block.widths.reduce((a, b) => a + b, 0);
+  const room = context.width - gap * (block.widths.length - 1);
+  const shares = block.widths.map((share) => (room * share) / sum);
+  const wanted = shares.map((_, index) => naturalWidth(block, index, context));
   let x = 0;
-  return widths.map((share) => {
-    const column = { x, width: (room * share) / sum };
-    x += column.width + gap;
+  return fillShares(shares, wanted).map((width) => {
+    const column = { x, width };
+    x += width + gap;
     return column;
   });
+}
+
+/** Width of a column's longest cell on one line. */
+function naturalWidth(block: BlockOf<'table'>, index: number, context: BlockContext): number {
+  const cells = [block.head, ...block.rows].map((cells, row) => {
+    const cell = cells[index];
+    if (!cell) return 0;
+    const style = cellStyle(cell, row === 0);
+    const lines = breakWords(cell.content, style, 1e6, context.fonts, context.linkOf);
+    return Math.max(0, ...lines.map((line) => line.width));
+  });
+  // A hair more, so that rounding never breaks the longest cell.
+  return Math.max(0, ...cells) + 0.01;
+}
+
+/** Gives slack to the columns that lack least first. */
+export function fillShares(shares: readonly number[], wanted: readonly number[]): number[] {
+  const widths = [...shares];
+  const lackOf = (index: number): number => (wanted[index] ?? 0) - (shares[index] ?? 0);
+  const lacking = widths.map((_, index) => index).filter((index) => lackOf(index) > 0);
+  for (const index of lacking.sort((a, b) => lackOf(a) - lackOf(b))) {
+    const slack = widths.map((width, at) => Math.max(0, width - (wanted[at] ?? 0)));
+    const total = slack.reduce((a, b) => a + b, 0);
+    const taken = Math.min(lackOf(index), total);
+    if (taken <= 0) break;
+    slack.forEach((part, at) => {
+      widths[at] = (widths[at] ?? 0) - (taken * part) / total;
+    });
+    widths[index] = (widths[index] ?? 0) + taken;
+  }
+  return widths;
 }
 
 function cellStyle(cell: TableCell, isHead: boolean): TextStyle {
@@ -65,7 +100,7 @@ function tableRow(
 
 export function measureTable(block: BlockOf<'table'>, context: BlockContext): Row[] {
   const table: Tag = { type: 'Table', parent: context.sect };
-  const columns = columnsOf(block.widths, context.width);
+  const columns = columnsOf(block, context);
   const rows: Row[] = [];
   if (block.caption !== '') {
     const tag: Tag = { type: 'Caption', parent: table };

@@ -5,7 +5,7 @@ import { type InkName, textStyles, weights } from '../paper.ts';
 import { plain, setWords, textAt } from './words.ts';
 
 /** Width of the words on what governs, points. */
-const governsWidth = 132;
+const governsWidth = 150;
 const termInks: readonly InkName[] = ['ink', 'oxide', 'oxide3', 'zinc5'];
 const narrow = 'ibm-plex-sans-condensed-regular';
 
