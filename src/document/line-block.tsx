@@ -48,6 +48,37 @@ const LineRow = memo(function LineRow(props: LineRowProps) {
       className={classNames('sheet-line', chosen && 'is-chosen', lit && 'is-lit')}
     >
       <LineReference block={block} />
+      {isShort(block) ? <ShortLine block={block} /> : <LongLine block={block} />}
+      <LineResult block={block} />
+    </div>
+  );
+}, same);
+
+/** Given and table values, and statements, take one row: nothing is worked out in them. */
+const isShort = ({ lineKind, working }: Line): boolean =>
+  ['given', 'statement', 'lookup'].includes(lineKind) && working.length <= 1;
+
+function ShortLine({ block }: { block: Line }) {
+  const [symbol] = block.working;
+  return (
+    <div className="line-short">
+      <p className="line-title">
+        {block.title}
+        {symbol && (
+          <>
+            {' '}
+            <Formula tex={symbol} className="text-ink" />
+          </>
+        )}
+      </p>
+      <LineWords block={block} />
+    </div>
+  );
+}
+
+function LongLine({ block }: { block: Line }) {
+  return (
+    <>
       <p className="line-title">{block.title}</p>
       {block.working.length > 0 && (
         <div className="line-working">
@@ -57,11 +88,10 @@ const LineRow = memo(function LineRow(props: LineRowProps) {
           ))}
         </div>
       )}
-      <LineResult block={block} />
       <LineWords block={block} />
-    </div>
+    </>
   );
-}, same);
+}
 
 function LineReference({ block }: { block: Line }) {
   const { clause, equation } = block.reference;
@@ -70,7 +100,7 @@ function LineReference({ block }: { block: Line }) {
       <span className="line-number">{block.number}</span>
       {(clause || equation) && (
         <span className="line-clause">
-          {clause} {equation && <span className="text-zinc-7">{equation}</span>}
+          <span>{clause}</span> {equation && <span className="text-zinc-7">{equation}</span>}
         </span>
       )}
     </div>
@@ -83,16 +113,16 @@ function LineResult({ block }: { block: Line }) {
   const bad = verdict !== null && verdict !== 'OK';
   return (
     <div className="line-result">
+      {also && (
+        <span className="line-also">
+          {also.value} {also.unit} ={' '}
+        </span>
+      )}
       <span className={classNames('line-value', bad && 'text-oxide')}>
         {verdict && <span className="line-verdict">{verdict} </span>}
         {result?.value}
       </span>
       {result?.unit && <span className="line-unit"> {result.unit}</span>}
-      {also && (
-        <span className="line-also">
-          = {also.value} {also.unit}
-        </span>
-      )}
     </div>
   );
 }

@@ -4,7 +4,7 @@ import { classNames } from './class-names.ts';
 export const fieldClass = (invalid: boolean, extra?: string) =>
   classNames(
     'h-8 w-full min-w-0 rounded-field border bg-paper px-2 text-ink',
-    'read-only:bg-transparent disabled:bg-transparent disabled:text-zinc-7',
+    '[&[readonly]]:bg-transparent disabled:bg-transparent disabled:text-zinc-7',
     invalid ? 'border-oxide' : 'border-zinc-3 hover:border-zinc-5',
     extra,
   );

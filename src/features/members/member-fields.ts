@@ -9,11 +9,17 @@ export interface FieldWords {
   /** What a screen reader says in place of the symbol. */
   readonly spoken: string;
   readonly about: string;
+  /** Whether the symbol stands beside the label in the margin. */
+  readonly shown: boolean;
 }
 
-const words = (label: string, tex: string, spoken: string, about: string): FieldWords => ({
-  ...{ label, tex, spoken, about },
-});
+const words = (
+  label: string,
+  tex: string,
+  spoken: string,
+  about: string,
+  shown = true,
+): FieldWords => ({ label, tex, spoken, about, shown });
 
 export const lengthWords: Readonly<Record<LengthName, FieldWords>> = {
   length: words('Length', 'L', 'L', 'Between the held ends.'),
@@ -28,25 +34,27 @@ export const lengthWords: Readonly<Record<LengthName, FieldWords>> = {
   ),
 };
 
-export const CbWords = words('Moment factor', 'C_b', 'C b', 'A number, auto, or empty for 1.0.');
+export const CbWords = words('Factor', 'C_b', 'C b', 'A number, auto, or empty for 1.0.');
 
 export const actionWords: Readonly<Record<ActionName, FieldWords>> = {
   P: words('Axial', 'P', 'P', 'Compression is positive.'),
-  MxA: words('Major, end A', 'M_{xA}', 'M x A', 'Moment about x at end A.'),
-  MxB: words('Major, end B', 'M_{xB}', 'M x B', 'Moment about x at end B.'),
-  MyA: words('Minor, end A', 'M_{yA}', 'M y A', 'Moment about y at end A.'),
-  MyB: words('Minor, end B', 'M_{yB}', 'M y B', 'Moment about y at end B.'),
+  MxA: words('Major, end A', 'M_{xA}', 'M x A', 'Moment about x at end A.', false),
+  MxB: words('Major, end B', 'M_{xB}', 'M x B', 'Moment about x at end B.', false),
+  MyA: words('Minor, end A', 'M_{yA}', 'M y A', 'Moment about y at end A.', false),
+  MyB: words('Minor, end B', 'M_{yB}', 'M y B', 'Moment about y at end B.', false),
   MxMax: words(
     'Major, largest',
     'M_{x,max}',
     'M x max',
     'Largest moment about x from the analysis, anywhere along the member.',
+    false,
   ),
   MyMax: words(
     'Minor, largest',
     'M_{y,max}',
     'M y max',
     'Largest moment about y from the analysis, anywhere along the member.',
+    false,
   ),
 };
 

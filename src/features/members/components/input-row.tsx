@@ -14,6 +14,7 @@ export function InputRow(props: {
   path: string;
   label: ReactNode;
   problem: string | undefined;
+  /** The ring; left out, the control takes its room too. */
   source?: ReactNode;
   children: (control: RowControl) => ReactNode;
 }) {
@@ -24,12 +25,14 @@ export function InputRow(props: {
     control['aria-invalid'] = true;
   }
   return (
-    <div className="input-row">
+    <div className={props.source === undefined ? 'input-row is-wide' : 'input-row'}>
       <label htmlFor={id}>{props.label}</label>
       <div className="min-w-0">{props.children(control)}</div>
-      <div className="flex h-8 items-center justify-end">{props.source}</div>
+      {props.source !== undefined && (
+        <div className="flex h-8 items-center justify-end">{props.source}</div>
+      )}
       {props.problem && (
-        <div className="col-span-3 pb-1">
+        <div className="col-span-full pb-1">
           <ProblemText id={`${id}-problem`}>{readable(props.problem)}</ProblemText>
         </div>
       )}
@@ -47,8 +50,14 @@ const readable = (problem: string): string => {
 export function SymbolLabel({ words }: { words: FieldWords }) {
   return (
     <>
-      {words.label} <Formula tex={words.tex} />
-      <span className="sr-only">{words.spoken}</span>
+      {words.label}
+      {words.shown && (
+        <>
+          {' '}
+          <Formula tex={words.tex} />
+        </>
+      )}
+      <span className="sr-only"> {words.spoken}</span>
     </>
   );
 }

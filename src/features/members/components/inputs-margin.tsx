@@ -25,7 +25,7 @@ export function InputsMargin(props: {
   const row = draft.combinations.find(({ id }) => id === combination) ?? draft.combinations[0];
   const open = record?.unconfirmed ?? 0;
   return (
-    <aside aria-label="Inputs" data-screen-only className="member-margin px-5 py-5">
+    <aside aria-label="Inputs" data-screen-only className="member-margin px-4 py-5">
       {props.restoredFrom && (
         <div className="mb-4">
           <Note tone="asks">

@@ -16,6 +16,7 @@ import { InputsMargin } from './inputs-margin.tsx';
 import { MemberFormContext } from './member-form-context.ts';
 import { MemberStrip } from './member-strip.tsx';
 import { SheetCautions } from './sheet-cautions.tsx';
+import { SheetContents } from './sheet-contents.tsx';
 import { SheetPaper } from './sheet-paper.tsx';
 import { goToControl, StaleNotice } from './stale-notice.tsx';
 import { TraceMargin } from './trace-margin.tsx';
@@ -165,6 +166,15 @@ export function MemberEditor(props: {
             onClose={place.closeLine}
             onCopyLine={() => place.line && copyLine(place.line)}
             onCopyLink={copyLink}
+            contents={
+              <SheetContents
+                blocks={sheet.blocks}
+                onGo={(address) => {
+                  setView('sheet');
+                  requestAnimationFrame(() => focusLine(sheetElement.current, address, 'center'));
+                }}
+              />
+            }
           />
         </div>
       </div>

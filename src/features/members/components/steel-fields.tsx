@@ -33,9 +33,9 @@ export function SteelFields() {
             {!steel && !listed && (
               <option value={draft.material}>{draft.material || 'choose'}</option>
             )}
-            {STEELS.map(({ key, title }) => (
+            {STEELS.map(({ key }) => (
               <option key={key} value={key}>
-                {title}
+                {key}
               </option>
             ))}
             <option value={own}>a steel of your own</option>
@@ -67,15 +67,17 @@ function OwnSteel({ steel }: { steel: DraftSteel }) {
         path={path}
         label={label}
         problem={problem}
-        source={
-          name === 'Fy' && (
-            <SourceControl
-              what="the yield stress"
-              stated={steel}
-              onChange={(stated) => change(stated, 'source')}
-            />
-          )
-        }
+        {...(name === 'Fy'
+          ? {
+              source: (
+                <SourceControl
+                  what="the yield stress"
+                  stated={steel}
+                  onChange={(stated) => change(stated, 'source')}
+                />
+              ),
+            }
+          : {})}
       >
         {(control) => (
           <input

@@ -1,4 +1,4 @@
-import type { RefObject } from 'react';
+import type { ReactNode, RefObject } from 'react';
 import { Button } from '#client/ui/button.tsx';
 import { Keycap } from '#client/ui/keycap.tsx';
 import type { Trace, TraceStep } from '#shared/report/present-trace.ts';
@@ -13,6 +13,8 @@ export function TraceMargin(props: {
   onClose: () => void;
   onCopyLine: () => void;
   onCopyLink: () => void;
+  /** What stands there while no line is chosen. */
+  contents: ReactNode;
   container: RefObject<HTMLElement | null>;
 }) {
   const { trace, lost, onFollow } = props;
@@ -57,7 +59,12 @@ export function TraceMargin(props: {
             </Button>
           </>
         )}
-        {!trace && !lost && <Invitation />}
+        {!trace && !lost && (
+          <>
+            <Invitation />
+            {props.contents}
+          </>
+        )}
       </div>
       <TraceKeys />
     </aside>
@@ -100,9 +107,9 @@ function UsedBy(props: { steps: readonly TraceStep[]; onFollow: (address: string
 const Invitation = () => (
   <>
     <h2 className="caps">Trace</h2>
-    <p className="mt-2 font-serif text-head text-zinc-7">
-      Choose any number on the sheet. The values it came from light up in place, and here stands the
-      way home: line by line down to what was given, with its source.
+    <p className="mt-2 font-serif text-zinc-7">
+      Choose any number on the sheet: the values it came from light up in place, and here stands the
+      way home, line by line, down to what was given and by whom.
     </p>
   </>
 );
