@@ -1,4 +1,3 @@
-import { readFileSync } from 'node:fs';
 import { evaluate } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import { createRecorder, type GivenValue } from '#shared/calc/recorder.ts';
@@ -8,10 +7,8 @@ import { nominalStress } from '#shared/standards/aisc360-22/e3.ts';
 import { formulaNamed } from '#shared/standards/library.ts';
 import { inUnit, UNIT_SIZES } from './in-unit.ts';
 import { printedStep, roundsTo } from './printed-digits.ts';
+import { readPublished } from './published-cases.ts';
 import { firstMember, recordOf, valueAt } from './run-input.ts';
-
-const read = (file: string): unknown =>
-  JSON.parse(readFileSync(new URL(`./aisc360-22/${file}`, import.meta.url), 'utf8'));
 
 interface Row {
   readonly example: string;
@@ -29,7 +26,7 @@ interface Limit {
   readonly slenderness: { readonly printed: string };
   readonly Fe: { readonly printed: string };
 }
-const data = read('formulas.json') as {
+const data = readPublished('formulas.json') as {
   formulas: readonly Row[];
   tableE1: { readonly rows: readonly Limit[] };
 };
@@ -94,7 +91,7 @@ describe('Design Examples v16.0, Table E-1: where elastic buckling begins', () =
 });
 
 describe('Design Examples v16.0, section F3 introduction: noncompact flanges at 50 ksi', () => {
-  const list = read('noncompact-flanges.json') as {
+  const list = readPublished('noncompact-flanges.json') as {
     shapes: { section: string; printedPercent: number | null; fromInputs: number }[];
   };
   const member = (section: string) =>

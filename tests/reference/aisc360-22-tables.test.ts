@@ -1,11 +1,8 @@
-import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { inUnit } from './in-unit.ts';
 import { roundsTo } from './printed-digits.ts';
+import { readPublished } from './published-cases.ts';
 import { firstMember, recordOf, valueAt } from './run-input.ts';
-
-const read = (file: string): unknown =>
-  JSON.parse(readFileSync(new URL(`./aisc360-22/${file}`, import.meta.url), 'utf8'));
 
 describe('Design Examples v16.0, W rows of the quoted tables of the Manual', () => {
   interface Strength {
@@ -24,7 +21,7 @@ describe('Design Examples v16.0, W rows of the quoted tables of the Manual', () 
     readonly Lp: { readonly printed: string; readonly fromInputs: number };
     readonly Lr: { readonly printed: string; readonly fromInputs: number };
   }
-  const tables = read('tables-w.json') as { strengths: Strength[]; limits: Limits[] };
+  const tables = readPublished('tables-w.json') as { strengths: Strength[]; limits: Limits[] };
   const run = (design: 'LRFD' | 'ASD', section: string, axis: 'x' | 'y', Lb?: string) =>
     firstMember(
       recordOf({
