@@ -5,15 +5,12 @@ import { unpackWoff } from './unpack-woff.ts';
 /** The text faces; each name is also that of the file in `fonts`. */
 export const textFaces = [
   'ibm-plex-sans-regular',
-  'ibm-plex-sans-italic',
   'ibm-plex-sans-medium',
   'ibm-plex-sans-semibold',
   'ibm-plex-sans-condensed-regular',
-  'ibm-plex-sans-condensed-medium',
   'ibm-plex-sans-condensed-semibold',
   'ibm-plex-serif-regular',
   'ibm-plex-serif-semibold',
-  'ibm-plex-serif-italic',
   'ibm-plex-mono-regular',
 ] as const;
 

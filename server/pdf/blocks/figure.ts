@@ -9,10 +9,12 @@ import { plain, setWords, textAt } from './words.ts';
 
 /** A scene's unit is 1/96 in. */
 const unit = 72 / 96;
+/** Of a figure that shares a page with its caption, points. */
+const tallest = 560;
 
 export function measureFigure(block: BlockOf<'figure'>, context: BlockContext): Row[] {
   const { scene } = block;
-  const scale = Math.min(unit, context.width / scene.width);
+  const scale = Math.min(unit, context.width / scene.width, tallest / scene.height);
   const tag: Tag = { type: 'Figure', parent: context.sect, alt: scene.description };
   const left = (context.width - scene.width * scale) / 2;
   const height = scene.height * scale;

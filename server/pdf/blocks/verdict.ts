@@ -41,7 +41,12 @@ export function measureVerdict(block: BlockOf<'verdict'>, context: BlockContext)
   const governs =
     block.ratioText === null
       ? setWords(plain(block.governs), textStyles.sentence, beside, context)
-      : setWords(plain(`governs ${block.governs}`), textStyles.small, column, context);
+      : setWords(
+          plain(block.governs === '' ? '' : `governs ${block.governs}`),
+          textStyles.small,
+          column,
+          context,
+        );
   const under = { ...column, y: column.y + governs.height };
   const combination = setWords(
     plain(block.ratioText === null ? '' : block.combination),
