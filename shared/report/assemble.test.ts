@@ -7,6 +7,7 @@ import { parseInput } from '../members/resolve.ts';
 import { runCalculation } from '../members/run.ts';
 import { assembleReport } from './assemble.ts';
 import { CAUTIONS, PRELIMINARY } from './cautions.ts';
+import { memberTable } from './completeness-block.ts';
 import { editionNotice } from './cover-block.ts';
 import { type DocumentData, unsignedDocument } from './document-data.ts';
 import { memberSheet } from './member-sheet.ts';
@@ -142,6 +143,27 @@ describe('report', () => {
       for (const row of member.completeness) expect(told).toContain(row.title);
     }
     expect(words(of(tree.blocks, 'table').at(-1) as Block)).toContain('temporary works');
+  });
+
+  it('keeps combinations with different reasons apart', () => {
+    const [first] = record.members;
+    const [row] = first?.completeness ?? [];
+    const [one] = row?.cells ?? [];
+    if (!first || !row || !one) throw new Error('no completeness');
+    const cells = ['same', 'same', 'other'].map((because, i) => ({
+      ...one,
+      combination: `c${i + 1}`,
+      because,
+    }));
+    const table = memberTable({ ...first, completeness: [{ ...row, cells }] });
+    const told = (table as BlockOf<'table'>).rows.map((r) => [
+      r[3]?.content[0]?.text,
+      r[5]?.content[0]?.text,
+    ]);
+    expect(told).toEqual([
+      ['1.2D + 1.6L; 1.2D + L + W', 'same'],
+      ['no axial force', 'other'],
+    ]);
   });
 
   it('carries the cautions', () => {

@@ -54,6 +54,15 @@ const formulas = {
     prints: 'display',
     ratio: true,
   }),
+  less: defineFormula(book, {
+    id: 'less',
+    clause: 'App. 8.1.2',
+    title: 'Factor',
+    symbol: 'Cm',
+    dimension: 'none',
+    expression: '0.6-M1M2',
+    operands: { M1M2: 'none' },
+  }),
   cube: defineFormula(book, {
     id: 'cube',
     clause: 'E4',
@@ -98,6 +107,18 @@ function sample(): MemberRecord {
     ],
     'the member is slender',
     { title: 'How slender', clause: clause('E2'), because: 'It is only a sample.' },
+  );
+  const ratio = m.given('given/ratio', 'M1M2', 'none', typed(-0.5, '-0.5'), { title: 'Ratio' });
+  m.formula(formulas.less, 'App8/Cm', { M1M2: ratio });
+  m.choice(
+    'App8/branch',
+    [
+      { left: s, relation: '<=', right: 20, outcome: 'never' },
+      { left: ratio, relation: '>=', right: 0, outcome: 'never' },
+      { left: ratio, relation: '<', right: -0.5, outcome: 'never' },
+    ],
+    'nothing of the kind',
+    { title: 'All fail' },
   );
   const c = createRecorder(':');
   const Pr = c.given('given/P', 'Pr', 'force', typed(310 * KIP, '310 kip'), {
@@ -220,6 +241,18 @@ describe('a line as a block', () => {
     expect(words(present('E2/branch'))).toBe(
       'The member is stocky, because Lcx/rx = 49.44 does not exceed 200 and Lcx/rx = 49.44 does not exceed 100. It is only a sample.',
     );
+  });
+
+  it('says of conditions that fail how the sides really stand', () => {
+    expect(words(present('App8/branch'))).toBe(
+      'Nothing of the kind, because Lcx/rx = 49.44 exceeds 20, M1/M2 = −0.5 is less than 0 and M1/M2 = −0.5 equals −0.5.',
+    );
+  });
+
+  it('brackets a negative value after a sign', () => {
+    const block = present('App8/Cm');
+    expect(block.working[2]).toBe('={0.6}-({\\htmlData{ref=given/ratio}{-0.5}})');
+    expect(block.text).toBe('Cm = 0.6 − (M1/M2) = 0.6 − (−0.5) = 1.100');
   });
 
   it('says what governs, against what', () => {
