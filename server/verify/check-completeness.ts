@@ -1,0 +1,41 @@
+import { placedLines } from '#shared/calc/address.ts';
+import type { CoverageRow, MemberRecord } from '#shared/calc/record.ts';
+import { printNumber } from '#shared/units/format.ts';
+
+type Cell = CoverageRow['cells'][number];
+
+export interface CoverageProblem {
+  /** The line the cell cites, where it is there. */
+  readonly address: string | null;
+  readonly reason: string;
+}
+
+/** Every limit state has a cell under every combination, and what a cell cites is as it says. */
+export function* checkCompleteness(member: MemberRecord): Iterable<CoverageProblem> {
+  const names = new Map(member.combinations.map((c) => [c.id, c.name]));
+  for (const row of member.completeness) {
+    const covered = row.cells.map((cell) => cell.combination).join(' ');
+    if (covered !== [...names.keys()].join(' '))
+      yield { address: null, reason: `${row.title}: does not cover each combination once` };
+    for (const cell of row.cells)
+      for (const reason of cellReasons(cell, member))
+        yield { address: null, reason: `${row.title}, ${names.get(cell.combination)}: ${reason}` };
+  }
+}
+
+function cellReasons(cell: Cell, member: MemberRecord): string[] {
+  const { address, ratio, ratioText, state } = cell;
+  const placed = placedLines(member).find((p) => p.address === address);
+  if (address !== null && !placed) return [`cites ${address}, which is not there`];
+  if (placed?.line.kind !== 'check')
+    return ratio === null && ratioText === null ? [] : ['has a ratio without a check'];
+  const { line } = placed;
+  const printed = printNumber(line.ratio, line.print.working ?? { dec: 3 }).text;
+  const summary = member.combinations.find((c) => c.id === cell.combination)?.summary;
+  const governs = summary?.governing?.address === address;
+  return [
+    ...(ratio === line.ratio ? [] : [`says the ratio ${ratio}, its check has ${line.ratio}`]),
+    ...(ratioText === printed ? [] : [`prints ${ratioText}, its check prints ${printed}`]),
+    ...((state === 'governs') === governs ? [] : [`says "${state}" against the summary`]),
+  ];
+}

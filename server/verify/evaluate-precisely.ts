@@ -1,0 +1,135 @@
+import {
+  absDependencies,
+  acosDependencies,
+  addDependencies,
+  atan2Dependencies,
+  type BigNumber,
+  bignumberDependencies,
+  cosDependencies,
+  create,
+  divideDependencies,
+  type FactoryFunctionMap,
+  type MathNode,
+  multiplyDependencies,
+  parseDependencies,
+  powDependencies,
+  sinDependencies,
+  sqrtDependencies,
+  subtractDependencies,
+  tanDependencies,
+  unaryMinusDependencies,
+} from 'mathjs';
+
+/*
+ * The second evaluator: the same text as the books', evaluated in decimal numbers of 34 digits by
+ * the full mathjs, apart from the number-only instance that made the record. It has no constants;
+ * pi is bound by name.
+ */
+const math = create(
+  {
+    parseDependencies,
+    bignumberDependencies,
+    addDependencies,
+    subtractDependencies,
+    multiplyDependencies,
+    divideDependencies,
+    powDependencies,
+    unaryMinusDependencies,
+    sqrtDependencies,
+    sinDependencies,
+    cosDependencies,
+    tanDependencies,
+    acosDependencies,
+    atan2Dependencies,
+    absDependencies,
+  } as unknown as FactoryFunctionMap,
+  { number: 'BigNumber', precision: 34, predictable: true },
+);
+
+const PI = math.bignumber('3.141592653589793238462643383279502884');
+
+/** Agreement asked of a formula line: relative, and of the largest term where terms cancel. */
+const RELATIVE = 1e-9;
+const OF_LARGEST_TERM = 1e-12;
+/** A sum this much smaller than its largest term has cancelled. */
+const CANCELLED = 1e-3;
+
+type Scope = Map<string, BigNumber>;
+type Sum = MathNode & { readonly fn: string; readonly args: readonly [MathNode, MathNode] };
+
+const parsed = new Map<string, MathNode>();
+
+function parse(expression: string): MathNode {
+  const known = parsed.get(expression);
+  if (known) return known;
+  const node = math.parse(expression);
+  parsed.set(expression, node);
+  return node;
+}
+
+const scopeOf = (operands: Readonly<Record<string, number>>): Scope =>
+  new Map([
+    ...Object.entries(operands).map(([name, value]) => [name, math.bignumber(value)] as const),
+    ['pi', PI] as const,
+  ]);
+
+const evaluate = (node: MathNode, scope: Scope): BigNumber =>
+  math.bignumber(node.evaluate(new Map(scope)));
+
+/**
+ * Value of an expression in 34 digits, as the nearest number; not finite where it has none. Throws
+ * on a syntax error and on a symbol without an operand.
+ */
+export const evaluatePrecisely = (
+  expression: string,
+  operands: Readonly<Record<string, number>>,
+): number => evaluate(parse(expression), scopeOf(operands)).toNumber();
+
+/** Whether a recorded value is what the expression gives with these operands. */
+export function reproduces(
+  expression: string,
+  operands: Readonly<Record<string, number>>,
+  value: number,
+): boolean {
+  const [node, scope] = [parse(expression), scopeOf(operands)];
+  const exact = evaluate(node, scope);
+  if (!exact.isFinite()) return false;
+  const off = exact.minus(math.bignumber(value)).abs();
+  return (
+    off.lessThanOrEqualTo(exact.abs().times(RELATIVE)) ||
+    off.lessThanOrEqualTo(cancellation(node, scope, exact))
+  );
+}
+
+/** How far the value may be off because terms in it cancel: each such sum moved by its share. */
+function cancellation(node: MathNode, scope: Scope, exact: BigNumber): BigNumber {
+  return sumsIn(node).reduce((total, sum) => {
+    const terms = sum.args.map((term) => evaluate(term, scope).abs());
+    const largest = terms.reduce((a, b) => (a.greaterThan(b) ? a : b));
+    const whole = evaluate(sum, scope).abs();
+    if (whole.greaterThan(largest.times(CANCELLED))) return total;
+    const share = largest.times(OF_LARGEST_TERM);
+    const moved = node.transform((part) =>
+      part === sum ? math.parse(`(${sum.toString()})+cancelledShare`) : part,
+    );
+    const there = evaluate(moved, new Map([...scope, ['cancelledShare', share]]));
+    return there.isFinite() ? total.plus(there.minus(exact).abs()) : total;
+  }, math.bignumber(0));
+}
+
+const sumsIn = (node: MathNode): Sum[] =>
+  node.filter((part): boolean => {
+    const { fn } = part as Partial<Sum>;
+    return part.type === 'OperatorNode' && (fn === 'add' || fn === 'subtract');
+  }) as Sum[];
+
+/** Names of the symbols in an expression, without functions and pi. */
+export function symbolsIn(expression: string): Set<string> {
+  const names = new Set<string>();
+  parse(expression).traverse((node, path) => {
+    if (node.type !== 'SymbolNode' || path === 'fn') return;
+    const { name } = node as unknown as { name: string };
+    if (name !== 'pi') names.add(name);
+  });
+  return names;
+}
