@@ -29,7 +29,8 @@ export interface DepsOptions {
 
 /** Opens the pool and makes the rest; `close` when done. */
 export function makeDeps(env: Env, options: DepsOptions = {}): Deps {
-  const log = pino({ level: env.logLevel });
+  // Standard output is for the one line that says where it serves.
+  const log = pino({ level: env.logLevel }, pino.destination(2));
   const pool = new pg.Pool({
     connectionString: env.databaseUrl,
     max: 20,

@@ -12,7 +12,8 @@ const environment = z.object({
   PUBLIC_ORIGIN: z.url().optional(),
   /** Express's `trust proxy`: addresses whose X-Forwarded headers are believed. */
   TRUSTED_PROXIES: z.string().default('loopback'),
-  LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
+  /** Requests are logged at `info`: the default, except on this machine only. */
+  LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).optional(),
 });
 
 export interface Env {
@@ -31,11 +32,13 @@ export interface Env {
 
 const isLoopback = (host: string) => /^(127\.\d+\.\d+\.\d+|::1|localhost)$/.test(host);
 
-/** Parses the environment. Throws one error that lists every variable that is wrong. */
+/** Parses the environment; an empty variable is none. Throws one error that lists all that is wrong. */
 export function parseEnv(variables: NodeJS.ProcessEnv): Env {
-  const parsed = environment.safeParse(variables);
+  const given = Object.entries(variables).filter(([, value]) => value !== '');
+  const parsed = environment.safeParse(Object.fromEntries(given));
   if (!parsed.success) throw new Error(`Environment:\n${z.prettifyError(parsed.error)}`);
   const env = parsed.data;
+  const loopback = isLoopback(env.HOST);
   return {
     host: env.HOST,
     port: env.PORT,
@@ -45,7 +48,7 @@ export function parseEnv(variables: NodeJS.ProcessEnv): Env {
     sessionSecret: env.SESSION_SECRET,
     publicOrigin: env.PUBLIC_ORIGIN ? new URL(env.PUBLIC_ORIGIN).origin : null,
     trustedProxies: env.TRUSTED_PROXIES,
-    logLevel: env.LOG_LEVEL,
-    loopback: isLoopback(env.HOST),
+    logLevel: env.LOG_LEVEL ?? (loopback ? 'warn' : 'info'),
+    loopback,
   };
 }

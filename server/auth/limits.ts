@@ -13,7 +13,7 @@ const quarter = 15 * 60;
 
 export const rateLimitSettings = {
   signInOfAddress: { points: 300, duration: quarter },
-  /** Of one account from one address; forgotten when the right password comes. */
+  /** Both of one account; forgotten when the right password comes. */
   signInOfAccount: { points: 8, duration: quarter },
   signInOfAccountAnywhere: { points: 60, duration: quarter },
   passwordChange: { points: 8, duration: quarter },

@@ -20,8 +20,10 @@ if (!given.success) {
   process.exit(2);
 }
 const [firmName, email] = given.data;
-const { DATABASE_URL, PUBLIC_ORIGIN, HOST = '127.0.0.1', PORT = '4310' } = process.env;
-const origin = PUBLIC_ORIGIN ? new URL(PUBLIC_ORIGIN).origin : `http://${HOST}:${PORT}`;
+const { DATABASE_URL, PUBLIC_ORIGIN, HOST, PORT } = process.env;
+const origin = PUBLIC_ORIGIN
+  ? new URL(PUBLIC_ORIGIN).origin
+  : `http://${HOST || '127.0.0.1'}:${PORT || 4310}`;
 const pool = new pg.Pool({ connectionString: DATABASE_URL, max: 1 });
 try {
   const now = new Date();
@@ -40,9 +42,16 @@ try {
       `${origin}/welcome/${token}\n`,
   );
 } catch (error) {
-  if (uniqueViolation(error) !== 'users_email') throw error;
-  console.error(`${email} has an account already.`);
+  console.error(reasonOf(error));
   process.exitCode = 1;
 } finally {
   await pool.end();
+}
+
+function reasonOf(error: unknown): string {
+  if (uniqueViolation(error) === 'users_email') return `${email} has an account already.`;
+  const { code } = ((error as Error).cause ?? error) as { code?: unknown };
+  // PostgreSQL: undefined table.
+  if (code === '42P01') return 'The database is empty: start Stanchion once, which fills it.';
+  throw error;
 }

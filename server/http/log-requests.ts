@@ -1,3 +1,4 @@
+import type { ServerResponse } from 'node:http';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 
@@ -10,10 +11,14 @@ export function logRequests(log: Logger) {
     logger: log,
     autoLogging: { ignore: (req) => !req.url?.startsWith('/api/') },
     serializers: { req: () => undefined, res: () => undefined, err: () => undefined },
-    customProps: (_req, res) => ({
-      route: (res as { locals?: { route?: string } }).locals?.route ?? 'unknown',
-      status: res.statusCode,
-    }),
+    quietReqLogger: true,
+    customSuccessObject: (_req, res, logged) => ({ ...logged, ...told(res) }),
+    customErrorObject: (_req, res, _error, logged) => ({ ...logged, ...told(res) }),
     customLogLevel: (_req, res) => (res.statusCode >= 500 ? 'error' : 'info'),
   });
 }
+
+const told = (res: ServerResponse & { locals?: { route?: string } }) => ({
+  route: res.locals?.route ?? 'unknown',
+  status: res.statusCode,
+});

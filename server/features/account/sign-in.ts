@@ -24,6 +24,7 @@ export const signIn: Handler<typeof account.signIn> = async (context) => {
     throw new AppError('wrong-credentials');
   }
   await deps.limits.reset('signInOfAccount', `${email} ${address}`);
+  await deps.limits.reset('signInOfAccountAnywhere', email);
   await auth.begin(req, viewer);
   await transaction(deps.pool, (tx) =>
     writeAudit(tx, accountScope(deps, viewer), { action: 'account.signed-in' }),

@@ -78,7 +78,7 @@ const membersOf = (db: Db, calculationIds: string[]): Promise<StoredMemberBy[]> 
     .where(inArray(members.calculationId, calculationIds))
     .orderBy(asc(members.position), asc(members.id));
 
-export async function calculationRows(db: Db, viewer: Viewer, where: Where = {}) {
+export async function calculationRows(db: Db, viewer: Viewer, where: Where) {
   return (await visibleCalculations(db, viewer, where)).map(rowOf);
 }
 

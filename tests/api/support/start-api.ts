@@ -15,10 +15,11 @@ export interface Api {
 
 interface Options extends DepsOptions {
   readonly env?: Partial<Env>;
+  readonly clientFolder?: string;
 }
 
 /** The API on a database of its own and a free port of this machine. */
-export async function startApi({ env, ...options }: Options = {}): Promise<Api> {
+export async function startApi({ env, clientFolder, ...options }: Options = {}): Promise<Api> {
   const database = await cloneDatabase();
   const deps = makeDeps(
     {
@@ -30,7 +31,7 @@ export async function startApi({ env, ...options }: Options = {}): Promise<Api> 
     },
     options,
   );
-  const server = createServer(createApp(deps));
+  const server = createServer(createApp(deps, clientFolder));
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   return {
     ...{ deps, server, ownerUrl: database.ownerUrl },

@@ -1,0 +1,112 @@
+import { afterAll, beforeAll, beforeEach, expect, it } from 'vitest';
+import { hashesOf } from '#shared/calc/hashes.ts';
+import { inputSchema } from '#shared/members/input.ts';
+import { basisDraft, memberDraft } from './support/drafts.ts';
+import { makeWorld, type World } from './support/world.ts';
+
+let world: World;
+let calculationId: string;
+let count = 0;
+beforeAll(async () => {
+  world = await makeWorld();
+});
+afterAll(() => world.api.stop());
+
+const call: World['of']['engineer']['client']['call'] = (route, options) =>
+  world.of.engineer.client.call(route, options);
+
+/** A calculation of its own for each test, with members A, B and C. */
+beforeEach(async () => {
+  count += 1;
+  const body = { number: `M-${count}`, title: 'Members', basis: basisDraft };
+  const made = await call('createCalculation', { params: { projectId: world.projectId }, body });
+  calculationId = made.body.id;
+  for (const mark of ['A', 'B', 'C']) await add(mark);
+});
+
+const add = async (mark: string, changes = {}) => {
+  const body = { draft: { ...memberDraft, mark, ...changes } };
+  return (await call('createMember', { params: { calculationId }, body })).body;
+};
+const show = async () => (await call('showCalculation', { params: { calculationId } })).body;
+const marks = async () => (await show()).memberRows.map(({ mark }: { mark: string }) => mark);
+const idOf = async (mark: string): Promise<string> =>
+  (await show()).memberRows.find((row: { mark: string }) => row.mark === mark).id;
+
+it('puts a copy right after its member, under a free mark', async () => {
+  const params = { calculationId, memberId: await idOf('A') };
+  await call('duplicateMember', { params, body: {} });
+  await call('duplicateMember', { params, body: {} });
+  expect(await marks()).toEqual(['A', 'A copy 2', 'A copy', 'B', 'C']);
+  expect((await show()).problems).toEqual([]);
+});
+
+it('deletes a member and restores it to its place, with what it held', async () => {
+  const memberId = await idOf('B');
+  const params = { calculationId, memberId };
+  const before = await call('showMember', { params });
+  const deleted = await call('deleteMember', { params });
+  expect(await marks()).toEqual(['A', 'C']);
+  expect((await show()).deletedMembers).toEqual([deleted.body]);
+  expect((await call('showMember', { params })).status).toBe(404);
+  expect((await call('deleteMember', { params })).status).toBe(404);
+  const restored = await call('restoreMember', { params, body: {} });
+  expect(restored.body.draft).toEqual(before.body.draft);
+  expect(await marks()).toEqual(['A', 'B', 'C']);
+  expect((await call('restoreMember', { params, body: {} })).status).toBe(404);
+});
+
+it('runs every member again when the basis changes', async () => {
+  const before = await show();
+  const body = { number: before.number, title: before.title, version: before.version };
+  const basis = { ...basisDraft, analysis: { ...basisDraft.analysis, secondOrder: 'amplified' } };
+  const after = await call('updateCalculation', {
+    ...{ params: { calculationId }, body: { ...body, basis } },
+  });
+  const ratio = ({ memberRows }: { memberRows: { summary: { ratio: number } }[] }) =>
+    memberRows.map(({ summary }) => summary.ratio);
+  expect(after.body.memberRows).toHaveLength(3);
+  for (const [index, value] of ratio(after.body).entries()) {
+    expect(value).not.toBe(ratio(before)[index]);
+  }
+});
+
+it('says which members keep the whole from being recorded', async () => {
+  await add('B');
+  await add('D', { length: { text: '-3 ft', confirmed: true } });
+  const { problems } = await show();
+  expect(problems.map(({ path }: { path: string }) => path)).toContain('members[D].length');
+  const record = await call('showRecord', { params: { calculationId } });
+  expect(record.status).toBe(422);
+  expect(record.body.problems).toEqual(problems);
+  const report = await call('downloadReport', { params: { calculationId } });
+  expect(report.body.problems).toEqual(problems);
+  // The input can be had all the same.
+  const input = await call('downloadInput', { params: { calculationId } });
+  expect(input.body.members.map(({ mark }: { mark: string }) => mark)).toEqual([
+    ...['A', 'B', 'C', 'B', 'D'],
+  ]);
+});
+
+it('gives the input file of the command line, and its record with hashes', async () => {
+  const input = await call('downloadInput', { params: { calculationId } });
+  expect(input.headers['content-disposition']).toBe(`attachment; filename=M-${count}.input.json`);
+  expect(inputSchema.safeParse(input.body).error).toBeUndefined();
+  expect(input.body.members[0]).toMatchObject({
+    ...{ mark: 'A', section: { value: 'W12X79' }, Lb: { value: '22 ft', confirmed: true } },
+    combinations: [{ P: { value: '310 kip' }, MxA: { value: '118 kip ft' } }],
+  });
+  expect(input.body.members[0]).not.toHaveProperty('Cb');
+  const { body: record } = await call('showRecord', { params: { calculationId } });
+  const { resultHash, snapshotHash } = record;
+  expect(hashesOf(record)).toEqual({ resultHash, snapshotHash });
+});
+
+it('makes the report a PDF that is called by number and revision', async () => {
+  const report = await call('downloadReport', { params: { calculationId } });
+  expect(report.headers).toMatchObject({
+    'content-type': 'application/pdf',
+    'content-disposition': `attachment; filename="M-${count} rev A draft.pdf"`,
+  });
+  expect(report.body.subarray(0, 5).toString()).toBe('%PDF-');
+});
