@@ -137,6 +137,13 @@ describe('member', () => {
     sound(memberScene(member({ depth: null, width: null, axial: null })));
   });
 
+  it('draws the elevation of a member without moments', () => {
+    const scene = memberScene(member({ planes: [] }));
+    sound(scene);
+    expect(texts(scene).some((t) => t.startsWith('elevation'))).toBe(true);
+    expect(scene.description).not.toContain('moments');
+  });
+
   it('draws the plan only where the minor axis bends', () => {
     const minor = (moment: number) =>
       plane({ plane: 'minor', endA: named('MyA', moment, 'm'), endB: named('MyB', 0, '0') });

@@ -22,7 +22,7 @@ export function memberScene(drawing: MemberDrawing): Scene {
     }),
   ];
   let y = 20;
-  for (const plane of drawnPlanes(drawing)) {
+  for (const plane of views(drawing)) {
     const size = plane.plane === 'major' ? drawing.depth : drawing.width;
     const half = ((size ?? 0) * perMm) / 2;
     const axis = y + Math.max(half + 16, 30);
@@ -39,9 +39,24 @@ export function memberScene(drawing: MemberDrawing): Scene {
   };
 }
 
+const unbent = (symbol: string): NamedDrawn => ({ symbol, value: 0, text: '0' });
+
+const UNBENT: PlaneDrawing = {
+  plane: 'major',
+  endA: unbent('MxA'),
+  endB: unbent('MxB'),
+  kL: null,
+  largest: null,
+  required: null,
+};
+
 /** The elevation always, the plan only where the minor axis bends. */
-const drawnPlanes = (drawing: MemberDrawing): readonly PlaneDrawing[] =>
-  drawing.planes.filter((p) => p.plane === 'major' || p.endA.value !== 0 || p.endB.value !== 0);
+const views = (drawing: MemberDrawing): readonly PlaneDrawing[] => [
+  drawing.planes.find((p) => p.plane === 'major') ?? UNBENT,
+  ...drawing.planes.filter((p) => p.plane === 'minor' && isBent(p)),
+];
+
+const isBent = ({ endA, endB }: PlaneDrawing): boolean => endA.value !== 0 || endB.value !== 0;
 
 /** Lengths that print alike share a bar; all bars are measured off from end A. */
 function lengthBars(drawing: MemberDrawing, along: (mm: number) => number, top: number) {
@@ -91,7 +106,8 @@ function describe(drawing: MemberDrawing): string {
     axial === null || axial.value === 0
       ? 'no axial force'
       : `axial ${axial.value > 0 ? 'compression' : 'tension'} ${axial.symbol} ${axial.text}`;
-  const moments = drawnPlanes(drawing)
+  const moments = drawing.planes
+    .filter(isBent)
     .flatMap((p) => [p.endA, p.endB])
     .map((m) => `${m.symbol} ${m.text}`);
   const lengths = drawing.lengths.map((l) => `${l.symbol} ${l.text}`);
