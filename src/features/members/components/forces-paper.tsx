@@ -11,16 +11,20 @@ import { useMemberForm } from './member-form-context.ts';
 import { PasteDialog } from './paste-dialog.tsx';
 
 /** All combinations as a table, to be typed in or pasted from a spreadsheet. */
-export function ForcesPaper({
-  units,
-  onShow,
-}: {
+export function ForcesPaper(props: {
   units: 'us' | 'si';
+  /** Largest moments are asked for only where an analysis gives them. */
+  withLargest: boolean;
   onShow: (id: string) => void;
 }) {
+  const { units } = props;
   const { draft, edit, editable } = useMemberForm();
   const [pasting, setPasting] = useState<string | null>(null);
   const rows = draft.combinations;
+  const actions = actionNames.filter(
+    (action) =>
+      props.withLargest || !action.endsWith('Max') || rows.some((row) => row[action].text !== ''),
+  );
   const onPaste = (event: ClipboardEvent) => {
     const text = event.clipboardData.getData('text/plain');
     if (!editable || !/[\t\n]./.test(text)) return;
@@ -65,7 +69,7 @@ export function ForcesPaper({
           head={
             <>
               <HeadCell className="w-[20%]">Combination</HeadCell>
-              {actionNames.map((action) => (
+              {actions.map((action) => (
                 <HeadCell key={action} className="text-right">
                   <Formula tex={actionWords[action].tex} />
                   <span className="sr-only">{actionWords[action].spoken}</span>
@@ -79,7 +83,13 @@ export function ForcesPaper({
           }
         >
           {rows.map((row, index) => (
-            <ForcesRow key={row.id} row={row} index={index} onShow={onShow} />
+            <ForcesRow
+              key={row.id}
+              row={row}
+              index={index}
+              actions={actions}
+              onShow={props.onShow}
+            />
           ))}
         </Ledger>
       )}

@@ -1,7 +1,12 @@
 import { Button } from '#client/ui/button.tsx';
 import { classNames } from '#client/ui/class-names.ts';
 import { Row } from '#client/ui/ledger.tsx';
-import { actionNames, type DraftCombination, type DraftSource } from '#shared/contracts/members.ts';
+import {
+  type ActionName,
+  actionNames,
+  type DraftCombination,
+  type DraftSource,
+} from '#shared/contracts/members.ts';
 import { withAction, withCombination, withoutCombination, withText } from '../edit-draft.ts';
 import { actionWords } from '../member-fields.ts';
 import { useMemberForm } from './member-form-context.ts';
@@ -18,6 +23,8 @@ const cellClass = (problem: string | undefined, extra?: string) =>
 export function ForcesRow(props: {
   row: DraftCombination;
   index: number;
+  /** The columns that are shown. */
+  actions: readonly ActionName[];
   onShow: (id: string) => void;
 }) {
   const { row, index } = props;
@@ -53,7 +60,7 @@ export function ForcesRow(props: {
             className={cellClass(nameProblem, 'font-semibold')}
           />
         </td>
-        {actionNames.map((action) => {
+        {props.actions.map((action) => {
           const problem = problemAt(`${at}.${action}`);
           return (
             <td key={action} className="py-0.5 pr-1">
@@ -106,7 +113,7 @@ export function ForcesRow(props: {
       {problems.length > 0 && (
         <Row>
           <td
-            colSpan={10}
+            colSpan={props.actions.length + 3}
             id={`${row.id}-problems`}
             className="pb-1.5 text-small font-medium text-oxide"
           >

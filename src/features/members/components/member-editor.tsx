@@ -106,7 +106,11 @@ export function MemberEditor(props: {
   return (
     <MemberFormContext value={form}>
       {/* biome-ignore lint/a11y/noStaticElementInteractions: undo and redo anywhere on the page of a member */}
-      <div className="member-layout" data-print-plain onKeyDown={formKeys}>
+      <div
+        className={view === 'forces' ? 'member-layout is-forces' : 'member-layout'}
+        data-print-plain
+        onKeyDown={formKeys}
+      >
         <InputsMargin
           basis={basis}
           record={preview.record?.members[0] ?? null}
@@ -133,6 +137,7 @@ export function MemberEditor(props: {
           {view === 'forces' ? (
             <ForcesPaper
               units={basis.units}
+              withLargest={basis.analysis.secondOrder === 'from-analysis'}
               onShow={(id) => {
                 place.showCombination(id);
                 setView('sheet');

@@ -1,0 +1,72 @@
+import { sectionName } from '#client/document/section-name.ts';
+import { classNames } from '#client/ui/class-names.ts';
+import { SectionPreview } from './section-preview.tsx';
+
+/** The designations that hold what was typed, beside the outline of the one pointed at. */
+export function SectionChoice(props: {
+  list: string;
+  typed: string;
+  found: readonly string[];
+  active: number;
+  onPoint: (index: number) => void;
+  onChoose: (designation: string) => void;
+}) {
+  const { list, found, active } = props;
+  const shown = found[active];
+  return (
+    <>
+      <div
+        role="listbox"
+        id={list}
+        aria-label="Sections"
+        className="max-h-84 w-32 shrink-0 overflow-y-auto py-1"
+      >
+        {found.map((designation, index) => (
+          <SectionOption
+            key={designation}
+            id={`${list}-${index}`}
+            designation={designation}
+            active={index === active}
+            onPoint={() => props.onPoint(index)}
+            onChoose={() => props.onChoose(designation)}
+          />
+        ))}
+      </div>
+      <div className="min-w-0 flex-1 border-l border-zinc-2 p-3">
+        {shown ? (
+          <SectionPreview designation={shown} />
+        ) : (
+          <p className="text-zinc-7">
+            No W shape is called “{props.typed}”. Designations read like W12X79.
+          </p>
+        )}
+      </div>
+    </>
+  );
+}
+
+function SectionOption(props: {
+  id: string;
+  designation: string;
+  active: boolean;
+  onPoint: () => void;
+  onChoose: () => void;
+}) {
+  return (
+    // biome-ignore lint/a11y/useFocusableInteractive: the combobox keeps the focus and points here
+    // biome-ignore lint/a11y/useKeyWithClickEvents: the combobox has the keys
+    <div
+      role="option"
+      id={props.id}
+      aria-selected={props.active}
+      ref={(element) => {
+        if (props.active) element?.scrollIntoView({ block: 'nearest' });
+      }}
+      onPointerMove={props.onPoint}
+      onClick={props.onChoose}
+      className={classNames('figures px-3 py-0.5', props.active && 'bg-ink text-paper')}
+    >
+      {sectionName(props.designation)}
+    </div>
+  );
+}
