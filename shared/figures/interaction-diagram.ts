@@ -3,9 +3,9 @@ import type { InteractionPoint } from './drawing.ts';
 import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path } from './shapes.ts';
 
-const WIDTH = 640;
-const HEIGHT = 320;
-const PLOT = { left: 56, right: 366, top: 28, bottom: 276 };
+const WIDTH = 424;
+const HEIGHT = 276;
+const PLOT = { left: 40, right: 256, top: 28, bottom: 236 };
 const LISTED = 12;
 
 /** ANSI/AISC 360-22 H1-1a and H1-1b as a line of moment utilisation against Pr/Pc. */
@@ -93,14 +93,14 @@ function mark(point: InteractionPoint, index: number, x: number, y: number): Sha
 }
 
 function list(points: readonly InteractionPoint[]): Shape[] {
-  const left = PLOT.right + 34;
+  const left = PLOT.right + 14;
   const rest = points.length - LISTED;
   const rows = points.slice(0, LISTED).flatMap((point, index): Shape[] => {
     const y = PLOT.top + 8 + index * 18;
     const weight = index === 0 ? 600 : 400;
     return [
       label(String(index + 1), [left + 12, y], { anchor: 'end', weight }),
-      label(point.combination, [left + 22, y], { weight, within: WIDTH - left - 80 }),
+      label(point.combination, [left + 22, y], { weight, within: WIDTH - left - 64 }),
       label(point.ratioText, [WIDTH, y], { anchor: 'end', weight, ...overInk(point) }),
     ];
   });

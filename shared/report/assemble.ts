@@ -1,6 +1,6 @@
 import type { CalculationRecord } from '../calc/record.ts';
 import { basisBlock } from './basis-block.ts';
-import { cautionsBlock, NOT_YET_CHECKED, PRELIMINARY } from './cautions.ts';
+import { CAUTION_OF_EVERY_PAGE, cautionsBlock, NOT_YET_CHECKED, PRELIMINARY } from './cautions.ts';
 import { completenessBlocks } from './completeness-block.ts';
 import { coverBlock } from './cover-block.ts';
 import type { DocumentData } from './document-data.ts';
@@ -44,8 +44,8 @@ const FILL: Record<
   unconfirmed: (record) => [unconfirmedBlock(record)],
   completeness: (record) => completenessBlocks(record),
   members: (record) =>
-    record.members.flatMap((member): Block[] => [
-      { kind: 'pageBreak' },
+    record.members.flatMap((member, index): Block[] => [
+      ...(index === 0 ? [] : [{ kind: 'pageBreak' as const }]),
       ...wholeMemberSheet(record, member.id),
     ]),
   cautions: () => [cautionsBlock()],
@@ -65,7 +65,7 @@ export function pageFrame(record: CalculationRecord, document: DocumentData): Pa
     originator: people.originator,
     checker: people.checker ?? NOT_YET_CHECKED,
     marking: document.issued ? null : PRELIMINARY,
-    foot: `${record.program.name}, engine ${record.program.engine} · ${standardNames(record.standard).name}, ${record.design} · results ${hash}`,
+    foot: `${record.program.name}, engine ${record.program.engine} · ${standardNames(record.standard).name}, ${record.design} · results ${hash}. ${CAUTION_OF_EVERY_PAGE}`,
     paper: document.paper,
   };
 }

@@ -14,6 +14,10 @@ export const CAUTIONS: readonly string[] = [
   'A calculation that is not issued is preliminary and is marked so on every page.',
 ];
 
+/** The same in one line, for the foot of every page. */
+export const CAUTION_OF_EVERY_PAGE =
+  'Does not replace the locally adopted code. A licensed engineer takes responsibility for it. What is not covered stands under Cautions.';
+
 interface Outside {
   readonly what: string;
   /** Where the standards treat it, for a reader who has to see to it elsewhere. */

@@ -7,6 +7,7 @@ import { readMember } from '../figures/read-member.ts';
 import { readSection } from '../figures/read-section.ts';
 import type { Scene } from '../figures/scene.ts';
 import { sectionOutline } from '../figures/section-outline.ts';
+import { sideBySide } from '../figures/side-by-side.ts';
 import type { Block } from './tree.ts';
 
 /** The figures of a sheet for one combination: member, moments of both planes, interaction, section. */
@@ -30,10 +31,23 @@ export function memberFigures(
           `Moments about ${plane.plane === 'major' ? 'x' : 'y'}${under}, drawn on the compressed side.`,
         ] as const,
     ),
-    [interactionDiagram(readInteraction(member)), 'Interaction, every combination as a point.'],
-    [section && sectionOutline(section), 'Section to scale, without fillets.'],
+    crossSection(interactionDiagram(readInteraction(member)), section && sectionOutline(section)),
   ];
   return figures.flatMap(([scene, caption]): Block[] =>
     scene ? [{ kind: 'figure', scene, caption }] : [],
   );
+}
+
+const OUTLINE = 'Section to scale, without fillets.';
+
+/** The interaction diagram and the section's outline stand beside each other. */
+function crossSection(
+  interaction: Scene | null,
+  outline: Scene | null,
+): readonly [Scene | null, string] {
+  if (!interaction) return [outline, OUTLINE];
+  const caption = 'Interaction, every combination as a point.';
+  return outline
+    ? [sideBySide(interaction, outline), `${caption} ${OUTLINE}`]
+    : [interaction, caption];
 }
