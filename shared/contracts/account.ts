@@ -11,7 +11,7 @@ export const newPassword = z
   .min(passwordMinimum, `at least ${passwordMinimum} characters`)
   .max(200, 'at most 200 characters');
 
-const email = z.string().trim().toLowerCase().max(254).pipe(z.email());
+export const emailAddress = z.string().trim().toLowerCase().max(254).pipe(z.email());
 
 export const person = z.object({
   id,
@@ -92,5 +92,3 @@ export const account = {
     answer: sessionState,
   }),
 };
-
-export { email as emailAddress };

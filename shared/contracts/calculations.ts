@@ -55,14 +55,12 @@ export const calculationRow = z.object({
 });
 export type CalculationRow = z.infer<typeof calculationRow>;
 
-export const permissionsHere = z.object({ edit: z.boolean() });
-
 export const calculation = calculationRow.extend({
   version,
   basis: basisDraft,
   /** Whether the person may open the project too, or was let into this calculation only. */
   projectVisible: z.boolean(),
-  can: permissionsHere,
+  can: z.object({ edit: z.boolean() }),
   memberRows: z.array(memberRow),
   /** Why there is no record of the whole yet, by member (`members[C-07].mark`). */
   problems: z.array(problemPlace),

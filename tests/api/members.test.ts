@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, beforeEach, expect, it } from 'vitest';
+import { refreshSummaries } from '#server/features/members/refresh-summaries.ts';
 import { hashesOf } from '#shared/calc/hashes.ts';
 import { inputSchema } from '#shared/members/input.ts';
 import { basisDraft, memberDraft } from './support/drafts.ts';
@@ -69,6 +70,16 @@ it('runs every member again when the basis changes', async () => {
   for (const [index, value] of ratio(after.body).entries()) {
     expect(value).not.toBe(ratio(before)[index]);
   }
+});
+
+it('runs again at start what an older engine ran', async () => {
+  const { pool } = world.api.deps;
+  const { memberRows } = await show();
+  const stale =
+    "update members set summary = '{}', summary_engine = '0.0.0' where calculation_id = $1";
+  await pool.query(stale, [calculationId]);
+  await refreshSummaries(world.api.deps);
+  expect((await show()).memberRows).toEqual(memberRows);
 });
 
 it('says which members keep the whole from being recorded', async () => {
