@@ -60,7 +60,8 @@ function lineProblems(
     if (!valued(ref).print[form]) problems.push(`${ref} does not print the form used here`);
   if (problems.length > 0) return problems;
 
-  if ('print' in line)
+  // A given value may itself have that many.
+  if ('print' in line && line.kind !== 'given')
     for (const digits of [line.print.working, line.print.display])
       if (digits)
         want(

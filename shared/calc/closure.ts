@@ -45,9 +45,21 @@ export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] 
   for (const node of nodes)
     for (const { ref, form } of usesOf(node.line, (r) => nodeAt(r, node).line, set))
       nodeAt(ref, node).shown[form] ??= firstDigits(nodeAt(ref, node).line);
-  for (const node of nodes.toReversed()) closeNode(node, (ref) => nodeAt(ref, node), set);
+  // Digits that one line gives an operand may unsettle another line that had closed on its shorter
+  // form: passes repeat until none adds a digit. Digits only grow, so they end.
+  for (let before = -1; before !== digitsShown(nodes); ) {
+    before = digitsShown(nodes);
+    for (const node of nodes.toReversed()) closeNode(node, (ref) => nodeAt(ref, node), set);
+  }
   return nodes.map((n) => ('print' in n.line ? { ...n.line, print: n.shown as Print } : n.line));
 }
+
+const digitsShown = (nodes: readonly Node[]): number =>
+  nodes.reduce(
+    (sum, { shown: { working, display } }) =>
+      sum + (working ? count(working) : 0) + (display ? count(display) : 0),
+    0,
+  );
 
 const firstDigits = (line: Line): Digits =>
   line.kind === 'formula' && line.print.working !== null && 'dec' in line.print.working

@@ -44,9 +44,15 @@ export function numberTyped(line: ValuedLine, unit: Unit): string | null {
   // Feet and inches together are not one number.
   return Math.abs(Number(number) - fromBase(line.value, unit)) <=
     1e-12 * Math.abs(Number(number)) + 1e-300
-    ? number
+    ? withinDigits(number)
     : null;
 }
+
+/** Digits beyond the 15 that a value carries (a spreadsheet's float) do not print. */
+const withinDigits = (number: string): string =>
+  number.replace(/e.*/i, '').replace(/\D/g, '').replace(/^0+/, '').length > 15
+    ? String(Number(Number(number).toPrecision(15)))
+    : number;
 
 /** Prints one form at the given digits; typed and table values print as they stand. */
 export function printForm(line: ValuedLine, form: Form, digits: Digits, set: UnitSet): PrintedForm {

@@ -7,9 +7,16 @@ import {
 } from '#shared/standards/elastic-theory/second-order.ts';
 import type { DimensionName } from '#shared/units/dimension.ts';
 
-const given = (value: number): GivenValue => ({
+const BASE_UNIT: Partial<Record<DimensionName, string>> = {
+  force: 'N',
+  length: 'mm',
+  moment: 'N mm',
+  rigidity: 'N mm²',
+};
+
+const given = (value: number, dimension: DimensionName): GivenValue => ({
   value,
-  text: String(value),
+  text: `${value} ${BASE_UNIT[dimension] ?? ''}`.trim(),
   source: { kind: 'typed' },
   confirmed: false,
 });
@@ -29,7 +36,7 @@ export interface PlaneCase {
 export function solvePlane(c: PlaneCase) {
   const r = createRecorder('');
   const quantity = (name: string, dimension: DimensionName, value: number): Quantity =>
-    r.given(`given/${name}`, name, dimension, given(value), { title: name });
+    r.given(`given/${name}`, name, dimension, given(value, dimension), { title: name });
   const alpha = quantity('alpha', 'none', c.alpha ?? 1);
   const Pr = quantity('Pr', 'force', c.P);
   const EIstar = quantity('EIstar', 'rigidity', c.EI);
