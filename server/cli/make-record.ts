@@ -2,7 +2,7 @@ import { sealRecord } from '#shared/calc/hashes.ts';
 import type { CalculationRecord } from '#shared/calc/record.ts';
 import { parseInput } from '#shared/members/resolve.ts';
 import { runCalculation } from '#shared/members/run.ts';
-import { readJson } from './read-json.ts';
+import { readJson } from './read-file.ts';
 import { UsageError } from './usage-error.ts';
 
 /** Runs an INPUT.json and seals its record. Throws a UsageError that lists every path and reason. */

@@ -1,0 +1,119 @@
+import type { VerifyProblem } from '../problem.ts';
+import { type Compared, compareSegments, significant } from './compare-segments.ts';
+import type { ExpectedBlock, ExpectedSegment } from './expected-pages.ts';
+import type { Segment } from './page-text.ts';
+
+export interface PageProblem {
+  readonly block: ExpectedBlock;
+  readonly reason: string;
+}
+
+export interface ComparedPages<P> {
+  readonly problems: readonly P[];
+  /** Blocks whose words differ while their numbers agree. */
+  readonly reworded: number;
+}
+
+/** Compares the sheets of all members with the segments of the pages, block by block. */
+export function compareSheets(
+  blocks: readonly ExpectedBlock[],
+  found: readonly Segment[],
+): ComparedPages<PageProblem> {
+  const problems: PageProblem[] = [];
+  let reworded = 0;
+  let at = startOf(blocks, found);
+  let before: ExpectedBlock | null = null;
+  let beforeAt = at;
+  for (const block of blocks) {
+    const place = block.line ? placeOf(block, found, at, beforeAt + 1) : at;
+    if (place > at) {
+      const extra = found.slice(at, place).map((s) => s.visible);
+      problems.push({
+        block: before ?? block,
+        reason: `page ${found[at]?.page} shows "${extra.join(' ')}" beside what the record gives`,
+      });
+    }
+    const own = found.slice(place, place + block.segments.length);
+    const compared = block.name === 'a figure' ? figure(block, own, blocks) : lineOf(block, own);
+    problems.push(...compared.reasons.map((reason) => ({ block, reason })));
+    if (compared.reworded) reworded += 1;
+    before = block;
+    beforeAt = place;
+    at = place + block.segments.length;
+  }
+  return { problems, reworded };
+}
+
+/** Number, clause and result of a line agree in every character. */
+const lineOf = ({ line, segments }: ExpectedBlock, found: readonly Segment[]): Compared =>
+  compareSegments(
+    segments,
+    found,
+    (index) => line !== null && (index < 2 || index === segments.length - 1),
+  );
+
+/** A figure shows no number that the member's sheet doesn't. */
+function figure(
+  block: ExpectedBlock,
+  found: readonly Segment[],
+  blocks: readonly ExpectedBlock[],
+): Compared {
+  const numbers = (text: string): string[] =>
+    significant(text)
+      .split(' ')
+      .filter((t) => /\d/.test(t));
+  const said = ({ visible, alt }: ExpectedSegment): string => `${visible} ${alt ?? ''}`;
+  const known = new Set(
+    blocks
+      .filter((b) => b.member === block.member)
+      .flatMap((b) => b.segments.flatMap((s) => numbers(said(s)))),
+  );
+  const reasons = found.flatMap((segment) =>
+    numbers(said(segment))
+      .filter((number) => !known.has(number))
+      .map((number) => `page ${segment.page} shows ${number}, which the sheet does not have`),
+  );
+  return { reasons, reworded: false };
+}
+
+const isNumber = (block: ExpectedBlock, found: readonly Segment[], at: number): boolean =>
+  found[at]?.visible === block.line?.number;
+
+/** Whether a line stands at a place: its number and what follows it. */
+const standsAt = (block: ExpectedBlock, found: readonly Segment[], at: number): boolean =>
+  isNumber(block, found, at) &&
+  (block.segments[1] === undefined || found[at + 1]?.visible === block.segments[1].visible);
+
+/** Where the sheets begin: so many segments before the number of their first line. */
+function startOf(blocks: readonly ExpectedBlock[], found: readonly Segment[]): number {
+  const first = blocks.findIndex((b) => b.line !== null);
+  const lead = blocks.slice(0, Math.max(first, 0)).reduce((n, b) => n + b.segments.length, 0);
+  const block = blocks[first];
+  const at = block ? found.findIndex((_, i) => standsAt(block, found, i)) : -1;
+  const total = blocks.reduce((n, b) => n + b.segments.length, 0);
+  return Math.max(0, at < 0 ? found.length - total : at - lead);
+}
+
+/** Where a line stands: as expected, or else wherever its number is found after `least`. */
+function placeOf(
+  block: ExpectedBlock,
+  found: readonly Segment[],
+  expected: number,
+  least: number,
+): number {
+  if (isNumber(block, found, expected)) return expected;
+  for (let at = least; at < found.length; at += 1) if (standsAt(block, found, at)) return at;
+  return expected;
+}
+
+/** A page's problem as a problem of the verification. */
+export const pageProblem = (
+  { block, reason }: PageProblem,
+  markOf: (member: string) => string,
+): VerifyProblem => ({
+  member: { id: block.member, mark: markOf(block.member) },
+  address: block.line?.address ?? null,
+  kind: block.line?.kind ?? 'page',
+  by: 'page',
+  reason: block.line ? reason : `${block.name}: ${reason}`,
+});
