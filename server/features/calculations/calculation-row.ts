@@ -2,7 +2,7 @@ import { summaryOf } from '#server/features/members/stored-member.ts';
 import { worstVerdict } from '#shared/calc/verdict.ts';
 import type { CalculationRow } from '#shared/contracts/calculations.ts';
 import type { MemberSummary } from '#shared/contracts/members.ts';
-import type { VisibleCalculation } from './queries.ts';
+import type { VisibleCalculation } from './visible-calculations.ts';
 
 /** What lists show of a calculation: its members' worst verdict, largest ratio and open inputs. */
 export function rowOf(found: VisibleCalculation): CalculationRow {

@@ -4,7 +4,7 @@ import { firms, users } from '#server/db/schema/people.ts';
 import type { Db } from '#server/db/transaction.ts';
 import { draftOf } from '#server/features/members/stored-member.ts';
 import { notFound } from '#server/http/app-error.ts';
-import { visibleCalculations } from './queries.ts';
+import { visibleCalculations } from './visible-calculations.ts';
 
 /** A calculation that the person may see, with its present members, for a run of all of it. */
 export async function loadForRun(db: Db, viewer: Viewer, calculationId: string) {

@@ -1,5 +1,5 @@
 import { rowOf } from '#server/features/calculations/calculation-row.ts';
-import { visibleCalculations } from '#server/features/calculations/queries.ts';
+import { visibleCalculations } from '#server/features/calculations/visible-calculations.ts';
 import { mayCreateProject, projectRows } from '#server/features/projects/queries.ts';
 import type { HandlersOf } from '#server/http/handler.ts';
 import type { desk } from '#shared/contracts/desk.ts';

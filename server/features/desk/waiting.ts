@@ -1,4 +1,4 @@
-import type { VisibleCalculation } from '#server/features/calculations/queries.ts';
+import type { VisibleCalculation } from '#server/features/calculations/visible-calculations.ts';
 import { memberRowOf } from '#server/features/members/stored-member.ts';
 import { type WaitingItem, waitingReasons } from '#shared/contracts/desk.ts';
 import type { MemberRow } from '#shared/contracts/members.ts';
