@@ -4,7 +4,7 @@ import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
-  build: { outDir: 'dist/client', emptyOutDir: true, sourcemap: true },
+  build: { outDir: 'dist/client', emptyOutDir: true, assetsInlineLimit: 0, sourcemap: true },
   server: { proxy: { '/api': `http://127.0.0.1:${process.env.PORT ?? 4310}` } },
   test: {
     pool: 'forks',
