@@ -53,6 +53,16 @@ function holds({ left, relation, right }: Tried): boolean {
   return { '<': l < r, '<=': l <= r, '>': l > r, '>=': l >= r, '=': l === r }[relation];
 }
 
+/**
+ * A plain number within a few bits of one with at most 12 digits is that number: 600 kip over
+ * 1200 kip is 0.5 whatever the units it was computed in, so that limits met exactly are met.
+ */
+function withoutNoise(value: number, dimension: DimensionName): number {
+  if (dimension !== 'none' || !Number.isFinite(value)) return value;
+  const plain = Number(value.toPrecision(12));
+  return Math.abs(value - plain) <= 8 * Number.EPSILON * Math.abs(plain) ? plain : value;
+}
+
 export type Recorder = ReturnType<typeof createRecorder>;
 
 /** A recorder of one scope: '' for member lines, ':' for the lines of one combination. */
@@ -183,8 +193,11 @@ export function createRecorder(prefix: '' | ':') {
           throw new Error(
             `${formula.id}: ${name} is ${operands[name]?.dimension}, not ${dimension}`,
           );
-      const value = formula.expression.evaluate(
-        Object.fromEntries(Object.entries(operands).map(([name, q]) => [name, q.value])),
+      const value = withoutNoise(
+        formula.expression.evaluate(
+          Object.fromEntries(Object.entries(operands).map(([name, q]) => [name, q.value])),
+        ),
+        formula.dimension,
       );
       if (!Number.isFinite(value)) {
         notice(
@@ -276,7 +289,7 @@ export function createRecorder(prefix: '' | ':') {
 
     /** Demand against capacity, or a utilisation against 1. OK means the unrounded ratio is at most 1. */
     check(key: string, demand: Quantity, capacity: Quantity | 1, more: Titled): LineOf<'check'> {
-      const ratio = demand.value / (capacity === 1 ? 1 : capacity.value);
+      const ratio = withoutNoise(demand.value / (capacity === 1 ? 1 : capacity.value), 'none');
       if (!Number.isFinite(ratio)) {
         notice(
           `${key}/failed`,
