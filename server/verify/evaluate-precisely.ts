@@ -67,11 +67,15 @@ function parse(expression: string): MathNode {
   return node;
 }
 
-const scopeOf = (operands: Readonly<Record<string, number>>): Scope =>
-  new Map([
+/** Operands by name; throws where a symbol has none, which mathjs might read as a unit. */
+function scopeOf(expression: string, operands: Readonly<Record<string, number>>): Scope {
+  for (const name of symbolsIn(expression))
+    if (!Object.hasOwn(operands, name)) throw new Error(`${expression}: no operand ${name}`);
+  return new Map([
     ...Object.entries(operands).map(([name, value]) => [name, math.bignumber(value)] as const),
     ['pi', PI] as const,
   ]);
+}
 
 const evaluate = (node: MathNode, scope: Scope): BigNumber =>
   math.bignumber(node.evaluate(new Map(scope)));
@@ -83,7 +87,7 @@ const evaluate = (node: MathNode, scope: Scope): BigNumber =>
 export const evaluatePrecisely = (
   expression: string,
   operands: Readonly<Record<string, number>>,
-): number => evaluate(parse(expression), scopeOf(operands)).toNumber();
+): number => evaluate(parse(expression), scopeOf(expression, operands)).toNumber();
 
 /** Whether a recorded value is what the expression gives with these operands. */
 export function reproduces(
@@ -91,7 +95,7 @@ export function reproduces(
   operands: Readonly<Record<string, number>>,
   value: number,
 ): boolean {
-  const [node, scope] = [parse(expression), scopeOf(operands)];
+  const [node, scope] = [parse(expression), scopeOf(expression, operands)];
   const exact = evaluate(node, scope);
   if (!exact.isFinite()) return false;
   const off = exact.minus(math.bignumber(value)).abs();

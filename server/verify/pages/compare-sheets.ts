@@ -1,6 +1,7 @@
 import type { VerifyProblem } from '../problem.ts';
 import { type Compared, compareSegments, significant } from './compare-segments.ts';
 import type { ExpectedBlock, ExpectedSegment } from './expected-pages.ts';
+import { type FoundBlock, misplaced } from './misplaced.ts';
 import type { Segment } from './page-text.ts';
 
 export interface PageProblem {
@@ -8,8 +9,8 @@ export interface PageProblem {
   readonly reason: string;
 }
 
-export interface ComparedPages<P> {
-  readonly problems: readonly P[];
+interface ComparedSheets {
+  readonly problems: readonly PageProblem[];
   /** Blocks whose words differ while their numbers agree. */
   readonly reworded: number;
 }
@@ -18,8 +19,9 @@ export interface ComparedPages<P> {
 export function compareSheets(
   blocks: readonly ExpectedBlock[],
   found: readonly Segment[],
-): ComparedPages<PageProblem> {
+): ComparedSheets {
   const problems: PageProblem[] = [];
+  const placed: FoundBlock[] = [];
   let reworded = 0;
   let at = startOf(blocks, found);
   let before: ExpectedBlock | null = null;
@@ -34,6 +36,7 @@ export function compareSheets(
       });
     }
     const own = found.slice(place, place + block.segments.length);
+    placed.push({ block, found: own });
     const compared = block.name === 'a figure' ? figure(block, own, blocks) : lineOf(block, own);
     problems.push(...compared.reasons.map((reason) => ({ block, reason })));
     if (compared.reworded) reworded += 1;
@@ -41,15 +44,21 @@ export function compareSheets(
     beforeAt = place;
     at = place + block.segments.length;
   }
+  for (const { block, found: own } of misplaced(placed)) {
+    const reason = `page ${own[0]?.page} shows a part of it in another line's place`;
+    problems.push({ block, reason });
+  }
   return { problems, reworded };
 }
 
-/** Number, clause and result of a line agree in every character. */
-const lineOf = ({ line, segments }: ExpectedBlock, found: readonly Segment[]): Compared =>
+/** Number, clause and result of a line, and the record's own words, agree in every character. */
+const lineOf = ({ line, segments, fixed }: ExpectedBlock, found: readonly Segment[]): Compared =>
   compareSegments(
     segments,
     found,
-    (index) => line !== null && (index < 2 || index === segments.length - 1),
+    (index) =>
+      fixed.has(segments[index]?.visible ?? '') ||
+      (line !== null && (index < 2 || index === segments.length - 1)),
   );
 
 /** A figure shows no number that the member's sheet doesn't. */

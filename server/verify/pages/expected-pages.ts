@@ -3,15 +3,16 @@ import type { Item, Part, Row } from '#server/pdf/items.ts';
 import { measureDocument } from '#server/pdf/measure-document.ts';
 import { papers } from '#server/pdf/paper.ts';
 import { setText } from '#server/pdf/text-runs.ts';
+import { placedLines } from '#shared/calc/address.ts';
 import type { LineKind } from '#shared/calc/line.ts';
-import type { CalculationRecord } from '#shared/calc/record.ts';
+import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
 import { pageFrame } from '#shared/report/assemble.ts';
 import { unsignedDocument } from '#shared/report/document-data.ts';
 import { wholeMemberSheet } from '#shared/report/member-sheet.ts';
 import type { Block, DocumentTree, LineBlock } from '#shared/report/tree.ts';
 import { bare, type Segment } from './page-text.ts';
 
-export type ExpectedSegment = Omit<Segment, 'page'>;
+export type ExpectedSegment = Omit<Segment, 'page' | 'baselines'>;
 
 /** A block of a member's sheet with the segments that it must stand in. */
 export interface ExpectedBlock {
@@ -22,6 +23,8 @@ export interface ExpectedBlock {
     readonly kind: LineKind;
     readonly number: string;
   } | null;
+  /** Texts that the record itself has: they are no words of the program. */
+  readonly fixed: ReadonlySet<string>;
   /** What the block is called where it is not a line. */
   readonly name: string;
   readonly segments: readonly ExpectedSegment[];
@@ -42,11 +45,22 @@ export function expectedSheets(record: CalculationRecord, fonts: FontSet): Expec
       (block): ExpectedBlock => ({
         member: member.id,
         line: block.kind === 'line' ? lineOf(block) : null,
+        fixed: fixedTexts(member, block),
         name: NAMES[block.kind] ?? block.kind,
         segments: segmentsOf([block], record, fonts),
       }),
     ),
   );
+}
+
+function fixedTexts(member: MemberRecord, block: Block): ReadonlySet<string> {
+  if (block.kind === 'sheetHead') return new Set([block.mark].map(bare));
+  if (block.kind === 'lineSection') return new Set([block.title, block.reference].map(bare));
+  if (block.kind !== 'line') return new Set();
+  const line = placedLines(member).find((p) => p.address === block.address)?.line;
+  const words =
+    line?.kind === 'notice' ? line.text : line?.kind === 'statement' ? line.statement : '';
+  return new Set([block.title, words].map(bare));
 }
 
 const lineOf = ({ address, lineKind, number }: LineBlock) => ({

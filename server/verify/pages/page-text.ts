@@ -8,6 +8,8 @@ export interface Segment {
   readonly actual: readonly string[];
   /** Alternative text of its structure element. */
   readonly alt: string | null;
+  /** Lowest and highest baseline of its glyphs, points from the foot of the page; null without. */
+  readonly baselines: readonly [low: number, high: number] | null;
 }
 
 export interface PageText {

@@ -55,7 +55,7 @@ async function readPage(page: Page, number: number, actual: ActualTexts): Promis
   });
   const alts = altsOf(await page.getStructTree());
   const annotations = await page.getAnnotations();
-  const visible = new Map<string, string>();
+  const marked = new Map<string, { visible: string; baselines: number[] }>();
   const open: (string | null)[] = [];
   let [frame, loose] = ['', ''];
   for (const item of items) {
@@ -63,21 +63,25 @@ async function readPage(page: Page, number: number, actual: ActualTexts): Promis
       if (item.type === 'endMarkedContent') open.pop();
       else open.push(item.id ?? null);
       const id = open.at(-1);
-      if (id && !visible.has(id)) visible.set(id, '');
+      if (id && !marked.has(id)) marked.set(id, { visible: '', baselines: [] });
       continue;
     }
-    const id = open.findLast((held) => held !== null);
-    if (id) visible.set(id, `${visible.get(id)}${bare(item.str)}`);
-    else if (visible.size === 0) frame += bare(item.str);
-    else loose += bare(item.str);
+    const text = bare(item.str);
+    const part = marked.get(open.findLast((held) => held !== null) ?? '');
+    if (part && text !== '') {
+      part.visible += text;
+      part.baselines.push(Number(item.transform[5]));
+    } else if (marked.size === 0) frame += text;
+    else loose += text;
   }
   page.cleanup();
   return {
     number,
-    segments: [...visible].map(
-      ([id, text]): Segment => ({
+    segments: [...marked].map(
+      ([id, { visible, baselines }]): Segment => ({
         page: number,
-        visible: text,
+        visible,
+        baselines: baselines.length === 0 ? null : [Math.min(...baselines), Math.max(...baselines)],
         actual: actual.get(number)?.get(Number(/_mc(\d+)$/.exec(id)?.[1])) ?? [],
         alt: alts.get(id) ?? null,
       }),

@@ -1,0 +1,60 @@
+import { describe, expect, it } from 'vitest';
+import { evaluatePrecisely, reproduces, symbolsIn } from './evaluate-precisely.ts';
+
+// Digits of constants: OEIS A002193 (sqrt 2), A049469 (sin 1), A049470 (cos 1), A049471 (tan 1),
+// A019670 (pi/3), A002388 (pi squared), A003881 (pi/4).
+const constants: readonly (readonly [string, Readonly<Record<string, number>>, string])[] = [
+  ['sqrt(a)', { a: 2 }, '1.4142135623730950488'],
+  ['a^0.5', { a: 2 }, '1.4142135623730950488'],
+  ['sin(a)', { a: 1 }, '0.84147098480789650665'],
+  ['cos(a)', { a: 1 }, '0.5403023058681397174'],
+  ['tan(a)', { a: 1 }, '1.5574077246549022305'],
+  ['acos(a)', { a: 0.5 }, '1.0471975511965977462'],
+  ['pi^2', {}, '9.8696044010893586188'],
+  ['atan2(a,b)', { a: 1, b: 1 }, '0.78539816339744830962'],
+  ['abs(a)', { a: -3 }, '3'],
+  ['-a', { a: 3 }, '-3'],
+];
+
+describe('the second evaluator', () => {
+  it.each(constants)('%s', (expression, operands, value) => {
+    expect(evaluatePrecisely(expression, operands)).toBe(Number(value));
+  });
+
+  it.each(['E', 'A', 'J', 'K', 'L', 'h', 'b', 'T', 'V', 'phi', 'tau', 'e', 'i'])(
+    'has no meaning of its own for %s',
+    (name) => {
+      expect(evaluatePrecisely(name, { [name]: 7 })).toBe(7);
+      expect(() => evaluatePrecisely(name, {})).toThrow(name);
+    },
+  );
+
+  it('has no value where there is none', () => {
+    expect(reproduces('sqrt(a)', { a: -1 }, 1)).toBe(false);
+    expect(reproduces('1/a', { a: 0 }, 1)).toBe(false);
+    expect(reproduces('acos(a)', { a: 2 }, 0)).toBe(false);
+  });
+
+  it('asks for nine digits', () => {
+    expect(reproduces('a*b', { a: 3, b: 7 }, 21 * (1 + 5e-10))).toBe(true);
+    expect(reproduces('a*b', { a: 3, b: 7 }, 21 * (1 + 2e-9))).toBe(false);
+  });
+
+  it('asks for twelve digits of the largest term where terms cancel', () => {
+    // 1 − 0.999999999 = 1e-9: a share of 1e-12 of the term 1 is a thousandth of the result.
+    expect(reproduces('1-a', { a: 0.999999999 }, 1e-9 + 5e-13)).toBe(true);
+    expect(reproduces('1-a', { a: 0.999999999 }, 1e-9 + 2e-12)).toBe(false);
+    // The same below a fraction: 1/1e-9 is a thousandth uncertain too.
+    expect(reproduces('b/(1-a)', { a: 0.999999999, b: 1 }, 1e9 * (1 + 5e-4))).toBe(true);
+    expect(reproduces('b/(1-a)', { a: 0.999999999, b: 1 }, 1e9 * (1 + 2e-3))).toBe(false);
+  });
+
+  it('is no milder where nothing cancels', () => {
+    expect(reproduces('1-a', { a: 0.5 }, 0.5 * (1 + 2e-9))).toBe(false);
+    expect(reproduces('a+b', { a: 1e6, b: 1 }, 1000001 * (1 + 2e-9))).toBe(false);
+  });
+
+  it('names the symbols of an expression', () => {
+    expect([...symbolsIn('pi^2*E/(Lc/r)^2+sqrt(E)')]).toEqual(['E', 'Lc', 'r']);
+  });
+});
