@@ -8,7 +8,10 @@ export function Front({ title, children }: { title: string; children: ReactNode 
   }, [title]);
   return (
     <div className="grid min-h-screen lg:grid-cols-[minmax(0,1fr)_minmax(420px,520px)]">
-      <div className="on-ink relative flex flex-col justify-between gap-10 overflow-hidden bg-ink p-8 text-paper lg:p-14">
+      <aside
+        aria-label="What Stanchion is"
+        className="on-ink relative flex flex-col justify-between gap-10 overflow-hidden bg-ink p-8 text-paper lg:p-14"
+      >
         <p className="flex items-center gap-3 text-title font-semibold">
           <Mark className="h-7 w-7" />
           Stanchion
@@ -25,7 +28,7 @@ export function Front({ title, children }: { title: string; children: ReactNode 
             engineer takes responsibility for it.
           </p>
         </div>
-      </div>
+      </aside>
       <main id="main" className="flex flex-col justify-center bg-paper px-8 py-12 lg:px-14">
         <h1 className="mb-6 border-b-2 border-ink pb-2 font-serif text-display font-semibold">
           {title}

@@ -28,12 +28,13 @@ function Run({ run }: { run: Inline }) {
 }
 
 function ValueRun(props: { text: string; address: string; member: string | undefined }) {
-  const { follow } = useDocument();
+  const { follow, onCurrent } = useDocument();
   if (!follow) return <span className="figures font-semibold">{props.text}</span>;
   return (
     <button
       type="button"
-      tabIndex={-1}
+      // On a sheet the keyboard goes from line to line and from there to the sources.
+      tabIndex={onCurrent ? -1 : 0}
       data-ref={props.address}
       className="figures cursor-pointer font-semibold"
       onClick={(event) => {

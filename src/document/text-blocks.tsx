@@ -3,7 +3,7 @@ import type { BlockOf, TableCell } from '#shared/report/tree.ts';
 import { Inlines } from './inlines.tsx';
 
 export function HeadingBlock({ block }: { block: BlockOf<'heading'> }) {
-  const Tag = (['h2', 'h3', 'h4'] as const)[block.level - 1] ?? 'h4';
+  const Tag = block.level === 1 ? 'h2' : 'h3';
   return (
     <Tag
       className={`document-heading level-${block.level}`}

@@ -1,4 +1,4 @@
-import { type ReactNode, useEffect, useId, useRef } from 'react';
+import { type ReactNode, useId, useLayoutEffect, useRef } from 'react';
 import { classNames } from './class-names.ts';
 
 /**
@@ -14,7 +14,8 @@ export function Dialog(props: {
 }) {
   const ref = useRef<HTMLDialogElement>(null);
   const title = useId();
-  useEffect(() => {
+  // Closed before it leaves the page, so that the focus goes back to where it was.
+  useLayoutEffect(() => {
     const dialog = ref.current;
     if (dialog && !dialog.open) dialog.showModal();
     return () => dialog?.close();

@@ -30,11 +30,10 @@ export function useBasisDraft(calculation: Calculation): VersionedDraft<HeadAndB
 /** The basis of design, part by part: what it is at the left, what is set at the right. */
 export function BasisForm(props: { draft: VersionedDraft<HeadAndBasis>; editable: boolean }) {
   const { draft, editable } = props;
-  const keys = useFormKeys(draft);
+  useFormKeys(draft);
   const part = { value: draft.value, edit: draft.edit };
   return (
-    // biome-ignore lint/a11y/noStaticElementInteractions: undo and redo anywhere in the form
-    <div onKeyDown={keys}>
+    <>
       <fieldset disabled={!editable}>
         <legend className="sr-only">Basis of design</legend>
         <Part title="This calculation">
@@ -67,7 +66,7 @@ export function BasisForm(props: { draft: VersionedDraft<HeadAndBasis>; editable
           onSettle={draft.settle}
         />
       )}
-    </div>
+    </>
   );
 }
 

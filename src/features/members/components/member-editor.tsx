@@ -84,7 +84,7 @@ export function MemberEditor(props: {
     close: place.closeLine,
     copyLine,
   });
-  const formKeys = useFormKeys(draft);
+  useFormKeys(draft);
   const go = (path: string) => {
     const row = /^combinations\[(\d+)\]/.exec(path)?.[1];
     const combination = row === undefined ? undefined : value.combinations[Number(row)];
@@ -105,11 +105,9 @@ export function MemberEditor(props: {
 
   return (
     <MemberFormContext value={form}>
-      {/* biome-ignore lint/a11y/noStaticElementInteractions: undo and redo anywhere on the page of a member */}
       <div
         className={view === 'forces' ? 'member-layout is-forces' : 'member-layout'}
         data-print-plain
-        onKeyDown={formKeys}
       >
         <InputsMargin
           basis={basis}

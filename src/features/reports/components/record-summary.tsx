@@ -10,7 +10,7 @@ import { resultsBlock } from '#shared/report/results-block.ts';
 import type { Block } from '#shared/report/tree.ts';
 import { unconfirmedBlock } from '#shared/report/unconfirmed-block.ts';
 
-const heading = (text: string): Block => ({ kind: 'heading', level: 2, text });
+const heading = (text: string): Block => ({ kind: 'heading', level: 1, text });
 
 /** What the report says of a calculation as a whole; every value leads to its line. */
 export function RecordSummary(props: { calculationId: string; record: CalculationRecord }) {

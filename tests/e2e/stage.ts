@@ -1,0 +1,87 @@
+import type { Browser, BrowserContext, Page } from 'playwright-core';
+import { afterAll, afterEach, beforeAll, expect } from 'vitest';
+import { type Application, serveApplication } from '#tests/support/application.ts';
+import { openBrowser, type PageProblem, watchPage } from '#tests/support/browser.ts';
+
+export interface Opened {
+  readonly page: Page;
+  readonly context: BrowserContext;
+}
+
+export interface Stage {
+  readonly origin: string;
+  /** A page of a person of its own; what goes wrong in it fails the test unless it is expected. */
+  open(options?: { width?: number; expected?: (text: string) => boolean }): Promise<Opened>;
+  /** The same, signed in as one of the demo's people. */
+  openAs(
+    name: string,
+    options?: { width?: number; expected?: (text: string) => boolean },
+  ): Promise<Opened>;
+}
+
+/** The built application with its demo, and a browser, for the tests of one file. */
+export function openStage(): Stage {
+  let application: Application;
+  let browser: Browser;
+  const contexts: BrowserContext[] = [];
+  const problems: PageProblem[][] = [];
+
+  beforeAll(async () => {
+    [application, browser] = await Promise.all([serveApplication(), openBrowser()]);
+  });
+  afterAll(async () => {
+    await browser?.close();
+    await application?.stop();
+  });
+  afterEach(async () => {
+    const found = problems.splice(0).flat();
+    await Promise.all(contexts.splice(0).map((context) => context.close()));
+    expect(found).toEqual([]);
+  });
+
+  const stage: Stage = {
+    get origin() {
+      return application.origin;
+    },
+    async open({ width = 1280, expected } = {}) {
+      const context = await browser.newContext({
+        baseURL: application.origin,
+        viewport: { width, height: 860 },
+        permissions: ['clipboard-read', 'clipboard-write'],
+      });
+      contexts.push(context);
+      const page = await context.newPage();
+      page.setDefaultTimeout(15_000);
+      problems.push(await watchPage(page, expected));
+      return { page, context };
+    },
+    async openAs(name, options) {
+      const opened = await stage.open(options);
+      await opened.page.goto('/');
+      await opened.page.getByRole('button', { name: `Sign in as ${name}` }).click();
+      await opened.page.getByRole('heading', { name: `The desk of ${name}` }).waitFor();
+      return opened;
+    },
+  };
+  return stage;
+}
+
+export const engineer = 'Ines Marlow';
+export const reviewer = 'Tomas Okoye';
+
+/** Opens a member of the demo's hall columns by its mark; resolves when its sheet stands. */
+export async function openMember(page: Page, mark: string, calculation = 'TQ-CAL-012') {
+  await page.goto('/');
+  await page.getByRole('link', { name: calculation }).first().click();
+  await page.getByRole('rowheader', { name: mark }).getByRole('link').click();
+  await page.locator('[data-line]').first().waitFor();
+}
+
+export const saved = (page: Page) => page.getByText(/^saved \d\d:\d\d$/).waitFor();
+
+/** The control of an input in the margin, by the path that problems carry. */
+export const input = (page: Page, path: string) =>
+  page.locator(`#input-${path.replace(/[^A-Za-z0-9]+/g, '-')}`);
+
+/** The line of an address on the sheet. */
+export const line = (page: Page, address: string) => page.locator(`[data-line="${address}"]`);
