@@ -71,6 +71,9 @@ export type ParsedInput =
 
 const TYPED: Source = { kind: 'typed' };
 const DEFAULT_CB: Source = { kind: 'typed', note: 'Not given: 1.0, on the safe side' };
+// In N and mm: beyond these nothing is built, and products leave the range of numbers.
+const SMALLEST = 1e-9;
+const LARGEST = 1e15;
 const OTHER_FAMILY = /^(HSS|PIPE|2L|WT|MT|ST|MC|HP|C|M|S|L)\d/;
 
 const pathText = (path: readonly PropertyKey[]): string =>
@@ -172,6 +175,11 @@ function resolveMember(
     const parsed = parseQuantity(text, dimension);
     if (!parsed.ok) {
       problem(path, parsed.reason);
+      return null;
+    }
+    const size = Math.abs(parsed.quantity.value);
+    if (size !== 0 && (size < SMALLEST || size > LARGEST)) {
+      problem(path, `is ${text}, which no member has; see the number and its unit`);
       return null;
     }
     return { value: parsed.quantity.value, text: parsed.quantity.text, source, confirmed };

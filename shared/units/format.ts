@@ -14,6 +14,10 @@ export interface PrintedNumber {
 const THIN = '\u2009';
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
+/** Ratios of this size and above print significant digits: their decimals say nothing. */
+const MANY = 1e6;
+const MANY_DIGITS = 4;
+
 /** Numbers of this size and above, or below SMALL, print as ×10ⁿ. */
 const LARGE = 1e8;
 const SMALL = 1e-3;
@@ -33,6 +37,7 @@ export function printNumber(value: number, digits: Digits): PrintedNumber {
   const size = Math.abs(value);
   if (size === 0)
     return plainForm('0', false, 'sig' in digits ? 10 ** -digits.sig : 10 ** -digits.dec);
+  if ('dec' in digits && size >= MANY) return printNumber(value, { sig: digits.dec + MANY_DIGITS });
   if ('dec' in digits) {
     const fixed = size.toFixed(Math.min(digits.dec, 20));
     return plainForm(fixed, value < 0, 10 ** -digits.dec);

@@ -86,6 +86,51 @@ describe('closure of the elastic theory cases', () => {
   });
 });
 
+// Units mixed up, noughts too many: absurd but legible inputs.
+describe('closure of extreme members', () => {
+  for (const secondOrder of ['amplified', 'exact', 'from-analysis'])
+    for (const length of ['1e-8 mm', '14 ft', '1e9 ft'])
+      it(`${secondOrder}, ${length}`, () => {
+        const faults = ['1e-9 N', '100 kip', '1e14 N'].flatMap((P) =>
+          ['1e-8 N mm', '50 kip ft', '1e14 N mm'].flatMap((M) =>
+            ['1e-8 MPa', '50 ksi', '1e14 MPa'].flatMap((Fy) =>
+              faultsOf(
+                recordOf({
+                  format: 1,
+                  standard: 'aisc360-22',
+                  design: 'LRFD',
+                  units: 'us',
+                  analysis: {
+                    method: 'direct',
+                    secondOrder,
+                    includesMemberEffect: false,
+                    sway: 'none',
+                  },
+                  members: [
+                    {
+                      mark: 'extreme',
+                      section: 'W14X82',
+                      material: { name: 'any', Fy, source: { kind: 'typed' } },
+                      length,
+                      ends: 'held',
+                      Lcx: length,
+                      Lcy: length,
+                      Lcz: length,
+                      Lb: length,
+                      Cb: 'auto',
+                      endMomentSign: 'bending',
+                      combinations: [{ name: 'any', P, MxA: M, MxB: M, MyA: M }],
+                    },
+                  ],
+                }),
+              ).map((f) => `${P}, ${M}, ${Fy}: ${f}`),
+            ),
+          ),
+        );
+        expect(faults).toEqual([]);
+      });
+});
+
 describe('closure of 500 random members', () => {
   const random = seededRandom(20220801);
   const inputs = Array.from({ length: 500 }, () => randomInput(random));

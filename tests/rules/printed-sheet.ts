@@ -3,7 +3,7 @@ import { placedLines } from '#shared/calc/address.ts';
 import type { Line, ValuedLine } from '#shared/calc/line.ts';
 import { printedForms } from '#shared/calc/printed.ts';
 import type { MemberRecord } from '#shared/calc/record.ts';
-import { printNumber } from '#shared/units/format.ts';
+import { type Digits, printNumber } from '#shared/units/format.ts';
 import type { UnitSet } from '#shared/units/unit-set.ts';
 
 /*
@@ -43,6 +43,16 @@ const stepOf = (line: ValuedLine, form: 'working' | 'display', read: Read): Read
   if (!digits || !('sig' in digits) || read.value === 0) return read;
   const first = Math.floor(Math.log10(Math.abs(read.value)) + 1e-12);
   return { ...read, step: Math.max(read.step, 10 ** (first - digits.sig + 1)) };
+};
+
+/** Utilisations and differences have decimals; from a million on, digits that count. */
+const readRatio = (value: number, digits: Digits | null, otherwise: number) => {
+  const used = digits ?? { dec: otherwise };
+  const { text } = printNumber(value, used);
+  const read = readPrinted(text);
+  if (!('dec' in used) || Math.abs(read.value) < 1e6) return { ...read, text };
+  const first = Math.floor(Math.log10(Math.abs(read.value)));
+  return { ...read, step: 10 ** (first - used.dec - 3), text };
 };
 
 /** Faults of a member's printed sheet, each with its address. */
@@ -116,8 +126,8 @@ function lineFaults(line: Line, read: Reader, set: UnitSet): string[] {
       return best === extreme ? [] : [`prints ${best} as ${line.sense} of ${values.join(', ')}`];
     }
     case 'check': {
-      const text = printNumber(line.ratio, line.print.working ?? { dec: 3 }).text;
-      const ratio = readPrinted(text);
+      const ratio = readRatio(line.ratio, line.print.working, 3);
+      const { text } = ratio;
       const demand = read(line.demand, 'display').value;
       const capacity = line.capacity === 1 ? 1 : read(line.capacity, 'display').value;
       return [
@@ -129,10 +139,10 @@ function lineFaults(line: Line, read: Reader, set: UnitSet): string[] {
       ];
     }
     case 'comparison': {
-      const text = printNumber(line.difference * 100, line.print.working ?? { dec: 1 }).text;
+      const printed = readRatio(line.difference * 100, line.print.working, 1);
       const value =
         (read(line.used, 'display').value / read(line.other, 'display').value - 1) * 100;
-      return follows(value, readPrinted(text)) ? [] : [`prints ${text} % for ${value} %`];
+      return follows(value, printed) ? [] : [`prints ${printed.text} % for ${value} %`];
     }
     default:
       return [];
