@@ -72,13 +72,16 @@ function step(elements: readonly HTMLElement[], by: 1 | -1) {
   elements[Math.max(0, Math.min(elements.length - 1, at + by))]?.focus();
 }
 
+export const lineElement = (sheet: HTMLElement | null, address: string): HTMLElement | null =>
+  sheet?.querySelector<HTMLElement>(`[data-line="${CSS.escape(address)}"]`) ?? null;
+
 /** Moves the focus to a line of the sheet; `where` it comes to stand if it is out of sight. */
 export function focusLine(
   sheet: HTMLElement | null,
   address: string,
   where: ScrollLogicalPosition = 'nearest',
 ): boolean {
-  const line = sheet?.querySelector<HTMLElement>(`[data-line="${CSS.escape(address)}"]`);
+  const line = lineElement(sheet, address);
   if (!line) return false;
   line.focus({ preventScroll: true });
   line.scrollIntoView({ block: where });

@@ -49,7 +49,7 @@ const says = ({ summary }: MemberRow): string =>
 
 function MemberLink({ calculation, row }: { calculation: Calculation; row: MemberRow }) {
   return (
-    <Link to={paths.member(calculation.id, row.id)} className="link text-ink">
+    <Link to={paths.member(calculation.id, row.id)} className="link whitespace-nowrap text-ink">
       {row.mark || 'without a mark'}
     </Link>
   );

@@ -1,5 +1,6 @@
 import { Link } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
+import { sectionName } from '#client/document/section-name.ts';
 import { count } from '#client/lib/count.ts';
 import { Empty } from '#client/ui/state-panels.tsx';
 import type { WaitingItem } from '#shared/contracts/desk.ts';
@@ -31,7 +32,7 @@ export function WaitingList({ items }: { items: readonly WaitingItem[] }) {
             className="link font-semibold"
           >
             {item.member.mark || 'without a mark'}
-            {item.member.section && ` · ${item.member.section}`}
+            {item.member.section && ` · ${sectionName(item.member.section)}`}
           </Link>
           <span
             className={item.reason === 'unconfirmed' ? 'text-zinc-7' : 'font-semibold text-oxide'}

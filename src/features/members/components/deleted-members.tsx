@@ -1,3 +1,4 @@
+import { sectionName } from '#client/document/section-name.ts';
 import { when } from '#client/lib/clock.ts';
 import { count } from '#client/lib/count.ts';
 import { reasonOf } from '#client/lib/problem.ts';
@@ -18,7 +19,7 @@ export function DeletedMembers({ calculation }: { calculation: Calculation }) {
         {deletedMembers.map((member) => (
           <li key={member.id} className="flex items-baseline gap-3 py-1">
             <span className="text-ink">
-              {member.mark} {member.section}
+              {member.mark} {sectionName(member.section)}
             </span>
             <span>
               {when(member.deletedAt)}, {member.deletedBy}

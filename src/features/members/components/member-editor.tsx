@@ -9,7 +9,7 @@ import { firstCombination } from '../first-draft.ts';
 import { memberRules } from '../member-rules.ts';
 import { useLivePreview } from '../use-preview.ts';
 import { useSheet } from '../use-sheet.ts';
-import { focusLine, useSheetKeys } from '../use-sheet-keys.ts';
+import { focusLine, lineElement, useSheetKeys } from '../use-sheet-keys.ts';
 import { useSheetPlace } from '../use-sheet-place.ts';
 import { ForcesPaper } from './forces-paper.tsx';
 import { InputsMargin } from './inputs-margin.tsx';
@@ -64,6 +64,12 @@ export function MemberEditor(props: {
       pending.current = null;
     }
   }, [place.line, sheet.blocks, view]);
+
+  // A line chosen where it stands comes out from under what may cover it.
+  useEffect(() => {
+    if (place.line)
+      lineElement(sheetElement.current, place.line)?.scrollIntoView({ block: 'nearest' });
+  }, [place.line]);
 
   const copyLine = useCallback(
     (address: string) => {
@@ -159,27 +165,29 @@ export function MemberEditor(props: {
             )
           )}
         </div>
-        {/* biome-ignore lint/a11y/noStaticElementInteractions: the keys of the sheet hold in its trace too */}
-        <div className="contents" onKeyDown={sheetKeys}>
-          <TraceMargin
-            container={traceElement}
-            trace={sheet.trace}
-            lost={place.line !== null && sheet.trace === null && sheet.blocks.length > 0}
-            onFollow={follow}
-            onClose={place.closeLine}
-            onCopyLine={() => place.line && copyLine(place.line)}
-            onCopyLink={copyLink}
-            contents={
-              <SheetContents
-                blocks={sheet.blocks}
-                onGo={(address) => {
-                  setView('sheet');
-                  requestAnimationFrame(() => focusLine(sheetElement.current, address, 'center'));
-                }}
-              />
-            }
-          />
-        </div>
+        {view === 'sheet' && (
+          // biome-ignore lint/a11y/noStaticElementInteractions: the keys of the sheet hold in its trace too
+          <div className="contents" onKeyDown={sheetKeys}>
+            <TraceMargin
+              container={traceElement}
+              trace={sheet.trace}
+              lost={place.line !== null && sheet.trace === null && sheet.blocks.length > 0}
+              onFollow={follow}
+              onClose={place.closeLine}
+              onCopyLine={() => place.line && copyLine(place.line)}
+              onCopyLink={copyLink}
+              contents={
+                <SheetContents
+                  blocks={sheet.blocks}
+                  onGo={(address) => {
+                    setView('sheet');
+                    requestAnimationFrame(() => focusLine(sheetElement.current, address, 'center'));
+                  }}
+                />
+              }
+            />
+          </div>
+        )}
       </div>
       {draft.conflict && (
         <ConflictDialog

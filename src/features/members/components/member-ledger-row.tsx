@@ -1,5 +1,6 @@
 import { Link } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
+import { sectionName } from '#client/document/section-name.ts';
 import { count } from '#client/lib/count.ts';
 import { Cell, Row, RowHead } from '#client/ui/ledger.tsx';
 import { RatioBar } from '#client/ui/ratio-bar.tsx';
@@ -23,7 +24,7 @@ export function MemberLedgerRow(props: {
           {row.mark || 'without a mark'}
         </Link>
       </RowHead>
-      <Cell className="whitespace-nowrap">{row.section || '–'}</Cell>
+      <Cell className="whitespace-nowrap">{sectionName(row.section) || '–'}</Cell>
       <Cell>{[row.place, row.length].filter(Boolean).join(', ')}</Cell>
       <Cell className="align-middle">
         <RatioBar ratio={summary.ratio} />

@@ -89,7 +89,7 @@ export function SectionField() {
           align="start"
           sideOffset={3}
           collisionPadding={10}
-          role="presentation"
+          aria-label="Sections found"
           onOpenAutoFocus={(event) => event.preventDefault()}
           onCloseAutoFocus={(event) => event.preventDefault()}
           // The field keeps the focus, so that typing goes on.
