@@ -31,7 +31,7 @@ describe('bad inputs', () => {
         .waitFor();
       expect(await field.getAttribute('aria-invalid')).toBe('true');
       const described = await field.getAttribute('aria-describedby');
-      expect(await page.locator(`[id="${described}"]`).innerText()).toMatch(reason);
+      expect(await page.locator(`[id="${described}"]`).textContent()).toMatch(reason);
       expect(await page.locator('[data-line]').count()).toBe(lines);
       await saved(page);
       await page.reload();
@@ -40,7 +40,7 @@ describe('bad inputs', () => {
       await field.fill(before);
       await expect.poll(() => page.locator('[data-line]').count()).toBe(lines);
       await saved(page);
-      expect(await page.locator('body').innerText()).not.toMatch(/NaN|Infinity|undefined/);
+      expect(await page.locator('body').textContent()).not.toMatch(/NaN|Infinity|undefined/);
     },
   );
 
@@ -90,7 +90,7 @@ describe('bad inputs', () => {
       else await field.fill(typed);
       await page.locator(`.sheet-verdict[data-verdict="${verdict}"]`).waitFor();
       expect(await page.locator('.verdict-ratio').count()).toBe(0);
-      expect(await page.locator('.verdict-governs').innerText()).toContain(clause);
+      expect(await page.locator('.verdict-governs').textContent()).toContain(clause);
       if (path === 'ends') await field.selectOption(before);
       else await field.fill(before);
       await page.locator('.sheet-verdict[data-verdict="OK"]').waitFor();

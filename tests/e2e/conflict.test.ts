@@ -19,7 +19,7 @@ describe('two changes of one member', () => {
     await dialog.waitFor();
     const clashes = dialog.getByRole('group');
     expect(await clashes.count()).toBe(1);
-    expect(await clashes.innerText()).toMatch(/15 ft[\s\S]*10 ft/);
+    expect(await clashes.textContent()).toMatch(/15 ft[\s\S]*10 ft/);
     const save = dialog.getByRole('button', { name: /still to choose|Save this/ });
     expect(await save.isDisabled()).toBe(true);
     await dialog.getByRole('radio').first().check();

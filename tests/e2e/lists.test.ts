@@ -74,7 +74,7 @@ describe('the drawings of a project', () => {
     await page.getByLabel('Revision').fill('B');
     await page.getByLabel('Status').selectOption('for construction');
     await page.getByRole('button', { name: 'Save', exact: true }).click();
-    await expect.poll(() => row.innerText()).toMatch(/B[\s\S]*for construction/);
+    await expect.poll(() => row.textContent()).toMatch(/B[\s\S]*for construction/);
     await page.getByRole('button', { name: 'Delete S-777' }).click();
     await row.waitFor({ state: 'detached' });
     await page.getByText(/deleted drawing/).click();

@@ -27,7 +27,7 @@ describe('signing in', () => {
     const email = page.getByLabel('E-mail address');
     expect(await email.getAttribute('aria-invalid')).toBe('true');
     const described = await email.getAttribute('aria-describedby');
-    expect(await page.locator(`[id="${described}"]`).innerText()).toContain('wanted');
+    expect(await page.locator(`[id="${described}"]`).textContent()).toContain('wanted');
   });
 
   it('leads an engineer of the demo to the desk, and out again', async () => {

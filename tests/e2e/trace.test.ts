@@ -37,12 +37,12 @@ describe('following a number home', () => {
   it('goes from an operand to its own line, and the list of uses leads back', async () => {
     const { page } = await stage.openAs(engineer);
     await openMember(page, 'C-07');
-    await line(page, 'c1:H1/ratio').locator('[data-ref="E3/Pc"]').first().click();
-    await page.locator('.sheet-line.is-chosen[data-line="E3/Pc"]').waitFor();
+    await line(page, 'c1:H1/ratio').locator('[data-ref="E1/Pc"]').first().click();
+    await page.locator('.sheet-line.is-chosen[data-line="E1/Pc"]').waitFor();
     const uses = page.locator('[data-used-by] .rung');
     expect(await uses.count()).toBeGreaterThan(0);
     await page.goBack();
-    await expect.poll(() => new URL(page.url()).searchParams.get('line')).not.toBe('E3/Pc');
+    await expect.poll(() => new URL(page.url()).searchParams.get('line')).not.toBe('E1/Pc');
   });
 
   it('gives a line an address that can be shared', async () => {
@@ -68,7 +68,7 @@ describe('following a number home', () => {
   it('copies a line as one line of text', async () => {
     const { page } = await stage.openAs(engineer);
     await openMember(page, 'C-07');
-    await line(page, 'E3/Pc').click();
+    await line(page, 'E1/Pc').click();
     await page.getByRole('button', { name: 'Copy line' }).click();
     await page.getByText(/copied as text/).waitFor();
     const text = await page.evaluate(() => navigator.clipboard.readText());

@@ -7,12 +7,12 @@ describe('undo in the form as a whole', () => {
   it('goes back over fields, sources and rows, and forth again', async () => {
     const { page } = await stage.openAs(engineer);
     await openMember(page, 'C-07');
-    const sheet = () => page.locator('.verdict-ratio').innerText();
+    const sheet = () => page.locator('.verdict-ratio').textContent();
     const first = await sheet();
     await input(page, 'Lb').fill('10 ft');
     await input(page, 'Lcy').fill('12 ft');
     await page.getByRole('button', { name: /^Source of Buckling L c y/ }).click();
-    await page.getByLabel('Confirmed').check();
+    await page.getByRole('checkbox', { name: 'Confirmed' }).check();
     await page.getByRole('button', { name: 'Done' }).click();
     await page.getByRole('button', { name: 'Add', exact: true }).click();
     await expect.poll(() => page.getByRole('button', { name: /without a name/ }).count()).toBe(1);
