@@ -1,0 +1,83 @@
+import { describe, expect, it } from 'vitest';
+import { parseExpression } from './parse.ts';
+
+describe('a formula text', () => {
+  it('names its symbols in order, once, without π', () => {
+    expect(parseExpression('pi^2*E/(Lc/r)^2+E').symbols).toEqual(['E', 'Lc', 'r']);
+  });
+  it('has no constants and no units of its own: every letter is a symbol', () => {
+    const names = [
+      'E',
+      'e',
+      'i',
+      'phi',
+      'tau',
+      'A',
+      'J',
+      'K',
+      'L',
+      'h',
+      'b',
+      'T',
+      'V',
+      'N',
+      'm',
+      'c',
+      'kip',
+    ];
+    for (const name of names) {
+      const parsed = parseExpression(`2*${name}`);
+      expect(parsed.symbols).toEqual([name]);
+      expect(parsed.evaluate({ [name]: 21 })).toBe(42);
+      expect(() => parsed.evaluate({})).toThrow();
+    }
+  });
+  it('keeps constants as written', () => {
+    const { tree } = parseExpression('0.70*E');
+    expect(tree).toMatchObject({
+      kind: 'binary',
+      left: { kind: 'number', text: '0.70', value: 0.7 },
+    });
+  });
+  // By hand.
+  for (const [text, operands, value] of [
+    ['0.658^(Fy/Fe)*Fy', { Fy: 50, Fe: 50 }, 32.9],
+    ['-M', { M: 3 }, -3],
+    ['-x^2', { x: 3 }, -9],
+    ['2^3^2', {}, 512],
+    ['a-b-c', { a: 1, b: 2, c: 3 }, -4],
+    ['a/b/c', { a: 12, b: 3, c: 2 }, 2],
+    ['abs(M)', { M: -7 }, 7],
+    ['sqrt(a^2+b^2)', { a: 3, b: 4 }, 5],
+    ['atan2(y,x)', { y: 1, x: -1 }, (3 * Math.PI) / 4],
+    ['acos(psi)', { psi: -0.5 }, (2 * Math.PI) / 3],
+    ['pi', {}, Math.PI],
+  ] as const)
+    it(`${text} = ${value}`, () => {
+      expect(parseExpression(text).evaluate(operands)).toBeCloseTo(value, 12);
+    });
+  it('has no value where there is none', () => {
+    expect(parseExpression('sqrt(x)').evaluate({ x: -1 })).toBeNaN();
+    expect(parseExpression('1/x').evaluate({ x: 0 })).toBe(Number.POSITIVE_INFINITY);
+  });
+});
+
+describe('what a formula text may not hold', () => {
+  for (const [text, why] of [
+    ['2 Fy', /implicit multiplication/],
+    ['a < b', /operator|RelationalNode|ConditionalNode/],
+    ['a > b ? a : b', /ConditionalNode/],
+    ['max(a,b)', /function max/],
+    ['log(a)', /function log/],
+    ['x = 3', /AssignmentNode/],
+    ['[1,2]', /ArrayNode/],
+    ['a.b', /AccessorNode/],
+    ['"text"', /./],
+    ['a;b', /BlockNode/],
+    ['f(x) = x', /FunctionAssignmentNode/],
+    ['5 %', /./],
+    ['a!', /operator/],
+    ['(a', /./],
+  ] as const)
+    it(text, () => expect(() => parseExpression(text)).toThrow(why));
+});
