@@ -1,0 +1,159 @@
+import { describe, expect, it } from 'vitest';
+import { UNIT_SETS } from '../units/unit-set.ts';
+import { closeLines, hidesSide } from './closure.ts';
+import { closureProblems } from './closure-problems.ts';
+import { defineFormula } from './formula.ts';
+import type { Line } from './line.ts';
+import { printedForms } from './printed.ts';
+import { createRecorder } from './recorder.ts';
+
+const set = UNIT_SETS.us;
+const place = (lines: readonly Line[]) =>
+  lines.map((line) => ({ address: line.key, combination: null, line }));
+const given = (r: ReturnType<typeof createRecorder>, key: string, text: string) =>
+  r.given(
+    key,
+    key,
+    'none',
+    { value: Number(text), text, source: { kind: 'typed' }, confirmed: false },
+    { title: key },
+  );
+const formula = (id: string, expression: string, ...operands: string[]) =>
+  defineFormula('b', {
+    id,
+    clause: 'A',
+    title: id,
+    symbol: id,
+    dimension: 'none',
+    expression,
+    operands: Object.fromEntries(operands.map((o) => [o, 'none'])),
+  });
+const printed = (line: Line | undefined): string =>
+  line && 'value' in line ? (printedForms(line, set).working?.number.text ?? '') : '';
+const digits = (line: Line | undefined): unknown => line && 'print' in line && line.print.working;
+
+/*
+ * By hand: a = 1.00004, b = 1. Four figures print a·b as 1.000, and d = (q − 1)·1e5 = 4 can't follow
+ * from 1.000; it follows from 1.00004.
+ */
+describe('digits are added to operands until the line closes', () => {
+  const r = createRecorder('');
+  const a = given(r, 'a', '1.00004');
+  const q = r.formula(formula('q', 'a*b', 'a', 'b'), 'q', { a, b: given(r, 'b', '1') });
+  r.formula(formula('d', '(q-1)*100000', 'q'), 'd', { q });
+  const closed = closeLines(place(r.lines), set);
+  it('the operand prints what the result needs, the result stays at four', () => {
+    expect(printed(closed[2])).toBe('1.00004');
+    expect(digits(closed[3])).toEqual({ sig: 4 });
+    expect(printed(closed[3])).toBe('4.000');
+  });
+  it('and the proof finds nothing; it does where a digit is taken away', () => {
+    expect(closureProblems(place(closed), set)).toEqual([]);
+    const short = closed.map((l, i) =>
+      i === 2 && 'print' in l ? { ...l, print: { ...l.print, working: { sig: 4 } } } : l,
+    ) as Line[];
+    expect(closureProblems(place(short), set)).toEqual([
+      {
+        address: 'd',
+        reason: expect.stringContaining('prints 4.000, its printed operands give 0') as string,
+      },
+    ]);
+  });
+  it('typed values print as they stand', () => expect(printed(closed[0])).toBe('1.00004'));
+});
+
+describe('a comparison prints the truth', () => {
+  const compare = (left: number, right: number) => {
+    const r = createRecorder('');
+    const one = given(r, 'one', '1');
+    const value = (key: string, v: number) =>
+      r.formula(formula(key, `${v}*one`, 'one'), key, { one });
+    r.choice(
+      'c',
+      [{ left: value('l', left), relation: '<', right: value('r', right), outcome: 'below' }],
+      'not below',
+      { title: 'C' },
+    );
+    const closed = closeLines(place(r.lines), set);
+    expect(closureProblems(place(closed), set)).toEqual([]);
+    return [printed(closed[1]), printed(closed[2])];
+  };
+  it('with more digits where four would lie', () => {
+    // 1.000 and 1.000 would not be one below the other.
+    const [l, r] = compare(1.00001, 1.00002);
+    expect(Number(l)).toBeLessThan(Number(r));
+  });
+  it('with four where they do', () => expect(compare(1.5, 2)).toEqual(['1.500', '2.000']));
+  it('equal values print equal', () => {
+    const [l, r] = compare(4 / 3, 4 / 3);
+    expect(l).toBe(r);
+  });
+});
+
+describe('a ratio never hides its side of 1', () => {
+  const check = (ratio: number) => {
+    const r = createRecorder('');
+    r.check('check', given(r, 'd', String(ratio)), 1, { title: 'Check' });
+    const closed = closeLines(place(r.lines), set);
+    expect(closureProblems(place(closed), set)).toEqual([]);
+    return digits(closed[1]);
+  };
+  it('three decimals, more near 1', () => {
+    expect(check(0.9293)).toEqual({ dec: 3 });
+    expect(check(1)).toEqual({ dec: 3 });
+    expect(check(1.0004)).toEqual({ dec: 4 });
+    expect(check(0.99996)).toEqual({ dec: 5 });
+    expect(check(1.0000001)).toEqual({ dec: 7 });
+  });
+  it('is decided on the rounded number', () => {
+    expect(hidesSide(1.0004, { dec: 3 })).toBe(true);
+    expect(hidesSide(1.0006, { dec: 3 })).toBe(false);
+    expect(hidesSide(0.9996, { dec: 3 })).toBe(true);
+    expect(hidesSide(1, { dec: 3 })).toBe(false);
+  });
+});
+
+/*
+ * A root closes by its residual: the equation changes sign across one step of the last printed digit.
+ * x² − a = 0 at a = 2: 1.414 ± 0.001.
+ */
+describe('a root', () => {
+  const square = formula('square', 'x^2-a', 'x', 'a');
+  const closed = (() => {
+    const r = createRecorder('');
+    r.root(
+      square,
+      'root',
+      { symbol: 'x', dimension: 'none', bracket: [0, 2] },
+      { a: given(r, 'a', '2') },
+    );
+    return closeLines(place(r.lines), set);
+  })();
+  it('prints and closes', () => {
+    expect(printed(closed[1])).toBe('1.414');
+    expect(closureProblems(place(closed), set)).toEqual([]);
+  });
+  it('does not close on another number', () => {
+    const wrong = closed.map((l) => (l.kind === 'root' ? { ...l, value: 1.42 } : l));
+    expect(closureProblems(place(wrong), set)[0]?.reason).toMatch(/no sign change/);
+  });
+});
+
+/*
+ * Two lines share an operand: the one read later closes on the operand's short form, the earlier one
+ * then needs a longer form. Both have to close in the end. u = 10 000·v − 9 999·w is touchy in v.
+ */
+describe('lines that share an operand', () => {
+  it('close together', () => {
+    for (let n = 0; n < 200; n += 1) {
+      const r = createRecorder('');
+      const one = given(r, 'one', '1');
+      const v = r.formula(formula('v', `${1.2341 + n * 1.7e-5}*one`, 'one'), 'v', { one });
+      const w = r.formula(formula('w', `${1.2347 - n * 1.3e-5}*one`, 'one'), 'w', { one });
+      r.formula(formula('u', '10000*v-9999*w', 'v', 'w'), 'u', { v, w });
+      r.formula(formula('t', 'v*w', 'v', 'w'), 't', { v, w });
+      r.formula(formula('s', 'v/w', 'v', 'w'), 's', { v, w });
+      expect(closureProblems(place(closeLines(place(r.lines), set)), set)).toEqual([]);
+    }
+  });
+});
