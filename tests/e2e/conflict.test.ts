@@ -18,7 +18,7 @@ describe('two changes of one member', () => {
     const dialog = mine.page.getByRole('dialog', { name: /was changed in the meantime/ });
     await dialog.waitFor();
     const clashes = dialog.getByRole('group');
-    expect(await clashes.count()).toBe(1);
+    expect(await clashes.allTextContents()).toHaveLength(1);
     expect(await clashes.textContent()).toMatch(/15 ft[\s\S]*10 ft/);
     const save = dialog.getByRole('button', { name: /still to choose|Save this/ });
     expect(await save.isDisabled()).toBe(true);

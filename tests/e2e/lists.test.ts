@@ -47,7 +47,7 @@ describe('the members of a calculation', () => {
     expect(await page.getByRole('button', { name: /^(Delete|Duplicate|Move|Add)/ }).count()).toBe(
       0,
     );
-    await page.getByRole('rowheader', { name: 'C-07' }).getByRole('link').click();
+    await page.getByRole('rowheader', { name: 'C-07', exact: true }).getByRole('link').click();
     await page.locator('[data-line]').first().waitFor();
     expect(await page.locator('#input-Lb').getAttribute('readonly')).not.toBeNull();
   });

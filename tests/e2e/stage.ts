@@ -73,7 +73,7 @@ export const reviewer = 'Tomas Okoye';
 export async function openMember(page: Page, mark: string, calculation = 'TQ-CAL-012') {
   await page.goto('/');
   await page.getByRole('link', { name: calculation }).first().click();
-  await page.getByRole('rowheader', { name: mark }).getByRole('link').click();
+  await page.getByRole('rowheader', { name: mark, exact: true }).getByRole('link').click();
   await page.locator('[data-line]').first().waitFor();
 }
 

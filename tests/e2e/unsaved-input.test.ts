@@ -16,8 +16,8 @@ describe('input that no server has yet', () => {
     await page.reload();
     await expect.poll(() => input(page, 'place').inputValue()).toBe('grid 4/C');
     await page.getByText(/that was not saved yet was brought back/).waitFor();
+    await page.getByRole('button', { name: 'not saved, try now' }).waitFor();
     await page.unroute('**/api/**');
-    await page.getByRole('button', { name: 'not saved, try now' }).click();
     await saved(page);
     const other = await context.newPage();
     await other.goto(page.url());

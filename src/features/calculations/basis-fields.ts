@@ -47,7 +47,7 @@ export const basisRules: MergeRules<HeadAndBasis> = {
       id,
       label: labels[id] ?? id,
       text: field === null ? '' : String(field),
-      mark: JSON.stringify(field),
+      value: field,
     })),
   take: (into, from, id) => {
     const path = id.split('.');

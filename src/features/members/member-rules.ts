@@ -15,7 +15,7 @@ const quantityText = (quantity: DraftQuantity): string =>
     : `${quantity.text} (${draftSourceText(quantity.source)}, ${quantity.confirmed ? 'confirmed' : 'not confirmed'})`;
 
 const field = (id: keyof MemberDraft, label: string, text: string, value: unknown): DraftField => ({
-  ...{ id, label, text, mark: JSON.stringify(value) },
+  ...{ id, label, text, value },
 });
 
 const combinationText = (row: DraftCombination): string =>
@@ -44,7 +44,7 @@ export const memberRules: MergeRules<MemberDraft> = {
       id: `${rowPrefix}${row.id}`,
       label: `Combination ${row.name || row.id}`,
       text: combinationText(row),
-      mark: JSON.stringify(row),
+      value: row,
     })),
   ],
   take: (into, from, id) => {

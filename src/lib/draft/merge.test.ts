@@ -5,7 +5,7 @@ type Draft = Readonly<Record<string, string>>;
 
 const rules: MergeRules<Draft> = {
   fields: (draft) =>
-    Object.entries(draft).map(([id, text]) => ({ id, label: `label ${id}`, text, mark: text })),
+    Object.entries(draft).map(([id, text]) => ({ id, label: `label ${id}`, text, value: text })),
   take: (into, from, id) => {
     const { [id]: _, ...rest } = into;
     const value = from[id];
@@ -23,6 +23,21 @@ describe('two changes of one version', () => {
     const result = merge({ a: '1', b: '2' }, { a: '9', b: '3' }, { a: '8', b: '3' }, rules);
     expect(result.agreed).toEqual({ a: '8', b: '3' });
     expect(result.clashes).toEqual([{ id: 'a', label: 'label a', mine: '9', theirs: '8' }]);
+  });
+
+  it('takes values for the same whatever the order of their names', () => {
+    const ruled: MergeRules<Readonly<Record<string, unknown>>> = {
+      fields: (draft) =>
+        Object.entries(draft).map(([id, value]) => ({ id, label: id, text: '', value })),
+      take: (into, from, id) => ({ ...into, [id]: from[id] }),
+    };
+    const result = merge(
+      { a: { x: 1, y: 2 } },
+      { a: { x: 9, y: 2 } },
+      { a: { y: 2, x: 1 } },
+      ruled,
+    );
+    expect(result).toEqual({ agreed: { a: { x: 9, y: 2 } }, clashes: [] });
   });
 
   it('carries over rows that one of them added or took away', () => {

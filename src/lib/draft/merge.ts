@@ -1,9 +1,11 @@
-/** One field of a draft: `mark` tells whether two are the same, `text` is what a person reads. */
+import { same } from '#client/lib/same.ts';
+
+/** One field of a draft: its JSON value, and what a person reads of it. */
 export interface DraftField {
   readonly id: string;
   readonly label: string;
   readonly text: string;
-  readonly mark: string;
+  readonly value: unknown;
 }
 
 /** How a kind of draft falls into fields, and how one field is carried over. */
@@ -36,8 +38,9 @@ export function merge<T>(base: T, mine: T, theirs: T, rules: MergeRules<T>): Mer
   for (const id of new Set([...my.keys(), ...their.keys(), ...before.keys()])) {
     const m = my.get(id);
     const t = their.get(id);
-    if (m?.mark === before.get(id)?.mark || m?.mark === t?.mark) continue;
-    if (t?.mark === before.get(id)?.mark) {
+    const b = before.get(id);
+    if (same(m?.value, b?.value) || same(m?.value, t?.value)) continue;
+    if (same(t?.value, b?.value)) {
       agreed = rules.take(agreed, mine, id);
       continue;
     }
