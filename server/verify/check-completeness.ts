@@ -1,4 +1,5 @@
 import { placedLines } from '#shared/calc/address.ts';
+import type { Line } from '#shared/calc/line.ts';
 import type { CoverageRow, MemberRecord } from '#shared/calc/record.ts';
 import { printNumber } from '#shared/units/format.ts';
 
@@ -12,24 +13,24 @@ export interface CoverageProblem {
 
 /** Every limit state has a cell under every combination, and what a cell cites is as it says. */
 export function* checkCompleteness(member: MemberRecord): Iterable<CoverageProblem> {
+  const lines = new Map(placedLines(member).map((p) => [p.address, p.line]));
   const names = new Map(member.combinations.map((c) => [c.id, c.name]));
   for (const row of member.completeness) {
     const covered = row.cells.map((cell) => cell.combination).join(' ');
     if (covered !== [...names.keys()].join(' '))
       yield { address: null, reason: `${row.title}: does not cover each combination once` };
     for (const cell of row.cells)
-      for (const reason of cellReasons(cell, member))
+      for (const reason of cellReasons(cell, member, lines))
         yield { address: null, reason: `${row.title}, ${names.get(cell.combination)}: ${reason}` };
   }
 }
 
-function cellReasons(cell: Cell, member: MemberRecord): string[] {
+function cellReasons(cell: Cell, member: MemberRecord, lines: ReadonlyMap<string, Line>): string[] {
   const { address, ratio, ratioText, state } = cell;
-  const placed = placedLines(member).find((p) => p.address === address);
-  if (address !== null && !placed) return [`cites ${address}, which is not there`];
-  if (placed?.line.kind !== 'check')
+  const line = lines.get(address ?? '');
+  if (address !== null && !line) return [`cites ${address}, which is not there`];
+  if (line?.kind !== 'check')
     return ratio === null && ratioText === null ? [] : ['has a ratio without a check'];
-  const { line } = placed;
   const printed = printNumber(line.ratio, line.print.working ?? { dec: 3 }).text;
   const summary = member.combinations.find((c) => c.id === cell.combination)?.summary;
   const governs = summary?.governing?.address === address;

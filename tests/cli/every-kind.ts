@@ -6,10 +6,13 @@ import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
 import { parseInput } from '#shared/members/resolve.ts';
 import { runCalculation } from '#shared/members/run.ts';
 
-/** A calculation whose record has every kind of line that the books make, and every verdict. */
-export function everyKind(): CalculationRecord {
+/**
+ * A calculation whose record has every kind of line that the books make, and every verdict; `P` is
+ * the axial force of its first combination.
+ */
+export function everyKind(P = '150 kip'): CalculationRecord {
   const file = new URL('./every-kind.json', import.meta.url);
-  const parsed = parseInput(JSON.parse(readFileSync(file, 'utf8')));
+  const parsed = parseInput(JSON.parse(readFileSync(file, 'utf8').replace('150 kip', P)));
   if (!parsed.ok) throw new Error(JSON.stringify(parsed.problems));
   return sealRecord(runCalculation(parsed.input));
 }

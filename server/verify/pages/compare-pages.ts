@@ -19,9 +19,10 @@ export function comparePages(
   const sheets = compareSheets(expectedSheets(record, fonts), found);
   const front = compareFront(record, found, fonts);
   const notes = [...front.notes, ...annotationNotes(pages)];
-  if (sheets.reworded > 0)
+  const reworded = sheets.reworded + front.reworded;
+  if (reworded > 0)
     notes.push(
-      `${sheets.reworded} blocks of the sheets are worded otherwise than here; their numbers agree`,
+      `${reworded} lines and rows on the pages are worded otherwise than by this version; their numbers agree`,
     );
   return {
     problems: [

@@ -58,15 +58,17 @@ const lineOf = ({ line, segments, fixed }: ExpectedBlock, found: readonly Segmen
     found,
     (index) =>
       fixed.has(segments[index]?.visible ?? '') ||
-      (line !== null && (index < 2 || index === segments.length - 1)),
+      (line !== null && (index < 2 || (line.result && index === segments.length - 1))),
   );
 
-/** A figure shows no number that the member's sheet doesn't. */
+/** A figure may be drawn otherwise by another version, but shows no number that its sheet lacks. */
 function figure(
   block: ExpectedBlock,
   found: readonly Segment[],
   blocks: readonly ExpectedBlock[],
 ): Compared {
+  const same = compareSegments(block.segments, found, () => false);
+  if (same.reasons.length === 0) return same;
   const numbers = (text: string): string[] =>
     significant(text)
       .split(' ')
@@ -82,7 +84,7 @@ function figure(
       .filter((number) => !known.has(number))
       .map((number) => `page ${segment.page} shows ${number}, which the sheet does not have`),
   );
-  return { reasons, reworded: false };
+  return { reasons, reworded: reasons.length === 0 };
 }
 
 const isNumber = (block: ExpectedBlock, found: readonly Segment[], at: number): boolean =>

@@ -4,8 +4,8 @@ import { measureDocument } from '#server/pdf/measure-document.ts';
 import { papers } from '#server/pdf/paper.ts';
 import { setText } from '#server/pdf/text-runs.ts';
 import { placedLines } from '#shared/calc/address.ts';
-import type { LineKind } from '#shared/calc/line.ts';
-import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
+import type { Line, LineKind } from '#shared/calc/line.ts';
+import type { CalculationRecord } from '#shared/calc/record.ts';
 import { pageFrame } from '#shared/report/assemble.ts';
 import { unsignedDocument } from '#shared/report/document-data.ts';
 import { wholeMemberSheet } from '#shared/report/member-sheet.ts';
@@ -22,6 +22,8 @@ export interface ExpectedBlock {
     readonly address: string;
     readonly kind: LineKind;
     readonly number: string;
+    /** Its last segment is its result or its verdict. */
+    readonly result: boolean;
   } | null;
   /** Texts that the record itself has: they are no words of the program. */
   readonly fixed: ReadonlySet<string>;
@@ -40,33 +42,34 @@ const NAMES: Readonly<Partial<Record<Block['kind'], string>>> = {
 
 /** The sheets of all members as their pages must say them, in order. */
 export function expectedSheets(record: CalculationRecord, fonts: FontSet): ExpectedBlock[] {
-  return record.members.flatMap((member) =>
-    wholeMemberSheet(record, member.id).map(
+  return record.members.flatMap((member) => {
+    const lines = new Map(placedLines(member).map((p) => [p.address, p.line]));
+    return wholeMemberSheet(record, member.id).map(
       (block): ExpectedBlock => ({
         member: member.id,
         line: block.kind === 'line' ? lineOf(block) : null,
-        fixed: fixedTexts(member, block),
+        fixed: fixedTexts(block, 'address' in block ? lines.get(block.address ?? '') : undefined),
         name: NAMES[block.kind] ?? block.kind,
         segments: segmentsOf([block], record, fonts),
       }),
-    ),
-  );
+    );
+  });
 }
 
-function fixedTexts(member: MemberRecord, block: Block): ReadonlySet<string> {
+function fixedTexts(block: Block, line: Line | undefined): ReadonlySet<string> {
   if (block.kind === 'sheetHead') return new Set([block.mark].map(bare));
   if (block.kind === 'lineSection') return new Set([block.title, block.reference].map(bare));
   if (block.kind !== 'line') return new Set();
-  const line = placedLines(member).find((p) => p.address === block.address)?.line;
   const words =
     line?.kind === 'notice' ? line.text : line?.kind === 'statement' ? line.statement : '';
   return new Set([block.title, words].map(bare));
 }
 
-const lineOf = ({ address, lineKind, number }: LineBlock) => ({
+const lineOf = ({ address, lineKind, number, result, verdict }: LineBlock) => ({
   address,
   kind: lineKind as LineKind,
   number,
+  result: result !== null || verdict !== null,
 });
 
 /** The segments of some blocks, as the report sets them. */
