@@ -69,23 +69,21 @@ function figure(
 ): Compared {
   const same = compareSegments(block.segments, found, () => false);
   if (same.reasons.length === 0) return same;
-  const numbers = (text: string): string[] =>
-    significant(text)
-      .split(' ')
-      .filter((t) => /\d/.test(t));
-  const said = ({ visible, alt }: ExpectedSegment): string => `${visible} ${alt ?? ''}`;
   const known = new Set(
-    blocks
-      .filter((b) => b.member === block.member)
-      .flatMap((b) => b.segments.flatMap((s) => numbers(said(s)))),
+    blocks.filter((b) => b.member === block.member).flatMap((b) => b.segments.flatMap(numbersIn)),
   );
   const reasons = found.flatMap((segment) =>
-    numbers(said(segment))
+    numbersIn(segment)
       .filter((number) => !known.has(number))
       .map((number) => `page ${segment.page} shows ${number}, which the sheet does not have`),
   );
   return { reasons, reworded: reasons.length === 0 };
 }
+
+const numbersIn = ({ pieces, alt }: ExpectedSegment): string[] =>
+  [...pieces, alt ?? '']
+    .flatMap((text) => significant(text).split(' '))
+    .filter((token) => /\d/.test(token));
 
 const isNumber = (block: ExpectedBlock, found: readonly Segment[], at: number): boolean =>
   found[at]?.visible === block.line?.number;

@@ -92,8 +92,10 @@ export const rowSegments = (row: Row, fonts: FontSet): ExpectedSegment[] =>
 function partSegment({ tag, items }: Part, fonts: FontSet): ExpectedSegment | null {
   const content = items.filter((i) => ['text', 'formula', 'path'].includes(i.kind));
   if (!tag || content.length === 0) return null;
+  const pieces = content.map((item) => bare(visibleText(item, fonts))).filter((p) => p !== '');
   return {
-    visible: bare(content.map((item) => visibleText(item, fonts)).join('')),
+    visible: pieces.join(''),
+    pieces,
     actual: content.flatMap((item) => actualText(item, fonts)).map(bare),
     alt: tag.alt === undefined ? null : bare(tag.alt),
   };

@@ -4,6 +4,8 @@ export interface Segment {
   readonly page: number;
   /** Text of its glyphs, without spaces. */
   readonly visible: string;
+  /** The same by runs of glyphs that stand close together: the labels of a figure. */
+  readonly pieces: readonly string[];
   /** Texts that stand in its place when copied (ActualText), without spaces. */
   readonly actual: readonly string[];
   /** Alternative text of its structure element. */

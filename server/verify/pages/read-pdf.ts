@@ -55,7 +55,7 @@ async function readPage(page: Page, number: number, actual: ActualTexts): Promis
   });
   const alts = altsOf(await page.getStructTree());
   const annotations = await page.getAnnotations();
-  const marked = new Map<string, { visible: string; baselines: number[] }>();
+  const marked = new Map<string, MarkedText>();
   const open: (string | null)[] = [];
   let [frame, loose] = ['', ''];
   for (const item of items) {
@@ -63,24 +63,23 @@ async function readPage(page: Page, number: number, actual: ActualTexts): Promis
       if (item.type === 'endMarkedContent') open.pop();
       else open.push(item.id ?? null);
       const id = open.at(-1);
-      if (id && !marked.has(id)) marked.set(id, { visible: '', baselines: [] });
+      if (id && !marked.has(id)) marked.set(id, new MarkedText());
       continue;
     }
     const text = bare(item.str);
     const part = marked.get(open.findLast((held) => held !== null) ?? '');
-    if (part && text !== '') {
-      part.visible += text;
-      part.baselines.push(Number(item.transform[5]));
-    } else if (marked.size === 0) frame += text;
+    if (part) part.add(text, item.transform.map(Number), item.width);
+    else if (marked.size === 0) frame += text;
     else loose += text;
   }
   page.cleanup();
   return {
     number,
     segments: [...marked].map(
-      ([id, { visible, baselines }]): Segment => ({
+      ([id, { pieces, baselines }]): Segment => ({
         page: number,
-        visible,
+        visible: pieces.join(''),
+        pieces,
         baselines: baselines.length === 0 ? null : [Math.min(...baselines), Math.max(...baselines)],
         actual: actual.get(number)?.get(Number(/_mc(\d+)$/.exec(id)?.[1])) ?? [],
         alt: alts.get(id) ?? null,
@@ -90,6 +89,25 @@ async function readPage(page: Page, number: number, actual: ActualTexts): Promis
     loose,
     annotations: annotations.map((a) => String(a.subtype)).filter((kind) => kind !== 'Link'),
   };
+}
+
+/** The glyphs of one piece of marked content, as they come. */
+class MarkedText {
+  readonly pieces: string[] = [];
+  readonly baselines: number[] = [];
+  /** Where the last glyphs ended. */
+  private x = Number.NaN;
+
+  add(text: string, matrix: readonly number[], width: number): void {
+    if (text === '') return;
+    const [, , , size = 0, x = 0, y = 0] = matrix;
+    const gap = x - this.x;
+    const joined = y === this.baselines.at(-1) && gap > -0.1 * size && gap < 0.35 * size;
+    if (joined) this.pieces.push(`${this.pieces.pop() ?? ''}${text}`);
+    else this.pieces.push(text);
+    this.baselines.push(y);
+    this.x = x + width;
+  }
 }
 
 interface Node {
