@@ -173,7 +173,10 @@ export function useVersionedDraft<T>(options: VersionedDraftOptions<T>): Version
     redo: useCallback(() => dispatch({ type: 'redo' }), []),
     canUndo: history.past.length > 0,
     canRedo: history.future.length > 0,
-    saveState,
+    saveState:
+      saveState.kind === 'saved' && editable && !same(value, base.current.value)
+        ? { kind: 'unsaved' }
+        : saveState,
     saveNow: useCallback(() => void saveNow(), [saveNow]),
     conflict,
     settle,
