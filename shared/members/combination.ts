@@ -1,6 +1,7 @@
 import type { Line, LineOf } from '../calc/line.ts';
 import { createRecorder, NotComputable, type Quantity } from '../calc/recorder.ts';
-import { interaction, interactionChecks } from '../standards/aisc360-22/h1.ts';
+import { firstOrderAxialLimit } from '../standards/aisc360-22/app7.ts';
+import { interaction, interactionChecks, separateChecks } from '../standards/aisc360-22/h1.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import type { CompressionStrength } from './compression.ts';
 import { availableMajor, type MajorStrength } from './flexure.ts';
@@ -110,6 +111,8 @@ function steps(
     return;
   }
   const axial = c.P.value > 0 && m.compression && m.alpha ? { Pr, Pc: m.compression.Pc } : null;
+  if (axial && m.compression && m.alpha && input.analysis.method === 'first-order')
+    firstOrderAxialLimit(r, m.alpha, Pr, m.compression.Pns);
   const state =
     axial && m.compression && m.alpha && AXES.some((a) => bends(c, a))
       ? axialState(r, input, Pr, m.alpha, m.compression.Pns)
@@ -134,20 +137,14 @@ function steps(
   const { x, y } = done.planes;
   const incomplete = [x, y].some((p) => p?.state === 'failed' || p?.state === 'outside scope');
   const Mcx = x?.Mr ? (m.Mcx ?? majorCapacity(m, c, r, x)) : null;
-  if (incomplete || (x?.Mr && !Mcx)) {
-    if (axial) {
-      r.section('H1', 'Checks', clause('H1.1'));
-      done.checks.push(
-        r.check('H1/axial', axial.Pr, axial.Pc, {
-          title: 'Compression alone',
-          clause: clause('E1'),
-        }),
-      );
-    }
-    return;
-  }
   const major = x?.Mr && Mcx ? { Mr: x.Mr, Mc: Mcx } : null;
   const minor = y?.Mr && m.Mcy ? { Mr: y.Mr, Mc: m.Mcy } : null;
+  if (incomplete || (x?.Mr && !Mcx)) {
+    // Without the interaction a strength that is exceeded by itself still says NOT OK.
+    if (axial || major || minor) r.section('H1', 'Checks', clause('H1.1'));
+    done.checks.push(...separateChecks(r, axial, major, minor));
+    return;
+  }
   r.section('H1', 'Checks', clause('H1.1'));
   done.checks.push(...interactionChecks(r, axial, major, minor));
   if (!axial && !major && !minor)
@@ -179,7 +176,12 @@ function majorCapacity(
 ): Quantity | null {
   const { major, q } = m;
   if (!major || !q.Lb) return null;
-  const Cb = automaticCb(r, m.input, x, { L: q.L, Lb: q.Lb, givenMax: c.moments.x.max !== null });
+  const Cb = automaticCb(r, m.input, x, {
+    L: q.L,
+    Lb: q.Lb,
+    givenMax: c.moments.x.max !== null,
+    compressed: c.P.value > 0,
+  });
   r.section('F2', 'Major-axis flexural strength of this combination', clause('F2'));
   return availableMajor(r, m.input.design, major, Cb);
 }

@@ -8,7 +8,7 @@ import {
   nominalStress,
   slendernessNote,
 } from '../standards/aisc360-22/e3.ts';
-import { elasticTorsionalStress } from '../standards/aisc360-22/e4.ts';
+import { e4Formulas, elasticTorsionalStress } from '../standards/aisc360-22/e4.ts';
 import {
   e7Formulas,
   effectiveArea,
@@ -63,6 +63,7 @@ export function compressionStrength(
 
   r.section('E3/strength', 'Compressive strength', clause('E3'));
   const Fn = nominalStress(r, Fy, Fe);
+  const torsional = z !== null && Fe.value < Math.min(x.stress.value, y.stress.value);
   const slender = cls.flangeSlender || cls.webSlender;
   const widths = slenderWidths(r, elements);
   const Ag = s.A;
@@ -71,7 +72,7 @@ export function compressionStrength(
         Fn,
         Ae: effectiveArea(r, 'E7', elements, widths, Fn),
       })
-    : r.formula(e3Formulas.strength, 'E3/Pn', { Fn, Ag });
+    : r.formula(torsional ? e4Formulas.strength : e3Formulas.strength, 'E3/Pn', { Fn, Ag });
   const Pc = availableCompression(r, design, constant, Pn);
 
   r.section('C2', 'Cross-section strength for stability', clause('C2.3'));
@@ -84,7 +85,7 @@ export function compressionStrength(
   return {
     Pc,
     Pns,
-    torsional: z !== null && z.value <= Math.min(x.stress.value, y.stress.value),
+    torsional,
     slender,
   };
 }

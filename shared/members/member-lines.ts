@@ -63,7 +63,7 @@ const METHOD_LIMITS = {
   ],
   'first-order': [
     'App. 7.3',
-    'The method is limited to second-order drift of at most 1.5 times the first-order one and to axial forces of at most half the cross-section strength, with its additional lateral loads in the analysis; this is taken as given, not checked here.',
+    'The method is limited to second-order drift of at most 1.5 times the first-order one, with its additional lateral loads in the analysis; this is taken as given, not checked here. Its limit of the axial force stands under each combination.',
   ],
 } as const;
 
@@ -145,6 +145,9 @@ const baseValue = (published: string, dimension: 'stress'): number => {
   return parsed.quantity.value;
 };
 
+/** In MPa: A514 and A709 Grade HPS 100W [690], the strongest that A3.1 lists. */
+const HIGHEST_YIELD_STRESS = 690;
+
 /** Constants of the steel: of its grade from the table, or as given; E and G of the standard. */
 export function steelLines(
   r: Recorder,
@@ -188,6 +191,14 @@ export function steelLines(
           steel.steel.title,
         )
       : r.given('steel/Fy', 'Fy', 'stress', steel.Fy, { title: `Yield stress, ${steel.name}` });
+  if (steel.kind === 'own' && Fy.value > HIGHEST_YIELD_STRESS)
+    r.notice(
+      'steel/unusual',
+      'caution',
+      'yield-stress-above-listed',
+      'The yield stress exceeds 100 ksi (690 MPa), more than any steel that A3.1 lists has: see the number and its unit.',
+      { title: 'Yield stress above those of the standard', clause: clause('A3.1') },
+    );
   const standard = (symbol: 'E' | 'G', title: string) =>
     stress(
       symbol,

@@ -22,7 +22,7 @@ export function automaticCb(
   r: Recorder,
   input: ResolvedInput,
   plane: PlaneResult,
-  q: { L: Quantity; Lb: Quantity; givenMax: boolean },
+  q: { L: Quantity; Lb: Quantity; givenMax: boolean; compressed: boolean },
 ): Quantity {
   r.section('F1', 'Lateral-torsional buckling modification factor', clause('F1'));
   if (q.Lb.value !== q.L.value)
@@ -37,6 +37,13 @@ export function automaticCb(
       r,
       'diagram-unknown',
       'The shape of the moment diagram is not given. Cb is taken as 1, which is on the safe side.',
+    );
+  // A compressed member without the exact solution: at or beyond the critical load of pinned ends.
+  if (q.compressed && !exact)
+    return one(
+      r,
+      'diagram-beyond-critical-load',
+      'The axial force reaches the critical load of the member with pinned ends: the moment diagram between the given end moments is not known. Cb is taken as 1, which is on the safe side.',
     );
   const { MA, MB } = ends;
   const { secondOrder } = input.analysis;

@@ -115,7 +115,12 @@ export function parseInput(json: unknown): ParsedInput {
       design: input.design,
       units: input.units,
       constants: input.constants ?? input.units,
-      analysis: { ...analysis, includesMemberEffect: analysis.includesMemberEffect ?? false },
+      analysis: {
+        ...analysis,
+        // Says something of moments from an analysis only; elsewhere it must not move the hash.
+        includesMemberEffect:
+          analysis.secondOrder === 'from-analysis' && analysis.includesMemberEffect === true,
+      },
       members,
     },
   };

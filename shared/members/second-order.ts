@@ -97,7 +97,7 @@ export function requiredMoment(
   if (plane.heldBetween)
     return outside(
       'held-within-bending-plane',
-      `The buckling length about the ${WORD[axis]} axis is shorter than the member, which bends in that plane: it is continuous over the points that hold it. Moments there are not given, so the second-order moment is not computed.`,
+      `The buckling length about the ${WORD[axis]} axis is shorter than the member, which bends in that plane: it is continuous over the points that hold it. Moments there are not given, so the second-order moment is not computed. Where the buckling length is shorter because the ends are held against rotation, give the length of the member: the end moments carry that restraint.`,
       `Held within the plane of ${WORD[axis]}-axis bending`,
     );
   const largest = given.max
@@ -138,19 +138,19 @@ export function requiredMoment(
         symbol: `Mr${axis}`,
       });
       if (includesMemberEffect && exact) besideAnalysis(r, axis, Mr, exact.Mmax);
-      if (!includesMemberEffect && axial && largest && !exact)
+      if (!includesMemberEffect && axial && largest && largest.value > ends.M2.value)
         r.notice(
           `${at}/no-diagram`,
           'caution',
           'member-effect-not-found',
-          'The analysis leaves out the effect of the axial force between the ends, and without end moments it cannot be added here.',
+          'The given largest moment exceeds both end moments, so the member carries load between its ends. The analysis leaves out the effect of the axial force between the ends, and without the load it cannot be added here: the required moment may be too low.',
           { title: 'Second-order effect between the ends', clause: clause('C2.1') },
         );
       return Mr;
     }
     if (!exact || !code) return ends.M2;
     const [used, other] = secondOrder === 'exact' ? [exact.Mmax, code] : [code, exact.Mmax];
-    compare(r, axis, exact, code, used, other);
+    compare(r, axis, code, used, other);
     return used;
   };
   return { state: 'done', Mr: required(), ends, exact, code };
@@ -206,14 +206,7 @@ const LOWER_BY = 0.05;
 /** An exact moment above the analysis's largest by this share is cautioned. */
 const ABOVE_BY = 0.02;
 
-function compare(
-  r: Recorder,
-  axis: Axis,
-  exact: SecondOrder,
-  code: Quantity,
-  used: Quantity,
-  other: Quantity,
-): void {
+function compare(r: Recorder, axis: Axis, code: Quantity, used: Quantity, other: Quantity): void {
   const difference = r.comparison(
     `theory/${axis}/comparison`,
     used,
@@ -228,7 +221,7 @@ function compare(
       `theory/${axis}/lower`,
       'caution',
       'code-moment-lower',
-      `The standard's amplified moment is more than 5 % below the exact elastic one (${exact.Mmax.symbol}). The utilisation with the exact moment stands beside the check.`,
+      "The standard's amplified moment is more than 5 % below the exact elastic one. Where the interaction is checked, its utilisation with the exact moment stands beside it.",
       {
         title: `Amplified moment below the exact one, ${WORD[axis]} axis`,
         clause: clause('App. 8.1.2', 'A-8-3'),

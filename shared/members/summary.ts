@@ -92,7 +92,7 @@ const worstOf = <T extends { readonly summary: Summary }>(
   return { verdict, worst };
 };
 
-/** The member takes its worst combination; its ratio is the largest, null if any is FAILED or NOT CHECKED. */
+/** The member takes its worst combination: the largest ratio of that verdict, null if it is FAILED or NOT CHECKED. */
 export function memberSummary(combinations: readonly CombinationRecord[]): Summary {
   const { verdict, worst } = worstOf(combinations);
   return {

@@ -1,4 +1,5 @@
 import { defineBook } from '../book.ts';
+import { app7Formulas } from './app7.ts';
 import { app8Formulas } from './app8.ts';
 import { b4Formulas } from './b4.ts';
 import { c2Formulas } from './c2.ts';
@@ -27,6 +28,7 @@ export const aisc360 = defineBook(
     f2Formulas,
     f3Formulas,
     f6Formulas,
+    app7Formulas,
     app8Formulas,
     h1Formulas,
   ].flatMap((group) => Object.values(group)),

@@ -21,6 +21,16 @@ export const e4Formulas = {
       Iy: 'inertia',
     },
   }),
+  strength: formula({
+    id: 'E4-1',
+    clause: 'E4',
+    equation: 'E4-1',
+    title: 'Nominal compressive strength, torsional buckling',
+    symbol: 'Pn',
+    dimension: 'force',
+    expression: 'Fn*Ag',
+    operands: { Fn: 'stress', Ag: 'area' },
+  }),
 };
 
 export interface TorsionalBuckling {

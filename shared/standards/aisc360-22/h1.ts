@@ -178,6 +178,18 @@ export function interactionChecks(
         clause: clause('H1.1', axial ? (checksEquation(r) ?? null) : 'H1-1b'),
       }),
     );
+  checks.push(...separateChecks(r, axial, x, y));
+  return checks;
+}
+
+/** Each strength against its own demand, as far as both are known. */
+export function separateChecks(
+  r: Recorder,
+  axial: Compression | null,
+  x: Flexure | null,
+  y: Flexure | null,
+): LineOf<'check'>[] {
+  const checks: LineOf<'check'>[] = [];
   if (axial)
     checks.push(
       r.check('H1/axial', axial.Pr, axial.Pc, { title: 'Compression alone', clause: clause('E1') }),
