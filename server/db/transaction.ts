@@ -16,6 +16,11 @@ export async function transaction<T>(
 ): Promise<T> {
   const client = await pool.connect();
   let broken: Error | undefined;
+  // A connection that is lost says so by an event as well, which unheard would end the process.
+  const lost = (error: Error) => {
+    broken = error;
+  };
+  client.on('error', lost);
   try {
     await client.query('begin');
     const result = await work({ db: drizzle(client) });
@@ -27,6 +32,7 @@ export async function transaction<T>(
     });
     throw error;
   } finally {
+    client.off('error', lost);
     client.release(broken);
   }
 }
