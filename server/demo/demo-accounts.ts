@@ -14,5 +14,8 @@ export const demoAccounts: readonly DemoAccount[] = [
   { name: 'Samir Haddad', email: 'samir.haddad@ternquay-port.example', role: 'reader' },
 ];
 
+export const isDemoAccount = (email: string) =>
+  demoAccounts.some((account) => account.email === email);
+
 /** Not a secret: the sign-in page shows it in demo mode. */
 export const demoPassword = 'ferry hall columns';

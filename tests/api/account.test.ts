@@ -147,6 +147,16 @@ it('lets a one-time link set the password once, within 72 hours', async () => {
   expect(JSON.stringify(rows)).not.toContain(token);
 });
 
+it('ends every other link of a person with the first that is used', async () => {
+  const { id } = await person('eleven');
+  const link = () => transaction(api.deps.pool, (tx) => makeWelcomeToken(tx, id, api.deps.now()));
+  const [first, second] = [await link(), await link()];
+  const body = { password: 'set by the one-time link' };
+  const accept = (token: string) => api.client().call('acceptWelcome', { params: { token }, body });
+  expect((await accept(second)).status).toBe(200);
+  expect((await accept(first)).status).toBe(404);
+});
+
 it('uses a one-time link once even when it is opened twice at the same moment', async () => {
   const { id } = await person('ten');
   const token = await transaction(api.deps.pool, (tx) => makeWelcomeToken(tx, id, api.deps.now()));

@@ -1,5 +1,9 @@
+import { createServer } from 'node:http';
 import { afterAll, beforeAll, expect, it } from 'vitest';
+import { createApp } from '#server/app.ts';
 import { seedDemo } from '#server/demo/seed-demo.ts';
+import { makeDeps } from '#server/deps.ts';
+import { apiClient } from './support/api-client.ts';
 import { type Api, startApi } from './support/start-api.ts';
 
 let api: Api;
@@ -45,6 +49,25 @@ it('holds the scenario once, with every verdict and some inputs not confirmed', 
     ['LRFD', 'us'],
     ['ASD', 'si'],
   ]);
+});
+
+it('admits none of the demo accounts outside demo mode, signed in before or not', async () => {
+  const deps = makeDeps(api.deps.env);
+  const server = createServer(createApp(deps));
+  await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
+  const { demo } = (await api.client().call('showSession')).body;
+  const [{ email }] = demo.accounts;
+  const before = api.client();
+  const signedIn = await before.signIn(email, demo.password);
+  expect(signedIn.status).toBe(200);
+  const cookies = [signedIn.headers['set-cookie']].flat().map((cookie) => cookie?.split(';')[0]);
+  const headers = { Cookie: cookies.join('; ') };
+  expect((await before.call('showDesk', { headers })).status).toBe(200);
+  expect((await apiClient(server).call('showDesk', { headers })).status).toBe(401);
+  expect((await apiClient(server).signIn(email, demo.password)).status).toBe(401);
+  server.closeAllConnections();
+  server.close();
+  await deps.close();
 });
 
 it('has no accounts to show outside demo mode', async () => {

@@ -1,6 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { accountScope } from '#server/audit/scope-of.ts';
 import { writeAudit } from '#server/audit/write-audit.ts';
+import { networkOf } from '#server/auth/network-of.ts';
 import { hashPassword } from '#server/auth/password.ts';
 import { loadViewer } from '#server/auth/viewer.ts';
 import { users } from '#server/db/schema/people.ts';
@@ -15,7 +16,7 @@ import { findWelcome, useWelcomeToken } from './welcome-token.ts';
 /** Sets the first password by the one-time link, which is used up, and signs in. */
 export const acceptWelcome: Handler<typeof account.acceptWelcome> = async (context) => {
   const { deps, auth, req, params, body } = context;
-  await deps.limits.spend('welcome', req.ip ?? '');
+  await deps.limits.spend('welcome', networkOf(req.ip));
   if (!(await findWelcome(deps.db, params.token, deps.now()))) throw notFound();
   const passwordHash = await hashPassword(body.password);
   const viewer = await transaction(deps.pool, async (tx) => {

@@ -1,6 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { accountScope } from '#server/audit/scope-of.ts';
 import { writeAudit } from '#server/audit/write-audit.ts';
+import { networkOf } from '#server/auth/network-of.ts';
 import { memberships, users } from '#server/db/schema/people.ts';
 import { transaction } from '#server/db/transaction.ts';
 import type { Deps } from '#server/deps.ts';
@@ -13,11 +14,11 @@ import { sessionStateOf } from './session-state.ts';
 export const signIn: Handler<typeof account.signIn> = async (context) => {
   const { deps, auth, req, res, body } = context;
   const email = body.email.trim().toLowerCase();
-  const address = req.ip ?? '';
+  const address = networkOf(req.ip);
   await deps.limits.spend('signInOfAddress', address);
   await deps.limits.spend('signInOfAccount', `${email} ${address}`);
   await deps.limits.spend('signInOfAccountAnywhere', email);
-  const viewer = await auth.checkPassword(req, res);
+  const viewer = await auth.checkPassword({ email, password: body.password }, req, res);
   if (!viewer) {
     // Not awaited: the answer takes as long where there is no such account.
     noteRefusal(deps, email).catch((err) => deps.log.error({ err }, 'refusal not noted'));
@@ -25,10 +26,11 @@ export const signIn: Handler<typeof account.signIn> = async (context) => {
   }
   await deps.limits.reset('signInOfAccount', `${email} ${address}`);
   await deps.limits.reset('signInOfAccountAnywhere', email);
-  await auth.begin(req, viewer);
+  // First the entry: no session without one.
   await transaction(deps.pool, (tx) =>
     writeAudit(tx, accountScope(deps, viewer), { action: 'account.signed-in' }),
   );
+  await auth.begin(req, viewer);
   return sessionStateOf(context);
 };
 

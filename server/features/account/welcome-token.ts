@@ -30,12 +30,17 @@ export async function findWelcome(db: Db, token: string, now: Date) {
   return found ?? null;
 }
 
-/** Uses a token up; gives the person's id, or null where it cannot be used (any more). */
+/** Uses a token up, and every other of the person; gives the person's id, or null where it cannot be used (any more). */
 export async function useWelcomeToken(tx: Transaction, token: string, now: Date) {
   const [used] = await tx.db
     .update(welcomes)
     .set({ usedAt: now })
     .where(usable(token, now))
     .returning({ userId: welcomes.userId });
-  return used?.userId ?? null;
+  if (!used) return null;
+  await tx.db
+    .update(welcomes)
+    .set({ usedAt: now })
+    .where(and(eq(welcomes.userId, used.userId), isNull(welcomes.usedAt)));
+  return used.userId;
 }
