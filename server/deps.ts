@@ -4,6 +4,8 @@ import { type Logger, pino } from 'pino';
 import { type Limits, makeLimits, type RateLimitSettings } from './auth/limits.ts';
 import type { Db } from './db/transaction.ts';
 import type { Env } from './env.ts';
+import { loggedError } from './http/logged-error.ts';
+import { makeTurns, type TakeTurn } from './http/turns.ts';
 import { makeRuns, type Runs } from './runs/runs.ts';
 
 /** Everything a handler may use of the outside world, made once at start. */
@@ -14,6 +16,7 @@ export interface Deps {
   readonly log: Logger;
   readonly limits: Limits;
   readonly runs: Runs;
+  readonly takeTurn: TakeTurn;
   readonly now: () => Date;
   /** The demo's accounts are shown on the sign-in page. */
   readonly demo: boolean;
@@ -30,7 +33,7 @@ export interface DepsOptions {
 /** Opens the pool and makes the rest; `close` when done. */
 export function makeDeps(env: Env, options: DepsOptions = {}): Deps {
   // Standard output is for the one line that says where it serves.
-  const log = pino({ level: env.logLevel }, pino.destination(2));
+  const log = pino({ level: env.logLevel, serializers: { err: loggedError } }, pino.destination(2));
   const pool = new pg.Pool({
     connectionString: env.databaseUrl,
     max: 20,
@@ -47,6 +50,7 @@ export function makeDeps(env: Env, options: DepsOptions = {}): Deps {
     limits: makeLimits(pool, options.rateLimits),
     now: options.now ?? (() => new Date()),
     runs,
+    takeTurn: makeTurns(),
     demo: options.demo ?? false,
     close: async () => {
       await runs.close();

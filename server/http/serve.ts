@@ -24,7 +24,10 @@ export function serve(
   router[method](contract.path, async (req, res) => {
     res.locals.route = `${contract.method} ${contract.path}`;
     const context = await contextOf(deps, auth, contract, req, res);
-    const answer: unknown = await handler(context);
+    const work = async (): Promise<unknown> => handler(context);
+    const permitted = contract.access.who === 'permitted' ? req.user : null;
+    const answer =
+      permitted && changes(req) ? await deps.takeTurn(permitted.userId, work) : await work();
     if ('file' in contract.answer) sendFile(res, contract.answer, answer as FileContent);
     else res.json(contract.answer.parse(answer));
   });

@@ -1,70 +1,104 @@
 import { Worker } from 'node:worker_threads';
-import type { TaskName, Tasks } from './tasks.ts';
+import { type OrderedBy, Orders, type Waiting } from './orders.ts';
+import type { Order, TaskName, Tasks } from './tasks.ts';
 
-interface Pending {
-  readonly resolve: (made: unknown) => void;
-  readonly reject: (error: unknown) => void;
-}
+type Answer = { made: unknown } | { error: unknown };
 
-type Answer = { number: number; made: unknown } | { number: number; error: unknown };
-
-/** Longer than any report of 500 members takes; then the thread is given up. */
+/** Longer than the largest report takes; then the thread is given up. */
 const patience = 10 * 60_000;
+/** Of a thread; where it is not enough, the order fails and not the process. */
+const megabytes = 2048;
+
+const ended = () => new Error('the computing thread has ended');
 
 /**
- * A thread that computes, so that the web process goes on answering. It starts with the first
- * order; if it dies, what it had before it fails and the next order starts another one.
+ * A thread that computes, so that the web process goes on answering: one order after another. It
+ * starts with the first; if it dies, the order in work fails and another thread does the next.
  */
 export class RunThread {
   private worker: Worker | null = null;
-  private readonly pending = new Map<number, Pending>();
-  private number = 0;
+  private readonly orders = new Orders();
+  private inWork: Waiting | null = null;
+  private timer: NodeJS.Timeout | undefined;
 
-  /** Has a thing made. Rejects with what the making threw. */
+  /**
+   * Has a thing made. Rejects with what the making threw, with `too-many` where the person has
+   * other orders, and with the signal's reason when they have gone.
+   */
   async make<Name extends TaskName>(
     task: Name,
     given: Tasks[Name]['given'],
+    by?: OrderedBy,
   ): Promise<Tasks[Name]['made']> {
-    const worker = this.started();
-    this.number += 1;
-    const { number } = this;
+    by?.signal.throwIfAborted();
+    let left: (() => void) | undefined;
     const made = new Promise<unknown>((resolve, reject) => {
-      this.pending.set(number, { resolve, reject });
+      // Task and what is given to it come as the pair that `Order` is.
+      const ordered = { order: { task, given } as Order, by, resolve, reject };
+      this.orders.add(ordered, this.inWork);
+      left = () => this.forget(ordered);
+      by?.signal.addEventListener('abort', left);
+      this.next();
     });
-    worker.ref();
-    worker.postMessage({ number, order: { task, given } });
-    const timer = setTimeout(() => void worker.terminate(), patience);
-    timer.unref();
     try {
       // What a task makes is what `make` in the thread returns for it.
       return (await made) as Tasks[Name]['made'];
     } finally {
-      clearTimeout(timer);
-      this.pending.delete(number);
-      if (this.pending.size === 0) worker.unref();
+      if (left) by?.signal.removeEventListener('abort', left);
     }
   }
 
+  /** Ends the thread; what waits fails. */
   async close(): Promise<void> {
+    for (const { reject } of this.orders.removeAll()) reject(ended());
     await this.worker?.terminate();
+  }
+
+  private next(): void {
+    if (this.inWork) return;
+    this.inWork = this.orders.take();
+    if (!this.inWork) {
+      this.worker?.unref();
+      return;
+    }
+    const worker = this.started();
+    worker.ref();
+    this.timer = setTimeout(() => void worker.terminate(), patience).unref();
+    worker.postMessage(this.inWork.order);
+  }
+
+  /** Ends the order in work by `end` and begins the next. */
+  private done(end: (waiting: Waiting) => void): void {
+    clearTimeout(this.timer);
+    const done = this.inWork;
+    this.inWork = null;
+    if (done) end(done);
+    this.next();
+  }
+
+  private forget(ordered: Waiting): void {
+    ordered.reject(ordered.by?.signal.reason);
+    if (this.inWork === ordered) void this.worker?.terminate();
+    else this.orders.remove(ordered);
   }
 
   private started(): Worker {
     if (this.worker) return this.worker;
     const url = new URL('./start-run-thread.mjs', import.meta.url);
-    const worker = new Worker(url, { execArgv: [] });
+    const resourceLimits = { maxOldGenerationSizeMb: megabytes };
+    const worker = new Worker(url, { execArgv: [], resourceLimits });
     worker.on('message', (answer: Answer) => {
-      const waiting = this.pending.get(answer.number);
-      if ('error' in answer) waiting?.reject(answer.error);
-      else waiting?.resolve(answer.made);
+      this.done(({ resolve, reject }) =>
+        'error' in answer ? reject(answer.error) : resolve(answer.made),
+      );
     });
     const gone = (error: unknown) => {
-      if (this.worker === worker) this.worker = null;
-      for (const { reject } of this.pending.values()) reject(error);
-      this.pending.clear();
+      if (this.worker !== worker) return;
+      this.worker = null;
+      this.done(({ reject }) => reject(error));
     };
     worker.on('error', gone);
-    worker.on('exit', () => gone(new Error('the computing thread has ended')));
+    worker.on('exit', () => gone(ended()));
     this.worker = worker;
     return worker;
   }

@@ -24,6 +24,35 @@ it('answers each order with its own result', async () => {
   expect(verdicts).toEqual(together);
 });
 
+const by = (person: string) => {
+  const gone = new AbortController();
+  return { gone, person, signal: gone.signal };
+};
+
+it('takes three orders of one person at a time, beside those of others', async () => {
+  const orders = [1, 2, 3].map(() => thread.make('summaries', given, by('one')));
+  await expect(thread.make('summaries', given, by('one'))).rejects.toMatchObject({
+    code: 'too-many',
+  });
+  orders.push(thread.make('summaries', given, by('two')));
+  expect(await Promise.all(orders)).toHaveLength(4);
+  expect(await thread.make('summaries', given, by('one'))).toHaveLength(members.length);
+});
+
+it('gives up what nobody waits for any more, in work or not, and does the rest', async () => {
+  const [inWork, waiting] = [by('one'), by('one')];
+  const many = { ...given, members: Array.from({ length: 2000 }, () => members).flat() };
+  const failures = [
+    expect(thread.make('summaries', many, inWork)).rejects.toThrow('aborted'),
+    expect(thread.make('summaries', many, waiting)).rejects.toThrow('aborted'),
+  ];
+  const other = thread.make('summaries', given, by('two'));
+  waiting.gone.abort();
+  inWork.gone.abort();
+  await Promise.all(failures);
+  expect(await other).toHaveLength(members.length);
+});
+
 it('rejects with what the making threw, and goes on', async () => {
   const broken = { basis: hallBasis, members: null } as unknown as Tasks['record']['given'];
   await expect(thread.make('record', broken)).rejects.toThrow(TypeError);

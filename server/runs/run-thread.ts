@@ -17,10 +17,10 @@ function make(order: Order) {
   }
 }
 
-parentPort?.on('message', async ({ number, order }: { number: number; order: Order }) => {
+parentPort?.on('message', async (order: Order) => {
   try {
-    parentPort?.postMessage({ number, made: await make(order) });
+    parentPort?.postMessage({ made: await make(order) });
   } catch (error) {
-    parentPort?.postMessage({ number, error });
+    parentPort?.postMessage({ error });
   }
 });

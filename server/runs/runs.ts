@@ -1,14 +1,15 @@
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import type { MemberDraft, MemberSummary } from '#shared/contracts/members.ts';
+import type { OrderedBy } from './orders.ts';
 import { RunThread } from './run-thread-client.ts';
 import type { Drafts, Tasks } from './tasks.ts';
+import { tooLarge } from './too-large.ts';
 
 /** Everything that is computed of a calculation on the server. */
 export interface Runs {
   summarise(basis: BasisDraft, id: string, draft: MemberDraft): Promise<MemberSummary>;
-  summariseAll(drafts: Drafts): Promise<MemberSummary[]>;
-  record(drafts: Drafts): Promise<Tasks['record']['made']>;
-  report(given: Tasks['report']['given']): Promise<Tasks['report']['made']>;
+  record(drafts: Drafts, by: OrderedBy): Promise<Tasks['record']['made']>;
+  report(given: Tasks['report']['given'], by: OrderedBy): Promise<Tasks['report']['made']>;
   close(): Promise<void>;
 }
 
@@ -22,9 +23,8 @@ export function makeRuns(): Runs {
       if (!summary) throw new Error('a member was given and none was summarised');
       return summary;
     },
-    summariseAll: (drafts) => short.make('summaries', drafts),
-    record: (drafts) => long.make('record', drafts),
-    report: (given) => long.make('report', given),
+    record: async (drafts, by) => tooLarge(drafts) ?? long.make('record', drafts, by),
+    report: async (given, by) => tooLarge(given.drafts) ?? long.make('report', given, by),
     close: async () => {
       await Promise.all([short.close(), long.close()]);
     },

@@ -41,6 +41,17 @@ it('refuses what is not JSON', async () => {
   expect((await post('application/x-www-form-urlencoded', 'draft=1')).status).toBe(415);
 });
 
+it('refuses what is not packed as it says', async () => {
+  const { client } = world.of.engineer;
+  const { body } = await client.call('showSession');
+  const answer = await client.agent
+    .post(path())
+    .set({ Origin: originOf(world.api.server), [csrfHeader]: body.csrfToken })
+    .set({ 'Content-Encoding': 'gzip', 'Content-Type': 'application/json' })
+    .send('{}');
+  expect(answer.body).toMatchObject({ status: 400, detail: 'The body cannot be read.' });
+});
+
 it('names every place that is wrong', async () => {
   const answer = await save({
     ...memberDraft,

@@ -1,16 +1,15 @@
 import { eq } from 'drizzle-orm';
 import { auditScope } from '#server/audit/scope-of.ts';
 import { writeAudit } from '#server/audit/write-audit.ts';
-import { calculations, members } from '#server/db/schema/calculations.ts';
+import { calculations } from '#server/db/schema/calculations.ts';
 import { users } from '#server/db/schema/people.ts';
-import { type Transaction, transaction } from '#server/db/transaction.ts';
-import { draftOf, summaryColumns } from '#server/features/members/stored-member.ts';
+import { transaction } from '#server/db/transaction.ts';
+import { summariseAgain } from '#server/features/members/summarise-again.ts';
 import { AppError } from '#server/http/app-error.ts';
 import type { Handler } from '#server/http/handler.ts';
 import { refuseTakenNumber } from '#server/http/number-taken.ts';
-import type { Runs } from '#server/runs/runs.ts';
 import { canonicalText } from '#shared/calc/hashes.ts';
-import type { BasisDraft, calculations as contracts } from '#shared/contracts/calculations.ts';
+import type { calculations as contracts } from '#shared/contracts/calculations.ts';
 import { lockCalculation } from './lock-calculation.ts';
 import { loadCalculation } from './queries.ts';
 
@@ -37,7 +36,7 @@ export const updateCalculation: Handler<typeof contracts.updateCalculation> = as
         ...{ version: version + 1, changedBy: viewer.userId, changedAt: deps.now() },
       })
       .where(eq(calculations.id, calculationId));
-    await runMembersAgain(tx, deps.runs, calculationId, after.basis);
+    await summariseAgain(tx, deps.runs, calculationId, after.basis);
     const event = { action: 'calculation.updated', before, after } as const;
     await writeAudit(tx, auditScope(context, calculationId), event);
   });
@@ -48,21 +47,3 @@ export const updateCalculation: Handler<typeof contracts.updateCalculation> = as
   );
   return loadCalculation(deps.db, viewer, calculationId);
 };
-
-async function runMembersAgain(
-  tx: Transaction,
-  runs: Runs,
-  calculationId: string,
-  basis: BasisDraft,
-) {
-  const stored = await tx.db.select().from(members).where(eq(members.calculationId, calculationId));
-  const drafts = stored.map((member) => ({ id: member.id, draft: draftOf(member) }));
-  const summaries = await runs.summariseAll({ basis, members: drafts });
-  for (const [index, summary] of summaries.entries()) {
-    const set = summaryColumns(summary);
-    await tx.db
-      .update(members)
-      .set(set)
-      .where(eq(members.id, drafts[index]?.id ?? ''));
-  }
-}

@@ -1,23 +1,24 @@
-import { eq, ne } from 'drizzle-orm';
-import { calculations, members } from '#server/db/schema/calculations.ts';
+import { ne } from 'drizzle-orm';
+import { members } from '#server/db/schema/calculations.ts';
+import { transaction } from '#server/db/transaction.ts';
 import type { Deps } from '#server/deps.ts';
+import { lockCalculation } from '#server/features/calculations/lock-calculation.ts';
 import { ENGINE_VERSION } from '#shared/calc/engine.ts';
-import type { BasisDraft } from '#shared/contracts/calculations.ts';
-import { draftOf, summaryColumns } from './stored-member.ts';
+import { summariseAgain } from './summarise-again.ts';
 
-/** Runs again what an older engine ran, before anyone reads it in a list. */
-export async function refreshSummaries({ db, runs }: Deps): Promise<void> {
+/**
+ * Runs again what an older engine ran, before anyone reads it in a list. Another process may serve
+ * meanwhile: a calculation is locked, so that no summary is of a draft that has changed since.
+ */
+export async function refreshSummaries({ db, pool, runs }: Deps): Promise<void> {
   const old = await db
-    .select({ member: members, basis: calculations.basis })
+    .selectDistinct({ calculationId: members.calculationId })
     .from(members)
-    .innerJoin(calculations, eq(calculations.id, members.calculationId))
     .where(ne(members.summaryEngine, ENGINE_VERSION));
-  for (const { member, basis } of old) {
-    const summary = await runs.summarise(
-      JSON.parse(basis) as BasisDraft,
-      member.id,
-      draftOf(member),
-    );
-    await db.update(members).set(summaryColumns(summary)).where(eq(members.id, member.id));
+  for (const { calculationId } of old) {
+    await transaction(pool, async (tx) => {
+      const { basis } = await lockCalculation(tx, calculationId);
+      await summariseAgain(tx, runs, calculationId, basis);
+    });
   }
 }
