@@ -58,6 +58,9 @@ export function createApp(deps: Deps, clientFolder?: string): Express {
     throw notFound();
   });
   if (clientFolder) app.use(serveClient(clientFolder));
+  app.use(() => {
+    throw notFound();
+  });
   app.use(handleErrors(deps.log));
   return app;
 }

@@ -15,7 +15,7 @@ export function serveClient(folder: string): Router {
   );
   router.use(express.static(folder, { index: false, dotfiles: 'ignore' }));
   router.get('/{*page}', (_req, res) => {
-    res.sendFile(join(folder, 'index.html'), { cacheControl: false }, (error) => {
+    res.sendFile('index.html', { root: folder, cacheControl: false }, (error) => {
       if (error && !res.headersSent) {
         res.status(503).type('text/plain').send('The client is not built.');
       }

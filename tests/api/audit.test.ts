@@ -107,6 +107,21 @@ it('writes nothing when the change is refused or changes nothing', async () => {
   expect(await since(before)).toEqual([]);
 });
 
+it.each(['updateProject', 'updateDrawing'] as const)(
+  'writes %s once when it is sent twice',
+  async (route) => {
+    const caller = world.of.engineer;
+    const call = await validCalls[route]({ world, calculationId: world.calculationId, caller });
+    const renamed = { ...call, body: { ...call.body, title: `once ${route}` } };
+    const before = await lastId();
+    const first = await caller.client.call(route, renamed);
+    const second = await caller.client.call(route, renamed);
+    expect(second.status).toBe(200);
+    expect(second.body).toEqual(first.body);
+    expect(await since(before)).toHaveLength(1);
+  },
+);
+
 describe.each(['owner', 'web'] as const)('the %s role', (role) => {
   it.each([
     'update audit set actor_id = null',

@@ -9,11 +9,14 @@ import { type Api, startApi } from './support/start-api.ts';
 const folder = mkdtempSync(join(tmpdir(), 'stanchion-client-'));
 let api: Api;
 beforeAll(async () => {
-  const client = join(folder, 'client');
+  // A clone may lie in a hidden folder.
+  const client = join(folder, '.hidden', 'client');
   mkdirSync(join(client, 'assets'), { recursive: true });
   writeFileSync(join(client, 'index.html'), '<title>the page</title>');
   writeFileSync(join(client, 'assets', 'main-1a2b.js'), 'run()');
-  writeFileSync(join(folder, 'secret.txt'), 'not for the web');
+  for (const outside of [folder, join(folder, '.hidden')]) {
+    writeFileSync(join(outside, 'secret.txt'), 'not for the web');
+  }
   writeFileSync(join(client, '.hidden'), 'not for the web');
   api = await startApi({ clientFolder: client });
 });
@@ -57,6 +60,12 @@ it('serves files that never change for a year, and no page in place of an absent
 
 it('does not serve the page below /api', async () => {
   const { status, headers } = await get('/api/desk/nothing');
+  expect(status).toBe(404);
+  expect(headers['content-type']).toContain('application/problem+json');
+});
+
+it('answers what is no page as a problem', async () => {
+  const { status, headers } = await api.client().agent.post('/desk');
   expect(status).toBe(404);
   expect(headers['content-type']).toContain('application/problem+json');
 });

@@ -113,6 +113,34 @@ it('gives the input file of the command line, and its record with hashes', async
   expect(hashesOf(record)).toEqual({ resultHash, snapshotHash });
 });
 
+it('names downloads by the whole number, with signs that file names take', async () => {
+  const { number: before, title, version, basis } = await show();
+  const number = `a/b\\c"d:${before}\u202e`;
+  await call('updateCalculation', {
+    ...{ params: { calculationId }, body: { number, title, version, basis } },
+  });
+  const input = await call('downloadInput', { params: { calculationId } });
+  expect(input.headers['content-disposition']).toBe(
+    `attachment; filename=a-b-c-d-${before}-.input.json`,
+  );
+});
+
+it('records no more combinations than can be waited for', async () => {
+  const [row] = memberDraft.combinations;
+  const combinations = Array.from({ length: 500 }, (_, index) => ({ ...row, id: `c${index}` }));
+  for (const mark of ['X', 'Y', 'Z']) await add(mark, { combinations });
+  for (const route of ['showRecord', 'downloadReport'] as const) {
+    const refused = await call(route, { params: { calculationId } });
+    expect(refused.status).toBe(422);
+    expect(refused.body.problems).toEqual([
+      {
+        path: 'members',
+        message: 'hold 1503 combinations; at most 1000 are recorded here at once',
+      },
+    ]);
+  }
+});
+
 it('makes the report a PDF that is called by number and revision', async () => {
   const report = await call('downloadReport', { params: { calculationId } });
   expect(report.headers).toMatchObject({

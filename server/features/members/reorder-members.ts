@@ -19,6 +19,7 @@ export const reorderMembers: Handler<typeof contracts.reorderMembers> = async (c
     const present = all.filter(({ member }) => member.deletedAt === null);
     const before = present.map(({ member }) => member.id);
     if ([...before].sort().join() !== [...memberIds].sort().join()) throw movedOn(all, before);
+    if (before.join() === memberIds.join()) return;
     for (const [index, id] of memberIds.entries()) {
       await tx.db
         .update(members)

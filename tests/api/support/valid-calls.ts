@@ -68,7 +68,10 @@ export const validCalls: Record<RouteName, Prepare> = {
     params: ofProject(target),
     body: { number: unique(), title: '', revision: 'A', status: 'preliminary' },
   }),
-  updateDrawing: newDrawing,
+  updateDrawing: async (target) => {
+    const { params, body } = await newDrawing(target);
+    return { params, body: { ...body, revision: 'B' } };
+  },
   deleteDrawing: async (target) => ({ params: (await newDrawing(target)).params }),
   restoreDrawing: async (target) => {
     const { params } = await newDrawing(target);
