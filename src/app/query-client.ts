@@ -1,11 +1,11 @@
 import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
-import { signedOut } from '#client/features/account/queries.ts';
 import { keys } from '#client/lib/keys.ts';
 import { isProblem } from '#client/lib/problem.ts';
 
 /** A session that ended elsewhere: the gate then asks to sign in again, where the person was. */
 const noticeSignOut = (error: unknown) => {
-  if (isProblem(error, 'signed-out')) queryClient.setQueryData(keys.session, signedOut);
+  if (isProblem(error, 'signed-out'))
+    void queryClient.invalidateQueries({ queryKey: keys.session });
 };
 
 export const queryClient: QueryClient = new QueryClient({

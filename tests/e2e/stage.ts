@@ -10,6 +10,8 @@ export interface Opened {
 
 export interface Stage {
   readonly origin: string;
+  /** The application's database, as its owner. */
+  readonly databaseUrl: string;
   /** A page of a person of its own; what goes wrong in it fails the test unless it is expected. */
   open(options?: { width?: number; expected?: (text: string) => boolean }): Promise<Opened>;
   /** The same, signed in as one of the demo's people. */
@@ -42,6 +44,9 @@ export function openStage(): Stage {
   const stage: Stage = {
     get origin() {
       return application.origin;
+    },
+    get databaseUrl() {
+      return application.ownerUrl;
     },
     async open({ width = 1280, expected } = {}) {
       const context = await browser.newContext({

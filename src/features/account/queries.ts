@@ -1,10 +1,7 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
 import { call } from '#client/lib/api.ts';
 import { keys } from '#client/lib/keys.ts';
-import type { Person, SessionState } from '#shared/contracts/account.ts';
-
-/** What is known until the session is asked for again. */
-export const signedOut: SessionState = { user: null, csrfToken: '', demo: null };
+import type { Person } from '#shared/contracts/account.ts';
 
 export const sessionQuery = queryOptions({
   queryKey: keys.session,

@@ -3,6 +3,12 @@ import type { DraftSource } from '#shared/contracts/members.ts';
 
 export type SourceKind = DraftSource['kind'];
 
+/** Where a value comes from, and whether somebody stands for it. */
+export interface StatedBy {
+  readonly source?: DraftSource | undefined;
+  readonly confirmed: boolean;
+}
+
 export const sourceKinds: readonly { readonly value: SourceKind; readonly text: string }[] = [
   { value: 'typed', text: 'typed by hand' },
   { value: 'file', text: 'from a file' },

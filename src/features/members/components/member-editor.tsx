@@ -14,14 +14,12 @@ import { useSheetPlace } from '../use-sheet-place.ts';
 import { ForcesPaper } from './forces-paper.tsx';
 import { InputsMargin } from './inputs-margin.tsx';
 import { MemberFormContext } from './member-form-context.ts';
-import { MemberStrip } from './member-strip.tsx';
+import { type CentreView, MemberStrip } from './member-strip.tsx';
 import { SheetCautions } from './sheet-cautions.tsx';
 import { SheetContents } from './sheet-contents.tsx';
 import { SheetPaper } from './sheet-paper.tsx';
 import { goToControl, StaleNotice } from './stale-notice.tsx';
 import { TraceMargin } from './trace-margin.tsx';
-
-export type CentreView = 'sheet' | 'forces';
 
 /** A member: inputs at the left, its live sheet in the middle, the trace at the right. */
 export function MemberEditor(props: {

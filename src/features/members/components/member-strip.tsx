@@ -4,7 +4,8 @@ import { Button } from '#client/ui/button.tsx';
 import { classNames } from '#client/ui/class-names.ts';
 import { Hint } from '#client/ui/hint.tsx';
 import type { MemberDraft } from '#shared/contracts/members.ts';
-import type { CentreView } from './member-editor.tsx';
+
+export type CentreView = 'sheet' | 'forces';
 
 const views: readonly { readonly value: CentreView; readonly text: string }[] = [
   { value: 'sheet', text: 'Sheet' },

@@ -12,6 +12,7 @@ export function SheetContents(props: {
   onGo: (address: string) => void;
 }) {
   const entries = entriesOf(props.blocks);
+  if (entries.length === 0) return null;
   return (
     <nav aria-label="Sections of the sheet" className="mt-6">
       <h2 className="caps mb-1">On this sheet</h2>

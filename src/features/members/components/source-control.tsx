@@ -3,14 +3,9 @@ import { useState } from 'react';
 import { Hint } from '#client/ui/hint.tsx';
 import { SourceRingButton } from '#client/ui/source-ring.tsx';
 import type { DraftSource } from '#shared/contracts/members.ts';
-import { draftSourceLetter, draftSourceText } from '../source-words.ts';
+import { draftSourceLetter, draftSourceText, type StatedBy } from '../source-words.ts';
 import { useMemberForm } from './member-form-context.ts';
 import { SourceForm } from './source-form.tsx';
-
-export interface StatedBy {
-  readonly source?: DraftSource | undefined;
-  readonly confirmed: boolean;
-}
 
 /** The ring beside a given value: explains its source on hover and focus, opens it to be changed. */
 export function SourceControl(props: {

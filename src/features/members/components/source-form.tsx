@@ -3,8 +3,13 @@ import { Button } from '#client/ui/button.tsx';
 import { ProblemText } from '#client/ui/field.tsx';
 import { SourceRing } from '#client/ui/source-ring.tsx';
 import type { DraftSource } from '#shared/contracts/members.ts';
-import { draftSourceLetter, emptySource, sourceKinds, sourceLack } from '../source-words.ts';
-import type { StatedBy } from './source-control.tsx';
+import {
+  draftSourceLetter,
+  emptySource,
+  type StatedBy,
+  sourceKinds,
+  sourceLack,
+} from '../source-words.ts';
 import { SourceDetails } from './source-details.tsx';
 
 /** Kind, details and state of a source. */
