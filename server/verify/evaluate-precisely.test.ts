@@ -54,6 +54,12 @@ describe('the second evaluator', () => {
     expect(reproduces('a+b', { a: 1e6, b: 1 }, 1000001 * (1 + 2e-9))).toBe(false);
   });
 
+  it('takes operands as the doubles they are, where the last bit of one counts', () => {
+    // arccos(1 − x) = √(2x) (1 + x/12 + …) by its series; x = 2⁻³⁰ is exact in binary only.
+    const x = 2 ** -30;
+    expect(reproduces('acos(a)', { a: 1 - x }, Math.sqrt(2 * x) * (1 + x / 12))).toBe(true);
+  });
+
   it('names the symbols of an expression', () => {
     expect([...symbolsIn('pi^2*E/(Lc/r)^2+sqrt(E)')]).toEqual(['E', 'Lc', 'r']);
   });

@@ -57,6 +57,9 @@ const CANCELLED = 1e-3;
 type Scope = Map<string, BigNumber>;
 type Sum = MathNode & { readonly fn: string; readonly args: readonly [MathNode, MathNode] };
 
+/** The very number a double holds, not the shortest decimal that reads as it. */
+const exactly = (value: number): BigNumber => math.bignumber(value.toPrecision(60));
+
 const parsed = new Map<string, MathNode>();
 
 function parse(expression: string): MathNode {
@@ -72,7 +75,7 @@ function scopeOf(expression: string, operands: Readonly<Record<string, number>>)
   for (const name of symbolsIn(expression))
     if (!Object.hasOwn(operands, name)) throw new Error(`${expression}: no operand ${name}`);
   return new Map([
-    ...Object.entries(operands).map(([name, value]) => [name, math.bignumber(value)] as const),
+    ...Object.entries(operands).map(([name, value]) => [name, exactly(value)] as const),
     ['pi', PI] as const,
   ]);
 }
@@ -98,7 +101,7 @@ export function reproduces(
   const [node, scope] = [parse(expression), scopeOf(expression, operands)];
   const exact = evaluate(node, scope);
   if (!exact.isFinite()) return false;
-  const off = exact.minus(math.bignumber(value)).abs();
+  const off = exact.minus(exactly(value)).abs();
   return (
     off.lessThanOrEqualTo(exact.abs().times(RELATIVE)) ||
     off.lessThanOrEqualTo(cancellation(node, scope, exact))

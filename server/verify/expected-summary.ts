@@ -7,6 +7,7 @@ import { printNumber } from '#shared/units/format.ts';
  * FAILED > NOT OK > NOT CHECKED > OK; a ratio only with OK and NOT OK.
  */
 const RANKED: readonly Verdict[] = ['OK', 'NOT CHECKED', 'NOT OK', 'FAILED'];
+const RATIO = { dec: 3 } as const;
 const hasRatio = (verdict: Verdict): boolean => verdict === 'OK' || verdict === 'NOT OK';
 
 /** The worst of some verdicts; of none, NOT CHECKED. */
@@ -57,7 +58,7 @@ export function expectedOfCombination(
   const checks = lines.filter((l): l is LineOf<'check'> => l.kind === 'check');
   const ratio = Math.max(0, ...checks.map((c) => c.ratio));
   const largest = checks.find((c) => c.ratio === ratio);
-  const ratioText = printNumber(ratio, largest?.print.working ?? { dec: 3 }).text;
+  const ratioText = largest ? printNumber(ratio, largest.print.working ?? RATIO).text : '0.000';
   return { verdict, ratio, ratioText, address: place(largest) };
 }
 

@@ -418,9 +418,9 @@ const wholeCases: readonly Case[] = [
   [
     'a ratio for what is not checked',
     (c) => {
-      memberOf(c, 'C1').summary.ratio = 0;
+      memberOf(c, '柱 1').summary.ratio = 0;
     },
-    { mark: 'C1', address: null },
+    { mark: '柱 1', address: null },
     /says the ratio 0, its lines give null/,
   ],
   [

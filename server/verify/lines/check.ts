@@ -1,6 +1,9 @@
 import type { LineOf } from '#shared/calc/line.ts';
 import { type LineContext, missing } from './line-context.ts';
 
+/** A few bits: a ratio that is a plain number but for them is taken as that number. */
+const TOLERANCE = 1e-14;
+
 /** A check: demand over capacity, and the verdict that the unrounded ratio gives. */
 export function* checkCheck(line: LineOf<'check'>, { valued }: LineContext): Iterable<string> {
   const demand = valued(line.demand);
@@ -10,9 +13,9 @@ export function* checkCheck(line: LineOf<'check'>, { valued }: LineContext): Ite
   if (!demand || (line.capacity !== 1 && !capacity)) return;
   if (demand.dimension !== (capacity?.dimension ?? 'none'))
     yield `puts ${demand.dimension} against ${capacity?.dimension ?? 'a plain limit'}`;
-  // Division is rounded the same everywhere: the ratio is this very number.
   const ratio = demand.value / (capacity?.value ?? 1);
-  if (ratio !== line.ratio) yield `has the ratio ${line.ratio}, its lines give ${ratio}`;
-  const verdict = ratio <= 1 ? 'OK' : 'NOT OK';
-  if (verdict !== line.verdict) yield `says ${line.verdict} at the ratio ${ratio}`;
+  if (!(Math.abs(ratio - line.ratio) <= TOLERANCE * Math.abs(ratio)))
+    yield `has the ratio ${line.ratio}, its lines give ${ratio}`;
+  const verdict = line.ratio <= 1 ? 'OK' : 'NOT OK';
+  if (verdict !== line.verdict) yield `says ${line.verdict} at the ratio ${line.ratio}`;
 }
