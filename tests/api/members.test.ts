@@ -57,6 +57,28 @@ it('deletes a member and restores it to its place, with what it held', async () 
   expect((await call('restoreMember', { params, body: {} })).status).toBe(404);
 });
 
+it('takes no member more than an input holds', async () => {
+  const params = { calculationId, memberId: await idOf('B') };
+  await call('deleteMember', { params });
+  await world.api.deps.pool.query(
+    `insert into members (id, calculation_id, position, draft, summary, summary_engine, version,
+       changed_by, changed_at)
+     select gen_random_uuid(), calculation_id, position + number, draft, summary, summary_engine,
+       version, changed_by, changed_at
+     from members, generate_series(1, 498) number where id = $1`,
+    [await idOf('A')],
+  );
+  const detail = 'A calculation holds at most 500 members.';
+  const one = { calculationId, memberId: await idOf('C') };
+  for (const [route, options] of [
+    ['createMember', { params, body: { draft: memberDraft } }],
+    ['duplicateMember', { params: one, body: {} }],
+    ['restoreMember', { params, body: {} }],
+  ] as const) {
+    expect((await call(route, options)).body).toMatchObject({ status: 400, detail });
+  }
+});
+
 it('runs every member again when the basis changes', async () => {
   const before = await show();
   const body = { number: before.number, title: before.title, version: before.version };

@@ -7,6 +7,7 @@ import { transaction } from '#server/db/transaction.ts';
 import { lockCalculation } from '#server/features/calculations/lock-calculation.ts';
 import type { Handler } from '#server/http/handler.ts';
 import type { members as contracts } from '#shared/contracts/members.ts';
+import { refuseOneTooMany } from './refuse-one-too-many.ts';
 import { draftColumns, memberOf } from './stored-member.ts';
 
 /** Adds a member at the end. */
@@ -15,6 +16,7 @@ export const createMember: Handler<typeof contracts.createMember> = async (conte
   const id = randomUUID();
   return transaction(deps.pool, async (tx) => {
     const { basis } = await lockCalculation(tx, scope.calculationId);
+    await refuseOneTooMany(tx, scope.calculationId);
     const [last] = await tx.db
       .select({ position: max(members.position) })
       .from(members)

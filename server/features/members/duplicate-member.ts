@@ -9,6 +9,7 @@ import type { members as contracts } from '#shared/contracts/members.ts';
 import { copyOfMark } from './copy-of-mark.ts';
 import { lockMember } from './lock-member.ts';
 import { storedMembers } from './queries.ts';
+import { refuseOneTooMany } from './refuse-one-too-many.ts';
 import { draftColumns, draftOf, memberOf } from './stored-member.ts';
 
 /** Adds a copy of a member right after it, under a mark that is free. */
@@ -18,6 +19,7 @@ export const duplicateMember: Handler<typeof contracts.duplicateMember> = async 
   const id = randomUUID();
   return transaction(deps.pool, async (tx) => {
     const { stored, basis } = await lockMember(tx, calculationId, params.memberId, 'present');
+    await refuseOneTooMany(tx, calculationId);
     const all = await storedMembers(tx.db, calculationId);
     const marks = all.map(({ member }) => draftOf(member).mark);
     const original = draftOf(stored);

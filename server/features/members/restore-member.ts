@@ -6,6 +6,7 @@ import { transaction } from '#server/db/transaction.ts';
 import type { Handler } from '#server/http/handler.ts';
 import type { members as contracts } from '#shared/contracts/members.ts';
 import { lockMember } from './lock-member.ts';
+import { refuseOneTooMany } from './refuse-one-too-many.ts';
 import { draftColumns, draftOf, memberOf } from './stored-member.ts';
 
 /** Brings a deleted member back to its place. */
@@ -14,6 +15,7 @@ export const restoreMember: Handler<typeof contracts.restoreMember> = async (con
   return transaction(deps.pool, async (tx) => {
     const { calculationId } = scope;
     const { stored, basis } = await lockMember(tx, calculationId, params.memberId, 'deleted');
+    await refuseOneTooMany(tx, calculationId);
     const draft = draftOf(stored);
     const set = {
       // The basis may have changed since.
