@@ -41,10 +41,20 @@ export async function problemOf(response: Response): Promise<Problem> {
 /** What a person can read of any error. */
 export function reasonOf(error: unknown): string {
   if (!(error instanceof Problem)) return 'Something in this page failed. Load it again.';
+  const places = error.code === 'invalid-request' ? (error.details?.problems ?? []) : [];
+  if (places.length > 0) return places.map(({ message }) => asSentence(message)).join(' ');
   const wait = error.details?.retryAfter;
   if (wait === undefined) return sentence(error.message);
   return `${sentence(error.message)} Try again in ${waitingTime(wait)}.`;
 }
+
+/** Why one field of a request is refused, where the answer names it. */
+export const refusalOf = (error: unknown, path: string): string | undefined => {
+  const found = isProblem(error) && error.details?.problems?.find((place) => place.path === path);
+  return found ? asSentence(found.message) : undefined;
+};
+
+const asSentence = (text: string) => sentence(text.charAt(0).toUpperCase() + text.slice(1));
 
 const sentence = (text: string) => (/[.!?]$/.test(text) ? text : `${text}.`);
 

@@ -40,7 +40,7 @@ describe('the one-time link of a new firm', () => {
   });
 
   it('lets the person change the password afterwards', async () => {
-    const { page } = await stage.open({ expected: (text) => /status of 401/.test(text) });
+    const { page } = await stage.open({ expected: (text) => /status of 400/.test(text) });
     await page.goto('/account');
     await page.getByLabel('E-mail address').fill('anna@alder-yard.example');
     await page.getByLabel('Password', { exact: true }).fill('alder yard first');
@@ -49,7 +49,8 @@ describe('the one-time link of a new firm', () => {
     await page.getByLabel('New password').fill('alder yard second');
     await page.getByLabel('The same once more').fill('alder yard second');
     await page.getByRole('button', { name: 'Change the password' }).click();
-    await page.getByRole('alert').waitFor();
+    await page.locator('[data-problem]').waitFor();
+    expect(await page.getByLabel('Present password').getAttribute('aria-invalid')).toBe('true');
     await page.getByLabel('Present password').fill('alder yard first');
     await page.getByRole('button', { name: 'Change the password' }).click();
     await page.getByText('Password changed').waitFor();

@@ -3,7 +3,7 @@ import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import { inputOf } from '#shared/contracts/draft-input.ts';
 import type { MemberDraft } from '#shared/contracts/members.ts';
 import type { ProblemPlace } from '#shared/contracts/problems.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runCalculation } from '#shared/members/run.ts';
 import { inputProblems } from './input-problems.ts';
 

@@ -1,5 +1,5 @@
 import { type UseFormRegister, useForm } from 'react-hook-form';
-import { reasonOf } from '#client/lib/problem.ts';
+import { reasonOf, refusalOf } from '#client/lib/problem.ts';
 import { useAnnounce } from '#client/ui/announcements.tsx';
 import { Button } from '#client/ui/button.tsx';
 import { Failure } from '#client/ui/state-panels.tsx';
@@ -30,12 +30,14 @@ export function ChangePasswordForm() {
   );
   return (
     <form noValidate onSubmit={submit} className="grid max-w-80 gap-4">
-      {change.error && <Failure title={reasonOf(change.error)} />}
+      {change.error && !refusalOf(change.error, 'current') && (
+        <Failure title={reasonOf(change.error)} />
+      )}
       <TextField
         label="Present password"
         type="password"
         autoComplete="current-password"
-        problem={formState.errors.current?.message}
+        problem={formState.errors.current?.message ?? refusalOf(change.error, 'current')}
         {...register('current', { required: 'Your present password is wanted' })}
       />
       <NewPasswordFields

@@ -1,7 +1,7 @@
 import { useForm } from 'react-hook-form';
 import { useNavigate } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
-import { reasonOf } from '#client/lib/problem.ts';
+import { reasonOf, refusalOf } from '#client/lib/problem.ts';
 import { Button } from '#client/ui/button.tsx';
 import { Dialog } from '#client/ui/dialog.tsx';
 import { Field, fieldClass } from '#client/ui/field.tsx';
@@ -35,11 +35,13 @@ export function NewCalculationDialog(props: { project: Project; onClose: () => v
   return (
     <Dialog title="A new calculation" onClose={props.onClose}>
       <form noValidate onSubmit={submit} className="grid gap-4">
-        {create.error && <Failure title={reasonOf(create.error)} />}
+        {create.error && !refusalOf(create.error, 'number') && (
+          <Failure title={reasonOf(create.error)} />
+        )}
         <div className="grid grid-cols-2 gap-4">
           <TextField
             label="Number"
-            problem={errors.number?.message}
+            problem={errors.number?.message ?? refusalOf(create.error, 'number')}
             {...register('number', { required: 'A calculation has a number' })}
           />
           <TextField

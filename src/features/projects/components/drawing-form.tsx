@@ -1,5 +1,5 @@
 import { useForm } from 'react-hook-form';
-import { isProblem, reasonOf } from '#client/lib/problem.ts';
+import { isProblem, reasonOf, refusalOf } from '#client/lib/problem.ts';
 import { Button } from '#client/ui/button.tsx';
 import { Field, fieldClass } from '#client/ui/field.tsx';
 import { Failure } from '#client/ui/state-panels.tsx';
@@ -42,12 +42,12 @@ export function DrawingForm(props: { projectId: string; drawing?: Drawing; onDon
           {theirs.status}. Save again to put yours in its place, or cancel to keep it.
         </Failure>
       )}
-      {error && !theirs && <Failure title={reasonOf(error)} />}
+      {error && !theirs && !refusalOf(error, 'number') && <Failure title={reasonOf(error)} />}
       <div className="grid grid-cols-[1.2fr_3fr_0.8fr_1.4fr] gap-3">
         <TextField
           label="Number"
           autoFocus
-          problem={errors.number?.message}
+          problem={errors.number?.message ?? refusalOf(error, 'number')}
           {...register('number', { required: 'A drawing has a number' })}
         />
         <TextField label="Title" problem={errors.title?.message} {...register('title')} />

@@ -1,7 +1,7 @@
 import { useForm } from 'react-hook-form';
 import { useNavigate } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
-import { reasonOf } from '#client/lib/problem.ts';
+import { reasonOf, refusalOf } from '#client/lib/problem.ts';
 import { Button } from '#client/ui/button.tsx';
 import { Dialog } from '#client/ui/dialog.tsx';
 import { Failure } from '#client/ui/state-panels.tsx';
@@ -20,8 +20,10 @@ export function NewProjectDialog({ onClose }: { onClose: () => void }) {
   return (
     <Dialog title="A new project" onClose={onClose}>
       <form noValidate onSubmit={submit} className="grid gap-4">
-        {create.error && <Failure title={reasonOf(create.error)} />}
-        <ProjectFields register={register} errors={formState.errors} />
+        {create.error && !refusalOf(create.error, 'number') && (
+          <Failure title={reasonOf(create.error)} />
+        )}
+        <ProjectFields register={register} errors={formState.errors} refusal={create.error} />
         <div className="flex justify-end gap-2">
           <Button onClick={onClose}>Cancel</Button>
           <Button rank="main" type="submit" disabled={create.isPending}>

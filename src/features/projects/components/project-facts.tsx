@@ -60,7 +60,7 @@ function ProjectForm({ project, onDone }: { project: Project; onDone: () => void
       ) : (
         update.error && <Failure title={reasonOf(update.error)} />
       )}
-      <ProjectFields register={register} errors={formState.errors} />
+      <ProjectFields register={register} errors={formState.errors} refusal={update.error} />
       <div className="flex gap-2">
         <Button rank="main" type="submit" disabled={update.isPending}>
           {conflict ? 'Save mine' : 'Save'}

@@ -1,4 +1,5 @@
 import type { FieldErrors, UseFormRegister } from 'react-hook-form';
+import { refusalOf } from '#client/lib/problem.ts';
 import { TextField } from '#client/ui/text-field.tsx';
 import type { ProjectValues } from '../mutations.ts';
 
@@ -9,13 +10,15 @@ const longest = (max: number) => ({
 export function ProjectFields(props: {
   register: UseFormRegister<ProjectValues>;
   errors: FieldErrors<ProjectValues>;
+  /** The error of the last attempt. */
+  refusal: unknown;
 }) {
   const { register, errors } = props;
   return (
     <div className="grid grid-cols-2 gap-4">
       <TextField
         label="Number"
-        problem={errors.number?.message}
+        problem={errors.number?.message ?? refusalOf(props.refusal, 'number')}
         {...register('number', { required: 'A project has a number', ...longest(40) })}
       />
       <TextField
