@@ -1,6 +1,6 @@
 import { sealRecord } from '#shared/calc/hashes.ts';
 import type { CalculationRecord } from '#shared/calc/record.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runCalculation } from '#shared/members/run.ts';
 import { readJson } from './read-file.ts';
 import { UsageError } from './usage-error.ts';

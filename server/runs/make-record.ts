@@ -3,7 +3,7 @@ import type { CalculationRecord } from '#shared/calc/record.ts';
 import { inputOf } from '#shared/contracts/draft-input.ts';
 import { problemsOf } from '#shared/contracts/draft-problems.ts';
 import type { ProblemPlace } from '#shared/contracts/problems.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runCalculation } from '#shared/members/run.ts';
 import type { Drafts } from './tasks.ts';
 

@@ -2,7 +2,7 @@ import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import { type DraftOfMember, inputOf } from '#shared/contracts/draft-input.ts';
 import { problemsOfMember } from '#shared/contracts/draft-problems.ts';
 import type { MemberSummary } from '#shared/contracts/members.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runMember } from '#shared/members/run.ts';
 import { unconfirmedIn } from './unconfirmed-in.ts';
 

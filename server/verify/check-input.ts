@@ -1,6 +1,7 @@
 import { canonicalText } from '#shared/calc/hashes.ts';
 import type { CalculationRecord } from '#shared/calc/record.ts';
-import { type ParsedInput, parseInput, type ResolvedInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
+import type { ParsedInput, ResolvedInput } from '#shared/members/resolved.ts';
 
 /** The record's own input read again; null, with reasons, where it is no input. */
 export function readInput(record: CalculationRecord): {

@@ -45,20 +45,24 @@ export function expectedOfCombination(
   const halt = haltOf(member);
   const noStrength = member.lines.find((l) => l.kind === 'notice' && l.code === 'web-not-compact');
   const bent = lines.some((l) => l.key === 'theory/x/absA');
-  const idle = lines.some((l) => l.kind === 'notice' && l.code === 'no-forces');
+  const idle = lines.find((l) => l.kind === 'notice' && l.code === 'no-forces');
   const own = lines.map(verdictOf).filter((v) => v !== null);
   const open: Verdict[] = noStrength && bent ? ['NOT CHECKED'] : [];
-  const verdict = halt ? (verdictOf(halt) ?? 'OK') : idle ? 'OK' : worst([...own, ...open]);
+  const verdict = halt
+    ? (verdictOf(halt) ?? 'OK')
+    : idle
+      ? 'NOT CHECKED'
+      : worst([...own, ...open]);
   const place = (line: Line | undefined): string | null => (line ? `${id}:${line.key}` : null);
   if (!hasRatio(verdict)) {
-    const reason = lines.find((l) => l.kind === 'notice' && verdictOf(l) === verdict);
+    const reason = idle ?? lines.find((l) => l.kind === 'notice' && verdictOf(l) === verdict);
     const address = halt?.key ?? place(reason) ?? noStrength?.key ?? null;
     return { verdict, ratio: null, ratioText: null, address };
   }
   const checks = lines.filter((l): l is LineOf<'check'> => l.kind === 'check');
   const ratio = Math.max(0, ...checks.map((c) => c.ratio));
   const largest = checks.find((c) => c.ratio === ratio);
-  const ratioText = largest ? printNumber(ratio, largest.print.working ?? RATIO).text : '0.000';
+  const ratioText = largest ? printNumber(ratio, largest.print.working ?? RATIO).text : null;
   return { verdict, ratio, ratioText, address: place(largest) };
 }
 

@@ -1,6 +1,6 @@
 import { placedLines } from '#shared/calc/address.ts';
 import type { CalculationRecord } from '#shared/calc/record.ts';
-import type { ResolvedInput } from '#shared/members/resolve.ts';
+import type { ResolvedInput } from '#shared/members/resolved.ts';
 import { runCalculation } from '#shared/members/run.ts';
 
 export interface RerunProblem {

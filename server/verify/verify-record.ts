@@ -5,7 +5,7 @@ import type { Formula } from '#shared/calc/formula.ts';
 import { canonicalText, hashesOf } from '#shared/calc/hashes.ts';
 import { isValued } from '#shared/calc/line.ts';
 import { type CalculationRecord, type MemberRecord, recordSchema } from '#shared/calc/record.ts';
-import type { ResolvedInput } from '#shared/members/resolve.ts';
+import type { ResolvedInput } from '#shared/members/resolved.ts';
 import { formulaNamed } from '#shared/standards/library.ts';
 import { UNIT_SETS } from '#shared/units/unit-set.ts';
 import { checkCompleteness } from './check-completeness.ts';

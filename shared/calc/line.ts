@@ -31,7 +31,7 @@ const printSchema = z.object({
 });
 
 export const sourceSchema = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('typed'), note: z.string().max(200).optional() }),
+  z.object({ kind: z.literal('typed'), note: z.string().max(400).optional() }),
   z.object({
     kind: z.literal('file'),
     file: z.string().min(1).max(200),

@@ -33,7 +33,11 @@ it('gives what is typed and leaves out what is empty', () => {
   const source = { kind: 'typed' };
   expect(inputOf(basis, [{ id: 'm1', draft }])).toEqual({
     ...{ format: 1, standard: 'aisc360-22', design: 'ASD', units: 'si', constants: 'us' },
-    analysis: { method: 'direct', secondOrder: 'exact', sway: 'none' },
+    analysis: {
+      method: 'direct',
+      secondOrder: 'exact',
+      sway: { value: 'none', source: { kind: 'typed', note: 'S-1' }, confirmed: true },
+    },
     members: [
       {
         ...{ id: 'm1', mark: 'C-1', material: 'A992' },

@@ -20,12 +20,14 @@ export interface DraftOfMember {
  */
 export function inputOf(basis: BasisDraft, members: readonly DraftOfMember[]) {
   const { standard, design, units, constants, analysis } = basis;
-  const { method, secondOrder, includesMemberEffect, sway } = analysis;
+  const { method, secondOrder, includesMemberEffect, sway, swaySource } = analysis;
+  const note = swaySource.trim();
   return {
     format: 1,
     ...{ standard, design, units, constants },
     analysis: {
-      ...{ method, secondOrder, sway },
+      ...{ method, secondOrder },
+      sway: note ? { value: sway, source: { kind: 'typed', note }, confirmed: true } : sway,
       ...(includesMemberEffect === null ? {} : { includesMemberEffect }),
     },
     members: members.map(({ id, draft }) => memberInputOf(id, draft)),

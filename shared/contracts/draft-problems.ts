@@ -1,4 +1,4 @@
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import type { BasisDraft } from './calculations.ts';
 import { type DraftOfMember, inputOf } from './draft-input.ts';
 import type { ProblemPlace } from './problems.ts';

@@ -7,7 +7,7 @@ import type { CompressionStrength } from './compression.ts';
 import { availableMajor, type MajorStrength } from './flexure.ts';
 import type { MemberQuantities, SectionQuantities, SteelQuantities } from './member-lines.ts';
 import { automaticCb } from './modification-factor.ts';
-import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolve.ts';
+import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolved.ts';
 import {
   AXES,
   type Axis,
@@ -111,7 +111,7 @@ function steps(
     return;
   }
   const axial = c.P.value > 0 && m.compression && m.alpha ? { Pr, Pc: m.compression.Pc } : null;
-  if (axial && m.compression && m.alpha && input.analysis.method === 'first-order')
+  if (axial && m.compression?.Pns && m.alpha && input.analysis.method === 'first-order')
     firstOrderAxialLimit(r, m.alpha, Pr, m.compression.Pns);
   const state =
     axial && m.compression && m.alpha && AXES.some((a) => bends(c, a))

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { MemberRecord } from '../calc/record.ts';
-import { parseInput } from './resolve.ts';
+import { parseInput } from './parse-input.ts';
 import { runCalculation } from './run.ts';
 
 /* What the completeness table says is held against the clauses of ANSI/AISC 360-22, by hand. */

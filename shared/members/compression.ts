@@ -13,6 +13,7 @@ import {
   e7Formulas,
   effectiveArea,
   type SlenderElements,
+  type SlenderWidths,
   slenderWidths,
 } from '../standards/aisc360-22/e7.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
@@ -21,12 +22,13 @@ import type { MemberQuantities, SectionQuantities, SteelQuantities } from './mem
 /** Compressive strength of the member, with what the stability clauses need of it. */
 export interface CompressionStrength {
   readonly Pc: Quantity;
-  readonly Pns: Quantity;
+  /** null where the method of analysis does not use it. */
+  readonly Pns: Quantity | null;
   readonly torsional: boolean;
   readonly slender: boolean;
 }
 
-/** Chapter E: E3, E4 where Lcz exceeds Lcy, E7 where an element is slender; and Pns of C2.3. */
+/** Chapter E: E3, E4 where Lcz exceeds Lcy, E7 where an element is slender; and Pns of C2.3 where it is used. */
 export function compressionStrength(
   r: Recorder,
   design: 'LRFD' | 'ASD',
@@ -34,6 +36,7 @@ export function compressionStrength(
   s: SectionQuantities,
   q: MemberQuantities & { Lcx: Quantity; Lcy: Quantity; Lcz: Quantity },
   constant: Quantity,
+  usesPns: boolean,
 ): CompressionStrength {
   const { E, G, Fy } = steel;
   r.section('B4/compression', 'Width-to-thickness ratios, compression', clause('B4.1'));
@@ -75,19 +78,26 @@ export function compressionStrength(
     : r.formula(torsional ? e4Formulas.strength : e3Formulas.strength, 'E3/Pn', { Fn, Ag });
   const Pc = availableCompression(r, design, constant, Pn);
 
-  r.section('C2', 'Cross-section strength for stability', clause('C2.3'));
-  const Pns = slender
-    ? r.formula(c2Formulas.crossSectionSlender, 'C2/Pns', {
-        Fy,
-        Ae: effectiveArea(r, 'C2', elements, widths, Fy, 'AeFy'),
-      })
-    : r.formula(c2Formulas.crossSection, 'C2/Pns', { Fy, Ag });
+  const Pns = usesPns ? crossSectionStrength(r, Fy, elements, slender ? widths : null) : null;
   return {
     Pc,
     Pns,
     torsional,
     slender,
   };
+}
+
+/** Pns of C2.3: Fy Ag, or Fy Ae at Fn = Fy where an element is slender. */
+function crossSectionStrength(
+  r: Recorder,
+  Fy: Quantity,
+  elements: SlenderElements,
+  widths: SlenderWidths | null,
+): Quantity {
+  r.section('C2', 'Cross-section strength for stability', clause('C2.3'));
+  if (!widths) return r.formula(c2Formulas.crossSection, 'C2/Pns', { Fy, Ag: elements.Ag });
+  const Ae = effectiveArea(r, 'C2', elements, widths, Fy, 'AeFy');
+  return r.formula(c2Formulas.crossSectionSlender, 'C2/Pns', { Fy, Ae });
 }
 
 const elementsOf = (

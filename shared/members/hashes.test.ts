@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { hashesOf, sealRecord, sha256Hex } from '../calc/hashes.ts';
-import { parseInput } from './resolve.ts';
+import { parseInput } from './parse-input.ts';
 import { runCalculation } from './run.ts';
 
 const combination = { name: '1.2D + 1.6L', P: '100 kip', MxA: '50 kip ft', MxB: '-20 kip ft' };

@@ -16,7 +16,7 @@ const label = (most: number) =>
     "may hold letters, digits, spaces and . , : ; _ - / ( ) + # & ' only",
   );
 
-const stated = z.object({
+const stated = z.strictObject({
   source: sourceSchema.optional(),
   confirmed: z.boolean().optional(),
 });
@@ -106,7 +106,11 @@ export const analysisSchema = z.strictObject({
     'must be "from-analysis", "amplified" or "exact"',
   ),
   includesMemberEffect: z.boolean('must be true or false').optional(),
-  sway: z.literal('none', 'must be "none": sway is outside the scope of this version'),
+  /** Stated with its source where it can be: that the ends do not translate is an input. */
+  sway: z.union(
+    [z.literal('none'), stated.extend({ value: z.literal('none') })],
+    'must be "none": sway is outside the scope of this version',
+  ),
 });
 
 export const inputSchema = z.strictObject({

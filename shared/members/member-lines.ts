@@ -4,7 +4,7 @@ import { SPECIFICATION } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { parseQuantity } from '../units/parse.ts';
 import { MODULI } from './material.ts';
-import type { ResolvedInput, ResolvedMember } from './resolve.ts';
+import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolved.ts';
 
 export interface SteelQuantities {
   readonly E: Quantity;
@@ -67,6 +67,9 @@ const METHOD_LIMITS = {
   ],
 } as const;
 
+const hasEndMoments = ({ moments }: ResolvedCombination): boolean =>
+  [moments.x, moments.y].some(({ A, B }) => A.value !== 0 || B.value !== 0);
+
 /** Basis, restraints and lengths as given. Axis x is the major, y the minor axis. */
 export function givenLines(
   r: Recorder,
@@ -93,7 +96,8 @@ export function givenLines(
     true,
     { title: 'Second-order moments' },
   );
-  r.statement('given/sway', 'none: the ends do not translate', basis, true, {
+  const { sway } = input;
+  r.statement('given/sway', 'none: the ends do not translate', sway.source, sway.confirmed, {
     title: 'Sway',
     clause: clause('App. 8.1'),
   });
@@ -126,17 +130,36 @@ export function givenLines(
     ends.confirmed,
     { title: 'Ends' },
   );
+  if (member.combinations.some(hasEndMoments))
+    r.statement(
+      'given/sense',
+      member.endMomentSign === 'bending'
+        ? 'bending: equal signs bend the member in single curvature'
+        : 'joint: equal signs turn both ends the same way, reverse curvature',
+      { kind: 'typed' },
+      true,
+      { title: 'Sense of the end moments' },
+    );
   const length = (symbol: 'Lcx' | 'Lcy' | 'Lcz' | 'Lb', title: string): Quantity | null => {
     const given = member[symbol];
     return given ? r.given(`given/${symbol}`, symbol, 'length', given, { title }) : null;
   };
-  return {
+  const lengths = {
     L: r.given('given/L', 'L', 'length', member.length, { title: 'Length of the member' }),
     Lcx: length('Lcx', 'Buckling length about the major axis'),
     Lcy: length('Lcy', 'Buckling length about the minor axis'),
     Lcz: length('Lcz', 'Torsional buckling length'),
     Lb: length('Lb', 'Laterally unbraced length'),
   };
+  if (member.Lb?.value === 0 && member.Lb.source.kind === 'typed' && !member.Lb.source.note)
+    r.notice(
+      'given/continuous',
+      'caution',
+      'continuous-without-reason',
+      'An unbraced length of zero says that the compression flange is held continuously. What holds it is not stated.',
+      { title: 'Continuous lateral support', clause: clause('F2.2') },
+    );
+  return lengths;
 }
 
 const baseValue = (published: string, dimension: 'stress'): number => {

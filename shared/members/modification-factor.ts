@@ -2,7 +2,7 @@ import type { Quantity, Recorder } from '../calc/recorder.ts';
 import { f1Formulas, firstOrderQuarters, modificationFactor } from '../standards/aisc360-22/f1.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { secondOrderQuarters } from '../standards/elastic-theory/second-order.ts';
-import type { ResolvedInput } from './resolve.ts';
+import type { ResolvedInput } from './resolved.ts';
 import type { PlaneResult } from './second-order.ts';
 
 /** The second-order factor may be lower by this share before the sheet cautions. */

@@ -11,7 +11,7 @@ import { completenessOf } from './completeness.ts';
 import { compressionStrength } from './compression.ts';
 import { availableMajor, majorStrength, minorStrength } from './flexure.ts';
 import { givenLines, sectionLines, steelLines } from './member-lines.ts';
-import type { ResolvedInput, ResolvedMember } from './resolve.ts';
+import type { ResolvedInput, ResolvedMember } from './resolved.ts';
 import { bends } from './second-order.ts';
 import { combinationSummary, memberSummary, recordSummary } from './summary.ts';
 
@@ -142,7 +142,15 @@ function memberStrengths(
     const phib = bentX || bentY ? methodConstant(r, 'flexure', input.design) : null;
     const compression =
       phic && Lcx && Lcy && Lcz
-        ? compressionStrength(r, input.design, steel, section, { ...q, Lcx, Lcy, Lcz }, phic)
+        ? compressionStrength(
+            r,
+            input.design,
+            steel,
+            section,
+            { ...q, Lcx, Lcy, Lcz },
+            phic,
+            input.analysis.method !== 'effective-length',
+          )
         : null;
     const major = bentX && Lb && phib ? majorStrength(r, steel, section, Lb, phib) : null;
     const Cb =

@@ -14,7 +14,7 @@ import {
 } from '../standards/elastic-theory/end-moments.ts';
 import { largestMoment, type SecondOrder } from '../standards/elastic-theory/second-order.ts';
 import { clause as theory } from '../standards/elastic-theory/writer.ts';
-import type { ResolvedCombination, ResolvedInput } from './resolve.ts';
+import type { ResolvedCombination, ResolvedInput } from './resolved.ts';
 
 export type Axis = 'x' | 'y';
 export const AXES: readonly Axis[] = ['x', 'y'];
@@ -63,9 +63,9 @@ export function axialState(
   input: ResolvedInput,
   Pr: Quantity,
   alpha: Quantity,
-  Pns: Quantity,
+  Pns: Quantity | null,
 ): AxialState {
-  if (input.analysis.method !== 'direct') return { Pr, alpha, taub: null };
+  if (input.analysis.method !== 'direct' || !Pns) return { Pr, alpha, taub: null };
   r.section('C2', 'Stiffness of the direct analysis', clause('C2.3'));
   return { Pr, alpha, taub: stiffnessReduction(r, alpha, Pr, Pns) ?? 'failed' };
 }
@@ -119,6 +119,13 @@ export function requiredMoment(
       'Load between the ends',
     );
 
+  if (axial && largest && !includesMemberEffect && largest.value > ends.M2.value)
+    return outside(
+      'transverse-load',
+      'The given largest moment exceeds both end moments, so the member carries load between its ends. The analysis leaves out the effect of the axial force between the ends, and without the load it cannot be added here: give moments from an analysis that includes it.',
+      'Load between the ends',
+    );
+
   const solved = axial
     ? solve(r, plane, axial, ends, secondOrder === 'from-analysis' && includesMemberEffect)
     : null;
@@ -138,14 +145,6 @@ export function requiredMoment(
         symbol: `Mr${axis}`,
       });
       if (includesMemberEffect && exact) besideAnalysis(r, axis, Mr, exact.Mmax);
-      if (!includesMemberEffect && axial && largest && largest.value > ends.M2.value)
-        r.notice(
-          `${at}/no-diagram`,
-          'caution',
-          'member-effect-not-found',
-          'The given largest moment exceeds both end moments, so the member carries load between its ends. The analysis leaves out the effect of the axial force between the ends, and without the load it cannot be added here: the required moment may be too low.',
-          { title: 'Second-order effect between the ends', clause: clause('C2.1') },
-        );
       return Mr;
     }
     if (!exact || !code) return ends.M2;

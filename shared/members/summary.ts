@@ -2,7 +2,7 @@ import type { Clause, Line, LineOf, Verdict } from '../calc/line.ts';
 import type { CombinationRecord, MemberRecord, Summary } from '../calc/record.ts';
 import { worstVerdict } from '../calc/verdict.ts';
 import { printNumber } from '../units/format.ts';
-import type { ResolvedCombination } from './resolve.ts';
+import type { ResolvedCombination } from './resolved.ts';
 
 const NOWHERE: Clause = { book: 'aisc360-22', clause: 'H1', equation: null };
 
@@ -46,7 +46,7 @@ export function combinationSummary(
   const verdict = halt
     ? worstVerdict(verdictsOf([halt]))
     : quiet
-      ? 'OK'
+      ? 'NOT CHECKED'
       : worstVerdict([
           ...verdictsOf(lines),
           ...(flexureOutside && bentMajor ? (['NOT CHECKED'] as const) : []),
@@ -60,14 +60,16 @@ export function combinationSummary(
     : (halt ??
       lines.find(
         (l) =>
-          l.kind === 'notice' && l.severity === (verdict === 'FAILED' ? 'failed' : 'outside scope'),
+          l.kind === 'notice' &&
+          (l.code === 'no-forces' ||
+            l.severity === (verdict === 'FAILED' ? 'failed' : 'outside scope')),
       ) ??
       memberLines.find((l) => l.kind === 'notice' && l.code === 'web-not-compact'));
   const governs = numeric ? worst : reason;
   return {
     verdict,
-    ratio: numeric ? (worst?.ratio ?? 0) : null,
-    ratioText: numeric ? (worst ? ratioText(worst) : '0.000') : null,
+    ratio: numeric && worst ? worst.ratio : null,
+    ratioText: numeric && worst ? ratioText(worst) : null,
     governing: governs
       ? {
           address: memberLines.includes(governs) ? governs.key : `${c.id}:${governs.key}`,

@@ -3,7 +3,7 @@ import katex from 'katex';
 import { describe, expect, it } from 'vitest';
 import { lineGraph } from '../calc/graph.ts';
 import type { CalculationRecord } from '../calc/record.ts';
-import { parseInput } from '../members/resolve.ts';
+import { parseInput } from '../members/parse-input.ts';
 import { runCalculation } from '../members/run.ts';
 import { assembleReport } from './assemble.ts';
 import { CAUTIONS, PRELIMINARY } from './cautions.ts';

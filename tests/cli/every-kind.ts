@@ -3,7 +3,7 @@ import { placedLines } from '#shared/calc/address.ts';
 import { sealRecord } from '#shared/calc/hashes.ts';
 import type { Line, LineKind, LineOf } from '#shared/calc/line.ts';
 import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runCalculation } from '#shared/members/run.ts';
 
 /**

@@ -1,7 +1,7 @@
 import { placedLines } from '#shared/calc/address.ts';
 import type { Line } from '#shared/calc/line.ts';
 import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runCalculation } from '#shared/members/run.ts';
 
 /** The record of an INPUT.json that has to be valid. */

@@ -1,5 +1,5 @@
 import type { GivenValue } from '#shared/calc/recorder.ts';
-import type { ResolvedMember } from '#shared/members/resolve.ts';
+import type { ResolvedMember } from '#shared/members/resolved.ts';
 
 const LENGTHS = ['Lcx', 'Lcy', 'Lcz', 'Lb'] as const;
 

@@ -2,7 +2,7 @@ import type { PlacedLine } from '#shared/calc/address.ts';
 import type { Formula } from '#shared/calc/formula.ts';
 import type { Line, ValuedLine } from '#shared/calc/line.ts';
 import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
-import type { ResolvedMember } from '#shared/members/resolve.ts';
+import type { ResolvedMember } from '#shared/members/resolved.ts';
 
 /** What checking a line needs to know of the record around it. */
 export interface LineContext {

@@ -8,7 +8,7 @@ export const e4Formulas = {
     clause: 'E4',
     equation: 'E4-2',
     title: 'Elastic torsional buckling stress',
-    symbol: 'Fez',
+    symbol: 'Fet',
     dimension: 'stress',
     expression: '(pi^2*E*Cw/Lcz^2+G*J)/(Ix+Iy)',
     operands: {

@@ -78,7 +78,7 @@ export const symbols = {
   Fe: symbol('F_e', 'elastic buckling stress', 'stress'),
   Fex: symbol('F_{ex}', 'elastic flexural buckling stress, major axis', 'stress'),
   Fey: symbol('F_{ey}', 'elastic flexural buckling stress, minor axis', 'stress'),
-  Fez: symbol('F_{ez}', 'elastic torsional buckling stress', 'stress'),
+  Fet: symbol('F_{e,t}', 'elastic torsional buckling stress', 'stress'),
   FyFe: symbol('F_y/F_e', 'yield stress over elastic buckling stress'),
   Fn: symbol('F_n', 'nominal compressive stress', 'stress'),
   Fel: symbol('F_{el}', 'elastic local buckling stress', 'stress'),

@@ -197,9 +197,9 @@ describe('a load between the ends', () => {
 });
 
 describe('no forces at all', () => {
-  it('is OK with a ratio of zero, and says so', () => {
+  it('is NOT CHECKED, and says so', () => {
     const m = runOne({ member, forces: { P: '0 kip', MxA: '0 kip ft', MxB: '0 kip ft' } });
-    expect(m.summary).toMatchObject({ verdict: 'OK', ratio: 0, ratioText: '0.000' });
+    expect(m.summary).toMatchObject({ verdict: 'NOT CHECKED', ratio: null, ratioText: null });
     expect(
       [...linesOf(m).values()].some((l) => l.kind === 'notice' && l.code === 'no-forces'),
     ).toBe(true);

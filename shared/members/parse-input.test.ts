@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { parseInput } from './resolve.ts';
+import { parseInput } from './parse-input.ts';
 
 /* Structural: every wrong input names its place and what would be right; no engineering values. */
 const combination = { name: '1.2D + 1.6L', P: '100 kip', MxA: '50 kip ft', MxB: '-20 kip ft' };

@@ -1,0 +1,65 @@
+import { stateOf } from './given-values.ts';
+import { inputSchema } from './input.ts';
+import { repeated } from './repeated.ts';
+import { resolveMember } from './resolve-member.ts';
+import type { ParsedInput, Problem } from './resolved.ts';
+
+const pathText = (path: readonly PropertyKey[]): string =>
+  path.reduce<string>(
+    (at, p) =>
+      typeof p === 'number' ? `${at}[${p}]` : at === '' ? String(p) : `${at}.${String(p)}`,
+    '',
+  );
+
+/** Reads INPUT.json: its shape, its quantities, and what the members need; all problems at once. */
+export function parseInput(json: unknown): ParsedInput {
+  const shape = inputSchema.safeParse(json);
+  if (!shape.success)
+    return {
+      ok: false,
+      problems: shape.error.issues.map((i) => ({ path: pathText(i.path), message: i.message })),
+    };
+  const problems: Problem[] = [];
+  const input = shape.data;
+  const { analysis } = input;
+  if (analysis.secondOrder === 'from-analysis' && analysis.includesMemberEffect === undefined)
+    problems.push({
+      path: 'analysis.includesMemberEffect',
+      message:
+        'is needed with moments from an analysis: whether the effect of the axial force between the ends (P-δ) is in them',
+    });
+  const members = input.members.map((m, i) => resolveMember(m, i, input, problems));
+  repeated(
+    input.members.map((m) => m.mark),
+    (i) => `members[${i}].mark`,
+    'mark',
+    problems,
+  );
+  if (problems.length > 0) return { ok: false, problems };
+  return {
+    ok: true,
+    input: {
+      source: input,
+      design: input.design,
+      units: input.units,
+      constants: input.constants ?? input.units,
+      analysis: {
+        method: analysis.method,
+        secondOrder: analysis.secondOrder,
+        sway: 'none',
+        // Says something of moments from an analysis only; elsewhere it must not move the hash.
+        includesMemberEffect:
+          analysis.secondOrder === 'from-analysis' && analysis.includesMemberEffect === true,
+      },
+      sway:
+        typeof analysis.sway === 'string'
+          ? {
+              value: 'none',
+              source: { kind: 'typed', note: 'Basis of the calculation' },
+              confirmed: true,
+            }
+          : stateOf(analysis.sway),
+      members,
+    },
+  };
+}

@@ -1,0 +1,46 @@
+import type { GivenValue } from '../calc/recorder.ts';
+import { normalDesignation } from '../sections/table.ts';
+import { forceProblems } from './force-level.ts';
+import { type ReadQuantity, TYPED } from './given-values.ts';
+import type { CalculationInput, CombinationInput } from './input.ts';
+import type { ResolvedCombination } from './resolved.ts';
+
+export interface CombinationContext {
+  readonly input: CalculationInput;
+  /** The member's section as typed. */
+  readonly section: string;
+  readonly problem: (path: string, message: string) => void;
+  readonly quantity: ReadQuantity;
+}
+
+/** One force set. Forces belong to the section they were analysed with. */
+export function resolveCombination(
+  c: CombinationInput,
+  index: number,
+  { input, section, problem, quantity }: CombinationContext,
+): ResolvedCombination {
+  const path = `combinations[${index}]`;
+  for (const { field, message } of forceProblems(c, input.design))
+    problem(`${path}.${field}`, message);
+  const elsewhere =
+    c.analysedWith !== undefined &&
+    normalDesignation(c.analysedWith) !== normalDesignation(section);
+  const asAnalysed = <T extends GivenValue | null>(given: T): T =>
+    given && elsewhere ? { ...given, confirmed: false } : given;
+  const moment = (field: 'MxA' | 'MxB' | 'MyA' | 'MyB' | 'MxMax' | 'MyMax') =>
+    asAnalysed(quantity(`${path}.${field}`, c[field], 'moment'));
+  const none: GivenValue = { value: 0, text: '0', source: TYPED, confirmed: false };
+  const P = asAnalysed(quantity(`${path}.P`, c.P, 'force') ?? none);
+  // A moment left out is zero, with the source and state of the force set.
+  const zero = { ...P, value: 0, text: input.units === 'us' ? '0 kip ft' : '0 kN m' };
+  return {
+    id: c.id ?? `c${index + 1}`,
+    name: c.name,
+    analysedWith: elsewhere && c.analysedWith ? normalDesignation(c.analysedWith) : null,
+    P,
+    moments: {
+      x: { A: moment('MxA') ?? zero, B: moment('MxB') ?? zero, max: moment('MxMax') },
+      y: { A: moment('MyA') ?? zero, B: moment('MyB') ?? zero, max: moment('MyMax') },
+    },
+  };
+}

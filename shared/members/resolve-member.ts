@@ -1,0 +1,122 @@
+import type { Source } from '../calc/line.ts';
+import type { GivenValue } from '../calc/recorder.ts';
+import { findShape, normalDesignation } from '../sections/table.ts';
+import { partsOf, quantityReader, stateOf, TYPED } from './given-values.ts';
+import type { CalculationInput, MemberInput } from './input.ts';
+import { repeated } from './repeated.ts';
+import { resolveCombination } from './resolve-combination.ts';
+import { resolveSteel } from './resolve-steel.ts';
+import type { Problem, ResolvedCombination, ResolvedMember } from './resolved.ts';
+
+const DEFAULT_CB: Source = { kind: 'typed', note: 'Not given: 1.0, on the safe side' };
+const OTHER_FAMILY = /^(HSS|PIPE|2L|WT|MT|ST|MC|HP|C|M|S|L)\d/;
+
+/** One member with its quantities read; problems are added with their paths. */
+export function resolveMember(
+  m: MemberInput,
+  index: number,
+  input: CalculationInput,
+  problems: Problem[],
+): ResolvedMember {
+  const at = `members[${index}]`;
+  const problem = (path: string, message: string) =>
+    problems.push({ path: `${at}.${path}`, message });
+  const quantity = quantityReader(problem);
+  const length = (
+    path: 'length' | 'Lcx' | 'Lcy' | 'Lcz' | 'Lb',
+    zero: boolean,
+  ): GivenValue | null => {
+    const found = quantity(path, m[path], 'length');
+    if (found && (zero ? found.value < 0 : found.value <= 0))
+      problem(path, `is ${found.text}; it must be ${zero ? 'zero or above' : 'above zero'}`);
+    return found;
+  };
+  const none: GivenValue = { value: 0, text: '0', source: TYPED, confirmed: false };
+
+  const section = stateOf(m.section);
+  const shape = findShape(section.value);
+  if (!shape && !OTHER_FAMILY.test(normalDesignation(section.value)))
+    problem(
+      'section',
+      `"${section.value}" is not in the table of W shapes (AISC Shapes Database v15.0); write it like W12X79`,
+    );
+
+  const combinations = m.combinations.map((c, j) =>
+    resolveCombination(c, j, { input, section: section.value, problem, quantity }),
+  );
+  repeated(
+    m.combinations.map((c) => c.name),
+    (j) => `${at}.combinations[${j}].name`,
+    'combination',
+    problems,
+  );
+  repeated(
+    combinations.map((c) => c.id),
+    (j) => `${at}.combinations[${j}].id`,
+    'id',
+    problems,
+  );
+
+  const lengths = {
+    Lcx: length('Lcx', false),
+    Lcy: length('Lcy', false),
+    Lcz: length('Lcz', false),
+    Lb: length('Lb', true),
+  };
+  wantWhatIsNeeded(m, combinations, problem);
+
+  const Cb =
+    m.Cb === undefined
+      ? { ...none, value: 1, text: '1.0', source: DEFAULT_CB, confirmed: true }
+      : partsOf(m.Cb).text.trim() === 'auto'
+        ? ('auto' as const)
+        : quantity('Cb', m.Cb, 'none');
+  if (Cb !== 'auto' && Cb && !(Cb.value > 0 && Cb.value <= 5))
+    problem('Cb', `is ${Cb.text}; it must be above 0 and, by F1-1, not above 5, or "auto"`);
+
+  return {
+    id: m.id ?? `m${index + 1}`,
+    mark: m.mark,
+    section: { ...section, value: shape?.designation ?? section.value },
+    shape,
+    steel: resolveSteel(m, problem, quantity),
+    length: length('length', false) ?? none,
+    ends: stateOf(m.ends),
+    ...lengths,
+    Cb: Cb ?? 'auto',
+    endMomentSign: m.endMomentSign ?? 'bending',
+    combinations,
+  };
+}
+
+/** What the forces make necessary: lengths have no default, nor has the sense of end moments. */
+function wantWhatIsNeeded(
+  m: MemberInput,
+  combinations: readonly ResolvedCombination[],
+  problem: (path: string, message: string) => void,
+): void {
+  const compressed = combinations.some((c) => c.P.value > 0);
+  const bent = combinations.some(
+    ({ moments: { x } }) => x.A.value !== 0 || x.B.value !== 0 || (x.max?.value ?? 0) !== 0,
+  );
+  const bothEnds = combinations.some(({ moments }) =>
+    [moments.x, moments.y].some((p) => p.A.value !== 0 && p.B.value !== 0),
+  );
+  if (compressed)
+    for (const name of ['Lcx', 'Lcy', 'Lcz'] as const)
+      if (m[name] === undefined)
+        problem(
+          name,
+          'is needed: a combination has compression, and buckling lengths have no default',
+        );
+  if (bent && m.Lb === undefined)
+    problem(
+      'Lb',
+      'is needed: a combination bends the major axis, and the unbraced length has no default (0 where the compression flange is held continuously)',
+    );
+  if (bothEnds && m.endMomentSign === undefined)
+    problem(
+      'endMomentSign',
+      'is needed: "bending" (equal signs: single curvature) or "joint" (equal signs: reverse curvature)',
+    );
+}
