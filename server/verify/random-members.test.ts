@@ -1,6 +1,6 @@
 import { expect, it } from 'vitest';
 import { sealRecord } from '#shared/calc/hashes.ts';
-import { parseInput } from '#shared/members/resolve.ts';
+import { parseInput } from '#shared/members/parse-input.ts';
 import { runCalculation } from '#shared/members/run.ts';
 import { seededRandom } from '#tests/rules/random.ts';
 import { randomInput } from '#tests/rules/random-members.ts';
