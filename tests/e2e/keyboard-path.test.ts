@@ -94,7 +94,8 @@ describe('the whole path by keyboard alone', () => {
       'W12×79',
     ]);
     await page.keyboard.type('9');
-    await page.getByRole('img', { name: /Outline of W12X?×?79/ }).waitFor();
+    const found = page.getByRole('dialog', { name: 'Sections found' });
+    await found.getByRole('img', { name: /Outline of W12×79/ }).waitFor();
     await page.keyboard.press('Enter');
     await page.getByRole('heading', { name: /C-05 · W12×79/ }).waitFor();
     await saved(page);

@@ -1,5 +1,5 @@
-import { sectionName } from '#client/document/section-name.ts';
 import { classNames } from '#client/ui/class-names.ts';
+import { printedDesignation } from '#shared/sections/table.ts';
 import { SectionPreview } from './section-preview.tsx';
 
 /** The designations that hold what was typed, beside the outline of the one pointed at. */
@@ -66,7 +66,7 @@ function SectionOption(props: {
       onClick={props.onChoose}
       className={classNames('figures px-3 py-0.5', props.active && 'bg-ink text-paper')}
     >
-      {sectionName(props.designation)}
+      {printedDesignation(props.designation)}
     </div>
   );
 }

@@ -1,7 +1,13 @@
 import { SceneView } from '#client/document/figure-block.tsx';
 import { Formula } from '#client/document/formula.tsx';
 import { sectionOutline } from '#shared/figures/section-outline.ts';
-import { findShape, type PropertyName, W_TABLE, type WShape } from '#shared/sections/table.ts';
+import {
+  findShape,
+  type PropertyName,
+  printedDesignation,
+  W_TABLE,
+  type WShape,
+} from '#shared/sections/table.ts';
 
 const shown: readonly (readonly [PropertyName, string])[] = [
   ['A', 'A_g'],
@@ -20,7 +26,9 @@ export function SectionPreview({ designation }: { designation: string }) {
   if (!shape) return null;
   return (
     <div className="grid gap-2">
-      <SceneView scene={sectionOutline(drawingOf(shape))} />
+      <div className="mx-auto w-64">
+        <SceneView scene={sectionOutline(drawingOf(shape))} />
+      </div>
       <dl className="grid grid-cols-2 gap-x-4 font-condensed text-small">
         {shown.map(([name, tex]) => (
           <div key={name} className="flex justify-between gap-2">
@@ -44,7 +52,7 @@ function drawingOf({ designation, properties }: WShape) {
     text: properties[symbol].published,
   });
   return {
-    section: designation,
+    section: printedDesignation(designation),
     depth: drawn('d'),
     flangeWidth: drawn('bf'),
     webThickness: drawn('tw'),
