@@ -5,6 +5,10 @@ const WRONG_INPUT = 2;
 
 /** Runs a command; wrong input prints its reasons to stderr and nothing to stdout. */
 export async function runCommand(command: () => Promise<number>): Promise<void> {
+  // Whoever reads may have seen enough (`| head`).
+  process.stdout.on('error', (error: NodeJS.ErrnoException) => {
+    if (error.code !== 'EPIPE') throw error;
+  });
   try {
     process.exitCode = await command();
   } catch (error) {
