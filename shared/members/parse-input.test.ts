@@ -293,6 +293,18 @@ describe('wrong inputs', () => {
         /the mark "C1" is used twice/,
       ],
       [
+        'an id twice',
+        {
+          ...input,
+          members: [
+            { ...member, id: 'm-1' },
+            { ...member, mark: 'C2', id: 'm-1' },
+          ],
+        },
+        'members[1].id',
+        /the id "m-1" is used twice/,
+      ],
+      [
         'a combination twice',
         withMember({ combinations: [combination, combination] }),
         'members[0].combinations[1].name',

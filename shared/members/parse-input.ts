@@ -35,6 +35,12 @@ export function parseInput(json: unknown): ParsedInput {
     'mark',
     problems,
   );
+  repeated(
+    members.map((m) => m.id),
+    (i) => `members[${i}].id`,
+    'id',
+    problems,
+  );
   if (problems.length > 0) return { ok: false, problems };
   return {
     ok: true,
