@@ -1,5 +1,4 @@
 import type { ComponentProps } from 'react';
-import { Link, type LinkProps } from 'react-router-dom';
 import { classNames } from './class-names.ts';
 
 type Rank = 'main' | 'plain' | 'quiet' | 'grave';
@@ -33,14 +32,4 @@ export function Button({
       {...rest}
     />
   );
-}
-
-/** A link that looks like a button: it goes somewhere. */
-export function ButtonLink({
-  rank = 'plain',
-  size = 'body',
-  className,
-  ...rest
-}: Look & LinkProps) {
-  return <Link className={classNames(shape, sizes[size], ranks[rank], className)} {...rest} />;
 }

@@ -1,10 +1,10 @@
 import type { DraftCombination, DraftQuantity, MemberDraft } from '#shared/contracts/members.ts';
 
 /** A quantity nobody has given yet. */
-export const notGiven: DraftQuantity = { text: '', confirmed: false };
+const notGiven: DraftQuantity = { text: '', confirmed: false };
 
 /** An id for a row of forces; it stays with the row whatever it is called. */
-export function freshCombinationId(taken: readonly { id: string }[]): string {
+function freshCombinationId(taken: readonly { id: string }[]): string {
   const numbers = taken.map(({ id }) => Number(/^c(\d+)$/.exec(id)?.[1] ?? 0));
   return `c${Math.max(0, ...numbers) + 1}`;
 }

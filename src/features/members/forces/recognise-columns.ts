@@ -58,7 +58,7 @@ const aliases: Readonly<Record<string, string>> = {
 };
 
 /** A unit as headers write it: `kip-ft`, `(kN·m)`. */
-export function unitIn(text: string): string | null {
+function unitIn(text: string): string | null {
   const bare = text.trim();
   if (UNITS.has(bare) && bare !== '') return bare;
   const known = aliases[bare.toLowerCase().replace(/[\s.·⋅*-]/g, '')];
