@@ -1,8 +1,8 @@
 import { type ClipboardEvent, useState } from 'react';
-import { Formula } from '#client/document/formula.tsx';
 import { Button } from '#client/ui/button.tsx';
 import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
 import { Empty } from '#client/ui/state-panels.tsx';
+import { SymbolMark } from '#client/ui/symbol.tsx';
 import { actionNames } from '#shared/contracts/members.ts';
 import { firstCombination } from '../first-draft.ts';
 import { actionWords } from '../member-fields.ts';
@@ -71,7 +71,7 @@ export function ForcesPaper(props: {
               <HeadCell className="w-[20%]">Combination</HeadCell>
               {actions.map((action) => (
                 <HeadCell key={action} className="text-right">
-                  <Formula tex={actionWords[action].tex} />
+                  <SymbolMark tex={actionWords[action].tex} />
                   <span className="sr-only">{actionWords[action].spoken}</span>
                 </HeadCell>
               ))}

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
-import { Formula } from '#client/document/formula.tsx';
 import { ProblemText } from '#client/ui/field.tsx';
+import { SymbolMark } from '#client/ui/symbol.tsx';
 import { controlId, type FieldWords } from '../member-fields.ts';
 
 export interface RowControl {
@@ -54,7 +54,7 @@ export function SymbolLabel({ words }: { words: FieldWords }) {
       {words.shown && (
         <>
           {' '}
-          <Formula tex={words.tex} />
+          <SymbolMark tex={words.tex} />
         </>
       )}
       <span className="sr-only"> {words.spoken}</span>

@@ -1,5 +1,5 @@
 import { SceneView } from '#client/document/figure-block.tsx';
-import { Formula } from '#client/document/formula.tsx';
+import { SymbolMark } from '#client/ui/symbol.tsx';
 import { sectionOutline } from '#shared/figures/section-outline.ts';
 import {
   findShape,
@@ -33,7 +33,7 @@ export function SectionPreview({ designation }: { designation: string }) {
         {shown.map(([name, tex]) => (
           <div key={name} className="flex justify-between gap-2">
             <dt>
-              <Formula tex={tex} />
+              <SymbolMark tex={tex} />
               <span className="sr-only">{name}</span>
             </dt>
             <dd className="figures font-medium">{shape.properties[name].published}</dd>
