@@ -347,6 +347,7 @@ export const sampleDocument: DocumentTree = {
         'Preliminary, not issued',
         '5 inputs are not confirmed; the list follows the summary.',
       ],
+      cautions: ['It does not replace the locally adopted building code and its amendments.'],
     },
     { kind: 'pageBreak' },
     { kind: 'heading', level: 1, text: 'Summary' },

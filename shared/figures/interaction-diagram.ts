@@ -4,9 +4,10 @@ import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path } from './shapes.ts';
 
 const WIDTH = 424;
-const HEIGHT = 276;
-const PLOT = { left: 40, right: 256, top: 28, bottom: 236 };
+const HEIGHT = 242;
+const PLOT = { left: 40, right: 226, top: 24, bottom: 204 };
 const LISTED = 12;
+const ROW = 15.5;
 
 /** ANSI/AISC 360-22 H1-1a and H1-1b as a line of moment utilisation against Pr/Pc. */
 const ENVELOPE: readonly Point[] = [
@@ -70,8 +71,8 @@ function frame(
       PENS.rule,
     ),
     ...ticks.flatMap(cross),
-    label('Pr / Pc', [PLOT.left - 8, PLOT.top - 12], { weight: 600 }),
-    label('Mrx / Mcx + Mry / Mcy', [PLOT.right, PLOT.bottom + 34], {
+    label('Pr / Pc', [PLOT.left - 8, PLOT.top - 10], { weight: 600 }),
+    label('Mrx / Mcx + Mry / Mcy', [PLOT.right, PLOT.bottom + 33], {
       anchor: 'end',
       weight: 600,
     }),
@@ -96,7 +97,7 @@ function list(points: readonly InteractionPoint[]): Shape[] {
   const left = PLOT.right + 14;
   const rest = points.length - LISTED;
   const rows = points.slice(0, LISTED).flatMap((point, index): Shape[] => {
-    const y = PLOT.top + 8 + index * 18;
+    const y = PLOT.top + index * ROW;
     const weight = index === 0 ? 600 : 400;
     return [
       label(String(index + 1), [left + 12, y], { anchor: 'end', weight }),
@@ -105,7 +106,7 @@ function list(points: readonly InteractionPoint[]): Shape[] {
     ];
   });
   if (rest <= 0) return rows;
-  const y = PLOT.top + 8 + LISTED * 18;
+  const y = PLOT.top + LISTED * ROW;
   const words = rest === 1 ? 'one more, lower' : `${rest} more, all lower`;
   return [...rows, label(words, [left + 22, y], { ink: 'zinc7' })];
 }

@@ -4,7 +4,7 @@ import { memberView } from './member-view.ts';
 import type { Scene, Shape } from './scene.ts';
 import { label, PENS, path } from './shapes.ts';
 
-const ROW = 17;
+const ROW = 15;
 
 /**
  * The member to scale: elevation (depth d) and, where the minor axis bends, plan (width bf), held
@@ -25,12 +25,12 @@ export function memberScene(drawing: MemberDrawing): Scene {
   for (const plane of views(drawing)) {
     const size = plane.plane === 'major' ? drawing.depth : drawing.width;
     const half = ((size ?? 0) * perMm) / 2;
-    const axis = y + Math.max(half + 16, 30);
+    const axis = y + Math.max(half + 16, 27);
     const withAxial = plane.plane === 'major';
     shapes.push(...memberView({ drawing, plane, along, axis, half, withAxial }));
-    y = axis + Math.max(half + 24, 34);
+    y = axis + Math.max(half + 20, 31);
   }
-  const bars = lengthBars(drawing, along, y + 4);
+  const bars = lengthBars(drawing, along, y);
   return {
     width: WIDTH,
     height: Math.ceil(bars.end),
@@ -97,7 +97,7 @@ function lengthBars(drawing: MemberDrawing, along: (mm: number) => number, top: 
       label(first.text, [end + 8, y], { within: WIDTH - end - 10 }),
     );
   }
-  return { shapes, end: y + 8 };
+  return { shapes, end: y + 4 };
 }
 
 function describe(drawing: MemberDrawing): string {

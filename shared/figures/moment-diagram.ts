@@ -5,8 +5,10 @@ import { firstOrderSamples, type Sample, secondOrderSamples } from './moment-cur
 import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path, textWidth } from './shapes.ts';
 
-const TOP = 40;
-const TALL = 72;
+const TOP = 36;
+const TALL = 54;
+/** Under the lowest moment: the mark of a largest one that is negative. */
+const UNDER = 17;
 
 /**
  * First- and second-order moments along the member in one plane, on the compressed side, with the
@@ -45,7 +47,8 @@ export function momentDiagram(drawing: MemberDrawing, plane: PlaneDrawing): Scen
     ...(second ? largestMark(plane, along, along(length), up) : []),
     ...head(plane, second !== null),
   ];
-  return { width: WIDTH, height: TOP + TALL + 24, shapes, description: describe(plane, second) };
+  const height = TOP + TALL + (Math.min(0, ...all) < 0 ? UNDER : 6);
+  return { width: WIDTH, height, shapes, description: describe(plane, second) };
 }
 
 const filled = (curve: readonly Point[], base: number): Shape => {

@@ -14,6 +14,12 @@ export const CAUTIONS: readonly string[] = [
   'A calculation that is not issued is preliminary and is marked so on every page.',
 ];
 
+/** The same in short, for the title sheet. */
+export const CAUTIONS_OF_COVER: readonly string[] = [
+  'It does not replace the locally adopted building code and its amendments. A licensed engineer takes responsibility for it.',
+  'Not covered: connections, base plates, strength and stiffness of bracing, shear, torsion, deflection, concentrated forces, holes, fire, fatigue, seismic detailing, erection stability, temporary works.',
+];
+
 /** The same in one line, for the foot of every page. */
 export const CAUTION_OF_EVERY_PAGE =
   'Does not replace the locally adopted code. A licensed engineer takes responsibility for it. What is not covered stands under Cautions.';

@@ -1,5 +1,5 @@
 import type { CalculationRecord } from '../calc/record.ts';
-import { NOT_YET_APPROVED, NOT_YET_CHECKED, PRELIMINARY } from './cautions.ts';
+import { CAUTIONS_OF_COVER, NOT_YET_APPROVED, NOT_YET_CHECKED, PRELIMINARY } from './cautions.ts';
 import { type DocumentData, stated } from './document-data.ts';
 import type { BlockOf } from './tree.ts';
 
@@ -43,6 +43,7 @@ export function coverBlock(
     project: project.title,
     fields,
     notices: notices(record, document, standardName),
+    cautions: CAUTIONS_OF_COVER,
   };
 }
 
@@ -62,19 +63,30 @@ function notices(
   standardName: string,
 ): string[] {
   const { unconfirmed } = record.summary;
-  const count = (verdict: string): number =>
-    record.members.filter((m) => m.summary.verdict === verdict).length;
+  const marksOf = (verdict: string): string[] =>
+    record.members.filter((m) => m.summary.verdict === verdict).map((m) => m.mark);
   const found: (string | null)[] = [
     document.issued ? null : PRELIMINARY,
     unconfirmed === 0
       ? null
       : `${plural(unconfirmed, 'input is', 'inputs are')} not confirmed; the list follows the summary.`,
     ...(['FAILED', 'NOT OK', 'NOT CHECKED'] as const).map((verdict) =>
-      count(verdict) === 0 ? null : `${verdict}: ${plural(count(verdict), 'member', 'members')}.`,
+      membersNotice(verdict, marksOf(verdict)),
     ),
     editionNotice(document.basis.adoptedEdition, standardName),
   ];
   return found.filter((notice) => notice !== null);
+}
+
+/** How many members a notice names. */
+const NAMED = 12;
+
+/** `FAILED: C-10`; of many, the first ones by name and how many more. */
+function membersNotice(verdict: string, marks: readonly string[]): string | null {
+  if (marks.length === 0) return null;
+  const more = marks.length - NAMED;
+  const named = marks.slice(0, NAMED).join(', ');
+  return `${verdict}: ${named}${more > 0 ? ` and ${plural(more, 'other member', 'other members')}` : ''}.`;
 }
 
 const plural = (count: number, one: string, many: string): string =>

@@ -10,13 +10,14 @@ import { presentLine } from './present-line.ts';
 import type { Presenter } from './presenter.ts';
 import { shortReference } from './reference-text.ts';
 import { whyNone } from './results-block.ts';
-import { memberFigures } from './sheet-figures.ts';
+import { interactionFigure, memberFigures } from './sheet-figures.ts';
 import type { Block, BlockOf } from './tree.ts';
 import { verdictTerms } from './verdict-terms.ts';
 
 /**
- * A member's sheet: head, verdict, figures, the member's lines, then those of one combination
- * (null: the governing one). Throws if the member or the combination is not in the record.
+ * A member's sheet on the screen: head, verdict, the member with its moments, the member's lines,
+ * then those of one combination (null: the governing one), and at the end all combinations in the
+ * interaction diagram. Throws if the member or the combination is not in the record.
  */
 export function memberSheet(
   record: CalculationRecord,
@@ -32,10 +33,11 @@ export function memberSheet(
     ...memberFigures(record, member, combination),
     ...linesOf(presenter, null),
     ...(combination ? combinationBlocks(presenter, combination) : []),
+    ...interactionFigure(record, member),
   ];
 }
 
-/** The sheet with every combination, the governing one first among its figures. */
+/** The sheet with every combination; its figures are of the governing one, all on its first page. */
 export function wholeMemberSheet(record: CalculationRecord, memberId: string): Block[] {
   const { member, presenter } = openMember(record, memberId);
   const governing = chosen(member, null);
@@ -43,6 +45,7 @@ export function wholeMemberSheet(record: CalculationRecord, memberId: string): B
     sheetHead(member),
     verdictBlock(member, member.summary, governing),
     ...memberFigures(record, member, governing),
+    ...interactionFigure(record, member),
     ...linesOf(presenter, null),
     ...member.combinations.flatMap((c) => combinationBlocks(presenter, c)),
   ];

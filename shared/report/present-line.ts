@@ -2,6 +2,7 @@ import type { PlacedLine } from '../calc/address.ts';
 import type { Clause, Line, LineKind, LineOf, ValuedLine } from '../calc/line.ts';
 import { printedForms } from '../calc/printed.ts';
 import { readForms } from '../figures/read-line.ts';
+import { sectionText } from '../figures/section-text.ts';
 import { linked, type Step, substitutedStep, symbolicStep, valueLeaf } from './present-formula.ts';
 import { choiceSentence, comparisonSentence, governingSentence } from './present-sentence.ts';
 import { type Presenter, plain, printedBy, text, usedForm } from './presenter.ts';
@@ -63,17 +64,20 @@ const PRESENT = {
       confirmed: line.confirmed,
     },
   }),
-  statement: (_p, _placed, line) => ({
-    text: `${line.title}: ${line.statement}`,
-    ...(line.statement.length <= SHORT
-      ? { result: { value: line.statement, unit: '' } }
-      : { sentence: [text(line.statement)] }),
-    given: {
-      letter: sourceLetter(line.source),
-      source: sourceText(line.source),
-      confirmed: line.confirmed,
-    },
-  }),
+  statement: (_p, _placed, line) => {
+    const stated = sectionText(line.statement);
+    return {
+      text: `${line.title}: ${stated}`,
+      ...(stated.length <= SHORT
+        ? { result: { value: stated, unit: '' } }
+        : { sentence: [text(stated)] }),
+      given: {
+        letter: sourceLetter(line.source),
+        source: sourceText(line.source),
+        confirmed: line.confirmed,
+      },
+    };
+  },
   lookup: (p, _placed, line) => ({
     ...valued(p, line, []),
     sentence: [{ kind: 'text', quiet: true, text: tableText(line) }],
@@ -145,9 +149,15 @@ function typedElsewhere(p: Presenter, line: LineOf<'given'>): readonly Inline[] 
   return [{ kind: 'text', quiet: true, text: `given as ${typed}` }];
 }
 
-/** Where a value stands: `W shapes, row W12X79, column Ix_in4`; a clause has no columns. */
+/** Where a value stands: `W shapes, row W12X79, column Ix`; a clause has no columns. */
 const tableText = ({ table, row, column }: LineOf<'lookup'>): string =>
-  table.startsWith('Clause ') ? `${table}, ${row}` : `${table}, row ${row}, column ${column}`;
+  table.startsWith('Clause ')
+    ? `${table}, ${row}`
+    : `${table}, row ${row}, column ${columnText(column)}`;
+
+/** A column as the published table heads it: `Ix` for `Ix_in4`, `bf/2tf` for `bf_2tf`. */
+const columnText = (column: string): string =>
+  column.replace(/_in\d?$/, '').replace(/^(bf|h)_/, '$1/');
 
 /** Symbol, steps and result of a line that carries a value. */
 function valued(p: Presenter, line: ValuedLine, steps: readonly Step[]): Parts {

@@ -10,32 +10,37 @@ import { sectionOutline } from '../figures/section-outline.ts';
 import { sideBySide } from '../figures/side-by-side.ts';
 import type { Block } from './tree.ts';
 
-/** The figures of a sheet for one combination: member, moments of both planes, interaction, section. */
+/**
+ * The member and, under it at the same scale, the moments of both planes for one combination; the
+ * last one carries the words for all of them.
+ */
 export function memberFigures(
   record: CalculationRecord,
   member: MemberRecord,
   combination: CombinationRecord | null,
 ): Block[] {
   const drawing = readMember(member, combination, record.units);
-  const section = readSection(member, record.units);
+  if (!drawing) return [];
+  const moments = drawing.planes.flatMap((plane) => momentDiagram(drawing, plane) ?? []);
   const under = combination ? `, combination ${combination.name}` : '';
-  const figures: (readonly [Scene | null, string])[] = [
-    [
-      drawing && memberScene(drawing),
-      `Member to scale${under}. Lengths are measured off from end A.`,
-    ],
-    ...(drawing?.planes ?? []).map(
-      (plane) =>
-        [
-          momentDiagram(drawing as NonNullable<typeof drawing>, plane),
-          `Moments about ${plane.plane === 'major' ? 'x' : 'y'}${under}, drawn on the compressed side.`,
-        ] as const,
-    ),
-    crossSection(interactionDiagram(readInteraction(member)), section && sectionOutline(section)),
-  ];
-  return figures.flatMap(([scene, caption]): Block[] =>
-    scene ? [{ kind: 'figure', scene, caption }] : [],
+  const sides = moments.length > 0 ? ' Moments are drawn on the compressed side.' : '';
+  const caption = `Member to scale${under}; lengths are measured off from end A.${sides}`;
+  const scenes = [memberScene(drawing), ...moments];
+  return scenes.map((scene, index) => ({
+    kind: 'figure',
+    scene,
+    caption: index === scenes.length - 1 ? caption : '',
+  }));
+}
+
+/** Every combination in the interaction diagram, with the section's outline beside it. */
+export function interactionFigure(record: CalculationRecord, member: MemberRecord): Block[] {
+  const section = readSection(member, record.units);
+  const [scene, caption] = crossSection(
+    interactionDiagram(readInteraction(member)),
+    section && sectionOutline(section),
   );
+  return scene ? [{ kind: 'figure', scene, caption }] : [];
 }
 
 const OUTLINE = 'Section to scale, without fillets.';

@@ -97,6 +97,8 @@ export type Block =
         readonly tone?: 'plain' | 'over';
       }[];
       readonly notices: readonly string[];
+      /** What it doesn't do and doesn't cover, in short. */
+      readonly cautions: readonly string[];
     }
   /** Starts a member's sheet: a title block with mark, section, material. */
   | {

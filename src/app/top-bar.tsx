@@ -12,7 +12,10 @@ export interface Crumb {
 export interface Tab {
   readonly text: string;
   readonly to: string;
+  /** The pages under it are not its own. */
   readonly end?: boolean;
+  /** Where another page belongs to it. */
+  readonly current?: boolean;
 }
 
 /** The one bar: where I am, the parts of what is open, what is saved, who I am. */
@@ -41,7 +44,7 @@ export function TopBar(props: {
               className={({ isActive }) =>
                 classNames(
                   'flex items-center border-b-3 px-3 pt-0.75',
-                  isActive
+                  isActive || tab.current
                     ? 'border-oxide-3 font-semibold text-paper'
                     : 'border-transparent text-zinc-2 hover:text-paper',
                 )

@@ -87,7 +87,7 @@ export function FigureBlock({ block }: { block: BlockOf<'figure'> }) {
       className={block.scene.width < 400 ? 'sheet-figure sheet-figure-small' : 'sheet-figure'}
     >
       <SceneView scene={block.scene} />
-      <figcaption>{block.caption}</figcaption>
+      {block.caption && <figcaption>{block.caption}</figcaption>}
     </figure>
   );
 }

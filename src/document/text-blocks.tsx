@@ -99,6 +99,11 @@ export function CoverBlock({ block }: { block: BlockOf<'cover'> }) {
           {notice}
         </p>
       ))}
+      {block.cautions.map((caution) => (
+        <p key={caution} className="cover-caution">
+          {caution}
+        </p>
+      ))}
     </header>
   );
 }

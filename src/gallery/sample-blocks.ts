@@ -79,6 +79,7 @@ export const sampleBlocks: readonly Block[] = [
       { label: 'Worst verdict', value: 'NOT OK 1.041', tone: 'over' },
     ],
     notices: ['Preliminary, not issued.'],
+    cautions: ['It does not replace the locally adopted building code and its amendments.'],
   },
   { kind: 'heading', level: 1, text: 'A heading of the first level' },
   { kind: 'heading', level: 2, text: 'Of the second' },

@@ -38,7 +38,7 @@ export function Component() {
     <Shell
       title="Member"
       crumbs={calculationCrumbs(calculation.data)}
-      tabs={calculationTabs(calculationId)}
+      tabs={calculationTabs(calculationId, true)}
     >
       {error ? (
         <Failure title="The member could not be fetched" onRetry={retry}>
@@ -61,7 +61,7 @@ function MemberPage({ calculation, member }: { calculation: Calculation; member:
     <Shell
       title={`${mark}, ${calculation.number}`}
       crumbs={[...calculationCrumbs(calculation), { text: mark }]}
-      tabs={calculationTabs(calculation.id)}
+      tabs={calculationTabs(calculation.id, true)}
       layout="bare"
       status={
         <>

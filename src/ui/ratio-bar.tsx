@@ -1,6 +1,6 @@
 /** A ratio against its limit, which stands at the bar's right end; over it the bar is oxide and full. */
 export function RatioBar({ ratio }: { ratio: number | null }) {
-  if (ratio === null) return <svg className="block h-1.75 w-full" aria-hidden="true" />;
+  if (ratio === null) return <span className="text-small text-zinc-7">no ratio</span>;
   const over = ratio > 1;
   // The limit stands at 9/10 of the bar, so that what is over it can be seen to be.
   const limit = 90;

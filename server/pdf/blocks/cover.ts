@@ -35,6 +35,7 @@ export function measureCover(block: BlockOf<'cover'>, context: BlockContext): Ro
     row(1, [{ tag: null, items: [rule] }], { before: 12, keep: true }),
     ...fieldRows(block.fields, context),
     ...block.notices.map((notice, index) => noticeRow(notice, index === 0 ? 22 : 5, context)),
+    ...block.cautions.map((caution, index) => cautionRow(caution, index === 0 ? 22 : 4, context)),
   ];
 }
 
@@ -107,4 +108,13 @@ function noticeRow(notice: string, before: number, context: BlockContext): Row {
     ],
     { before },
   );
+}
+
+const cautionStyle: TextStyle = { ...textStyles.sentence, ink: 'zinc7' };
+
+function cautionRow(caution: string, before: number, context: BlockContext): Row {
+  const tag: Tag = { type: 'P', parent: context.sect };
+  const place = { x: 0, y: 0, width: Math.min(context.width, 430) };
+  const words = setWords(plain(caution), cautionStyle, place, context);
+  return row(words.height, [{ tag, items: words.items }], { before });
 }

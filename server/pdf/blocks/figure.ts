@@ -19,7 +19,7 @@ export function measureFigure(block: BlockOf<'figure'>, context: BlockContext): 
   const left = (context.width - scene.width * scale) / 2;
   const height = scene.height * scale;
   const items = sceneItems(scene, scale, left, context);
-  const rows = [row(height + 4, [{ tag, items }], { before: 8, keep: block.caption !== '' })];
+  const rows = [row(height + 4, [{ tag, items }], { before: 8, keep: true })];
   if (block.caption === '') return rows;
   const place = { x: 0, y: 0, width: context.width };
   const words = setWords(plain(block.caption), textStyles.small, place, context);

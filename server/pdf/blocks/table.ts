@@ -114,8 +114,16 @@ export function measureTable(block: BlockOf<'table'>, context: BlockContext): Ro
   }
   const head = tableRow(block.head, columns, table, true, context);
   rows.push({ ...head, before: rows.length > 0 ? 0 : 10 });
-  for (const cells of block.rows) {
-    rows.push({ ...tableRow(cells, columns, table, false, context), repeated: [head] });
-  }
-  return rows;
+  const body = block.rows.map((cells) => tableRow(cells, columns, table, false, context));
+  return [...rows, ...body.map((r, at) => ({ ...r, keep: keeps(at, body), repeated: [head] }))];
+}
+
+/** A table no higher than this is not divided, points. */
+const wholeUpTo = 240;
+
+/** Of a divided table no single row stands alone at the foot or the top of a page. */
+function keeps(at: number, body: readonly Row[]): boolean {
+  if (at === body.length - 1) return false;
+  const height = body.reduce((sum, each) => sum + each.height, 0);
+  return height <= wholeUpTo || at === 0 || at === body.length - 2;
 }

@@ -2,10 +2,10 @@ import { paths } from '#client/app/paths.ts';
 import type { Crumb, Tab } from '#client/app/top-bar.tsx';
 import type { Calculation } from '#shared/contracts/calculations.ts';
 
-/** The parts of a calculation, in the top bar. */
-export const calculationTabs = (calculationId: string): readonly Tab[] => [
+/** The parts of a calculation, in the top bar; a member's page is one of the members. */
+export const calculationTabs = (calculationId: string, onMember = false): readonly Tab[] => [
   { text: 'Basis', to: paths.basis(calculationId) },
-  { text: 'Members', to: paths.calculation(calculationId), end: true },
+  { text: 'Members', to: paths.calculation(calculationId), end: true, current: onMember },
   { text: 'Report', to: paths.report(calculationId) },
 ];
 

@@ -125,6 +125,7 @@ export function AnalysisPart(props: PartProps) {
         label="No sway: known from"
         optional
         maxLength={400}
+        fieldClassName="col-span-2"
         hint="The ends of the members do not move sideways relative to each other."
         value={analysis.swaySource}
         onChange={(event) => set.analysis({ swaySource: event.target.value }, 'swaySource')}
@@ -133,6 +134,7 @@ export function AnalysisPart(props: PartProps) {
         label="Notional loads"
         optional
         maxLength={400}
+        fieldClassName="col-span-2"
         value={analysis.notionalLoads}
         onChange={(event) => set.analysis({ notionalLoads: event.target.value }, 'notionalLoads')}
       />
@@ -144,7 +146,7 @@ export function AnalysisPart(props: PartProps) {
         onChange={(event) => set.analysis({ program: event.target.value }, 'program')}
       />
       <TextField
-        label="Its file"
+        label="File of the forces"
         optional
         maxLength={200}
         value={analysis.file}
@@ -168,7 +170,7 @@ export function CodePart(props: PartProps) {
         onChange={(event) => set.code({ name: event.target.value }, 'codeName')}
       />
       <TextField
-        label="Its year"
+        label="Year of the code"
         optional
         maxLength={20}
         value={basis.buildingCode.year}

@@ -13,34 +13,49 @@ export function CalculationBand({ calculation }: { calculation: Calculation }) {
   const total = open.reduce((sum, { summary }) => sum + summary.unconfirmed, 0);
   return (
     <div className="grid grid-cols-3 border-b border-zinc-2">
-      <Third title={asking.length > 0 ? 'Wants attention' : 'All members checked'}>
-        {asking.length === 0
-          ? rows.length > 0 && 'Each is within its limits under every combination.'
-          : asking.map((row, index) => (
-              <span key={row.id}>
-                {index > 0 && '; '}
-                <MemberLink calculation={calculation} row={row} /> {says(row)}
-              </span>
-            ))}
+      <Third title={attentionTitle(rows.length, asking.length)}>
+        {asking.length === 0 &&
+          (rows.length > 0
+            ? 'Each is within its limits under every combination.'
+            : 'Nothing has been calculated.')}
+        {asking.slice(0, NAMED).map((row, index) => (
+          <span key={row.id}>
+            {index > 0 && '; '}
+            <MemberLink calculation={calculation} row={row} /> {says(row)}
+          </span>
+        ))}
+        {andMore(asking.length)}
       </Third>
       <Third title={`Not confirmed: ${total}`}>
-        {total === 0
-          ? 'Every input has a source and is confirmed.'
-          : open.map((row, index) => (
-              <span key={row.id}>
-                {index > 0 && ', '}
-                {count(row.summary.unconfirmed, 'input')} of{' '}
-                <MemberLink calculation={calculation} row={row} />
-              </span>
-            ))}
+        {total === 0 &&
+          (rows.length > 0 ? 'Every input has a source and is confirmed.' : 'No inputs yet.')}
+        {open.slice(0, NAMED).map((row, index) => (
+          <span key={row.id}>
+            {index > 0 && ', '}
+            {count(row.summary.unconfirmed, 'input')} of{' '}
+            <MemberLink calculation={calculation} row={row} />
+          </span>
+        ))}
+        {andMore(open.length)}
       </Third>
       <Third title="Never covered here">
         Connections, base plates, bracing strength and stiffness, shear, torsion, deflection,
-        fatigue, fire, seismic detailing, erection.
+        fatigue, fire, seismic detailing, erection stability, temporary works.
       </Third>
     </div>
   );
 }
+
+/** How many members a part names; the list below has all of them. */
+const NAMED = 8;
+
+const andMore = (all: number): string =>
+  all > NAMED ? ` and ${count(all - NAMED, 'more member')}, in the list below` : '';
+
+const attentionTitle = (members: number, asking: number): string => {
+  if (members === 0) return 'No members yet';
+  return asking > 0 ? `Wants attention: ${asking} of ${members}` : 'All members are OK';
+};
 
 const says = ({ summary }: MemberRow): string =>
   summary.problems.length > 0

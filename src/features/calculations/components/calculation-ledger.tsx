@@ -22,8 +22,8 @@ export function CalculationLedger(props: {
           {props.showProject && <HeadCell>Project</HeadCell>}
           <HeadCell>Rev</HeadCell>
           <HeadCell className="text-right">Members</HeadCell>
-          <HeadCell className="w-[16%]">Worst</HeadCell>
-          <HeadCell className="text-right">Verdict</HeadCell>
+          <HeadCell className="w-[20%]">Largest ratio</HeadCell>
+          <HeadCell>Verdict</HeadCell>
           <HeadCell className="text-right">Not confirmed</HeadCell>
           <HeadCell>Changed</HeadCell>
         </>
@@ -43,13 +43,18 @@ export function CalculationLedger(props: {
           </Cell>
           <Cell className="figures text-right">{row.members}</Cell>
           <Cell className="align-middle">
-            <RatioBar ratio={row.ratio} />
+            {row.ratio !== null && (
+              <span className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-2.5">
+                <RatioBar ratio={row.ratio} />
+                <span className="figures">{row.ratioText}</span>
+              </span>
+            )}
           </Cell>
-          <Cell className="text-right">
+          <Cell>
             {row.verdict ? (
-              <VerdictText verdict={row.verdict} ratioText={row.ratioText} />
+              <VerdictText verdict={row.verdict} ratioText={null} />
             ) : (
-              'no members'
+              <span className="text-zinc-7">no members</span>
             )}
           </Cell>
           <Cell className="figures text-right">{row.unconfirmed}</Cell>

@@ -13,7 +13,7 @@ const says: Record<WaitingItem['reason'], (item: WaitingItem) => string> = {
   unconfirmed: (item) => `${count(item.count, 'input')} not confirmed`,
 };
 
-/** What waits for this person, worst first. */
+/** What waits for this person, worst first; a member stands once, with all it waits for. */
 export function WaitingList({ items }: { items: readonly WaitingItem[] }) {
   if (items.length === 0) {
     return (
@@ -22,28 +22,54 @@ export function WaitingList({ items }: { items: readonly WaitingItem[] }) {
   }
   return (
     <ul className="border-t-2 border-ink">
-      {items.map((item) => (
+      {byMember(items).map(([first, ...more]) => (
         <li
-          key={`${item.member.id}${item.reason}`}
+          key={first.member.id}
           className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 border-b border-zinc-2 py-2"
         >
           <Link
-            to={paths.member(item.calculation.id, item.member.id)}
-            className="link font-semibold"
+            to={paths.member(first.calculation.id, first.member.id)}
+            className="link w-fit font-semibold"
           >
-            {item.member.mark || 'without a mark'}
-            {item.member.section && ` · ${sectionName(item.member.section)}`}
+            {first.member.mark || 'without a mark'}
+            {first.member.section && ` · ${sectionName(first.member.section)}`}
           </Link>
-          <span
-            className={item.reason === 'unconfirmed' ? 'text-zinc-7' : 'font-semibold text-oxide'}
-          >
-            {says[item.reason](item)}
-          </span>
+          <Reason item={first} />
           <span className="font-condensed text-small text-zinc-7">
-            {item.calculation.number} {item.calculation.title}
+            {first.calculation.number} {first.calculation.title}
+          </span>
+          <span className="text-right text-small">
+            {more.map((item) => (
+              <Reason key={item.reason} item={item} />
+            ))}
           </span>
         </li>
       ))}
     </ul>
   );
+}
+
+const Reason = ({ item }: { item: WaitingItem }) => (
+  <span
+    className={
+      item.reason === 'unconfirmed'
+        ? 'text-right text-zinc-7'
+        : 'text-right font-semibold text-oxide'
+    }
+  >
+    {says[item.reason](item)}
+  </span>
+);
+
+type ItemsOfMember = [WaitingItem, ...WaitingItem[]];
+
+/** The items of each member together, in the order of their worst. */
+function byMember(items: readonly WaitingItem[]): ItemsOfMember[] {
+  const groups = new Map<string, ItemsOfMember>();
+  for (const item of items) {
+    const group = groups.get(item.member.id);
+    if (group) group.push(item);
+    else groups.set(item.member.id, [item]);
+  }
+  return [...groups.values()];
 }

@@ -50,11 +50,15 @@ export function MemberLedgerRow(props: {
   );
 }
 
+/** What a member asks for beside its verdict; one doesn't hide another. */
 function MemberState({ row }: { row: MemberRow }) {
-  const { problems, unconfirmed, verdict } = row.summary;
-  if (problems.length > 0)
-    return <Tag tone="asks">{count(problems.length, 'input')} to correct</Tag>;
-  if (verdict === 'NOT OK') return <Tag tone="asks">over limit</Tag>;
-  if (unconfirmed > 0) return <Tag>{unconfirmed} not confirmed</Tag>;
-  return <span className="text-zinc-7">confirmed</span>;
+  const { problems, unconfirmed } = row.summary;
+  if (problems.length === 0 && unconfirmed === 0)
+    return <span className="text-zinc-7">confirmed</span>;
+  return (
+    <span className="flex flex-wrap gap-1">
+      {problems.length > 0 && <Tag tone="asks">{count(problems.length, 'input')} to correct</Tag>}
+      {unconfirmed > 0 && <Tag>{unconfirmed} not confirmed</Tag>}
+    </span>
+  );
 }

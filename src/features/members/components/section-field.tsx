@@ -1,5 +1,6 @@
 import { Popover } from 'radix-ui';
 import { type KeyboardEvent, useId, useState } from 'react';
+import { sectionName } from '#client/document/section-name.ts';
 import { fieldClass } from '#client/ui/field.tsx';
 import { findShape, searchShapes } from '#shared/sections/table.ts';
 import { withStated, withText } from '../edit-draft.ts';
@@ -64,7 +65,9 @@ export function SectionField() {
               aria-autocomplete="list"
               {...(open && found[active] ? { 'aria-activedescendant': `${list}-${active}` } : {})}
               value={
-                open ? quantity.text : (findShape(quantity.text)?.designation ?? quantity.text)
+                open
+                  ? quantity.text
+                  : sectionName(findShape(quantity.text)?.designation ?? quantity.text)
               }
               readOnly={!editable}
               autoComplete="off"
