@@ -66,7 +66,11 @@ export const hallMembers: readonly MemberDraft[] = [
   {
     ...column('C-08', '5/B', 'W12X79', '22 ft'),
     ...assumedLengths('22 ft'),
-    combinations: [fromFile(forces, 'c1', 7, false), fromFile(forces, 'c2', 8, false)],
+    // The section moved on after the analysis: its forces are not confirmed, and say why.
+    combinations: [fromFile(forces, 'c1', 7), fromFile(forces, 'c2', 8)].map((row) => ({
+      ...row,
+      analysedWith: 'W12X65',
+    })),
   },
   {
     ...column('C-09', '6/B', 'W10X33', '16 ft'),

@@ -37,7 +37,7 @@ export async function seedCalculation(
   await tx.db.insert(calculations).values({ id: calculationId, projectId, ...row, ...changed });
   const created = { action: 'calculation.created', after: { number, title, basis } } as const;
   await writeAudit(tx, { ...scope, subjectId: calculationId }, created);
-  for (const [index, draft] of drafts.entries()) {
+  for (const [index, draft] of drafts.map(withAnalysedSection).entries()) {
     const id = randomUUID();
     const columns = await draftColumns(runs, basis, id, draft);
     await tx.db
@@ -47,3 +47,9 @@ export async function seedCalculation(
     await writeAudit(tx, { ...scope, subjectId: id }, added);
   }
 }
+
+/** The demo's forces are of the sections that its members have, unless they say otherwise. */
+const withAnalysedSection = (draft: MemberDraft): MemberDraft => ({
+  ...draft,
+  combinations: draft.combinations.map((row) => ({ analysedWith: draft.section.text, ...row })),
+});

@@ -2,8 +2,9 @@ import { describe, expect, it } from 'vitest';
 import { addressOf, splitAddress } from './address.ts';
 import { defineFormula } from './formula.ts';
 import { lineGraph } from './graph.ts';
+import type { Quantity } from './quantity.ts';
 import type { CombinationRecord } from './record.ts';
-import { createRecorder, type Quantity } from './recorder.ts';
+import { createRecorder } from './recorder.ts';
 
 const sum = defineFormula('b', {
   id: 'sum',

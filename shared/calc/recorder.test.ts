@@ -2,7 +2,8 @@ import { describe, expect, it } from 'vitest';
 import type { DimensionName } from '../units/dimension.ts';
 import { defineFormula } from './formula.ts';
 import { lineSchema } from './line.ts';
-import { createRecorder, NotComputable, type Quantity } from './recorder.ts';
+import type { Quantity } from './quantity.ts';
+import { createRecorder, NotComputable } from './recorder.ts';
 
 const typed = { kind: 'typed' } as const;
 const given = (

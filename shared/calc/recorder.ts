@@ -1,27 +1,9 @@
 import type { DimensionName } from '../units/dimension.ts';
+import { conditionOf, holds, type Tried } from './condition.ts';
 import type { Formula } from './formula.ts';
-import type { Clause, Line, LineOf, Print, Severity, Side, Source, ValuedLine } from './line.ts';
+import type { Clause, Line, LineOf, Print, Severity, Source, ValuedLine } from './line.ts';
+import { type GivenValue, type Quantity, withoutNoise } from './quantity.ts';
 import { solveBracketed } from './solve.ts';
-
-/**
- * The recorder writes typed lines as a procedure runs. It knows kinds of lines, never clauses. A
- * quantity it hands out is a number with the reference of its line; only such quantities enter
- * formulas, so every number on a sheet has a line.
- */
-export interface Quantity {
-  readonly ref: string;
-  readonly symbol: string;
-  readonly value: number;
-  readonly dimension: DimensionName;
-}
-
-/** A value somebody gave: base units, as typed, with its source and state. */
-export interface GivenValue {
-  readonly value: number;
-  readonly text: string;
-  readonly source: Source;
-  readonly confirmed: boolean;
-}
 
 /** Ends a run whose formula has no finite value; the notice that says so is already written. */
 export class NotComputable extends Error {}
@@ -31,38 +13,12 @@ interface Titled {
   readonly clause?: Clause | null;
 }
 
-export interface Tried {
-  readonly left: Quantity | number | string;
-  readonly relation: '<' | '<=' | '>' | '>=' | '=' | 'is';
-  readonly right: Quantity | number | string;
-  readonly outcome: string;
-}
-
 const UNPRINTED: Print = { working: null, display: null };
 
-const side = (s: Quantity | number | string): Side =>
-  typeof s === 'number' ? { constant: s } : typeof s === 'string' ? { words: s } : { ref: s.ref };
-
-const number = (s: Quantity | number | string): number =>
-  typeof s === 'number' ? s : typeof s === 'string' ? Number.NaN : s.value;
-
-/** Compared in plain JavaScript, without a tolerance. */
-function holds({ left, relation, right }: Tried): boolean {
-  if (relation === 'is') return left === right;
-  const [l, r] = [number(left), number(right)];
-  return { '<': l < r, '<=': l <= r, '>': l > r, '>=': l >= r, '=': l === r }[relation];
-}
-
 /**
- * A plain number within a few bits of one with at most 12 digits is that number: 600 kip over
- * 1200 kip is 0.5 whatever the units it was computed in, so that limits met exactly are met.
+ * The recorder writes typed lines as a procedure runs. It knows kinds of lines, never clauses. Only
+ * the quantities it hands out enter formulas, so every number on a sheet has a line.
  */
-function withoutNoise(value: number, dimension: DimensionName): number {
-  if (dimension !== 'none' || !Number.isFinite(value)) return value;
-  const plain = Number(value.toPrecision(12));
-  return Math.abs(value - plain) <= 8 * Number.EPSILON * Math.abs(plain) ? plain : value;
-}
-
 export type Recorder = ReturnType<typeof createRecorder>;
 
 /** A recorder of one scope: '' for member lines, ':' for the lines of one combination. */
@@ -246,13 +202,7 @@ export function createRecorder(prefix: '' | ':') {
         key,
         title: more.title,
         clause: more.clause ?? null,
-        tried: read.map((t) => ({
-          left: side(t.left),
-          relation: t.relation,
-          right: side(t.right),
-          holds: holds(t),
-          outcome: t.outcome,
-        })),
+        tried: read.map(conditionOf),
         otherwise,
         outcome: taken < 0 ? otherwise : (tried[taken]?.outcome ?? otherwise),
         because: more.because ?? '',

@@ -55,6 +55,7 @@ function memberInputOf(id: string, draft: MemberDraft) {
 const combinationInputOf = (row: DraftCombination) => ({
   ...{ id: row.id, name: row.name },
   ...(row.design ? { design: row.design } : {}),
+  ...(row.analysedWith?.trim() ? { analysedWith: row.analysedWith.trim() } : {}),
   ...Object.assign({}, ...actionNames.map((action) => given(action, row[action]))),
 });
 

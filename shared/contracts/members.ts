@@ -53,6 +53,8 @@ export const draftCombination = z.object({
   name: line(120),
   /** The load level that the forces say they are of; empty where they do not say. */
   design: z.enum(['LRFD', 'ASD', '']).optional(),
+  /** The section that the member had when the forces came: forces belong to it. */
+  analysedWith: line(60).optional(),
   P: draftQuantity,
   MxA: draftQuantity,
   MxB: draftQuantity,

@@ -1,5 +1,6 @@
 import type { Line, LineOf } from '../calc/line.ts';
-import { createRecorder, NotComputable, type Quantity } from '../calc/recorder.ts';
+import type { Quantity } from '../calc/quantity.ts';
+import { createRecorder, NotComputable } from '../calc/recorder.ts';
 import { firstOrderAxialLimit } from '../standards/aisc360-22/app7.ts';
 import { interaction, interactionChecks, separateChecks } from '../standards/aisc360-22/h1.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';

@@ -3,7 +3,8 @@ import type { CombinationRecord, CoverageRow } from '../calc/record.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { printNumber } from '../units/format.ts';
 import type { CombinationRun } from './combination.ts';
-import { LIMIT_STATES, notReached, type Told } from './limit-states.ts';
+import { notReached, type Told } from './limit-state.ts';
+import { LIMIT_STATES } from './limit-states.ts';
 
 type Cell = CoverageRow['cells'][number];
 

@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../calc/recorder.ts';
+import type { Quantity } from '../calc/quantity.ts';
+import type { Recorder } from '../calc/recorder.ts';
 import { type CompressionClass, compressionClass } from '../standards/aisc360-22/b4.ts';
 import { c2Formulas } from '../standards/aisc360-22/c2.ts';
 import {

@@ -1,5 +1,5 @@
 import type { Source } from '../calc/line.ts';
-import type { GivenValue } from '../calc/recorder.ts';
+import type { GivenValue } from '../calc/quantity.ts';
 import type { DimensionName } from '../units/dimension.ts';
 import { parseQuantity } from '../units/parse.ts';
 import type { Stated } from './resolved.ts';

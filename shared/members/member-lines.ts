@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../calc/recorder.ts';
+import type { Quantity } from '../calc/quantity.ts';
+import type { Recorder } from '../calc/recorder.ts';
 import { PROPERTY_NAMES, type PropertyName, W_TABLE, type WShape } from '../sections/table.ts';
 import { SPECIFICATION } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';

@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../calc/recorder.ts';
+import type { Quantity } from '../calc/quantity.ts';
+import type { Recorder } from '../calc/recorder.ts';
 import { f1Formulas, firstOrderQuarters, modificationFactor } from '../standards/aisc360-22/f1.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { secondOrderQuarters } from '../standards/elastic-theory/second-order.ts';

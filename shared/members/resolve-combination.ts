@@ -1,4 +1,4 @@
-import type { GivenValue } from '../calc/recorder.ts';
+import type { GivenValue } from '../calc/quantity.ts';
 import { normalDesignation } from '../sections/table.ts';
 import { forceProblems } from './force-level.ts';
 import { type ReadQuantity, TYPED } from './given-values.ts';

@@ -1,5 +1,5 @@
 import type { Source } from '../calc/line.ts';
-import type { GivenValue } from '../calc/recorder.ts';
+import type { GivenValue } from '../calc/quantity.ts';
 import { findShape, normalDesignation } from '../sections/table.ts';
 import { partsOf, quantityReader, stateOf, TYPED } from './given-values.ts';
 import type { CalculationInput, MemberInput } from './input.ts';

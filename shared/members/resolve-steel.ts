@@ -1,4 +1,4 @@
-import type { GivenValue } from '../calc/recorder.ts';
+import type { GivenValue } from '../calc/quantity.ts';
 import { type ReadQuantity, TYPED } from './given-values.ts';
 import type { MemberInput } from './input.ts';
 import { findSteel } from './material.ts';

@@ -1,5 +1,5 @@
 import type { Source } from '../calc/line.ts';
-import type { GivenValue } from '../calc/recorder.ts';
+import type { GivenValue } from '../calc/quantity.ts';
 import type { WShape } from '../sections/table.ts';
 import type { CalculationInput, Ends } from './input.ts';
 import type { Steel } from './material.ts';

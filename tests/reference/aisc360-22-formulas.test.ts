@@ -1,6 +1,7 @@
 import { evaluate } from 'mathjs';
 import { describe, expect, it } from 'vitest';
-import { createRecorder, type GivenValue } from '#shared/calc/recorder.ts';
+import type { GivenValue } from '#shared/calc/quantity.ts';
+import { createRecorder } from '#shared/calc/recorder.ts';
 import { findShape, W_DESIGNATIONS } from '#shared/sections/table.ts';
 import { majorFlexureClass } from '#shared/standards/aisc360-22/b4.ts';
 import { nominalStress } from '#shared/standards/aisc360-22/e3.ts';

@@ -1,4 +1,5 @@
-import { createRecorder, type GivenValue, type Quantity } from '#shared/calc/recorder.ts';
+import type { GivenValue, Quantity } from '#shared/calc/quantity.ts';
+import { createRecorder } from '#shared/calc/recorder.ts';
 import { criticalLoad } from '#shared/standards/aisc360-22/app8.ts';
 import { endMoments } from '#shared/standards/elastic-theory/end-moments.ts';
 import {

@@ -1,4 +1,4 @@
-import type { GivenValue } from '#shared/calc/recorder.ts';
+import type { GivenValue } from '#shared/calc/quantity.ts';
 import type { ResolvedMember } from '#shared/members/resolved.ts';
 
 const LENGTHS = ['Lcx', 'Lcy', 'Lcz', 'Lb'] as const;

@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import type { Quantity } from '../../calc/quantity.ts';
+import type { Recorder } from '../../calc/recorder.ts';
 import { clause, formula } from './writer.ts';
 
 // Appendix 8.1.2: the multiplier B1 for members without lateral translation of their ends.

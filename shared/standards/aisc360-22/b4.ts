@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import type { Quantity } from '../../calc/quantity.ts';
+import type { Recorder } from '../../calc/recorder.ts';
 import { clause, formula } from './writer.ts';
 
 // B4.1, Tables B4.1a and B4.1b: width-to-thickness limits of rolled I-shapes.

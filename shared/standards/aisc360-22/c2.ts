@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import type { Quantity } from '../../calc/quantity.ts';
+import type { Recorder } from '../../calc/recorder.ts';
 import { clause, formula } from './writer.ts';
 
 // C2.3 stiffness of the direct analysis method; App. 7 and App. 8 use the nominal one otherwise.

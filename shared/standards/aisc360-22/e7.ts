@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import type { Quantity } from '../../calc/quantity.ts';
+import type { Recorder } from '../../calc/recorder.ts';
 import { effectiveWidthConstants } from './parameters.ts';
 import { clause, formula } from './writer.ts';
 

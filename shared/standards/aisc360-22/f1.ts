@@ -1,4 +1,5 @@
-import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import type { Quantity } from '../../calc/quantity.ts';
+import type { Recorder } from '../../calc/recorder.ts';
 import { formula } from './writer.ts';
 
 // F1 general: Cb from the moments at the quarter points of the unbraced segment.

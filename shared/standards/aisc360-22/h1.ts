@@ -1,8 +1,30 @@
+import type { FormulaText } from '../../calc/formula.ts';
 import type { LineOf } from '../../calc/line.ts';
-import type { Quantity, Recorder } from '../../calc/recorder.ts';
+import type { Quantity } from '../../calc/quantity.ts';
+import type { Recorder } from '../../calc/recorder.ts';
 import { clause, formula } from './writer.ts';
 
-// H1.1 doubly symmetric members in flexure and compression.
+// H1.1 doubly symmetric members in flexure and compression. Terms that are zero are left out of the
+// equations; the equation number stays.
+const AXIAL = { Pr: 'force', Pc: 'force' } as const;
+const MAJOR = { Mrx: 'moment', Mcx: 'moment' } as const;
+const MINOR = { Mry: 'moment', Mcy: 'moment' } as const;
+
+const interactionFormula = (
+  id: string,
+  equation: string,
+  title: string,
+  expression: string,
+  operands: FormulaText['operands'],
+) =>
+  formula({
+    ...{ id, clause: 'H1.1', equation, title, symbol: 'ratio', dimension: 'none' },
+    ...{ expression, operands, prints: 'display', ratio: true },
+  });
+
+const NO_MINOR = 'Interaction, no minor-axis moment';
+const NO_MAJOR = 'Interaction, no major-axis moment';
+
 export const h1Formulas = {
   axialShare: formula({
     id: 'H1-Pr/Pc',
@@ -11,107 +33,45 @@ export const h1Formulas = {
     symbol: 'PrPc',
     dimension: 'none',
     expression: 'Pr/Pc',
-    operands: { Pr: 'force', Pc: 'force' },
+    operands: AXIAL,
     prints: 'display',
   }),
-  a: formula({
-    id: 'H1-1a',
-    clause: 'H1.1',
-    equation: 'H1-1a',
-    title: 'Interaction',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Pr/Pc+8/9*(Mrx/Mcx+Mry/Mcy)',
-    operands: {
-      Pr: 'force',
-      Pc: 'force',
-      Mrx: 'moment',
-      Mcx: 'moment',
-      Mry: 'moment',
-      Mcy: 'moment',
+  a: interactionFormula('H1-1a', 'H1-1a', 'Interaction', 'Pr/Pc+8/9*(Mrx/Mcx+Mry/Mcy)', {
+    ...AXIAL,
+    ...MAJOR,
+    ...MINOR,
+  }),
+  b: interactionFormula('H1-1b', 'H1-1b', 'Interaction', 'Pr/(2*Pc)+(Mrx/Mcx+Mry/Mcy)', {
+    ...AXIAL,
+    ...MAJOR,
+    ...MINOR,
+  }),
+  aMajor: interactionFormula('H1-1a-x', 'H1-1a', NO_MINOR, 'Pr/Pc+8/9*(Mrx/Mcx)', {
+    ...AXIAL,
+    ...MAJOR,
+  }),
+  bMajor: interactionFormula('H1-1b-x', 'H1-1b', NO_MINOR, 'Pr/(2*Pc)+Mrx/Mcx', {
+    ...AXIAL,
+    ...MAJOR,
+  }),
+  aMinor: interactionFormula('H1-1a-y', 'H1-1a', NO_MAJOR, 'Pr/Pc+8/9*(Mry/Mcy)', {
+    ...AXIAL,
+    ...MINOR,
+  }),
+  bMinor: interactionFormula('H1-1b-y', 'H1-1b', NO_MAJOR, 'Pr/(2*Pc)+Mry/Mcy', {
+    ...AXIAL,
+    ...MINOR,
+  }),
+  biaxial: interactionFormula(
+    'H1-1b-M',
+    'H1-1b',
+    'Interaction, no axial force',
+    'Mrx/Mcx+Mry/Mcy',
+    {
+      ...MAJOR,
+      ...MINOR,
     },
-    prints: 'display',
-    ratio: true,
-  }),
-  b: formula({
-    id: 'H1-1b',
-    clause: 'H1.1',
-    equation: 'H1-1b',
-    title: 'Interaction',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Pr/(2*Pc)+(Mrx/Mcx+Mry/Mcy)',
-    operands: {
-      Pr: 'force',
-      Pc: 'force',
-      Mrx: 'moment',
-      Mcx: 'moment',
-      Mry: 'moment',
-      Mcy: 'moment',
-    },
-    prints: 'display',
-    ratio: true,
-  }),
-  aMajor: formula({
-    id: 'H1-1a-x',
-    clause: 'H1.1',
-    equation: 'H1-1a',
-    title: 'Interaction, no minor-axis moment',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Pr/Pc+8/9*(Mrx/Mcx)',
-    operands: { Pr: 'force', Pc: 'force', Mrx: 'moment', Mcx: 'moment' },
-    prints: 'display',
-    ratio: true,
-  }),
-  bMajor: formula({
-    id: 'H1-1b-x',
-    clause: 'H1.1',
-    equation: 'H1-1b',
-    title: 'Interaction, no minor-axis moment',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Pr/(2*Pc)+Mrx/Mcx',
-    operands: { Pr: 'force', Pc: 'force', Mrx: 'moment', Mcx: 'moment' },
-    prints: 'display',
-    ratio: true,
-  }),
-  aMinor: formula({
-    id: 'H1-1a-y',
-    clause: 'H1.1',
-    equation: 'H1-1a',
-    title: 'Interaction, no major-axis moment',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Pr/Pc+8/9*(Mry/Mcy)',
-    operands: { Pr: 'force', Pc: 'force', Mry: 'moment', Mcy: 'moment' },
-    prints: 'display',
-    ratio: true,
-  }),
-  bMinor: formula({
-    id: 'H1-1b-y',
-    clause: 'H1.1',
-    equation: 'H1-1b',
-    title: 'Interaction, no major-axis moment',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Pr/(2*Pc)+Mry/Mcy',
-    operands: { Pr: 'force', Pc: 'force', Mry: 'moment', Mcy: 'moment' },
-    prints: 'display',
-    ratio: true,
-  }),
-  biaxial: formula({
-    id: 'H1-1b-M',
-    clause: 'H1.1',
-    equation: 'H1-1b',
-    title: 'Interaction, no axial force',
-    symbol: 'ratio',
-    dimension: 'none',
-    expression: 'Mrx/Mcx+Mry/Mcy',
-    operands: { Mrx: 'moment', Mcx: 'moment', Mry: 'moment', Mcy: 'moment' },
-    prints: 'display',
-    ratio: true,
-  }),
+  ),
 };
 
 /** One of the two moments against its strength. */

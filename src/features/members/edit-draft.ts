@@ -4,6 +4,7 @@ import type {
   DraftQuantity,
   MemberDraft,
 } from '#shared/contracts/members.ts';
+import { normalDesignation } from '#shared/sections/table.ts';
 import type { StatedName } from './member-fields.ts';
 
 /** Typing another value ends its confirmation: what was confirmed was the value before. */
@@ -33,7 +34,27 @@ export const withAction = (
   id: string,
   action: ActionName,
   quantity: DraftQuantity,
-): MemberDraft => withCombination(draft, id, (row) => ({ ...row, [action]: quantity }));
+): MemberDraft =>
+  withCombination(draft, id, (row) =>
+    withForcesOf(draft.section.text, { ...row, [action]: quantity }),
+  );
+
+/** Forces belong to the section they came with; a row that has none yet takes the member's. */
+export const withForcesOf = (section: string, row: DraftCombination): DraftCombination =>
+  row.analysedWith?.trim() || section.trim() === ''
+    ? row
+    : { ...row, analysedWith: section.trim() };
+
+/** Says that the forces come from an analysis with the section the member has now. */
+export const analysedAgain = (draft: MemberDraft, id: string): MemberDraft =>
+  withCombination(draft, id, (row) => ({ ...row, analysedWith: draft.section.text.trim() }));
+
+/** The section the forces were analysed with, where the member has another one now. */
+export function sectionLeft(draft: MemberDraft, row: DraftCombination): string | null {
+  const analysed = normalDesignation(row.analysedWith ?? '');
+  const now = normalDesignation(draft.section.text);
+  return analysed === '' || now === '' || analysed === now ? null : analysed;
+}
 
 export const withoutCombination = (draft: MemberDraft, id: string): MemberDraft => ({
   ...draft,

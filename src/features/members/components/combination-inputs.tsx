@@ -1,6 +1,8 @@
+import { Button } from '#client/ui/button.tsx';
 import { fieldClass } from '#client/ui/field.tsx';
 import { actionNames, type DraftCombination, type MemberDraft } from '#shared/contracts/members.ts';
-import { withAction, withCombination } from '../edit-draft.ts';
+import { normalDesignation, printedDesignation } from '#shared/sections/table.ts';
+import { analysedAgain, sectionLeft, withAction, withCombination } from '../edit-draft.ts';
 import { actionWords } from '../member-fields.ts';
 import { InputRow } from './input-row.tsx';
 import { useMemberForm } from './member-form-context.ts';
@@ -53,7 +55,33 @@ export function CombinationInputs(props: {
         />
       ))}
       <SenseRow />
+      <SectionLeft row={row} />
     </>
+  );
+}
+
+/** Forces of an analysis with another section count as not confirmed until it is run again. */
+function SectionLeft({ row }: { row: DraftCombination }) {
+  const { draft, edit, editable } = useMemberForm();
+  const left = sectionLeft(draft, row);
+  if (!left) return null;
+  const now = printedDesignation(normalDesignation(draft.section.text));
+  return (
+    <div role="status" className="mt-2 border-l-2 border-oxide pl-3 text-small">
+      <p>
+        These forces were analysed with {printedDesignation(left)}, the member is {now} now. They
+        are not confirmed until the analysis is run again.
+      </p>
+      {editable && (
+        <Button
+          size="small"
+          className="mt-1.5"
+          onClick={() => edit(analysedAgain(draft, row.id), `${row.id}/analysedWith`)}
+        >
+          Analysed again with {now}
+        </Button>
+      )}
+    </div>
   );
 }
 

@@ -4,6 +4,7 @@ import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
 import { Empty } from '#client/ui/state-panels.tsx';
 import { SymbolMark } from '#client/ui/symbol.tsx';
 import { actionNames } from '#shared/contracts/members.ts';
+import { withForcesOf } from '../edit-draft.ts';
 import { firstCombination } from '../first-draft.ts';
 import { actionWords } from '../member-fields.ts';
 import { ForcesRow } from './forces-row.tsx';
@@ -100,7 +101,8 @@ export function ForcesPaper(props: {
           present={rows}
           onClose={() => setPasting(null)}
           onTake={(combinations) => {
-            edit({ ...draft, combinations: [...combinations] }, 'rows/paste');
+            const here = combinations.map((row) => withForcesOf(draft.section.text, row));
+            edit({ ...draft, combinations: here }, 'rows/paste');
             setPasting(null);
           }}
         />
