@@ -19,7 +19,7 @@ export function measureDocument(tree: DocumentTree, paper: PaperSize, fonts: Fon
   let sect: Tag = { type: 'Sect', parent: root };
   let member = '';
   let running: RunningHead | null = null;
-  return tree.blocks.flatMap((block) => {
+  return tree.blocks.flatMap((block, index) => {
     if (opensSection(block)) {
       sect = { type: 'Sect', parent: root };
       running = null;
@@ -33,7 +33,8 @@ export function measureDocument(tree: DocumentTree, paper: PaperSize, fonts: Fon
       anchors.has(anchorOf(of, address)) ? anchorOf(of, address) : null;
     const width = paper.right - paper.left;
     const rows = measureBlock(block, { fonts, width, sect, linkOf });
-    return rows.map((row) => ({ ...row, running }));
+    const introduces = block.kind === 'paragraph' && tree.blocks[index + 1]?.kind === 'table';
+    return rows.map((row) => ({ ...row, running, keep: row.keep || introduces }));
   });
 }
 

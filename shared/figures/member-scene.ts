@@ -97,7 +97,7 @@ function lengthBars(drawing: MemberDrawing, along: (mm: number) => number, top: 
       label(first.text, [end + 8, y], { within: WIDTH - end - 10 }),
     );
   }
-  return { shapes, end: y + 4 };
+  return { shapes, end: y + 10 };
 }
 
 function describe(drawing: MemberDrawing): string {

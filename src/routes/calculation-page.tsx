@@ -55,14 +55,16 @@ function MembersPaper({ calculation }: { calculation: Calculation }) {
         actions={<Downloads calculation={calculation} />}
       />
       <CalculationBand calculation={calculation} />
-      <PartHead title="Members" actions={rows.length > 0 && add} />
       {rows.length > 0 ? (
-        <MemberLedger calculation={calculation} />
+        <MemberLedger calculation={calculation} actions={add} />
       ) : (
-        <Empty action={add}>
-          No members yet. A member has a mark, a section, lengths between restraints, and the forces
-          of each combination.
-        </Empty>
+        <>
+          <PartHead title="Members" />
+          <Empty action={add}>
+            No members yet. A member has a mark, a section, lengths between restraints, and the
+            forces of each combination.
+          </Empty>
+        </>
       )}
       {calculation.can.edit && <DeletedMembers calculation={calculation} />}
     </>

@@ -16,12 +16,12 @@ export function Paper({ children, className }: { children: ReactNode; className?
 /** Title of a paper with what it is about under it. */
 export function PaperHead(props: { title: ReactNode; sub?: ReactNode; actions?: ReactNode }) {
   return (
-    <header className="flex flex-wrap items-end justify-between gap-x-6 gap-y-3 border-b-2 border-ink pb-5">
-      <div className="min-w-0">
+    <header className="flex items-end justify-between gap-x-6 border-b-2 border-ink pb-5">
+      <div className="min-w-0 flex-1">
         <h1 className="font-serif text-display font-semibold">{props.title}</h1>
         {props.sub && <p className="mt-1 text-zinc-7">{props.sub}</p>}
       </div>
-      {props.actions && <div className="flex flex-wrap gap-2">{props.actions}</div>}
+      {props.actions && <div className="flex shrink-0 gap-2">{props.actions}</div>}
     </header>
   );
 }

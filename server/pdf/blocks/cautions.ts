@@ -14,6 +14,7 @@ export function measureCautions(block: BlockOf<'cautions'>, context: BlockContex
     const rows = paragraphRows(plain(item), textStyles.sentence, place, tag, context);
     return rows.map((row) => ({
       ...row,
+      keep: index < block.items.length - 1,
       parts: [...row.parts, { tag: null, items: [bar(0, 0, 1.5, row.height, 'oxide')] }],
     }));
   });

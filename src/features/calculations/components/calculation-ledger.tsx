@@ -42,7 +42,7 @@ export function CalculationLedger(props: {
             {row.revision}, {row.state}
           </Cell>
           <Cell className="figures text-right">{row.members}</Cell>
-          <Cell className="align-middle">
+          <Cell>
             {row.ratio !== null && (
               <span className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-2.5">
                 <RatioBar ratio={row.ratio} />
@@ -54,7 +54,7 @@ export function CalculationLedger(props: {
             {row.verdict ? (
               <VerdictText verdict={row.verdict} ratioText={null} />
             ) : (
-              <span className="text-zinc-7">no members</span>
+              <span className="whitespace-nowrap text-zinc-7">no members</span>
             )}
           </Cell>
           <Cell className="figures text-right">{row.unconfirmed}</Cell>

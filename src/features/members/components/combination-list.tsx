@@ -36,7 +36,9 @@ export function CombinationList(props: {
                     : 'hover:bg-zinc-1',
                 )}
               >
-                <span className="min-w-0 truncate">{row.name || 'without a name'}</span>
+                <span className="min-w-0 truncate" title={row.name}>
+                  {row.name || 'without a name'}
+                </span>
                 {summary && <VerdictText verdict={summary.verdict} ratioText={summary.ratioText} />}
               </button>
             </li>

@@ -42,8 +42,8 @@ export function ForcesPaper(props: {
         <div>
           <h1 className="font-serif text-title font-semibold">Member forces of {draft.mark}</h1>
           <p className="text-zinc-7">
-            Compression positive; moments at the ends A and B about x (major) and y (minor). Empty
-            is zero.
+            Compression positive; moments at the ends A and B about x (major) and y (minor). An
+            empty moment is zero.
           </p>
         </div>
         {editable && (
@@ -69,7 +69,7 @@ export function ForcesPaper(props: {
           caption="Combinations and their forces"
           head={
             <>
-              <HeadCell className="w-[20%]">Combination</HeadCell>
+              <HeadCell className="w-[26%]">Combination</HeadCell>
               {actions.map((action) => (
                 <HeadCell key={action} className="text-right">
                   <SymbolMark tex={actionWords[action].tex} />

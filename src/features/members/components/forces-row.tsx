@@ -49,6 +49,7 @@ export function ForcesRow(props: {
             aria-label={`Name of combination ${index + 1}`}
             {...(nameProblem ? { 'aria-invalid': true } : {})}
             value={row.name}
+            title={row.name}
             readOnly={!editable}
             maxLength={120}
             onChange={(event) =>
@@ -57,7 +58,7 @@ export function ForcesRow(props: {
                 `${row.id}/name`,
               )
             }
-            className={cellClass(nameProblem, 'font-semibold')}
+            className={cellClass(nameProblem, 'truncate font-semibold')}
           />
         </td>
         {props.actions.map((action) => {

@@ -62,7 +62,7 @@ export function InputsMargin(props: {
       {row && (
         <section aria-labelledby="inputs-forces" className="mt-5">
           <h2 id="inputs-forces" className="caps mb-1.5">
-            Combination {row.name}
+            Combination <span className="normal-case">{row.name}</span>
           </h2>
           <CombinationInputs
             row={row}

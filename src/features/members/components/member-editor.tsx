@@ -11,6 +11,7 @@ import { useLivePreview } from '../use-preview.ts';
 import { useSheet } from '../use-sheet.ts';
 import { focusLine, lineElement, useSheetKeys } from '../use-sheet-keys.ts';
 import { useSheetPlace } from '../use-sheet-place.ts';
+import { BlankSheet } from './blank-sheet.tsx';
 import { ForcesPaper } from './forces-paper.tsx';
 import { InputsMargin } from './inputs-margin.tsx';
 import { MemberFormContext } from './member-form-context.ts';
@@ -145,22 +146,22 @@ export function MemberEditor(props: {
                 setView('sheet');
               }}
             />
+          ) : sheet.blocks.length === 0 ? (
+            <BlankSheet mark={value.mark} titleFields={props.titleFields} />
           ) : (
-            sheet.blocks.length > 0 && (
-              <>
-                <SheetPaper
-                  sheet={sheetElement}
-                  blocks={sheet.blocks}
-                  chosen={place.line}
-                  lit={sheet.lit}
-                  titleFields={props.titleFields}
-                  onChoose={chooseLine}
-                  onFollow={follow}
-                  onKeyDown={sheetKeys}
-                />
-                <SheetCautions />
-              </>
-            )
+            <>
+              <SheetPaper
+                sheet={sheetElement}
+                blocks={sheet.blocks}
+                chosen={place.line}
+                lit={sheet.lit}
+                titleFields={props.titleFields}
+                onChoose={chooseLine}
+                onFollow={follow}
+                onKeyDown={sheetKeys}
+              />
+              <SheetCautions />
+            </>
           )}
         </div>
         {view === 'sheet' && (

@@ -1,7 +1,8 @@
-import { useState } from 'react';
+import { type ReactNode, useState } from 'react';
 import { reasonOf } from '#client/lib/problem.ts';
 import { useAnnounce } from '#client/ui/announcements.tsx';
 import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
+import { PartHead } from '#client/ui/paper.tsx';
 import type { Calculation } from '#shared/contracts/calculations.ts';
 import type { MemberRow } from '#shared/contracts/members.ts';
 import { useReorderMembers } from '../mutations.ts';
@@ -19,7 +20,8 @@ const matches = (row: MemberRow, wanted: string): boolean =>
     );
 
 /** A calculation's members: what governs each and by how much. */
-export function MemberLedger({ calculation }: { calculation: Calculation }) {
+export function MemberLedger(props: { calculation: Calculation; actions: ReactNode }) {
+  const { calculation } = props;
   const [wanted, setWanted] = useState('');
   const reorder = useReorderMembers(calculation.id);
   const announce = useAnnounce();
@@ -39,22 +41,30 @@ export function MemberLedger({ calculation }: { calculation: Calculation }) {
   };
   return (
     <>
-      <div className="mb-2 flex items-center justify-end gap-3">
-        <label htmlFor="member-search" className="text-small text-zinc-7">
-          Search
-        </label>
-        <input
-          id="member-search"
-          type="search"
-          value={wanted}
-          onChange={(event) => setWanted(event.target.value)}
-          placeholder="mark, section, place, verdict"
-          className="h-7 w-64 rounded-field border border-zinc-3 bg-paper px-2"
-        />
-        <span role="status" className="sr-only">
-          {wanted && `${shown.length} of ${rows.length} members`}
-        </span>
-      </div>
+      <PartHead
+        title="Members"
+        actions={
+          <>
+            <div className="flex items-center gap-2.5">
+              <label htmlFor="member-search" className="text-small text-zinc-7">
+                Search
+              </label>
+              <input
+                id="member-search"
+                type="search"
+                value={wanted}
+                onChange={(event) => setWanted(event.target.value)}
+                placeholder="mark, section, place, verdict"
+                className="h-8 w-64 rounded-field border border-zinc-3 bg-paper px-2"
+              />
+              <span role="status" className="sr-only">
+                {wanted && `${shown.length} of ${rows.length} members`}
+              </span>
+            </div>
+            {props.actions}
+          </>
+        }
+      />
       <Ledger
         caption="Members"
         head={
@@ -65,7 +75,7 @@ export function MemberLedger({ calculation }: { calculation: Calculation }) {
             <HeadCell className="w-[16%]">Ratio</HeadCell>
             <HeadCell className="text-right">Verdict</HeadCell>
             <HeadCell>Governs</HeadCell>
-            <HeadCell>State</HeadCell>
+            <HeadCell>Inputs</HeadCell>
             {editable && (
               <HeadCell className="w-[1%]">
                 <span className="sr-only">Order, duplicate, delete</span>

@@ -11,7 +11,7 @@ export function StaleNotice(props: {
 }) {
   const { problems, hasSheet } = props;
   if (problems.length === 0) return null;
-  const wants = `${count(problems.length, 'input')} ${problems.length === 1 ? 'wants' : 'want'} correcting`;
+  const wants = wantsOf(problems);
   return (
     <div
       data-screen-only
@@ -32,6 +32,14 @@ export function StaleNotice(props: {
       </ul>
     </div>
   );
+}
+
+/** What nobody has given yet is not wrong: it is still needed. */
+function wantsOf(problems: readonly ProblemPlace[]): string {
+  const one = problems.length === 1;
+  const missing = problems.every(({ message }) => /^is (needed|empty)/.test(message));
+  const verb = missing ? (one ? 'is still needed' : 'are still needed') : null;
+  return `${count(problems.length, 'input')} ${verb ?? (one ? 'wants correcting' : 'want correcting')}`;
 }
 
 /** Moves to the control of a path, if it is in the margin. */
