@@ -17,6 +17,17 @@ if (demo) await seedDemo(deps);
 await refreshSummaries(deps);
 
 const server = createServer(createApp(deps, clientFolder));
+server.on('error', (error: NodeJS.ErrnoException) => {
+  const words: Record<string, string> = {
+    EADDRINUSE: 'is in use; set PORT to another one',
+    EACCES: 'may not be used by this user; set PORT to one above 1023',
+    EADDRNOTAVAIL: `is not an address of this machine: HOST is ${env.host}`,
+  };
+  const known = words[error.code ?? ''];
+  if (!known) throw error;
+  process.stderr.write(`Port ${env.port} ${known}.\n`);
+  void deps.close().then(() => process.exit(1));
+});
 server.listen(env.port, env.host, () => {
   const address = server.address();
   const port = typeof address === 'object' && address ? address.port : env.port;

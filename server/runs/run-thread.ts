@@ -1,4 +1,5 @@
 import { parentPort } from 'node:worker_threads';
+import { makeDocument } from './make-document.ts';
 import { makeRecord } from './make-record.ts';
 import { makeReport } from './make-report.ts';
 import { summariseMember } from './summarise-member.ts';
@@ -12,8 +13,12 @@ function make(order: Order) {
       return order.given.members.map((member) => summariseMember(order.given.basis, member));
     case 'record':
       return makeRecord(order.given);
+    case 'document':
+      return makeDocument(order.given);
     case 'report':
       return makeReport(order.given);
+    default:
+      return order satisfies never;
   }
 }
 

@@ -9,6 +9,7 @@ import { tooLarge } from './too-large.ts';
 export interface Runs {
   summarise(basis: BasisDraft, id: string, draft: MemberDraft): Promise<MemberSummary>;
   record(drafts: Drafts, by: OrderedBy): Promise<Tasks['record']['made']>;
+  document(given: Tasks['document']['given'], by: OrderedBy): Promise<Tasks['document']['made']>;
   report(given: Tasks['report']['given'], by: OrderedBy): Promise<Tasks['report']['made']>;
   close(): Promise<void>;
 }
@@ -24,6 +25,7 @@ export function makeRuns(): Runs {
       return summary;
     },
     record: async (drafts, by) => tooLarge(drafts) ?? long.make('record', drafts, by),
+    document: async (given, by) => tooLarge(given.drafts) ?? long.make('document', given, by),
     report: async (given, by) => tooLarge(given.drafts) ?? long.make('report', given, by),
     close: async () => {
       await Promise.all([short.close(), long.close()]);

@@ -4,11 +4,18 @@ import type { DraftOfMember } from '#shared/contracts/draft-input.ts';
 import type { MemberSummary } from '#shared/contracts/members.ts';
 import type { ProblemPlace } from '#shared/contracts/problems.ts';
 import type { DocumentData } from '#shared/report/document-data.ts';
+import type { DocumentTree } from '#shared/report/tree.ts';
 
 /** What a run starts from: the forms of a calculation. */
 export interface Drafts {
   readonly basis: BasisDraft;
   readonly members: readonly DraftOfMember[];
+}
+
+export interface ReportDocument {
+  readonly tree: DocumentTree;
+  readonly resultHash: string;
+  readonly snapshotHash: string;
 }
 
 type Refused = { readonly problems: ProblemPlace[] };
@@ -20,6 +27,11 @@ export interface Tasks {
   readonly record: {
     readonly given: Drafts;
     readonly made: { readonly record: CalculationRecord } | Refused;
+  };
+  /** The report's document tree, with the hashes of its record. */
+  readonly document: {
+    readonly given: { readonly drafts: Drafts; readonly document: DocumentData };
+    readonly made: ReportDocument | Refused;
   };
   readonly report: {
     readonly given: {

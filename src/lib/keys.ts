@@ -5,5 +5,5 @@ export const keys = {
   project: (projectId: string) => ['project', projectId],
   calculation: (calculationId: string) => ['calculation', calculationId],
   member: (memberId: string) => ['member', memberId],
-  record: (calculationId: string) => ['record', calculationId],
+  report: (calculationId: string) => ['report', calculationId],
 } as const;

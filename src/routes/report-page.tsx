@@ -8,9 +8,9 @@ import {
 import { RevisionTag } from '#client/features/calculations/components/revision-tag.tsx';
 import { calculationQuery } from '#client/features/calculations/queries.ts';
 import { DownloadButton } from '#client/features/reports/components/download-button.tsx';
-import { RecordSummary } from '#client/features/reports/components/record-summary.tsx';
 import { RefusedRecord } from '#client/features/reports/components/refused-record.tsx';
-import { recordQuery } from '#client/features/reports/queries.ts';
+import { ReportDocument } from '#client/features/reports/components/report-document.tsx';
+import { reportQuery } from '#client/features/reports/queries.ts';
 import { Fetched, isAbsent } from '#client/ui/page-state.tsx';
 import { Paper, PaperHead } from '#client/ui/paper.tsx';
 import { Waiting } from '#client/ui/state-panels.tsx';
@@ -39,7 +39,7 @@ export function Component() {
 
 function ReportPaper({ calculation }: { calculation: Calculation }) {
   const { id, number } = calculation;
-  const record = useQuery(recordQuery(id));
+  const report = useQuery(reportQuery(id));
   return (
     <>
       <div className="px-6">
@@ -63,17 +63,17 @@ function ReportPaper({ calculation }: { calculation: Calculation }) {
           }
         />
       </div>
-      {record.data && <RecordSummary calculationId={id} record={record.data} />}
-      {record.error && (
+      {report.data && <ReportDocument calculationId={id} report={report.data} />}
+      {report.error && (
         <RefusedRecord
-          error={record.error}
+          error={report.error}
           calculation={calculation}
-          onRetry={() => void record.refetch()}
+          onRetry={() => void report.refetch()}
         />
       )}
-      {record.isPending && (
+      {report.isPending && (
         <div className="px-6">
-          <Waiting what="record" />
+          <Waiting what="report" />
         </div>
       )}
     </>

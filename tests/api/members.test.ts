@@ -151,7 +151,7 @@ it('records no more combinations than can be waited for', async () => {
   const [row] = memberDraft.combinations;
   const combinations = Array.from({ length: 500 }, (_, index) => ({ ...row, id: `c${index}` }));
   for (const mark of ['X', 'Y', 'Z']) await add(mark, { combinations });
-  for (const route of ['showRecord', 'downloadReport'] as const) {
+  for (const route of ['showRecord', 'showReport', 'downloadReport'] as const) {
     const refused = await call(route, { params: { calculationId } });
     expect(refused.status).toBe(422);
     expect(refused.body.problems).toEqual([

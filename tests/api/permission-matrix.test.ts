@@ -42,6 +42,7 @@ const expected: Record<string, readonly number[]> = {
   showCalculation: seeOne,
   downloadInput: seeOne,
   showRecord: seeOne,
+  showReport: seeOne,
   downloadReport: seeOne,
   updateCalculation: doOne,
   createMember: doOne,
@@ -54,7 +55,7 @@ const expected: Record<string, readonly number[]> = {
 };
 
 /** Reports first, while the calculation has one member only. */
-const reports: RouteName[] = ['showRecord', 'downloadReport'];
+const reports: RouteName[] = ['showRecord', 'showReport', 'downloadReport'];
 const routes = [
   ...reports,
   ...(Object.keys(routeTable) as RouteName[]).filter((route) => !reports.includes(route)),

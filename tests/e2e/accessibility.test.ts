@@ -53,7 +53,7 @@ describe('each screen is accessible (axe, WCAG 2.2 AA)', () => {
       await page.getByLabel('Building code').waitFor();
       await expectAccessible(page, 'basis');
       await page.getByRole('link', { name: 'Report', exact: true }).click();
-      await page.getByRole('heading', { name: 'Results' }).waitFor();
+      await page.getByRole('heading', { name: 'Summary of results' }).waitFor();
       await expectAccessible(page, 'report');
       await page.goto('/account');
       await page.getByLabel('Present password').waitFor();

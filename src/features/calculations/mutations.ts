@@ -8,6 +8,7 @@ function useKept() {
   return (calculation: Calculation) => {
     client.setQueryData(keys.calculation(calculation.id), calculation);
     void client.invalidateQueries({ queryKey: keys.project(calculation.project.id) });
+    void client.invalidateQueries({ queryKey: keys.report(calculation.id) });
     void client.invalidateQueries({ queryKey: keys.desk });
   };
 }

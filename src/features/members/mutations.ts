@@ -10,7 +10,7 @@ function useMemberChange<V, R>(calculationId: string, change: (values: V) => Pro
   return useMutation({
     mutationFn: change,
     onSettled: () => {
-      void client.invalidateQueries({ queryKey: keys.record(calculationId) });
+      void client.invalidateQueries({ queryKey: keys.report(calculationId) });
       void client.invalidateQueries({ queryKey: keys.desk });
       return client.invalidateQueries({ queryKey: keys.calculation(calculationId) });
     },
@@ -45,7 +45,7 @@ export function useUpdateMember(calculationId: string, memberId: string) {
     onSuccess: (member: Member) => {
       client.setQueryData(keys.member(memberId), member);
       for (const queryKey of [
-        keys.record(calculationId),
+        keys.report(calculationId),
         keys.desk,
         keys.calculation(calculationId),
       ]) {
@@ -70,7 +70,7 @@ export function useReorderMembers(calculationId: string) {
       );
     },
     onSettled: () => {
-      void client.invalidateQueries({ queryKey: keys.record(calculationId) });
+      void client.invalidateQueries({ queryKey: keys.report(calculationId) });
       return client.invalidateQueries({ queryKey: key });
     },
   });

@@ -91,6 +91,7 @@ export const validCalls: Record<RouteName, Prepare> = {
   },
   downloadInput: ({ calculationId }) => ({ params: { calculationId } }),
   showRecord: ({ calculationId }) => ({ params: { calculationId } }),
+  showReport: ({ calculationId }) => ({ params: { calculationId } }),
   downloadReport: ({ calculationId }) => ({ params: { calculationId } }),
   createMember: ({ calculationId }) => ({
     params: { calculationId },
