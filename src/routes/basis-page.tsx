@@ -44,7 +44,7 @@ function BasisPage({ calculation }: { calculation: Calculation }) {
       tabs={calculationTabs(calculation.id)}
       status={
         <>
-          <SaveStatus state={draft.saveState} onSave={draft.saveNow} />
+          {calculation.can.edit && <SaveStatus state={draft.saveState} onSave={draft.saveNow} />}
           <RevisionTag calculation={calculation} />
         </>
       }

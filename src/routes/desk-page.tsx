@@ -30,7 +30,10 @@ export function Component() {
           {({ projects, calculations, waiting }) => (
             <>
               <PartHead title="Waits for you" />
-              <WaitingList items={waiting} />
+              <WaitingList
+                items={waiting}
+                designs={calculations.some(({ roles }) => roles.includes('engineer'))}
+              />
               <PartHead title="Calculations" />
               {calculations.length > 0 ? (
                 <CalculationLedger rows={calculations} showProject caption="Your calculations" />

@@ -65,7 +65,7 @@ function MemberPage({ calculation, member }: { calculation: Calculation; member:
       layout="bare"
       status={
         <>
-          <SaveStatus state={draft.saveState} onSave={draft.saveNow} />
+          {editable && <SaveStatus state={draft.saveState} onSave={draft.saveNow} />}
           <RevisionTag calculation={calculation} />
         </>
       }

@@ -14,10 +14,15 @@ const says: Record<WaitingItem['reason'], (item: WaitingItem) => string> = {
 };
 
 /** What waits for this person, worst first; a member stands once, with all it waits for. */
-export function WaitingList({ items }: { items: readonly WaitingItem[] }) {
+export function WaitingList(props: { items: readonly WaitingItem[]; designs: boolean }) {
+  const { items } = props;
   if (items.length === 0) {
     return (
-      <Empty>Nothing waits for you: your members are within their limits and confirmed.</Empty>
+      <Empty>
+        {props.designs
+          ? 'Nothing waits for you: your members are within their limits and confirmed.'
+          : 'Nothing waits for you. What a calculation still lacks waits for its engineer.'}
+      </Empty>
     );
   }
   return (

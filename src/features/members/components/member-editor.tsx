@@ -21,6 +21,7 @@ import { SheetContents } from './sheet-contents.tsx';
 import { SheetPaper } from './sheet-paper.tsx';
 import { goToControl, StaleNotice } from './stale-notice.tsx';
 import { TraceMargin } from './trace-margin.tsx';
+import { WorseElsewhere } from './worse-elsewhere.tsx';
 
 /** A member: inputs at the left, its live sheet in the middle, the trace at the right. */
 export function MemberEditor(props: {
@@ -40,7 +41,10 @@ export function MemberEditor(props: {
   const announce = useAnnounce();
   const place = useSheetPlace();
   const preview = useLivePreview(basis, memberId, value);
-  const wanted = place.combination ?? value.combinations[0]?.id;
+  const recordOfMember = preview.record?.members[0] ?? null;
+  // The sheet opens at what governs, and stays there while inputs change.
+  const [opening] = useState(recordOfMember?.summary.governing?.combination);
+  const wanted = place.combination ?? opening ?? value.combinations[0]?.id;
   const sheet = useSheet(preview.record, memberId, position, wanted, place.line);
   const sheetElement = useRef<HTMLElement>(null);
   const traceElement = useRef<HTMLElement>(null);
@@ -116,7 +120,7 @@ export function MemberEditor(props: {
       >
         <InputsMargin
           basis={basis}
-          record={preview.record?.members[0] ?? null}
+          record={recordOfMember}
           combination={wanted}
           note={props.basisNote}
           restoredFrom={draft.restoredFrom}
@@ -150,6 +154,13 @@ export function MemberEditor(props: {
             <BlankSheet mark={value.mark} titleFields={props.titleFields} />
           ) : (
             <>
+              {recordOfMember && (
+                <WorseElsewhere
+                  member={recordOfMember}
+                  shown={sheet.combination}
+                  onShow={place.showCombination}
+                />
+              )}
               <SheetPaper
                 sheet={sheetElement}
                 blocks={sheet.blocks}

@@ -48,7 +48,7 @@ export function SteelFields() {
 }
 
 const ownFields = [
-  { name: 'name', label: 'Its name', path: 'material.name' },
+  { name: 'name', label: 'Name of the steel', path: 'material.name' },
   { name: 'Fy', label: 'Yield stress Fy', path: 'material.Fy' },
   { name: 'Fu', label: 'Tensile strength Fu', path: 'material.Fu' },
 ] as const;
