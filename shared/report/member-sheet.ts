@@ -1,3 +1,4 @@
+import { placedLines } from '../calc/address.ts';
 import type {
   CalculationRecord,
   CombinationRecord,
@@ -81,11 +82,19 @@ function verdictBlock(
     address: governing?.address ?? null,
     terms: governing ? verdictTerms(member, governing) : [],
     limit: '1.000',
-    governs: governing
-      ? `${shortReference(governing.clause)}, ${governing.title}`
-      : whyNone(member),
+    governs: governing ? governsWords(member, governing) : whyNone(member),
     combination: governing?.combinationName ?? combination?.name ?? '',
   };
+}
+
+/** Clause and title of what governs; of a notice, which has no ratio, its reason too. */
+function governsWords(
+  member: MemberRecord,
+  { clause, title, address }: NonNullable<Summary['governing']>,
+): string {
+  const line = placedLines(member).find((placed) => placed.address === address)?.line;
+  const named = `${shortReference(clause)}, ${title}`;
+  return line?.kind === 'notice' ? `${named}. ${line.text}` : named;
 }
 
 const linesOf = (presenter: Presenter, combination: string | null): Block[] =>

@@ -43,7 +43,10 @@ export function VerdictBlock({ block }: { block: BlockOf<'verdict'> }) {
     </>
   );
   return (
-    <div className="sheet-verdict" data-verdict={block.verdict}>
+    <div
+      className={block.ratioText === null ? 'sheet-verdict has-reason' : 'sheet-verdict'}
+      data-verdict={block.verdict}
+    >
       <p className={bad ? 'verdict-figure text-oxide' : 'verdict-figure'}>
         {address && follow ? (
           <button
@@ -58,7 +61,7 @@ export function VerdictBlock({ block }: { block: BlockOf<'verdict'> }) {
           figure
         )}
       </p>
-      <TermBar block={block} />
+      {block.ratioText !== null && <TermBar block={block} />}
       <p className="verdict-governs">
         {block.ratioText === null ? block.governs : `governs ${block.governs}`}
         {block.combination && <span>combination {block.combination}</span>}

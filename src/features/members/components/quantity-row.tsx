@@ -2,6 +2,7 @@ import { fieldClass } from '#client/ui/field.tsx';
 import type { DraftQuantity } from '#shared/contracts/members.ts';
 import { withText } from '../edit-draft.ts';
 import type { FieldWords } from '../member-fields.ts';
+import { placeWords } from '../place-words.ts';
 import { InputRow, SymbolLabel } from './input-row.tsx';
 import { useMemberForm } from './member-form-context.ts';
 import { SourceControl } from './source-control.tsx';
@@ -26,6 +27,7 @@ export function QuantityRow(props: {
         quantity.text.trim() !== '' && (
           <SourceControl
             what={`${words.label} ${words.spoken}`}
+            printed={placeWords(path)}
             stated={quantity}
             onChange={(stated) => onChange({ ...quantity, ...stated })}
           />

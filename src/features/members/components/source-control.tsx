@@ -9,7 +9,10 @@ import { SourceForm } from './source-form.tsx';
 
 /** The ring beside a given value: explains its source on hover and focus, opens it to be changed. */
 export function SourceControl(props: {
+  /** As it is read aloud. */
   what: string;
+  /** As it is printed, where that is not the same. */
+  printed?: string;
   stated: StatedBy;
   onChange: (stated: { source: DraftSource; confirmed: boolean }) => void;
 }) {
@@ -39,7 +42,7 @@ export function SourceControl(props: {
           className="z-40 w-76 rounded-field border border-ink bg-paper p-4 shadow-sheet"
         >
           <SourceForm
-            what={what}
+            what={props.printed ?? what}
             stated={stated}
             editable={editable}
             onChange={onChange}
