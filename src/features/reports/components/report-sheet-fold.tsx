@@ -28,6 +28,9 @@ export function ReportSheetFold(props: { sheet: ReportSheet; context: DocumentCo
         <span className={over ? 'ml-auto font-semibold text-oxide' : 'ml-auto font-semibold'}>
           {verdict ? [verdict.verdict, verdict.ratioText].filter(Boolean).join(' ') : ''}
         </span>
+        <span aria-hidden="true" className="w-12 text-right text-small text-zinc-7">
+          {open ? 'close' : 'open'}
+        </span>
       </summary>
       {open && (
         <DocumentContext value={context}>
