@@ -1,7 +1,7 @@
 import { scaleLinear } from 'd3-scale';
 import type { InteractionPoint } from './drawing.ts';
 import type { Point, Scene, Shape } from './scene.ts';
-import { label, PENS, path } from './shapes.ts';
+import { cutTo, label, PENS, path } from './shapes.ts';
 
 const WIDTH = 424;
 const HEIGHT = 242;
@@ -95,13 +95,14 @@ function mark(point: InteractionPoint, index: number, x: number, y: number): Sha
 
 function list(points: readonly InteractionPoint[]): Shape[] {
   const left = PLOT.right + 14;
+  const named = WIDTH - left - 64;
   const rest = points.length - LISTED;
   const rows = points.slice(0, LISTED).flatMap((point, index): Shape[] => {
     const y = PLOT.top + index * ROW;
     const weight = index === 0 ? 600 : 400;
     return [
       label(String(index + 1), [left + 12, y], { anchor: 'end', weight }),
-      label(point.combination, [left + 22, y], { weight, within: WIDTH - left - 64 }),
+      label(cutTo(point.combination, named), [left + 22, y], { weight, within: named }),
       label(point.ratioText, [WIDTH, y], { anchor: 'end', weight, ...overInk(point) }),
     ];
   });

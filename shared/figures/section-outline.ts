@@ -2,7 +2,7 @@ import type { NamedDrawn, SectionDrawing } from './drawing.ts';
 import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path } from './shapes.ts';
 
-const WIDTH = 220;
+const WIDTH = 236;
 const HEIGHT = 210;
 const BOX = 128;
 const LEFT = 18;

@@ -2,6 +2,8 @@ import type { Ink, Point, Shape, Stroke } from './scene.ts';
 
 /** The text sizes and pens of all figures. */
 export const TEXT = 11;
+/** Names are cut rather than set smaller than this. */
+const SMALLEST_NAME = 9;
 export const PENS = {
   outline: { ink: 'ink', width: 1 },
   rule: { ink: 'zinc5', width: 0.75 },
@@ -44,6 +46,17 @@ export const textWidth = (text: string, size = TEXT): number => [...text].length
 
 const fittedSize = (text: string, within: number): number =>
   Math.max(6, Math.min(TEXT, (TEXT * within) / Math.max(textWidth(text), 1)));
+
+/** A name that is too long for its place, cut so that it needn't be set small. */
+export function cutTo(text: string, width: number): string {
+  const fits = Math.floor(width / textWidth('n', SMALLEST_NAME));
+  return [...text].length <= fits
+    ? text
+    : `${[...text]
+        .slice(0, fits - 1)
+        .join('')
+        .trimEnd()}…`;
+}
 
 /** A filled head at `tip`, pointing along `angle` (radians, clockwise from +x). */
 export function arrowHead(tip: Point, angle: number, fill: Ink, size = 8): Shape {

@@ -23,8 +23,8 @@ export function memberFigures(
   if (!drawing) return [];
   const moments = drawing.planes.flatMap((plane) => momentDiagram(drawing, plane) ?? []);
   const under = combination ? `, combination ${combination.name}` : '';
-  const sides = moments.length > 0 ? ' Moments are drawn on the compressed side.' : '';
-  const caption = `Member to scale${under}; lengths are measured off from end A.${sides}`;
+  const sides = moments.length > 0 ? ', moments on the compressed side' : '';
+  const caption = `Member to scale${under}. Lengths from end A${sides}.`;
   const scenes = [memberScene(drawing), ...moments];
   return scenes.map((scene, index) => ({
     kind: 'figure',

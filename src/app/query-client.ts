@@ -12,7 +12,10 @@ export const queryClient: QueryClient = new QueryClient({
   queryCache: new QueryCache({ onError: noticeSignOut }),
   mutationCache: new MutationCache({ onError: noticeSignOut }),
   defaultOptions: {
+    // Without a connection a call fails and says so; it doesn't wait in silence for one.
+    mutations: { networkMode: 'always' },
     queries: {
+      networkMode: 'always',
       staleTime: 15_000,
       retry: (count, error) => count < 2 && isProblem(error, 'unreachable'),
     },

@@ -36,7 +36,12 @@ export const memberRules: MergeRules<MemberDraft> = {
     field('ownSteel', 'Own steel', draft.ownSteel?.name ?? '', draft.ownSteel),
     field('ends', 'Ends', quantityText(draft.ends), draft.ends),
     ...lengthNames.map((name) =>
-      field(name, `${lengthWords[name].label} ${name}`, quantityText(draft[name]), draft[name]),
+      field(
+        name,
+        `${lengthWords[name].label} ${name === 'length' ? 'L' : name}`,
+        quantityText(draft[name]),
+        draft[name],
+      ),
     ),
     field('Cb', 'Cb', quantityText(draft.Cb), draft.Cb),
     field('endMomentSign', 'Sense of end moments', draft.endMomentSign, draft.endMomentSign),

@@ -3,6 +3,7 @@ import type { VersionedDraft } from '#client/lib/draft/use-versioned-draft.ts';
 import { useAnnounce } from '#client/ui/announcements.tsx';
 import { ConflictDialog } from '#client/ui/conflict-dialog.tsx';
 import { useFormKeys } from '#client/ui/use-form-keys.ts';
+import type { MemberRecord } from '#shared/calc/record.ts';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import type { MemberDraft } from '#shared/contracts/members.ts';
 import { firstCombination } from '../first-draft.ts';
@@ -42,8 +43,7 @@ export function MemberEditor(props: {
   const place = useSheetPlace();
   const preview = useLivePreview(basis, memberId, value);
   const recordOfMember = preview.record?.members[0] ?? null;
-  // The sheet opens at what governs, and stays there while inputs change.
-  const [opening] = useState(recordOfMember?.summary.governing?.combination);
+  const opening = useOpening(recordOfMember);
   const wanted = place.combination ?? opening ?? value.combinations[0]?.id;
   const sheet = useSheet(preview.record, memberId, position, wanted, place.line);
   const sheetElement = useRef<HTMLElement>(null);
@@ -209,6 +209,13 @@ export function MemberEditor(props: {
       )}
     </MemberFormContext>
   );
+}
+
+/** The combination that governed when there first was a sheet; it stays while inputs change. */
+function useOpening(member: MemberRecord | null): string | undefined {
+  const opening = useRef<string | undefined>(undefined);
+  opening.current ??= member?.summary.governing?.combination ?? undefined;
+  return opening.current;
 }
 
 /** Puts text on the clipboard; where the browser refuses, nothing is said to have been copied. */

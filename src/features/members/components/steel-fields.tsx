@@ -38,7 +38,7 @@ export function SteelFields() {
                 {key}
               </option>
             ))}
-            <option value={own}>a steel of your own</option>
+            <option value={own}>own steel</option>
           </select>
         )}
       </InputRow>
@@ -48,9 +48,9 @@ export function SteelFields() {
 }
 
 const ownFields = [
-  { name: 'name', label: 'Name of the steel', path: 'material.name' },
-  { name: 'Fy', label: 'Yield stress Fy', path: 'material.Fy' },
-  { name: 'Fu', label: 'Tensile strength Fu', path: 'material.Fu' },
+  { name: 'name', label: 'Steel name', path: 'material.name' },
+  { name: 'Fy', label: 'Yield Fy', path: 'material.Fy' },
+  { name: 'Fu', label: 'Tensile Fu', path: 'material.Fu' },
 ] as const;
 
 function OwnSteel({ steel }: { steel: DraftSteel }) {
