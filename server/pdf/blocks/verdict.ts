@@ -9,8 +9,7 @@ const governsWidth = 150;
 const termInks: readonly InkName[] = ['ink', 'oxide', 'oxide3', 'zinc5'];
 const narrow = 'ibm-plex-sans-condensed-regular';
 
-export const verdictInk = (verdict: string): InkName =>
-  verdict === 'OK' ? 'ink' : 'oxide';
+export const verdictInk = (verdict: string): InkName => (verdict === 'OK' ? 'ink' : 'oxide');
 
 /** The verdict and its ratio, large, the terms of the interaction as a bar, what governs. */
 export function measureVerdict(block: BlockOf<'verdict'>, context: BlockContext): Row[] {
