@@ -51,7 +51,7 @@ describe('the whole path by keyboard alone', () => {
 
     await tabTo(page, /Source of Unbraced/);
     await page.keyboard.press('Enter');
-    await page.getByText('Where Unbraced L b comes from').waitFor();
+    await page.getByText('Where Unbraced Lb comes from').waitFor();
     await page.keyboard.press('Escape');
 
     await tabTo(page, /Line 2\.1,/);
