@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
 import { sectionName } from '#client/document/section-name.ts';
@@ -16,6 +17,7 @@ const says: Record<WaitingItem['reason'], (item: WaitingItem) => string> = {
 /** What waits for this person, worst first; a member stands once, with all it waits for. */
 export function WaitingList(props: { items: readonly WaitingItem[]; designs: boolean }) {
   const { items } = props;
+  const [all, setAll] = useState(false);
   if (items.length === 0) {
     return (
       <Empty>
@@ -25,34 +27,46 @@ export function WaitingList(props: { items: readonly WaitingItem[]; designs: boo
       </Empty>
     );
   }
+  const members = byMember(items);
+  const more = members.length - FIRST;
   return (
-    <ul className="border-t-2 border-ink">
-      {byMember(items).map(([first, ...more]) => (
-        <li
-          key={first.member.id}
-          className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 border-b border-zinc-2 py-2"
-        >
-          <Link
-            to={paths.member(first.calculation.id, first.member.id)}
-            className="link w-fit font-semibold"
+    <>
+      <ul className="border-t-2 border-ink">
+        {(all ? members : members.slice(0, FIRST)).map(([first, ...others]) => (
+          <li
+            key={first.member.id}
+            className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 border-b border-zinc-2 py-2"
           >
-            {first.member.mark || 'without a mark'}
-            {first.member.section && ` · ${sectionName(first.member.section)}`}
-          </Link>
-          <Reason item={first} />
-          <span className="font-condensed text-small text-zinc-7">
-            {first.calculation.number} {first.calculation.title}
-          </span>
-          <span className="text-right text-small">
-            {more.map((item) => (
-              <Reason key={item.reason} item={item} />
-            ))}
-          </span>
-        </li>
-      ))}
-    </ul>
+            <Link
+              to={paths.member(first.calculation.id, first.member.id)}
+              className="link w-fit font-semibold"
+            >
+              {first.member.mark || 'without a mark'}
+              {first.member.section && ` · ${sectionName(first.member.section)}`}
+            </Link>
+            <Reason item={first} />
+            <span className="font-condensed text-small text-zinc-7">
+              {first.calculation.number} {first.calculation.title}
+            </span>
+            <span className="text-right text-small">
+              {others.map((item) => (
+                <Reason key={item.reason} item={item} />
+              ))}
+            </span>
+          </li>
+        ))}
+      </ul>
+      {!all && more > 0 && (
+        <button type="button" className="link mt-2" onClick={() => setAll(true)}>
+          {count(more, 'more member')}
+        </button>
+      )}
+    </>
   );
 }
+
+/** How many members the list begins with; the calculations stay within reach under it. */
+const FIRST = 10;
 
 const Reason = ({ item }: { item: WaitingItem }) => (
   <span
