@@ -41,7 +41,10 @@ export async function call<N extends JsonRoute>(
 }
 
 /** Fetches a download; throws a Problem. */
-export async function download<N extends FileRoute>(name: N, request: Parts<N>): Promise<Blob> {
+export async function download<N extends FileRoute>(
+  name: N,
+  request: Parts<N> & { signal?: AbortSignal },
+): Promise<Blob> {
   const response = await send(name, request as Sent);
   return response.blob();
 }

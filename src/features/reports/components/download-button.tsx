@@ -1,7 +1,8 @@
 import { useMutation } from '@tanstack/react-query';
-import { type ReactNode, useState } from 'react';
+import { type ReactNode, useRef, useState } from 'react';
 import { download } from '#client/lib/api.ts';
 import { isProblem, reasonOf } from '#client/lib/problem.ts';
+import { useSeconds } from '#client/lib/use-seconds.ts';
 import { Button } from '#client/ui/button.tsx';
 import { Dialog } from '#client/ui/dialog.tsx';
 
@@ -17,20 +18,32 @@ export function DownloadButton(props: {
 }) {
   const { file, calculationId, name } = props;
   const [refused, setRefused] = useState<Error | null>(null);
+  const leaving = useRef<AbortController | null>(null);
   const fetching = useMutation({
-    mutationFn: () => download(file, { params: { calculationId } }),
+    mutationFn: () => {
+      leaving.current = new AbortController();
+      return download(file, { params: { calculationId }, signal: leaving.current.signal });
+    },
     onSuccess: (blob) => handOver(blob, name),
-    onError: setRefused,
+    onError: (error) => {
+      if (!leaving.current?.signal.aborted) setRefused(error);
+    },
   });
+  const seconds = useSeconds(fetching.isPending);
   return (
     <>
-      <Button
-        rank={props.rank ?? 'plain'}
-        disabled={fetching.isPending}
-        onClick={() => fetching.mutate()}
-      >
-        {fetching.isPending ? 'Making the file …' : props.children}
-      </Button>
+      {fetching.isPending ? (
+        <span className="inline-flex items-center gap-2">
+          <span role="status" className="figures text-small text-zinc-7">
+            Making the file{seconds > 1 ? `, ${seconds} s` : ' …'}
+          </span>
+          <Button onClick={() => leaving.current?.abort()}>Cancel</Button>
+        </span>
+      ) : (
+        <Button rank={props.rank ?? 'plain'} onClick={() => fetching.mutate()}>
+          {props.children}
+        </Button>
+      )}
       {refused && <Refusal error={refused} name={name} onClose={() => setRefused(null)} />}
     </>
   );
