@@ -127,7 +127,8 @@ function factor(e: Expr, leaf: LeafOf, inline: boolean, first: boolean): string 
   const tex = print(e, leaf, inline);
   const found = leafOf(e, leaf);
   const later = !first && found !== null && found.kind === 'value';
-  const openCall = first && e.kind === 'call' && e.fn !== 'sqrt' && e.fn !== 'abs';
+  // `sin kL` before a factor would take it in; `sin(kL/2)` closes itself.
+  const openCall = first && e.kind === 'call' && printsBare(e.fn, e.args, leaf);
   const quotient = inline && e.kind === 'binary' && e.op === '/' && !first;
   const chain = !first && e.kind === 'binary' && e.op === '*';
   return later ||
@@ -167,7 +168,13 @@ function call(
   if (fn === 'sqrt') return `\\sqrt{${args.map((a) => print(a, leaf, inline)).join()}}`;
   if (fn === 'abs') return `\\left|${args.map((a) => print(a, leaf, inline)).join()}\\right|`;
   const printed = args.map((a) => print(a, leaf, true));
-  const only = args.length === 1 ? args[0] : undefined;
-  const bare = only && leafOf(only, leaf)?.kind === 'symbol' && !isQuotient(only, leaf);
+  const bare = printsBare(fn, args, leaf);
   return `${CALLS[fn]}${power}${bare ? ` ${printed[0]}` : brackets(printed.join(',\\,'))}`;
 }
+
+/** A call of one symbol stands without brackets: `sin kL`. */
+const printsBare = (fn: FunctionName, args: readonly Expr[], leaf: LeafOf): boolean => {
+  const only = args.length === 1 ? args[0] : undefined;
+  if (!only || fn === 'sqrt' || fn === 'abs') return false;
+  return leafOf(only, leaf)?.kind === 'symbol' && !isQuotient(only, leaf);
+};
