@@ -1,4 +1,4 @@
-import { readFileSync } from 'node:fs';
+import { lstatSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { cloneFolder } from './clone.mjs';
 import { mustRun, say } from './run.mjs';
@@ -28,6 +28,11 @@ function isInstalled() {
 /** Installs the locked npm packages when node_modules is missing or the lock file has changed. */
 export async function ensurePackages() {
   if (isInstalled()) return;
+  const folder = join(cloneFolder, 'node_modules');
+  if (lstatSync(folder, { throwIfNoEntry: false })?.isSymbolicLink())
+    throw new Error(
+      `${folder} is a link to packages that are not the locked ones. Remove the link, so that npm installs here and not where it leads.`,
+    );
   say('Installing the npm packages …');
   await mustRun('npm', ['ci', '--ignore-scripts', '--include=dev', '--no-audit', '--no-fund']);
 }
