@@ -400,6 +400,37 @@ describe('what may be left out', () => {
   });
 });
 
+describe('an input that is not complete yet', () => {
+  const unfinished = {
+    ...input,
+    members: [
+      {
+        ...without(member, 'length'),
+        Lcx: '-14 ft',
+        combinations: [{ name: 'D', P: '100 kg' }, { MxA: '5 ft' }],
+      },
+    ],
+  };
+  it('says what is missing, and what is wrong beside it', () => {
+    expect(problemsOf(unfinished).map(({ path }) => path)).toEqual([
+      'members[0].length',
+      'members[0].combinations[1].name',
+      'members[0].combinations[1].P',
+      'members[0].combinations[0].P',
+      'members[0].combinations[1].MxA',
+      'members[0].Lcx',
+    ]);
+  });
+  it('says of another wrong shape that alone', () => {
+    expect(problemsOf({ ...unfinished, units: 'metric' }).map(({ path }) => path)).toEqual([
+      'units',
+      'members[0].length',
+      'members[0].combinations[1].name',
+      'members[0].combinations[1].P',
+    ]);
+  });
+});
+
 describe('sources and states', () => {
   it('stay with the value', () => {
     const parsed = parseInput(

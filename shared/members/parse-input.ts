@@ -1,8 +1,10 @@
+import type { z } from 'zod';
 import { stateOf } from './given-values.ts';
 import { inputSchema } from './input.ts';
 import { repeated } from './repeated.ts';
 import { resolveMember } from './resolve-member.ts';
 import type { ParsedInput, Problem } from './resolved.ts';
+import { withStandIns } from './stand-ins.ts';
 
 const pathText = (path: readonly PropertyKey[]): string =>
   path.reduce<string>(
@@ -14,11 +16,11 @@ const pathText = (path: readonly PropertyKey[]): string =>
 /** Reads INPUT.json: its shape, its quantities, and what the members need; all problems at once. */
 export function parseInput(json: unknown): ParsedInput {
   const shape = inputSchema.safeParse(json);
-  if (!shape.success)
-    return {
-      ok: false,
-      problems: shape.error.issues.map((i) => ({ path: pathText(i.path), message: i.message })),
-    };
+  if (!shape.success) {
+    const { issues } = shape.error;
+    const missing = issues.map((i) => ({ path: pathText(i.path), message: i.message }));
+    return { ok: false, problems: [...missing, ...problemsBeside(json, issues)] };
+  }
   const problems: Problem[] = [];
   const input = shape.data;
   const { analysis } = input;
@@ -68,4 +70,14 @@ export function parseInput(json: unknown): ParsedInput {
       members,
     },
   };
+}
+
+/** What is wrong with the rest of an input while some fields are not given yet. */
+function problemsBeside(json: unknown, issues: readonly z.core.$ZodIssue[]): Problem[] {
+  const completed = withStandIns(json, issues);
+  if (!completed) return [];
+  const parsed = parseInput(completed.json);
+  if (parsed.ok) return [];
+  const filled = completed.paths.map(pathText);
+  return parsed.problems.filter(({ path }) => !filled.includes(path));
 }
