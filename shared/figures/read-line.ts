@@ -48,3 +48,9 @@ export const drawn = (line: ValuedLine, set: UnitSet): NamedDrawn => ({
   value: line.value,
   text: readText(line, set),
 });
+
+/** The same with the label in the working unit of the sheet, whatever the table publishes in. */
+export function drawnInWorkingUnit(line: ValuedLine, set: UnitSet): NamedDrawn {
+  const form = readForms(line, set).at(-1);
+  return { symbol: line.symbol, value: line.value, text: form ? joined(form) : '' };
+}

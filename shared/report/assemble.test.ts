@@ -223,6 +223,16 @@ describe('member sheet', () => {
     expect(figures[3]).toContain('d 12.4 in');
   });
 
+  it('labels the section in the unit of the sheet', () => {
+    // 12.4 in = 314.96 mm by hand (1 in = 25.4 mm).
+    const parsed = parseInput({ ...INPUT, units: 'si' });
+    if (!parsed.ok) throw new Error('the input is right');
+    const si = memberSheet(runCalculation(parsed.input), 'm1');
+    const outline = of(si, 'figure').at(-1)?.scene.description;
+    expect(outline).toMatch(/d 31[45](\.\d+)? mm/);
+    expect(outline).not.toContain(' in');
+  });
+
   it('draws the joint sense by the way the ends really turn', () => {
     const joint = memberSheet(record, 'm5');
     const diagram = of(joint, 'figure').find((f) => f.scene.description.startsWith('Moments'));
