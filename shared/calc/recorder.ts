@@ -13,6 +13,20 @@ interface Titled {
   readonly clause?: Clause | null;
 }
 
+type Operands = Readonly<Record<string, Quantity>>;
+
+const valuesOf = (operands: Operands): Record<string, number> =>
+  Object.fromEntries(Object.entries(operands).map(([name, q]) => [name, q.value]));
+
+/** The named operands as a line holds them. */
+const operandsOf = (operands: Operands, names: readonly string[]): LineOf<'formula'>['operands'] =>
+  Object.fromEntries(
+    names.map((name) => {
+      const q = operands[name] as Quantity;
+      return [name, { ref: q.ref, symbol: q.symbol }];
+    }),
+  );
+
 const UNPRINTED: Print = { working: null, display: null };
 
 /**
@@ -135,7 +149,7 @@ export function createRecorder(prefix: '' | ':') {
     formula(
       formula: Formula,
       key: string,
-      operands: Readonly<Record<string, Quantity>>,
+      operands: Operands,
       more: { title?: string; symbol?: string } = {},
     ): Quantity {
       const clause: Clause = {
@@ -150,9 +164,7 @@ export function createRecorder(prefix: '' | ':') {
             `${formula.id}: ${name} is ${operands[name]?.dimension}, not ${dimension}`,
           );
       const value = withoutNoise(
-        formula.expression.evaluate(
-          Object.fromEntries(Object.entries(operands).map(([name, q]) => [name, q.value])),
-        ),
+        formula.expression.evaluate(valuesOf(operands)),
         formula.dimension,
       );
       if (!Number.isFinite(value)) {
@@ -177,12 +189,7 @@ export function createRecorder(prefix: '' | ':') {
           print: formula.ratio ? { working: { dec: 3 }, display: null } : UNPRINTED,
           formula: formula.id,
           expression: formula.expression.text,
-          operands: Object.fromEntries(
-            Object.keys(formula.operands).map((name) => {
-              const q = operands[name] as Quantity;
-              return [name, { ref: q.ref, symbol: q.symbol }];
-            }),
-          ),
+          operands: operandsOf(operands, Object.keys(formula.operands)),
           prints: formula.prints,
         }),
       );
@@ -288,7 +295,7 @@ export function createRecorder(prefix: '' | ':') {
       formula: Formula,
       key: string,
       unknown: { symbol: string; dimension: DimensionName; bracket: readonly [number, number] },
-      operands: Readonly<Record<string, Quantity>>,
+      operands: Operands,
       more: { title?: string } = {},
     ): Quantity {
       const clause: Clause = {
@@ -297,9 +304,7 @@ export function createRecorder(prefix: '' | ':') {
         equation: formula.equation,
       };
       const title = more.title ?? formula.title;
-      const fixed = Object.fromEntries(
-        Object.entries(operands).map(([name, q]) => [name, q.value]),
-      );
+      const fixed = valuesOf(operands);
       const at = (x: number) => formula.expression.evaluate({ ...fixed, [unknown.symbol]: x });
       const value = solveBracketed(at, unknown.bracket[0], unknown.bracket[1]);
       if (value === null) {
@@ -322,9 +327,7 @@ export function createRecorder(prefix: '' | ':') {
           formula: formula.id,
           expression: formula.expression.text,
           unknown: unknown.symbol,
-          operands: Object.fromEntries(
-            Object.entries(operands).map(([name, q]) => [name, { ref: q.ref, symbol: q.symbol }]),
-          ),
+          operands: operandsOf(operands, Object.keys(operands)),
           bracket: [unknown.bracket[0], unknown.bracket[1]],
           residual: at(value),
         }),

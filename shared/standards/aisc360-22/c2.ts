@@ -4,16 +4,6 @@ import { clause, formula } from './writer.ts';
 
 // C2.3 stiffness of the direct analysis method; App. 7 and App. 8 use the nominal one otherwise.
 export const c2Formulas = {
-  loadLevel: formula({
-    id: 'C2.1-alphaPr',
-    clause: 'C2.1',
-    title: 'Axial force at the LRFD load level',
-    symbol: 'alphaPr',
-    dimension: 'force',
-    expression: 'alpha*Pr',
-    operands: { alpha: 'none', Pr: 'force' },
-    prints: 'display',
-  }),
   crossSection: formula({
     id: 'C2.3-Pns',
     clause: 'C2.3',

@@ -88,7 +88,6 @@ export const symbols = {
   Pns: symbol('P_{ns}', 'cross-section compressive strength', 'force'),
   Pr: symbol('P_r', 'required axial strength', 'force'),
   Pc: symbol('P_c', 'available axial strength', 'force'),
-  alphaPr: symbol('\\alpha P_r', 'required axial strength at the LRFD load level', 'force'),
   Pu: symbol('\\alpha P_r/P_{ns}', 'share of the cross-section strength'),
   taub: symbol('\\tau_b', 'stiffness reduction factor'),
   EIstar: symbol('EI^{*}', 'flexural rigidity used in the analysis', 'rigidity'),
@@ -137,9 +136,6 @@ export const symbols = {
   MB: symbol('M_{(B)}', 'moment at end B, bending sense', 'moment'),
   PrPc: symbol('P_r/P_c', 'use of the axial strength'),
   ratio: symbol('R', 'utilisation'),
-  ratiox: symbol('M_{rx}/M_{cx}', 'use of the major-axis flexural strength'),
-  ratioy: symbol('M_{ry}/M_{cy}', 'use of the minor-axis flexural strength'),
   P: symbol('P_r', 'axial force, compression positive', 'force'),
-  ratioExact: symbol('R_{exact}', 'utilisation with the exact moment'),
   Cb2: symbol('C_{b,2}', 'modification factor from the second-order diagram'),
 } as const;
