@@ -33,14 +33,31 @@ const UNPRINTED: Print = { working: null, display: null };
  * The recorder writes typed lines as a procedure runs. It knows kinds of lines, never clauses. Only
  * the quantities it hands out enter formulas, so every number on a sheet has a line.
  */
-export type Recorder = ReturnType<typeof createRecorder>;
+export type Recorder = ReturnType<typeof writerOf> & {
+  /** The same lines, with keys under `name`: `s2` writes `s2/F2/Mn`. */
+  readonly within: (name: string) => Recorder;
+};
 
-/** A recorder of one scope: '' for member lines, ':' for the lines of one combination. */
-export function createRecorder(prefix: '' | ':') {
-  const lines: Line[] = [];
-  const keys = new Set<string>();
+/**
+ * A recorder of one scope: '' for member lines, ':' for the lines of one combination. `within`
+ * gives one whose keys start with a part of the member (`s2/`), writing to the same lines.
+ */
+export const createRecorder = (prefix: '' | ':'): Recorder =>
+  recorderWithin(prefix, '', [], new Set());
 
-  const add = <L extends Line>(line: L): L => {
+const recorderWithin = (
+  prefix: '' | ':',
+  part: string,
+  lines: Line[],
+  keys: Set<string>,
+): Recorder => ({
+  ...writerOf(prefix, part, lines, keys),
+  within: (name) => recorderWithin(prefix, `${part}${name}/`, lines, keys),
+});
+
+function writerOf(prefix: '' | ':', part: string, lines: Line[], keys: Set<string>) {
+  const add = <L extends Line>(given: L): L => {
+    const line: L = part === '' ? given : { ...given, key: part + given.key };
     if (keys.has(line.key)) throw new Error(`two lines with the key ${line.key}`);
     keys.add(line.key);
     Object.freeze(line);

@@ -15,6 +15,10 @@ export const DIMENSIONS = {
   stress: { force: 1, length: -2 },
   moment: { force: 1, length: 1 },
   rigidity: { force: 1, length: 2 },
+  lineLoad: { force: 1, length: -1 },
+  loadSlope: { force: 1, length: -2 },
+  rotationalStiffness: { force: 1, length: 1 },
+  deflection: { force: 0, length: 1 },
 } as const;
 
 export type DimensionName = keyof typeof DIMENSIONS;
@@ -35,4 +39,8 @@ export const DIMENSION_WORDS: Record<DimensionName, string> = {
   stress: 'a stress',
   moment: 'a moment',
   rigidity: 'a flexural rigidity',
+  lineLoad: 'a load per length',
+  loadSlope: 'a change of load per length',
+  rotationalStiffness: 'a rotational stiffness',
+  deflection: 'a deflection',
 };

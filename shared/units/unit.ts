@@ -54,6 +54,17 @@ const ALL: readonly Unit[] = [
   unit('N mm²', 'rigidity', 1, 1),
   unit('kN m²', 'rigidity', 1000, 1000),
   unit('kip in²', 'rigidity', N_PER_KIP, MM_PER_IN),
+  unit('N/mm', 'lineLoad', 1, 1),
+  unit('kN/m', 'lineLoad', 1000, 1000),
+  unit('kip/in', 'lineLoad', N_PER_KIP, MM_PER_IN),
+  unit('kip/ft', 'lineLoad', N_PER_KIP, MM_PER_FT),
+  unit('lbf/ft', 'lineLoad', N_PER_LBF, MM_PER_FT),
+  unit('N/mm²', 'loadSlope', 1, 1),
+  unit('kip/in²', 'loadSlope', N_PER_KIP, MM_PER_IN),
+  unit('N mm/rad', 'rotationalStiffness', 1, 1),
+  unit('kN m/rad', 'rotationalStiffness', 1000, 1000),
+  unit('kip in/rad', 'rotationalStiffness', N_PER_KIP, MM_PER_IN),
+  unit('kip ft/rad', 'rotationalStiffness', N_PER_KIP, MM_PER_FT),
 ];
 
 export const UNITS: ReadonlyMap<string, Unit> = new Map(ALL.map((u) => [u.name, u]));

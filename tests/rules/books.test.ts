@@ -249,6 +249,10 @@ const SIZES: Readonly<Record<DimensionName, number>> = {
   stress: 345,
   moment: 2.1e8,
   rigidity: 6.3e13,
+  lineLoad: 14,
+  loadSlope: 0.011,
+  rotationalStiffness: 3.7e9,
+  deflection: 6.3,
 };
 const sized = (formula: Formula): Record<string, number> =>
   Object.fromEntries(

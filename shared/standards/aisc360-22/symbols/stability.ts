@@ -1,0 +1,3 @@
+import type { BookSymbol } from '../../book.ts';
+
+export const stability = {} as const satisfies Record<string, BookSymbol>;
