@@ -1,43 +1,31 @@
 import { z } from 'zod';
-import { sourceSchema } from '../calc/line.ts';
+import {
+  labelSchema,
+  plainSchema,
+  quantitySchema,
+  statedSchema,
+  textSchema,
+  wordSchema,
+} from '../calc/quantity-input.ts';
+import { loadInputSchema, supportInputSchema } from './load-input.ts';
+import {
+  chartInputSchema,
+  netSectionInputSchema,
+  restraintInputSchema,
+  springsInputSchema,
+} from './restraint-input.ts';
+import { swayInputSchema } from './sway-input.ts';
 
 /**
  * INPUT.json, format 1: a calculation as its engineer gives it. Each quantity is a text with its
  * unit (`14 ft`), or an object that adds its source and whether it is confirmed. Units may be of
  * either set. Compression is positive; x is the major axis, y the minor.
  */
-const text = (most: number) =>
-  z.string().trim().min(1, 'is empty').max(most, `is longer than ${most} characters`);
+export const SWAYS = ['none', 'B2'] as const;
 
-/** Letters, digits and the signs that marks and names on drawings use. */
-const label = (most: number) =>
-  text(most).regex(
-    /^[\p{L}\p{N} .,:;_\-–/()+#&'°=×*]+$/u,
-    "may hold letters, digits, spaces and . , : ; _ - / ( ) + # & ' only",
-  );
-
-const stated = z.strictObject({
-  source: sourceSchema.optional(),
-  confirmed: z.boolean().optional(),
-});
-
-const amount = z
-  .string('must be a text with its unit, such as "14 ft"')
-  .max(60, 'is longer than 60 characters');
-export const quantitySchema = z.union(
-  [amount, stated.extend({ value: amount })],
-  'must be a text with its unit, such as "14 ft", or an object with value, source and confirmed',
-);
-export type QuantityInput = z.infer<typeof quantitySchema>;
-
-/** A plain number may also be a JSON number. */
-const plainSchema = z.union([
-  z.number(),
-  amount,
-  stated.extend({ value: z.union([z.number(), amount]) }),
-]);
-
-const wordSchema = z.union([text(40), stated.extend({ value: text(40) })]);
+/** H1.3 and H2 beside H1.1, Cb in tension by H1.2, τb = 1 with additional notional loads (C2.3(c)). */
+export const PROVISIONS = ['H1.3', 'H2', 'H1.2-Cb', 'C2.3-taub'] as const;
+export type Provision = (typeof PROVISIONS)[number];
 
 export const ENDS = ['held', 'free', 'sway', 'springs'] as const;
 
@@ -46,11 +34,11 @@ export const combinationInputSchema = z.strictObject({
     .string()
     .regex(/^[a-z0-9-]{1,40}$/)
     .optional(),
-  name: label(80),
+  name: labelSchema(80),
   /** Load level of the forces; it must be the calculation's. */
   design: z.enum(['LRFD', 'ASD'], 'must be "LRFD" or "ASD"').optional(),
   /** Section that the analysis behind these forces had; another one leaves them unconfirmed. */
-  analysedWith: text(40).optional(),
+  analysedWith: textSchema(40).optional(),
   P: quantitySchema,
   MxA: quantitySchema.optional(),
   MxB: quantitySchema.optional(),
@@ -58,10 +46,17 @@ export const combinationInputSchema = z.strictObject({
   MyB: quantitySchema.optional(),
   MxMax: quantitySchema.optional(),
   MyMax: quantitySchema.optional(),
+  /** Moments over the points held between the ends. */
+  supports: z.array(supportInputSchema).max(30, 'holds more than 30 points').optional(),
+  loads: z.array(loadInputSchema).max(30, 'holds more than 30 loads').optional(),
+  /** Largest shear forces from the analysis, where the loads are not given: x bends the major axis. */
+  Vx: quantitySchema.optional(),
+  Vy: quantitySchema.optional(),
+  sway: swayInputSchema.optional(),
 });
 
-const ownSteelSchema = stated.extend({
-  name: label(60),
+const ownSteelSchema = statedSchema.extend({
+  name: labelSchema(60),
   Fy: quantitySchema,
   Fu: quantitySchema.optional(),
 });
@@ -71,12 +66,15 @@ export const memberInputSchema = z.strictObject({
     .string()
     .regex(/^[a-z0-9-]{1,40}$/)
     .optional(),
-  mark: label(40),
+  mark: labelSchema(40),
   section: wordSchema,
-  material: z.union([text(40), ownSteelSchema]),
+  material: z.union([textSchema(40), ownSteelSchema]),
   length: quantitySchema,
   ends: z.union(
-    [z.enum(ENDS, `must be one of ${ENDS.join(', ')}`), stated.extend({ value: z.enum(ENDS) })],
+    [
+      z.enum(ENDS, `must be one of ${ENDS.join(', ')}`),
+      statedSchema.extend({ value: z.enum(ENDS) }),
+    ],
     `must be one of ${ENDS.join(', ')}`,
   ),
   Lcx: quantitySchema.optional(),
@@ -84,6 +82,15 @@ export const memberInputSchema = z.strictObject({
   Lcz: quantitySchema.optional(),
   Lb: quantitySchema.optional(),
   Cb: plainSchema.optional(),
+  /** What is held between the ends; bays, buckling lengths and segments follow from it. */
+  restraints: z.array(restraintInputSchema).max(30, 'holds more than 30 restraints').optional(),
+  springs: springsInputSchema.optional(),
+  charts: z
+    .strictObject({ x: chartInputSchema.optional(), y: chartInputSchema.optional() })
+    .optional(),
+  netSection: netSectionInputSchema.optional(),
+  /** Distance between transverse stiffeners of the web. */
+  stiffeners: quantitySchema.optional(),
   endMomentSign: z
     .enum(
       ['bending', 'joint'],
@@ -108,9 +115,13 @@ export const analysisSchema = z.strictObject({
   includesMemberEffect: z.boolean('must be true or false').optional(),
   /** Stated with its source where it can be: that the ends do not translate is an input. */
   sway: z.union(
-    [z.literal('none'), stated.extend({ value: z.literal('none') })],
-    'must be "none": sway is outside the scope of this version',
+    [z.enum(SWAYS), statedSchema.extend({ value: z.enum(SWAYS) })],
+    'must be "none", or "B2" where the stories sway',
   ),
+  /** Second-order over first-order drift of the structure, where it is known. */
+  driftRatio: plainSchema.optional(),
+  /** Optional provisions that the basis of design chooses. */
+  provisions: z.array(z.enum(PROVISIONS)).optional(),
 });
 
 export const inputSchema = z.strictObject({
