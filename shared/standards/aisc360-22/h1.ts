@@ -4,75 +4,74 @@ import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
 import { clause, formula } from './writer.ts';
 
-// H1.1 doubly symmetric members in flexure and compression. Terms that are zero are left out of the
-// equations; the equation number stays.
+// H1.1 flexure and compression; H1.2 the same equations with tension, H1.3(a) with the strengths in
+// the plane of bending. Terms that are zero are left out of the equations; the number stays.
 const AXIAL = { Pr: 'force', Pc: 'force' } as const;
 const MAJOR = { Mrx: 'moment', Mcx: 'moment' } as const;
 const MINOR = { Mry: 'moment', Mcy: 'moment' } as const;
 
-const interactionFormula = (
-  id: string,
-  equation: string,
-  title: string,
-  expression: string,
-  operands: FormulaText['operands'],
-) =>
-  formula({
-    ...{ id, clause: 'H1.1', equation, title, symbol: 'ratio', dimension: 'none' },
-    ...{ expression, operands, prints: 'display', ratio: true },
-  });
+/** The clause that sends to H1-1a and H1-1b: H1.1 compression, H1.2 tension, H1.3 in the plane. */
+export type InteractionClause = 'H1.1' | 'H1.2' | 'H1.3';
 
-const NO_MINOR = 'Interaction, no minor-axis moment';
-const NO_MAJOR = 'Interaction, no major-axis moment';
+/** `suffix` tells the ids of one clause from those of the others. */
+function interactionFormulas(number: InteractionClause, suffix: string) {
+  const one = (
+    id: string,
+    equation: string,
+    title: string,
+    expression: string,
+    operands: FormulaText['operands'],
+  ) =>
+    formula({
+      ...{ id: `${id}${suffix}`, clause: number, equation, title, symbol: 'ratio' },
+      ...{ dimension: 'none', expression, operands, prints: 'display', ratio: true },
+    });
+  const noMinor = 'Interaction, no minor-axis moment';
+  const noMajor = 'Interaction, no major-axis moment';
+  const x = { ...AXIAL, ...MAJOR };
+  const y = { ...AXIAL, ...MINOR };
+  const both = { ...x, ...MINOR };
+  return {
+    axialShare: formula({
+      id: `H1-Pr/Pc${suffix}`,
+      clause: number,
+      title: 'Use of the axial strength',
+      symbol: 'PrPc',
+      dimension: 'none',
+      expression: 'Pr/Pc',
+      operands: AXIAL,
+      prints: 'display',
+    }),
+    a: one('H1-1a', 'H1-1a', 'Interaction', 'Pr/Pc+8/9*(Mrx/Mcx+Mry/Mcy)', both),
+    b: one('H1-1b', 'H1-1b', 'Interaction', 'Pr/(2*Pc)+(Mrx/Mcx+Mry/Mcy)', both),
+    aMajor: one('H1-1a-x', 'H1-1a', noMinor, 'Pr/Pc+8/9*(Mrx/Mcx)', x),
+    bMajor: one('H1-1b-x', 'H1-1b', noMinor, 'Pr/(2*Pc)+Mrx/Mcx', x),
+    aMinor: one('H1-1a-y', 'H1-1a', noMajor, 'Pr/Pc+8/9*(Mry/Mcy)', y),
+    bMinor: one('H1-1b-y', 'H1-1b', noMajor, 'Pr/(2*Pc)+Mry/Mcy', y),
+  };
+}
 
-export const h1Formulas = {
-  axialShare: formula({
-    id: 'H1-Pr/Pc',
-    clause: 'H1.1',
-    title: 'Use of the axial strength',
-    symbol: 'PrPc',
-    dimension: 'none',
-    expression: 'Pr/Pc',
-    operands: AXIAL,
-    prints: 'display',
-  }),
-  a: interactionFormula('H1-1a', 'H1-1a', 'Interaction', 'Pr/Pc+8/9*(Mrx/Mcx+Mry/Mcy)', {
-    ...AXIAL,
-    ...MAJOR,
-    ...MINOR,
-  }),
-  b: interactionFormula('H1-1b', 'H1-1b', 'Interaction', 'Pr/(2*Pc)+(Mrx/Mcx+Mry/Mcy)', {
-    ...AXIAL,
-    ...MAJOR,
-    ...MINOR,
-  }),
-  aMajor: interactionFormula('H1-1a-x', 'H1-1a', NO_MINOR, 'Pr/Pc+8/9*(Mrx/Mcx)', {
-    ...AXIAL,
-    ...MAJOR,
-  }),
-  bMajor: interactionFormula('H1-1b-x', 'H1-1b', NO_MINOR, 'Pr/(2*Pc)+Mrx/Mcx', {
-    ...AXIAL,
-    ...MAJOR,
-  }),
-  aMinor: interactionFormula('H1-1a-y', 'H1-1a', NO_MAJOR, 'Pr/Pc+8/9*(Mry/Mcy)', {
-    ...AXIAL,
-    ...MINOR,
-  }),
-  bMinor: interactionFormula('H1-1b-y', 'H1-1b', NO_MAJOR, 'Pr/(2*Pc)+Mry/Mcy', {
-    ...AXIAL,
-    ...MINOR,
-  }),
-  biaxial: interactionFormula(
-    'H1-1b-M',
-    'H1-1b',
-    'Interaction, no axial force',
-    'Mrx/Mcx+Mry/Mcy',
-    {
-      ...MAJOR,
-      ...MINOR,
-    },
-  ),
+const FORMULAS = {
+  'H1.1': interactionFormulas('H1.1', ''),
+  'H1.2': interactionFormulas('H1.2', '-tension'),
+  'H1.3': interactionFormulas('H1.3', '-plane'),
 };
+
+const biaxial = formula({
+  id: 'H1-1b-M',
+  clause: 'H1.1',
+  equation: 'H1-1b',
+  title: 'Interaction, no axial force',
+  symbol: 'ratio',
+  dimension: 'none',
+  expression: 'Mrx/Mcx+Mry/Mcy',
+  operands: { ...MAJOR, ...MINOR },
+  prints: 'display',
+  ratio: true,
+});
+
+/** Every formula of this file, for the book. */
+export const h1Formulas = [...Object.values(FORMULAS).flatMap((f) => Object.values(f)), biaxial];
 
 /** One of the two moments against its strength. */
 export interface Flexure {
@@ -80,79 +79,97 @@ export interface Flexure {
   readonly Mc: Quantity;
 }
 
-export interface Compression {
+/** The axial force against its strength; both positive, in compression and in tension. */
+export interface Axial {
   readonly Pr: Quantity;
   readonly Pc: Quantity;
 }
 
+export interface Interaction {
+  readonly ratio: Quantity;
+  readonly equation: 'H1-1a' | 'H1-1b';
+}
+
 /**
  * H1-1a or H1-1b, decided on Pr/Pc ≥ 0.2; terms of a plane without moment, or of no axial force,
- * are left out of the equation. `at` is the key of the lines: `H1` for the check.
+ * are left out of the equation. `at` is the key of the lines: `H1` for the check. null where fewer
+ * than two of axial force and moments are present.
  */
 export function interaction(
   r: Recorder,
   at: string,
-  axial: Compression | null,
+  axial: Axial | null,
   x: Flexure | null,
   y: Flexure | null,
-): Quantity | null {
+  number: InteractionClause = 'H1.1',
+): Interaction | null {
   const moments = { ...(x && { Mrx: x.Mr, Mcx: x.Mc }), ...(y && { Mry: y.Mr, Mcy: y.Mc }) };
-  if (!axial) return x && y ? r.formula(h1Formulas.biaxial, `${at}/ratio`, moments) : null;
+  if (!axial)
+    return x && y ? { ratio: r.formula(biaxial, `${at}/ratio`, moments), equation: 'H1-1b' } : null;
   if (!x && !y) return null;
-  const share = r.formula(h1Formulas.axialShare, `${at}/PrPc`, { ...axial });
+  const formulas = FORMULAS[number];
+  const share = r.formula(formulas.axialShare, `${at}/PrPc`, { ...axial });
   const large =
     r.choice(
       `${at}/branch`,
       [{ left: share, relation: '>=', right: 0.2, outcome: 'H1-1a applies' }],
       'H1-1b applies',
-      { title: 'Which interaction equation', clause: clause('H1.1') },
+      { title: 'Which interaction equation', clause: clause(number) },
     ) === 0;
-  const used =
+  const [a, b] =
     x && y
-      ? large
-        ? h1Formulas.a
-        : h1Formulas.b
+      ? [formulas.a, formulas.b]
       : x
-        ? large
-          ? h1Formulas.aMajor
-          : h1Formulas.bMajor
-        : large
-          ? h1Formulas.aMinor
-          : h1Formulas.bMinor;
-  return r.formula(used, `${at}/ratio`, { ...axial, ...moments });
+        ? [formulas.aMajor, formulas.bMajor]
+        : [formulas.aMinor, formulas.bMinor];
+  return {
+    ratio: r.formula(large ? a : b, `${at}/ratio`, { ...axial, ...moments }),
+    equation: large ? 'H1-1a' : 'H1-1b',
+  };
 }
 
-/** H1.1: the interaction against 1, and each strength by itself (H1-1b halves the axial term). */
+/** The interaction against 1, and each strength by itself (H1-1b halves the axial term). */
 export function interactionChecks(
   r: Recorder,
-  axial: Compression | null,
+  axial: Axial | null,
   x: Flexure | null,
   y: Flexure | null,
+  number: 'H1.1' | 'H1.2' = 'H1.1',
 ): LineOf<'check'>[] {
   const checks: LineOf<'check'>[] = [];
-  const ratio = interaction(r, 'H1', axial, x, y);
-  if (ratio)
+  const found = interaction(r, 'H1', axial, x, y, number);
+  if (found)
     checks.push(
-      r.check('H1/check', ratio, 1, {
-        title: axial ? 'Flexure and compression' : 'Flexure about both axes',
-        clause: clause('H1.1', axial ? (checksEquation(r) ?? null) : 'H1-1b'),
+      r.check('H1/check', found.ratio, 1, {
+        title: axial
+          ? `Flexure and ${number === 'H1.2' ? 'tension' : 'compression'}`
+          : 'Flexure about both axes',
+        clause: clause(axial ? number : 'H1.1', found.equation),
       }),
     );
-  checks.push(...separateChecks(r, axial, x, y));
+  checks.push(...separateChecks(r, axial, x, y, number));
   return checks;
 }
 
 /** Each strength against its own demand, as far as both are known. */
 export function separateChecks(
   r: Recorder,
-  axial: Compression | null,
+  axial: Axial | null,
   x: Flexure | null,
   y: Flexure | null,
+  number: InteractionClause = 'H1.1',
 ): LineOf<'check'>[] {
   const checks: LineOf<'check'>[] = [];
   if (axial)
     checks.push(
-      r.check('H1/axial', axial.Pr, axial.Pc, { title: 'Compression alone', clause: clause('E1') }),
+      r.check(
+        'H1/axial',
+        axial.Pr,
+        axial.Pc,
+        number === 'H1.2'
+          ? { title: 'Tension alone', clause: clause('D2') }
+          : { title: 'Compression alone', clause: clause('E1') },
+      ),
     );
   if (x)
     checks.push(
@@ -164,7 +181,3 @@ export function separateChecks(
     );
   return checks;
 }
-
-/** Equation number of the interaction line just written. */
-const checksEquation = (r: Recorder): string | null | undefined =>
-  r.lines.findLast((l) => l.key === 'H1/ratio')?.clause?.equation;
