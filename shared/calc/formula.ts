@@ -18,6 +18,8 @@ export interface Formula {
   readonly prints: 'working' | 'display';
   /** The result is a utilisation: it prints with three decimals. */
   readonly ratio: boolean;
+  /** Where the equation holds, in our own words; null where it always does. */
+  readonly validity: string | null;
 }
 
 export interface FormulaText {
@@ -31,6 +33,7 @@ export interface FormulaText {
   readonly operands: Readonly<Record<string, DimensionName>>;
   readonly prints?: 'working' | 'display';
   readonly ratio?: boolean;
+  readonly validity?: string;
 }
 
 /** Makes a formula; throws unless the expression's symbols are exactly the declared operands. */
@@ -52,5 +55,6 @@ export function defineFormula(book: string, text: FormulaText): Formula {
     operands: Object.freeze({ ...text.operands }),
     prints: text.prints ?? 'working',
     ratio: text.ratio ?? false,
+    validity: text.validity ?? null,
   });
 }

@@ -2,6 +2,7 @@ import { evaluate } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import type { GivenValue } from '#shared/calc/quantity.ts';
 import { createRecorder } from '#shared/calc/recorder.ts';
+import { PUBLISHED_EQUATIONS } from '#shared/published-cases/published-cases.ts';
 import { findShape, W_DESIGNATIONS } from '#shared/sections/table.ts';
 import { majorFlexureClass } from '#shared/standards/aisc360-22/b4.ts';
 import { nominalStress } from '#shared/standards/aisc360-22/e3.ts';
@@ -11,26 +12,12 @@ import { printedStep, roundsTo } from './printed-digits.ts';
 import { readPublished } from './published-cases.ts';
 import { firstMember, recordOf, valueAt } from './run-input.ts';
 
-interface Row {
-  readonly example: string;
-  readonly what: string;
-  readonly formula: string;
-  readonly operands: Readonly<Record<string, string>>;
-  readonly unit: string;
-  /** null: the source prints no such number; by hand from its inputs. */
-  readonly printed: string | null;
-  readonly fromInputs: number;
-  readonly explained?: { readonly expression: string };
-}
 interface Limit {
   readonly Fy: string;
   readonly slenderness: { readonly printed: string };
   readonly Fe: { readonly printed: string };
 }
-const data = readPublished('formulas.json') as {
-  formulas: readonly Row[];
-  tableE1: { readonly rows: readonly Limit[] };
-};
+const tableE1 = readPublished('table-e1.json') as { readonly rows: readonly Limit[] };
 
 /** `5470 in⁶` in N and mm, without the program's own reading of units. */
 function base(text: string): number {
@@ -42,7 +29,7 @@ function base(text: string): number {
 }
 
 describe('Design Examples v16.0, single equations', () => {
-  for (const row of data.formulas)
+  for (const row of PUBLISHED_EQUATIONS.formulas)
     it(`${row.example}: ${row.what} = ${row.printed ?? row.fromInputs} ${row.unit} by ${row.formula}`, () => {
       const formula = formulaNamed(row.formula);
       if (!formula) throw new Error(`no formula ${row.formula}`);
@@ -77,7 +64,7 @@ describe('Design Examples v16.0, Table E-1: where elastic buckling begins', () =
     );
     return r.lines.find((l) => l.key === 'E3/Fn')?.clause?.equation ?? '';
   };
-  for (const { Fy, slenderness, Fe } of data.tableE1.rows)
+  for (const { Fy, slenderness, Fe } of tableE1.rows)
     it(`${Fy}: Lc/r = ${slenderness.printed}, Fe = ${Fe.printed} ksi`, () => {
       const half = printedStep(slenderness.printed) / 2;
       expect(branchAt(Fy, Number(slenderness.printed) - half)).toBe('E3-2');

@@ -10,7 +10,7 @@ export const zones: Readonly<Record<string, readonly string[]>> = {
 /** The folders of `shared` in reading order: each may import those before it and itself. */
 export const sharedOrder: readonly string[] = [
   ...['units', 'expr', 'calc', 'sections', 'standards', 'actions', 'members'],
-  ...['figures', 'report', 'policy', 'contracts'],
+  ...['published-cases', 'figures', 'report', 'library', 'policy', 'contracts'],
 ];
 
 /** Folders of `shared` that do without one before them: a book takes quantities, not sections. */
