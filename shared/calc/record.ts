@@ -88,7 +88,7 @@ export const recordSchema = z.object({
     method: z.enum(['direct', 'effective-length', 'first-order']),
     secondOrder: z.enum(['from-analysis', 'amplified', 'exact']),
     includesMemberEffect: z.boolean(),
-    sway: z.literal('none'),
+    sway: z.enum(['none', 'B2']),
   }),
   members: z.array(memberRecordSchema),
   summary: summarySchema.extend({ member: z.string().nullable(), unconfirmed: z.number().int() }),

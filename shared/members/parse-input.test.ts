@@ -258,9 +258,9 @@ describe('wrong inputs', () => {
       ],
       [
         'sway',
-        { ...input, analysis: { ...input.analysis, sway: 'B2' } },
+        { ...input, analysis: { ...input.analysis, sway: 'free' } },
         'analysis.sway',
-        /sway is outside the scope/,
+        /must be "none", or "B2"/,
       ],
       [
         'an analysis that does not say P-δ',

@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { stateOf } from './given-values.ts';
+import { quantityReader, stateOf } from './given-values.ts';
 import { inputSchema } from './input.ts';
 import { repeated } from './repeated.ts';
 import { resolveMember } from './resolve-member.ts';
@@ -30,6 +30,22 @@ export function parseInput(json: unknown): ParsedInput {
       message:
         'is needed with moments from an analysis: whether the effect of the axial force between the ends (P-δ) is in them',
     });
+  const sway =
+    typeof analysis.sway === 'string'
+      ? {
+          value: analysis.sway,
+          source: { kind: 'typed' as const, note: 'Basis of the calculation' },
+          confirmed: true,
+        }
+      : stateOf(analysis.sway);
+  const driftRatio = quantityReader((path, message) =>
+    problems.push({ path: `analysis.${path}`, message }),
+  )('driftRatio', analysis.driftRatio, 'none');
+  if (driftRatio && driftRatio.value < 1)
+    problems.push({
+      path: 'analysis.driftRatio',
+      message: `is ${driftRatio.text}; second-order drift is not below first-order drift`,
+    });
   const members = input.members.map((m, i) => resolveMember(m, i, input, problems));
   repeated(
     input.members.map((m) => m.mark),
@@ -54,19 +70,14 @@ export function parseInput(json: unknown): ParsedInput {
       analysis: {
         method: analysis.method,
         secondOrder: analysis.secondOrder,
-        sway: 'none',
+        sway: sway.value,
         // Says something of moments from an analysis only; elsewhere it must not move the hash.
         includesMemberEffect:
           analysis.secondOrder === 'from-analysis' && analysis.includesMemberEffect === true,
       },
-      sway:
-        typeof analysis.sway === 'string'
-          ? {
-              value: 'none',
-              source: { kind: 'typed', note: 'Basis of the calculation' },
-              confirmed: true,
-            }
-          : stateOf(analysis.sway),
+      sway,
+      driftRatio,
+      provisions: new Set(analysis.provisions ?? []),
       members,
     },
   };

@@ -5,6 +5,8 @@ import { partsOf, quantityReader, stateOf, TYPED } from './given-values.ts';
 import type { CalculationInput, MemberInput } from './input.ts';
 import { repeated } from './repeated.ts';
 import { resolveCombination } from './resolve-combination.ts';
+import { resolveDetails } from './resolve-details.ts';
+import { resolveRestraints } from './resolve-restraints.ts';
 import { resolveSteel } from './resolve-steel.ts';
 import type { Problem, ResolvedCombination, ResolvedMember } from './resolved.ts';
 
@@ -41,8 +43,13 @@ export function resolveMember(
       `"${section.value}" is not in the table of W shapes (AISC Shapes Database v15.0); write it like W12X79`,
     );
 
+  const memberLength = length('length', false) ?? none;
+  const restraints = resolveRestraints(m, memberLength, problem, quantity);
   const combinations = m.combinations.map((c, j) =>
-    resolveCombination(c, j, { input, section: section.value, problem, quantity }),
+    resolveCombination(c, j, {
+      ...{ input, section: section.value, problem, quantity },
+      ...{ length: memberLength, restraints },
+    }),
   );
   repeated(
     m.combinations.map((c) => c.name),
@@ -64,6 +71,7 @@ export function resolveMember(
     Lb: length('Lb', true),
   };
   wantWhatIsNeeded(m, combinations, problem);
+  if (restraints) wantReasons(lengths, problem);
 
   const Cb =
     m.Cb === undefined
@@ -80,10 +88,12 @@ export function resolveMember(
     section: { ...section, value: shape?.designation ?? section.value },
     shape,
     steel: resolveSteel(m, problem, quantity),
-    length: length('length', false) ?? none,
+    length: memberLength,
     ends: stateOf(m.ends),
     ...lengths,
     Cb: Cb ?? 'auto',
+    restraints,
+    ...resolveDetails(m, problem, quantity),
     endMomentSign: m.endMomentSign ?? 'bending',
     combinations,
   };
@@ -97,19 +107,23 @@ function wantWhatIsNeeded(
 ): void {
   const compressed = combinations.some((c) => c.P.value > 0);
   const bent = combinations.some(
-    ({ moments: { x } }) => x.A.value !== 0 || x.B.value !== 0 || (x.max?.value ?? 0) !== 0,
+    ({ moments: { x }, loads }) =>
+      x.A.value !== 0 ||
+      x.B.value !== 0 ||
+      (x.max?.value ?? 0) !== 0 ||
+      loads.some((load) => load.axis === 'x'),
   );
   const bothEnds = combinations.some(({ moments }) =>
     [moments.x, moments.y].some((p) => p.A.value !== 0 && p.B.value !== 0),
   );
-  if (compressed)
+  if (compressed && m.restraints === undefined)
     for (const name of ['Lcx', 'Lcy', 'Lcz'] as const)
-      if (m[name] === undefined)
+      if (m[name] === undefined && !(name !== 'Lcz' && m.charts?.[name === 'Lcx' ? 'x' : 'y']))
         problem(
           name,
           'is needed: a combination has compression, and buckling lengths have no default',
         );
-  if (bent && m.Lb === undefined)
+  if (bent && m.Lb === undefined && m.restraints === undefined)
     problem(
       'Lb',
       'is needed: a combination bends the major axis, and the unbraced length has no default (0 where the compression flange is held continuously)',
@@ -119,4 +133,17 @@ function wantWhatIsNeeded(
       'endMomentSign',
       'is needed: "bending" (equal signs: single curvature) or "joint" (equal signs: reverse curvature)',
     );
+}
+
+/** Lengths stated beside restraints stand in place of what follows from these: the reason is needed. */
+function wantReasons(
+  lengths: Readonly<Record<'Lcx' | 'Lcy' | 'Lcz' | 'Lb', GivenValue | null>>,
+  problem: (path: string, message: string) => void,
+): void {
+  for (const [name, given] of Object.entries(lengths))
+    if (given && given.source.kind === 'typed' && !given.source.note)
+      problem(
+        name,
+        'stands in place of the length that follows from the restraints: its source has to say why, or leave it out',
+      );
 }
