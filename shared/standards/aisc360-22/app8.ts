@@ -1,8 +1,9 @@
 import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
+import { CmEndMoments, multiplierB1 as multiplierOf } from './app8-b1.ts';
 import { clause, formula } from './writer.ts';
 
-// Appendix 8.1.2: the multiplier B1 for members without lateral translation of their ends.
+// Appendix 8.1.2: the critical load and the moment of members whose ends do not translate.
 export const app8Formulas = {
   criticalLoad: formula({
     id: 'A-8-5',
@@ -23,46 +24,6 @@ export const app8Formulas = {
     expression: 'alpha*Pr/Pe1',
     operands: { alpha: 'none', Pr: 'force', Pe1: 'force' },
     prints: 'display',
-  }),
-  momentRatio: formula({
-    id: 'App.8-M1/M2',
-    clause: 'App. 8.1.2',
-    title: 'Ratio of end moments in the sense of this appendix',
-    symbol: 'M1M2',
-    dimension: 'none',
-    expression: '-psi',
-    operands: { psi: 'none' },
-  }),
-  Cm: formula({
-    id: 'A-8-4',
-    clause: 'App. 8.1.2',
-    equation: 'A-8-4',
-    title: 'Equivalent uniform moment factor',
-    symbol: 'Cm',
-    dimension: 'none',
-    expression: '0.6-0.4*M1M2',
-    operands: { M1M2: 'none' },
-  }),
-  B1: formula({
-    id: 'A-8-3',
-    clause: 'App. 8.1.2',
-    equation: 'A-8-3',
-    title: 'Multiplier before its lower limit',
-    symbol: 'B1trial',
-    dimension: 'none',
-    expression: 'Cm/(1-alpha*Pr/Pe1)',
-    operands: { Cm: 'none', alpha: 'none', Pr: 'force', Pe1: 'force' },
-    prints: 'display',
-  }),
-  B1least: formula({
-    id: 'A-8-3-least',
-    clause: 'App. 8.1.2',
-    equation: 'A-8-3',
-    title: 'Multiplier at its lower limit',
-    symbol: 'B1',
-    dimension: 'none',
-    expression: '1',
-    operands: {},
   }),
   required: formula({
     id: 'A-8-1',
@@ -149,24 +110,14 @@ export function belowCriticalLoad(
   return taken !== 0;
 }
 
-/** Cm of A-8-4 and B1 of A-8-3, not less than 1. */
-export function multiplierB1(r: Recorder, axis: 'x' | 'y', q: Amplification): Quantity {
-  const M1M2 = r.formula(app8Formulas.momentRatio, at(axis, 'M1M2'), { psi: q.psi });
-  const Cm = r.formula(app8Formulas.Cm, at(axis, 'Cm'), { M1M2 });
-  const trial = r.formula(app8Formulas.B1, at(axis, 'B1/trial'), {
-    Cm,
+/** Cm of A-8-4 and B1 of A-8-3, not less than 1, for a member without load between its supports. */
+export const multiplierB1 = (r: Recorder, axis: 'x' | 'y', q: Amplification): Quantity =>
+  multiplierOf(r, `App8/${axis}`, {
     alpha: q.alpha,
     Pr: q.Pr,
     Pe1: q.Pe1,
+    Cm: CmEndMoments(r, `App8/${axis}`, q.psi),
   });
-  const taken = r.choice(
-    at(axis, 'B1/limit'),
-    [{ left: trial, relation: '>=', right: 1, outcome: 'the multiplier stands as computed' }],
-    'the multiplier is 1',
-    { title: 'Lower limit of the multiplier', clause: clause('App. 8.1.2', 'A-8-3') },
-  );
-  return taken === 0 ? trial : r.formula(app8Formulas.B1least, at(axis, 'B1'), {});
-}
 
 /** A-8-1 without lateral translation: B1 times the larger end moment. */
 export const amplifiedMoment = (

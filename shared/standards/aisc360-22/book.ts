@@ -1,6 +1,8 @@
 import { defineBook } from '../book.ts';
 import { app7Formulas } from './app7.ts';
 import { app8Formulas } from './app8.ts';
+import { app8B1Formulas } from './app8-b1.ts';
+import { app8B2Formulas } from './app8-b2.ts';
 import { b4Formulas } from './b4.ts';
 import { c2Formulas } from './c2.ts';
 import { e3Formulas } from './e3.ts';
@@ -30,6 +32,8 @@ export const aisc360 = defineBook(
     f6Formulas,
     app7Formulas,
     app8Formulas,
+    app8B1Formulas,
+    app8B2Formulas,
     h1Formulas,
   ].flatMap((group) => Object.values(group)),
 );

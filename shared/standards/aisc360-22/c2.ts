@@ -61,6 +61,27 @@ export const c2Formulas = {
     expression: '0.8*taub*E*I',
     operands: { taub: 'none', E: 'stress', I: 'inertia' },
   }),
+  notionalLoad: formula({
+    id: 'C2-1',
+    clause: 'C2.2b',
+    equation: 'C2-1',
+    title: 'Notional load at the level',
+    symbol: 'Ni',
+    dimension: 'force',
+    expression: '0.002*alpha*Yi',
+    operands: { alpha: 'none', Yi: 'force' },
+    prints: 'display',
+  }),
+  notionalForStiffness: formula({
+    id: 'C2.3c-Ni',
+    clause: 'C2.3',
+    title: 'Notional load in place of the stiffness reduction',
+    symbol: 'Ni',
+    dimension: 'force',
+    expression: '0.001*alpha*Yi',
+    operands: { alpha: 'none', Yi: 'force' },
+    prints: 'display',
+  }),
   nominalRigidity: formula({
     id: 'App.8-EI',
     clause: 'App. 8.1.2',
@@ -99,4 +120,110 @@ export function stiffnessReduction(
   return taken === 0
     ? r.formula(c2Formulas.taubFull, 'C2/taub', {})
     : r.formula(c2Formulas.taubReduced, 'C2/taub', { Pu: share });
+}
+
+/** How the structure was analysed: Chapter C, App. 7.2, App. 7.3. */
+export type StabilityMethod = 'direct' | 'effective-length' | 'first-order';
+
+/** C2.2b and C2.3(c): a notional load that the analysis has to hold, from the gravity load Yi of a level. */
+export const notionalLoad = (
+  r: Recorder,
+  alpha: Quantity,
+  Yi: Quantity,
+  at = 'C2/notional',
+): Quantity => r.formula(c2Formulas.notionalLoad, `${at}/Ni`, { alpha, Yi });
+
+/**
+ * C2.3(c): τb = 1 at any axial force, where the basis of the calculation says that the analysis
+ * holds a further notional load of 0.001 α Yi at every level in every combination. Where this
+ * member needs it (αPr > 0.5 Pns) a note says so, with its size if the gravity load is given.
+ */
+export function stiffnessByNotionalLoad(
+  r: Recorder,
+  q: { readonly alpha: Quantity; readonly Pr: Quantity; readonly Pns: Quantity },
+  Yi: Quantity | null,
+): Quantity {
+  const title = 'Notional load in place of the stiffness reduction';
+  const share = r.formula(c2Formulas.share, 'C2/share', { ...q });
+  const taken = r.choice(
+    'C2/branch',
+    [{ left: share, relation: '<=', right: 0.5, outcome: 'C2-2a applies' }],
+    'the factor stays 1, for which the further notional load stands in',
+    { title: 'Stiffness reduction', clause: clause('C2.3') },
+  );
+  if (taken !== 0) {
+    if (Yi)
+      r.formula(
+        c2Formulas.notionalForStiffness,
+        'C2/further/Ni',
+        { alpha: q.alpha, Yi },
+        { title },
+      );
+    r.notice(
+      'C2/further',
+      'note',
+      'further-notional-load',
+      'The stiffness is not reduced further because the analysis holds a notional load of 0.001 times the gravity load of each level, at the LRFD load level, in all combinations and beside any notional load for out-of-plumbness.',
+      { title, clause: clause('C2.3') },
+    );
+  }
+  return r.formula(c2Formulas.taubFull, 'C2/taub', {});
+}
+
+/** Largest ratio of second-order to first-order drift up to which a method's easements hold. */
+const DRIFT_LIMITS = {
+  direct: { limit: 1.7, clause: 'C2.1' },
+  'effective-length': { limit: 1.5, clause: 'App. 7.2' },
+  'first-order': { limit: 1.5, clause: 'App. 7.3' },
+} as const;
+
+/**
+ * Δ2nd/Δ1st at the LRFD load level, or B2 in its place, against the limit of the method: 1.7 with
+ * reduced stiffness (C2.1(b), C2.2b(d)), 1.5 with nominal stiffness (App. 7.2.1, 7.3.1). False,
+ * with an outside-scope notice, where the method may not be used; the direct analysis method always may.
+ */
+export function secondOrderRatio(
+  r: Recorder,
+  method: StabilityMethod,
+  ratio: Quantity,
+  at = 'C2/ratio',
+): boolean {
+  const { limit, clause: place } = DRIFT_LIMITS[method];
+  const title = 'Second-order drift over first-order drift';
+  const direct = method === 'direct';
+  const within = r.choice(
+    `${at}/limit`,
+    [
+      {
+        left: ratio,
+        relation: '<=',
+        right: limit,
+        outcome: direct
+          ? 'the easements for small second-order drift may be used'
+          : 'the method may be used',
+      },
+    ],
+    direct
+      ? 'the easements for small second-order drift may not be used'
+      : 'the method may not be used',
+    { title, clause: clause(place) },
+  );
+  if (within === 0) return true;
+  if (direct)
+    r.notice(
+      `${at}/above`,
+      'caution',
+      'second-order-drift-large',
+      'The second-order drift is more than 1.7 times the first-order drift. The analysis of the structure has to hold the effect of axial force between the ends of its members, and the notional loads, or the modelled out-of-plumbness, in all combinations, those with lateral loads included.',
+      { title, clause: clause(place) },
+    );
+  else
+    r.notice(
+      `${at}/above`,
+      'outside scope',
+      'method-drift-limit',
+      `The second-order drift is more than 1.5 times the first-order drift. The ${method === 'first-order' ? 'first-order analysis' : 'effective length'} method may not be used: use the direct analysis method.`,
+      { title, clause: clause(place) },
+    );
+  return direct;
 }
