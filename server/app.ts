@@ -8,6 +8,7 @@ import { accountHandlers } from './features/account/routes.ts';
 import { calculationHandlers } from './features/calculations/routes.ts';
 import { deskHandlers } from './features/desk/routes.ts';
 import { healthHandlers } from './features/health/routes.ts';
+import { libraryHandlers } from './features/library/routes.ts';
 import { memberHandlers } from './features/members/routes.ts';
 import { projectHandlers } from './features/projects/routes.ts';
 import { reportHandlers } from './features/reports/routes.ts';
@@ -27,6 +28,7 @@ const handlers = {
   ...calculationHandlers,
   ...memberHandlers,
   ...reportHandlers,
+  ...libraryHandlers,
 } satisfies { [Name in RouteName]: Handler<(typeof routeTable)[Name]> };
 
 /** The longest body: a member with 500 combinations, every value with its source. */

@@ -2,7 +2,8 @@ import { randomUUID } from 'node:crypto';
 import { writeAudit } from '#server/audit/write-audit.ts';
 import { calculations, members } from '#server/db/schema/calculations.ts';
 import type { Transaction } from '#server/db/transaction.ts';
-import { draftColumns } from '#server/features/members/stored-member.ts';
+import { keepFormulaUses } from '#server/features/members/keep-formula-uses.ts';
+import { runDraft } from '#server/features/members/stored-member.ts';
 import type { Runs } from '#server/runs/runs.ts';
 import { canonicalText } from '#shared/calc/hashes.ts';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
@@ -39,10 +40,11 @@ export async function seedCalculation(
   await writeAudit(tx, { ...scope, subjectId: calculationId }, created);
   for (const [index, draft] of drafts.map(withAnalysedSection).entries()) {
     const id = randomUUID();
-    const columns = await draftColumns(runs, basis, id, draft);
+    const { columns, uses } = await runDraft(runs, basis, id, draft);
     await tx.db
       .insert(members)
       .values({ id, calculationId, position: index + 1, ...columns, ...changed });
+    await keepFormulaUses(tx, id, uses);
     const added = { action: 'member.created', after: draft } as const;
     await writeAudit(tx, { ...scope, subjectId: id }, added);
   }

@@ -19,8 +19,8 @@ it('answers each order with its own result', async () => {
   const orders = members.map((member) =>
     thread.make('summaries', { basis: hallBasis, members: [member] }),
   );
-  const verdicts = (await Promise.all(orders)).map(([summary]) => summary?.verdict);
-  const together = (await thread.make('summaries', given)).map(({ verdict }) => verdict);
+  const verdicts = (await Promise.all(orders)).map(([made]) => made?.summary.verdict);
+  const together = (await thread.make('summaries', given)).map(({ summary }) => summary.verdict);
   expect(verdicts).toEqual(together);
 });
 

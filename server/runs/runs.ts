@@ -1,13 +1,13 @@
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
-import type { MemberDraft, MemberSummary } from '#shared/contracts/members.ts';
+import type { MemberDraft } from '#shared/contracts/members.ts';
 import type { OrderedBy } from './orders.ts';
 import { RunThread } from './run-thread-client.ts';
-import type { Drafts, Tasks } from './tasks.ts';
+import type { Drafts, SummarisedMember, Tasks } from './tasks.ts';
 import { tooLarge } from './too-large.ts';
 
 /** Everything that is computed of a calculation on the server. */
 export interface Runs {
-  summarise(basis: BasisDraft, id: string, draft: MemberDraft): Promise<MemberSummary>;
+  summarise(basis: BasisDraft, id: string, draft: MemberDraft): Promise<SummarisedMember>;
   record(drafts: Drafts, by: OrderedBy): Promise<Tasks['record']['made']>;
   document(given: Tasks['document']['given'], by: OrderedBy): Promise<Tasks['document']['made']>;
   report(given: Tasks['report']['given'], by: OrderedBy): Promise<Tasks['report']['made']>;
@@ -20,9 +20,9 @@ export function makeRuns(): Runs {
   const long = new RunThread();
   return {
     async summarise(basis, id, draft) {
-      const [summary] = await short.make('summaries', { basis, members: [{ id, draft }] });
-      if (!summary) throw new Error('a member was given and none was summarised');
-      return summary;
+      const [summarised] = await short.make('summaries', { basis, members: [{ id, draft }] });
+      if (!summarised) throw new Error('a member was given and none was summarised');
+      return summarised;
     },
     record: async (drafts, by) => tooLarge(drafts) ?? long.make('record', drafts, by),
     document: async (given, by) => tooLarge(given.drafts) ?? long.make('document', given, by),

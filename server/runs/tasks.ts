@@ -3,6 +3,7 @@ import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import type { DraftOfMember } from '#shared/contracts/draft-input.ts';
 import type { MemberSummary } from '#shared/contracts/members.ts';
 import type { ProblemPlace } from '#shared/contracts/problems.ts';
+import type { FormulaUse } from '#shared/library/formula-uses.ts';
 import type { DocumentData } from '#shared/report/document-data.ts';
 import type { DocumentTree } from '#shared/report/tree.ts';
 
@@ -18,12 +19,18 @@ export interface ReportDocument {
   readonly snapshotHash: string;
 }
 
+/** What is kept of a member's run. */
+export interface SummarisedMember {
+  readonly summary: MemberSummary;
+  readonly uses: readonly FormulaUse[];
+}
+
 type Refused = { readonly problems: ProblemPlace[] };
 
 /** What is computed away from the web process's own thread, by task. */
 export interface Tasks {
   /** Each member on its own, in their order. */
-  readonly summaries: { readonly given: Drafts; readonly made: MemberSummary[] };
+  readonly summaries: { readonly given: Drafts; readonly made: SummarisedMember[] };
   readonly record: {
     readonly given: Drafts;
     readonly made: { readonly record: CalculationRecord } | Refused;

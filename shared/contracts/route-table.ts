@@ -3,6 +3,7 @@ import { calculations } from './calculations.ts';
 import type { Contract } from './contract.ts';
 import { desk } from './desk.ts';
 import { health } from './health.ts';
+import { library } from './library.ts';
 import { members } from './members.ts';
 import { projects } from './projects.ts';
 import { reports } from './reports.ts';
@@ -16,6 +17,7 @@ export const routeTable = {
   ...calculations,
   ...members,
   ...reports,
+  ...library,
 } as const satisfies Record<string, Contract>;
 
 export type RouteName = keyof typeof routeTable;

@@ -31,6 +31,7 @@ const expected: Record<string, readonly number[]> = {
   changePassword: person,
   showDesk: person,
   listProjects: person,
+  listClauseUses: person,
   createProject: opening,
   showProject: seeProject,
   updateProject: doProject,

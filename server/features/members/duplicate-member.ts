@@ -7,10 +7,11 @@ import { transaction } from '#server/db/transaction.ts';
 import type { Handler } from '#server/http/handler.ts';
 import type { members as contracts } from '#shared/contracts/members.ts';
 import { copyOfMark } from './copy-of-mark.ts';
+import { keepFormulaUses } from './keep-formula-uses.ts';
 import { lockMember } from './lock-member.ts';
 import { storedMembers } from './queries.ts';
 import { refuseOneTooMany } from './refuse-one-too-many.ts';
-import { draftColumns, draftOf, memberOf } from './stored-member.ts';
+import { draftOf, memberOf, runDraft } from './stored-member.ts';
 
 /** Adds a copy of a member right after it, under a mark that is free. */
 export const duplicateMember: Handler<typeof contracts.duplicateMember> = async (context) => {
@@ -28,12 +29,14 @@ export const duplicateMember: Handler<typeof contracts.duplicateMember> = async 
       .update(members)
       .set({ position: sql`${members.position} + 1` })
       .where(and(eq(members.calculationId, calculationId), gt(members.position, stored.position)));
+    const { columns, uses } = await runDraft(deps.runs, basis, id, draft);
     const row = {
       ...{ id, calculationId, position: stored.position + 1 },
-      ...(await draftColumns(deps.runs, basis, id, draft)),
+      ...columns,
       ...{ version: 1, changedBy: viewer.userId, changedAt: deps.now(), deletedAt: null },
     };
     await tx.db.insert(members).values(row);
+    await keepFormulaUses(tx, id, uses);
     await writeAudit(tx, auditScope(context, id), { action: 'member.duplicated', after: draft });
     return memberOf(row, viewer.name);
   });

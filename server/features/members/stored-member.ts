@@ -11,22 +11,22 @@ export const draftOf = (stored: StoredMember) => JSON.parse(stored.draft) as Mem
 
 export const summaryOf = (stored: StoredMember) => JSON.parse(stored.summary) as MemberSummary;
 
-/** The columns of a run of a draft. */
+/** The columns of a run of a draft; the formulas it used stand in a table of their own. */
 export const summaryColumns = (summary: MemberSummary) => ({
   summary: JSON.stringify(summary),
   summaryEngine: ENGINE_VERSION,
 });
 
-/** The columns that hold a draft and the run of it. */
-export const draftColumns = async (
+/** Runs a draft: the columns that hold it and its summary, and the formulas that it uses. */
+export async function runDraft(
   runs: Runs,
   basis: BasisDraft,
   memberId: string,
   draft: MemberDraft,
-) => ({
-  draft: canonicalText(draft),
-  ...summaryColumns(await runs.summarise(basis, memberId, draft)),
-});
+) {
+  const { summary, uses } = await runs.summarise(basis, memberId, draft);
+  return { columns: { draft: canonicalText(draft), ...summaryColumns(summary) }, uses };
+}
 
 export function memberOf(stored: StoredMember, changedBy: string): Member {
   return {

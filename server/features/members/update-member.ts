@@ -7,9 +7,10 @@ import { AppError } from '#server/http/app-error.ts';
 import type { Handler } from '#server/http/handler.ts';
 import { canonicalText } from '#shared/calc/hashes.ts';
 import type { members as contracts } from '#shared/contracts/members.ts';
+import { keepFormulaUses } from './keep-formula-uses.ts';
 import { lockMember } from './lock-member.ts';
 import { loadMember } from './queries.ts';
-import { draftColumns, draftOf, memberOf } from './stored-member.ts';
+import { draftOf, memberOf, runDraft } from './stored-member.ts';
 
 /**
  * Saves a member's draft, valid or not. Saving what is stored already changes nothing, so that a
@@ -27,11 +28,13 @@ export const updateMember: Handler<typeof contracts.updateMember> = async (conte
       const { changedBy, changedAt } = theirs;
       throw new AppError('conflict', { conflict: { theirs, changedBy, changedAt } });
     }
+    const { columns, uses } = await runDraft(deps.runs, basis, stored.id, body.draft);
     const set = {
-      ...(await draftColumns(deps.runs, basis, stored.id, body.draft)),
+      ...columns,
       ...{ version: stored.version + 1, changedBy: viewer.userId, changedAt: deps.now() },
     };
     await tx.db.update(members).set(set).where(eq(members.id, stored.id));
+    await keepFormulaUses(tx, stored.id, uses);
     const event = {
       action: 'member.updated',
       before: draftOf(stored),

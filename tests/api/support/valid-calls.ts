@@ -56,6 +56,7 @@ export const validCalls: Record<RouteName, Prepare> = {
   }),
   showDesk: nothing,
   listProjects: nothing,
+  listClauseUses: () => ({ params: { book: 'aisc360-22', clause: 'E3' } }),
   createProject: () => ({ body: { number: unique(), title: 'New', client: '', place: '' } }),
   showProject: (target) => ({ params: ofProject(target) }),
   updateProject: async (target) => {
