@@ -1,23 +1,27 @@
 import type { Quantity } from '../calc/quantity.ts';
 import type { Recorder } from '../calc/recorder.ts';
-import { majorFlexureClass, minorFlexureClass } from '../standards/aisc360-22/b4.ts';
+import { majorFlexureClass, minorFlexureClass } from '../standards/aisc360-22/b4-flexure.ts';
+import { availableFlexure } from '../standards/aisc360-22/f1.ts';
 import {
-  availableFlexure,
-  type LtbLimits,
-  ltbRange,
-  ltbStrength,
+  F2_LTB,
+  type F2Limits,
+  ltbLimitsF2,
+  ltbStrengthF2,
   type MajorFlexure,
   plasticMomentMajor,
 } from '../standards/aisc360-22/f2.ts';
 import { flangeLocalBucklingMajor } from '../standards/aisc360-22/f3.ts';
 import { minorFlexuralStrength } from '../standards/aisc360-22/f6.ts';
+import { type LtbRange, ltbRangeOf } from '../standards/aisc360-22/ltb-range.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import type { SectionQuantities, SteelQuantities } from './member-lines.ts';
 
 /** Major-axis strength as far as it does not depend on the combination. */
 export interface MajorStrength {
   readonly q: MajorFlexure;
-  readonly limits: LtbLimits;
+  readonly limits: F2Limits;
+  readonly range: LtbRange;
+  readonly Lb: Quantity;
   readonly Mp: Quantity;
   readonly FLB: Quantity | null;
   readonly phib: Quantity;
@@ -48,15 +52,16 @@ export function majorStrength(
     return null;
   }
   r.section('F2', 'Major-axis flexural strength', clause(flange.class === 'compact' ? 'F2' : 'F3'));
-  const q: MajorFlexure = { E, Fy, Sx: s.Sx, Zx: s.Zx, ry: s.ry, rts: s.rts, J: s.J, ho: s.ho, Lb };
+  const q: MajorFlexure = { E, Fy, Sx: s.Sx, Zx: s.Zx, ry: s.ry, rts: s.rts, J: s.J, ho: s.ho };
   const Mp = plasticMomentMajor(r, q);
-  const limits = ltbRange(r, q);
+  const limits = ltbLimitsF2(r, q, null, Lb);
+  const range = ltbRangeOf(r, F2_LTB, limits, Lb);
   const FLB = flangeLocalBucklingMajor(
     r,
     { E, Fy, Sx: s.Sx, Mp, lambdaf: s.lambdaf, lambdaw: s.lambdaw },
     flange,
   );
-  return { q, limits, Mp, FLB, phib };
+  return { q, limits, range, Lb, Mp, FLB, phib };
 }
 
 /** Mn and Mc about the major axis once Cb is known; `Cb` is not used where LTB does not apply. */
@@ -66,7 +71,11 @@ export function availableMajor(
   m: MajorStrength,
   Cb: Quantity | null,
 ): Quantity {
-  const LTB = Cb ? ltbStrength(r, m.q, m.limits, m.Mp, Cb) : null;
+  const { range, Lb } = m;
+  const LTB =
+    Cb && (range === 'inelastic' || range === 'elastic')
+      ? ltbStrengthF2(r, m.q, m.limits, m.Mp, { range, Lb, Cb })
+      : null;
   const candidates = [LTB ?? m.Mp, ...(m.FLB ? [m.FLB] : [])];
   const Mn = r.governing('F2/Mn', 'min', candidates, {
     title: 'Nominal flexural strength, major axis',

@@ -4,7 +4,7 @@ import type { GivenValue } from '#shared/calc/quantity.ts';
 import { createRecorder } from '#shared/calc/recorder.ts';
 import { PUBLISHED_EQUATIONS } from '#shared/published-cases/published-cases.ts';
 import { findShape, W_DESIGNATIONS } from '#shared/sections/table.ts';
-import { majorFlexureClass } from '#shared/standards/aisc360-22/b4.ts';
+import { majorFlexureClass } from '#shared/standards/aisc360-22/b4-flexure.ts';
 import { nominalStress } from '#shared/standards/aisc360-22/e3.ts';
 import { formulaNamed } from '#shared/standards/library.ts';
 import { inUnit, UNIT_SIZES } from './in-unit.ts';

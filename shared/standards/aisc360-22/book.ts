@@ -4,6 +4,8 @@ import { app8Formulas } from './app8.ts';
 import { app8B1Formulas } from './app8-b1.ts';
 import { app8B2Formulas } from './app8-b2.ts';
 import { b4Formulas } from './b4.ts';
+import { b4FlexureFormulas } from './b4-flexure.ts';
+import { kcFormulas } from './b4-kc.ts';
 import { c2Formulas } from './c2.ts';
 import { e3Formulas } from './e3.ts';
 import { e4Formulas } from './e4.ts';
@@ -22,6 +24,8 @@ export const aisc360 = defineBook(
   { id: BOOK, name: 'ANSI/AISC 360-22', title: SPECIFICATION, symbols },
   [
     b4Formulas,
+    b4FlexureFormulas,
+    kcFormulas,
     c2Formulas,
     e3Formulas,
     e4Formulas,

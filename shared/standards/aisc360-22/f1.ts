@@ -1,8 +1,9 @@
 import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
+import type { Design } from './parameters.ts';
 import { formula } from './writer.ts';
 
-// F1 general: Cb from the moments at the quarter points of the unbraced segment.
+// F1 general: available strength; Cb from the moments at the quarter points of the unbraced segment.
 const quarter = (id: string, title: string, symbol: string, expression: string) =>
   formula({
     id,
@@ -50,9 +51,34 @@ export const f1Formulas = {
     operands: { Mmax: 'moment', MA4: 'moment', MB4: 'moment', MC4: 'moment' },
     prints: 'display',
   }),
+  availableLrfd: formula({
+    id: 'F1-LRFD',
+    clause: 'F1',
+    title: 'Design flexural strength',
+    symbol: 'Mc',
+    dimension: 'moment',
+    expression: 'phib*Mn',
+    operands: { phib: 'none', Mn: 'moment' },
+    prints: 'display',
+  }),
+  availableAsd: formula({
+    id: 'F1-ASD',
+    clause: 'F1',
+    title: 'Allowable flexural strength',
+    symbol: 'Mc',
+    dimension: 'moment',
+    expression: 'Mn/Omegab',
+    operands: { Omegab: 'none', Mn: 'moment' },
+    prints: 'display',
+  }),
 };
 
-/** F1-1 from the largest moment and those at the quarter points of the segment, all positive. */
+/**
+ * F1-1 from the largest moment and those at the quarter points of the segment, all positive. For
+ * doubly symmetric members, and singly symmetric ones in single curvature. A singly symmetric
+ * member in reverse curvature has the strength of both flanges checked, each with the moment that
+ * compresses it: call `majorSection` once for either flange.
+ */
 export const modificationFactor = (
   r: Recorder,
   at: string,
@@ -66,3 +92,22 @@ export const firstOrderQuarters = (r: Recorder, at: string, MA: Quantity, MB: Qu
   MB4: r.formula(f1Formulas.quarterB, `${at}/MB`, { MA, MB }),
   MC4: r.formula(f1Formulas.quarterC, `${at}/MC`, { MA, MB }),
 });
+
+/** φb Mn or Mn/Ωb of F1(a) about one axis; `constant` is φb or Ωb. */
+export function availableFlexure(
+  r: Recorder,
+  axis: 'x' | 'y',
+  design: Design,
+  constant: Quantity,
+  Mn: Quantity,
+  named: { at?: string; what?: string } = {},
+): Quantity {
+  const { at = `F1/${axis}`, what = 'flexural strength' } = named;
+  const more = {
+    symbol: `Mc${axis}`,
+    title: `${design === 'LRFD' ? 'Design' : 'Allowable'} ${what}, ${axis === 'x' ? 'major' : 'minor'} axis`,
+  };
+  return design === 'LRFD'
+    ? r.formula(f1Formulas.availableLrfd, `${at}/Mc`, { phib: constant, Mn }, more)
+    : r.formula(f1Formulas.availableAsd, `${at}/Mc`, { Omegab: constant, Mn }, more);
+}

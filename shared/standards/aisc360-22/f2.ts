@@ -1,9 +1,9 @@
 import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
-import type { Design } from './parameters.ts';
+import type { LtbClause, LtbLimits } from './ltb-range.ts';
 import { clause, formula } from './writer.ts';
 
-// F2 doubly symmetric compact I-shapes bent about the major axis.
+// F2 doubly symmetric compact I-shapes and channels bent about the major axis.
 export const f2Formulas = {
   plasticMoment: formula({
     id: 'F2-1',
@@ -34,6 +34,16 @@ export const f2Formulas = {
     dimension: 'none',
     expression: '1',
     operands: {},
+  }),
+  cChannel: formula({
+    id: 'F2-8b',
+    clause: 'F2.2',
+    equation: 'F2-8b',
+    title: 'Coefficient of a channel',
+    symbol: 'c',
+    dimension: 'none',
+    expression: 'ho/2*sqrt(Iy/Cw)',
+    operands: { ho: 'length', Iy: 'inertia', Cw: 'warping' },
   }),
   Lr: formula({
     id: 'F2-6',
@@ -100,26 +110,6 @@ export const f2Formulas = {
     expression: 'Fcr*Sx',
     operands: { Fcr: 'stress', Sx: 'modulus' },
   }),
-  availableLrfd: formula({
-    id: 'F1-LRFD',
-    clause: 'F1',
-    title: 'Design flexural strength',
-    symbol: 'Mc',
-    dimension: 'moment',
-    expression: 'phib*Mn',
-    operands: { phib: 'none', Mn: 'moment' },
-    prints: 'display',
-  }),
-  availableAsd: formula({
-    id: 'F1-ASD',
-    clause: 'F1',
-    title: 'Allowable flexural strength',
-    symbol: 'Mc',
-    dimension: 'moment',
-    expression: 'Mn/Omegab',
-    operands: { Omegab: 'none', Mn: 'moment' },
-    prints: 'display',
-  }),
 };
 
 export interface MajorFlexure {
@@ -131,99 +121,66 @@ export interface MajorFlexure {
   readonly rts: Quantity;
   readonly J: Quantity;
   readonly ho: Quantity;
-  readonly Lb: Quantity;
 }
+
+/** Iy and Cw of a channel, for its coefficient c; null for a doubly symmetric I-shape. */
+export type ChannelWarping = { readonly Iy: Quantity; readonly Cw: Quantity } | null;
+
+export interface F2Limits extends LtbLimits {
+  readonly c: Quantity | null;
+}
+
+export const F2_LTB: LtbClause = {
+  at: 'F2',
+  clause: 'F2.2',
+  limit: 'F2-5',
+  inelastic: 'F2-2',
+  elastic: 'F2-3',
+};
 
 /** F2.1. */
 export const plasticMomentMajor = (r: Recorder, q: MajorFlexure): Quantity =>
   r.formula(f2Formulas.plasticMoment, 'F2/Mp', { Fy: q.Fy, Zx: q.Zx });
 
-export type LtbRange = 'continuous' | 'yielding' | 'inelastic' | 'elastic';
-
-export interface LtbLimits {
-  readonly range: LtbRange;
-  readonly Lp: Quantity | null;
-  readonly Lr: Quantity | null;
-  readonly c: Quantity | null;
-}
-
-/** F2.2: which range Lb falls in; independent of Cb, so of the combination. */
-export function ltbRange(r: Recorder, q: MajorFlexure): LtbLimits {
-  const { Lb } = q;
-  if (Lb.value === 0) {
-    r.choice(
-      'F2/LTB/range',
-      [
-        {
-          left: Lb,
-          relation: '=',
-          right: 0,
-          outcome:
-            'lateral-torsional buckling does not apply: the compression flange is held continuously',
-        },
-      ],
-      '',
-      { title: 'Lateral-torsional buckling', clause: clause('F2.2') },
-    );
-    return { range: 'continuous', Lp: null, Lr: null, c: null };
-  }
-  const Lp = r.formula(f2Formulas.Lp, 'F2/Lp', { ry: q.ry, E: q.E, Fy: q.Fy });
-  if (Lb.value <= Lp.value) {
-    r.choice(
-      'F2/LTB/range',
-      [
-        {
-          left: Lb,
-          relation: '<=',
-          right: Lp,
-          outcome: 'lateral-torsional buckling does not apply',
-        },
-      ],
-      'lateral-torsional buckling is checked',
-      { title: 'Lateral-torsional buckling', clause: clause('F2.2', 'F2-5') },
-    );
-    return { range: 'yielding', Lp, Lr: null, c: null };
-  }
-  const c = r.formula(f2Formulas.c, 'F2/c', {});
-  const Lr = r.formula(f2Formulas.Lr, 'F2/Lr', {
-    rts: q.rts,
-    E: q.E,
-    Fy: q.Fy,
-    J: q.J,
-    c,
-    Sx: q.Sx,
-    ho: q.ho,
-  });
-  const taken = r.choice(
-    'F2/LTB/range',
-    [
-      { left: Lb, relation: '<=', right: Lp, outcome: 'lateral-torsional buckling does not apply' },
-      {
-        left: Lb,
-        relation: '<=',
-        right: Lr,
-        outcome: 'lateral-torsional buckling is inelastic: F2-2 applies',
-      },
-    ],
-    'lateral-torsional buckling is elastic: F2-3 applies',
-    { title: 'Lateral-torsional buckling', clause: clause('F2.2') },
-  );
-  return { range: taken === 1 ? 'inelastic' : 'elastic', Lp, Lr, c };
-}
-
-/** F2-2 or F2-3, not more than Mp; null where lateral-torsional buckling does not apply. */
-export function ltbStrength(
+/**
+ * F2-5 to F2-8 for a member whose longest unbraced length is `longest`: no limit where that is
+ * null or zero, Lr only where it exceeds Lp.
+ */
+export function ltbLimitsF2(
   r: Recorder,
   q: MajorFlexure,
-  limits: LtbLimits,
+  warping: ChannelWarping,
+  longest: Quantity | null,
+): F2Limits {
+  if (!longest || longest.value === 0) return { Lp: null, Lr: null, c: null };
+  const { E, Fy, Sx, ry, rts, J, ho } = q;
+  const Lp = r.formula(f2Formulas.Lp, 'F2/Lp', { ry, E, Fy });
+  if (longest.value <= Lp.value) return { Lp, Lr: null, c: null };
+  const c = warping
+    ? r.formula(f2Formulas.cChannel, 'F2/c', { ho, ...warping })
+    : r.formula(f2Formulas.c, 'F2/c', {});
+  const Lr = r.formula(f2Formulas.Lr, 'F2/Lr', { rts, E, Fy, J, c, Sx, ho });
+  return { Lp, Lr, c };
+}
+
+/** F2-2 or F2-3, not more than Mp. Throws where the limits of the range were not written. */
+export function ltbStrengthF2(
+  r: Recorder,
+  q: MajorFlexure,
+  limits: F2Limits,
   Mp: Quantity,
-  Cb: Quantity,
-): Quantity | null {
+  segment: {
+    readonly range: 'inelastic' | 'elastic';
+    readonly Lb: Quantity;
+    readonly Cb: Quantity;
+  },
+): Quantity {
   const { Lp, Lr, c } = limits;
-  if (!Lp || !Lr || !c) return null;
-  const { Fy, Sx, Lb, E, rts, J, ho } = q;
+  if (!Lp || !Lr || !c) throw new Error('F2.2: a limit is not written');
+  const { Fy, Sx, E, rts, J, ho } = q;
+  const { Lb, Cb } = segment;
   const trial =
-    limits.range === 'inelastic'
+    segment.range === 'inelastic'
       ? r.formula(f2Formulas.inelastic, 'F2/LTB/trial', { Cb, Mp, Fy, Sx, Lb, Lp, Lr })
       : r.formula(f2Formulas.elastic, 'F2/LTB/trial', {
           Fcr: r.formula(f2Formulas.criticalStress, 'F2/LTB/Fcr', { Cb, E, Lb, rts, J, c, Sx, ho }),
@@ -234,21 +191,4 @@ export function ltbStrength(
     symbol: 'MnLTB',
     clause: clause('F2.2'),
   });
-}
-
-/** φb Mn or Mn/Ωb of F1(a) about one axis. */
-export function availableFlexure(
-  r: Recorder,
-  axis: 'x' | 'y',
-  design: Design,
-  constant: Quantity,
-  Mn: Quantity,
-): Quantity {
-  const more = {
-    symbol: `Mc${axis}`,
-    title: `${design === 'LRFD' ? 'Design' : 'Allowable'} flexural strength, ${axis === 'x' ? 'major' : 'minor'} axis`,
-  };
-  return design === 'LRFD'
-    ? r.formula(f2Formulas.availableLrfd, `F1/${axis}/Mc`, { phib: constant, Mn }, more)
-    : r.formula(f2Formulas.availableAsd, `F1/${axis}/Mc`, { Omegab: constant, Mn }, more);
 }

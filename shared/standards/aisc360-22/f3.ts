@@ -1,7 +1,8 @@
 import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
-import type { ClassWithLimits } from './b4.ts';
-import { clause, formula } from './writer.ts';
+import type { ClassWithLimits } from './b4-flexure.ts';
+import { coefficientKc } from './b4-kc.ts';
+import { formula } from './writer.ts';
 
 // F3 doubly symmetric I-shapes with compact web and noncompact or slender flanges, major axis.
 export const f3Formulas = {
@@ -22,33 +23,6 @@ export const f3Formulas = {
       lambdarf: 'none',
     },
   }),
-  kcTrial: formula({
-    id: 'B4.1-kc',
-    clause: 'B4.1',
-    title: 'Coefficient for slender flanges',
-    symbol: 'kctrial',
-    dimension: 'none',
-    expression: '4/sqrt(lambdaw)',
-    operands: { lambdaw: 'none' },
-  }),
-  kcLeast: formula({
-    id: 'B4.1-kc-min',
-    clause: 'B4.1',
-    title: 'Least value of the coefficient',
-    symbol: 'kcleast',
-    dimension: 'none',
-    expression: '0.35',
-    operands: {},
-  }),
-  kcMost: formula({
-    id: 'B4.1-kc-max',
-    clause: 'B4.1',
-    title: 'Greatest value of the coefficient',
-    symbol: 'kcmost',
-    dimension: 'none',
-    expression: '0.76',
-    operands: {},
-  }),
   slender: formula({
     id: 'F3-2',
     clause: 'F3.2',
@@ -68,6 +42,8 @@ export interface FlangeLocalBuckling {
   readonly Mp: Quantity;
   readonly lambdaf: Quantity;
   readonly lambdaw: Quantity;
+  /** Where the flange's limit has already taken it (built-up shapes). */
+  readonly kc?: Quantity;
 }
 
 /** F3.2; null for a compact flange, where it does not apply. */
@@ -87,18 +63,6 @@ export function flangeLocalBucklingMajor(
       lambdapf: flange.lambdap,
       lambdarf: flange.lambdar,
     });
-  const trial = r.formula(f3Formulas.kcTrial, 'F3/kc/trial', { lambdaw });
-  const least = r.formula(f3Formulas.kcLeast, 'F3/kc/least', {});
-  const most = r.formula(f3Formulas.kcMost, 'F3/kc/most', {});
-  const capped = r.governing('F3/kc/capped', 'min', [trial, most], {
-    title: 'kc, not more than 0.76',
-    symbol: 'kc',
-    clause: clause('B4.1'),
-  });
-  const kc = r.governing('F3/kc', 'max', [capped, least], {
-    title: 'kc, not less than 0.35',
-    symbol: 'kc',
-    clause: clause('B4.1'),
-  });
+  const kc = q.kc ?? coefficientKc(r, 'F3', lambdaw);
   return r.formula(f3Formulas.slender, 'F3/FLB/Mn', { E, kc, Sx, lambda: lambdaf });
 }

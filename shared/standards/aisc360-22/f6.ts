@@ -1,6 +1,6 @@
 import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
-import type { ClassWithLimits } from './b4.ts';
+import type { ClassWithLimits } from './b4-flexure.ts';
 import { clause, formula } from './writer.ts';
 
 // F6 I-shapes bent about the minor axis.
