@@ -3,9 +3,12 @@ import {
   acosDependencies,
   addDependencies,
   atan2Dependencies,
+  atanDependencies,
+  atanhDependencies,
   type BigNumber,
   bignumberDependencies,
   cosDependencies,
+  coshDependencies,
   create,
   divideDependencies,
   type FactoryFunctionMap,
@@ -14,9 +17,11 @@ import {
   parseDependencies,
   powDependencies,
   sinDependencies,
+  sinhDependencies,
   sqrtDependencies,
   subtractDependencies,
   tanDependencies,
+  tanhDependencies,
   unaryMinusDependencies,
 } from 'mathjs';
 
@@ -39,12 +44,35 @@ const math = create(
     sinDependencies,
     cosDependencies,
     tanDependencies,
+    sinhDependencies,
+    coshDependencies,
+    tanhDependencies,
     acosDependencies,
+    atanDependencies,
     atan2Dependencies,
+    atanhDependencies,
     absDependencies,
   } as unknown as FactoryFunctionMap,
   { number: 'BigNumber', precision: 34, predictable: true },
 );
+
+/** Φₙ by its series alone: 34 digits leave room for the cancellation at any (kl)² of a member. */
+const series =
+  (n: number) =>
+  (x: BigNumber): BigNumber => {
+    let term = math.bignumber(1);
+    for (let i = 2; i <= n; i += 1) term = term.dividedBy(i);
+    let sum = math.bignumber(0);
+    for (let j = n; !term.isZero() && !sum.plus(term).equals(sum); j += 2) {
+      sum = sum.plus(term);
+      term = term
+        .times(x)
+        .negated()
+        .dividedBy((j + 1) * (j + 2));
+    }
+    return sum;
+  };
+math.import({ Phi2: series(2), Phi3: series(3), Phi4: series(4), Phi5: series(5) });
 
 const PI = math.bignumber('3.141592653589793238462643383279502884');
 

@@ -3,7 +3,10 @@ import {
   acosDependencies,
   addDependencies,
   atan2Dependencies,
+  atanDependencies,
+  atanhDependencies,
   cosDependencies,
+  coshDependencies,
   create,
   divideDependencies,
   type FactoryFunctionMap,
@@ -12,12 +15,15 @@ import {
   parseDependencies,
   powDependencies,
   sinDependencies,
+  sinhDependencies,
   sqrtDependencies,
   subtractDependencies,
   tanDependencies,
+  tanhDependencies,
   unaryMinusDependencies,
   unaryPlusDependencies,
 } from 'mathjs/number';
+import { seriesFunction } from './series-functions.ts';
 
 // Number-only, and only the functions that the books use: no constants and no units, so that E, A,
 // J, L, b, h, phi, tau stay symbols. The names are mathjs's own.
@@ -34,14 +40,42 @@ const used = {
   sinDependencies,
   cosDependencies,
   tanDependencies,
+  sinhDependencies,
+  coshDependencies,
+  tanhDependencies,
   acosDependencies,
+  atanDependencies,
   atan2Dependencies,
+  atanhDependencies,
   absDependencies,
 };
 const math = create(used as FactoryFunctionMap);
+math.import({
+  Phi2: (x: number) => seriesFunction(2, x),
+  Phi3: (x: number) => seriesFunction(3, x),
+  Phi4: (x: number) => seriesFunction(4, x),
+  Phi5: (x: number) => seriesFunction(5, x),
+});
 
-/** Functions a formula may call. */
-export const FUNCTIONS = ['sqrt', 'sin', 'cos', 'tan', 'acos', 'atan2', 'abs'] as const;
+/** Functions a formula may call; Φₙ as in series-functions.ts. */
+export const FUNCTIONS = [
+  'sqrt',
+  'sin',
+  'cos',
+  'tan',
+  'sinh',
+  'cosh',
+  'tanh',
+  'acos',
+  'atan',
+  'atan2',
+  'atanh',
+  'abs',
+  'Phi2',
+  'Phi3',
+  'Phi4',
+  'Phi5',
+] as const;
 export type FunctionName = (typeof FUNCTIONS)[number];
 
 /** The parsed form of a formula's text: plain data, from which value, TeX and text are all made. */

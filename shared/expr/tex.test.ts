@@ -32,6 +32,10 @@ describe('symbols', () => {
     ['-(a+b)', '-({a}+{b})'],
     ['0.658^(a/b)*a', '{0.658}^{{a}/{b}}\\,{a}'],
     ['sin(a/2)^2', '\\sin^{{2}}({a}/{2})'],
+    ['atan(a)', '\\arctan {a}'],
+    ['atanh(a)', '\\operatorname{artanh} {a}'],
+    ['b*sinh(a)', '{b}\\,\\sinh {a}'],
+    ['b*Phi3(a)', '{b}\\,\\Phi_{3}({a})'],
   ] as const)
     it(text, () => expect(symbols(text)).toBe(tex));
 });
@@ -61,6 +65,8 @@ describe('one line of text', () => {
     ['a/(b*c)', {}, 'a/(b · c)'],
     ['sqrt(a)', {}, '√(a)'],
     ['abs(M)', {}, '|M|'],
+    ['b*Phi3(-(k*l)^2)', {}, 'b · Φ₃(−(k · l)^2)'],
+    ['atan(a)+atanh(b)', {}, 'arctan(a) + artanh(b)'],
     ['a*b', { a: '−2', b: '3×10⁹' }, '(−2) · (3×10⁹)'],
   ] as const)
     it(text, () => expect(line(text, values)).toBe(printed));

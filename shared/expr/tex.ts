@@ -27,8 +27,17 @@ const CALLS: Record<Exclude<FunctionName, 'sqrt' | 'abs'>, string> = {
   sin: '\\sin',
   cos: '\\cos',
   tan: '\\tan',
+  sinh: '\\sinh',
+  cosh: '\\cosh',
+  tanh: '\\tanh',
   acos: '\\arccos',
+  atan: '\\arctan',
   atan2: '\\operatorname{atan2}',
+  atanh: '\\operatorname{artanh}',
+  Phi2: '\\Phi_{2}',
+  Phi3: '\\Phi_{3}',
+  Phi4: '\\Phi_{4}',
+  Phi5: '\\Phi_{5}',
 };
 
 const brackets = (tex: string): string =>
@@ -175,6 +184,6 @@ function call(
 /** A call of one symbol stands without brackets: `sin kL`. */
 const printsBare = (fn: FunctionName, args: readonly Expr[], leaf: LeafOf): boolean => {
   const only = args.length === 1 ? args[0] : undefined;
-  if (!only || fn === 'sqrt' || fn === 'abs') return false;
+  if (!only || fn === 'sqrt' || fn === 'abs' || fn.startsWith('Phi')) return false;
   return leafOf(only, leaf)?.kind === 'symbol' && !isQuotient(only, leaf);
 };

@@ -1,4 +1,15 @@
-import type { Expr } from './parse.ts';
+import type { Expr, FunctionName } from './parse.ts';
+
+/** Functions that a reader knows by another name. */
+const NAMES: Readonly<Partial<Record<FunctionName, string>>> = {
+  acos: 'arccos',
+  atan: 'arctan',
+  atanh: 'artanh',
+  Phi2: 'Φ₂',
+  Phi3: 'Φ₃',
+  Phi4: 'Φ₄',
+  Phi5: 'Φ₅',
+};
 
 const RANK = { '+': 1, '-': 1, '*': 3, '/': 3, '^': 4 } as const;
 
@@ -22,7 +33,7 @@ function print(e: Expr, leaf: (symbol: string) => string, least: number): string
       const args = e.args.map((a) => print(a, leaf, 0)).join(', ');
       if (e.fn === 'sqrt') return `√(${args})`;
       if (e.fn === 'abs') return `|${args}|`;
-      return `${e.fn === 'acos' ? 'arccos' : e.fn}(${args})`;
+      return `${NAMES[e.fn] ?? e.fn}(${args})`;
     }
     case 'binary': {
       const rank = RANK[e.op];

@@ -2,6 +2,7 @@ import katex from 'katex';
 import { all, create, type Unit } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import { defineFormula, type Formula } from '#shared/calc/formula.ts';
+import { seriesFunction } from '#shared/expr/series-functions.ts';
 import { type Leaf, texOf } from '#shared/expr/tex.ts';
 import { textOf } from '#shared/expr/text.ts';
 import { defineBook } from '#shared/standards/book.ts';
@@ -119,10 +120,17 @@ const textValue = (text: string): number =>
         .replace(/π/g, 'pi')
         .replace(/√/g, 'sqrt')
         .replace(/arccos/g, 'acos')
+        .replace(/arctan/g, 'atan')
+        .replace(/artanh/g, 'atanh')
+        .replace(/Φ([₂₃₄₅])/g, (_, n: string) => `Phi${'₀₁₂₃₄₅'.indexOf(n)}`)
         .replace(/\|([^|]*)\|/g, 'abs($1)'),
     ),
   );
 const plainMath = create(all ?? {});
+const SERIES = Object.fromEntries(
+  [2, 3, 4, 5].map((n) => [`Phi${n}`, (x: number) => seriesFunction(n, x)]),
+);
+plainMath.import(SERIES);
 
 // Where an operand of that kind has no value: a root of a negative number, an arc of more than 1.
 const IMPOSSIBLE: Readonly<Record<string, readonly string[]>> = {
@@ -224,6 +232,7 @@ describe('every symbol of the books', () => {
 // ---- Dimensions -----------------------------------------------------------------------------
 
 const math = create(all ?? {});
+math.import(SERIES);
 const SYSTEMS = {
   'kip, in': { force: 'kip', length: 'inch' },
   'N, mm': { force: 'N', length: 'mm' },

@@ -3,6 +3,8 @@
  * nothing, factors stand side by side, a minus sign belongs to what it stands before. What could be
  * read in two ways is refused. Written apart from the printer that it tests.
  */
+import { seriesFunction } from '#shared/expr/series-functions.ts';
+
 type Node =
   | { readonly kind: 'number'; readonly value: number }
   | { readonly kind: 'symbol'; readonly name: string }
@@ -82,8 +84,14 @@ const MARKS: readonly (readonly [RegExp, (found: string, c: Characters) => Node[
   ],
   [/\\sqrt/y, (_, c) => [{ kind: 'root', of: nodesOf(group(c)) }]],
   [/\^/y, (_, c) => [{ kind: 'raised', by: nodesOf(group(c)) }]],
-  [/\\operatorname\{atan2\}/y, () => [{ kind: 'function', name: 'atan2' }]],
-  [/\\(?:sin|cos|tan|arccos)(?![a-z])/y, (found) => [{ kind: 'function', name: found.slice(1) }]],
+  [
+    /\\operatorname\{(?:atan2|artanh)\}/y,
+    (found) => [{ kind: 'function', name: found.slice('\\operatorname{'.length, -1) }],
+  ],
+  [
+    /\\(?:sinh?|cosh?|tanh?|arccos|arctan|Phi_\{\d\})(?![a-z])/y,
+    (found) => [{ kind: 'function', name: found.slice(1) }],
+  ],
   [/\\left\|/y, () => [{ kind: 'bar', open: true }]],
   [/\\right\|/y, () => [{ kind: 'bar', open: false }]],
   [/\\pi(?![a-z])/y, () => [{ kind: 'symbol', name: 'pi' }]],
@@ -110,8 +118,17 @@ const CALLS: Readonly<Record<string, (a: number, b: number) => number>> = {
   sin: Math.sin,
   cos: Math.cos,
   tan: Math.tan,
+  sinh: Math.sinh,
+  cosh: Math.cosh,
+  tanh: Math.tanh,
   arccos: Math.acos,
+  arctan: Math.atan,
   atan2: Math.atan2,
+  artanh: Math.atanh,
+  'Phi_{2}': (x) => seriesFunction(2, x),
+  'Phi_{3}': (x) => seriesFunction(3, x),
+  'Phi_{4}': (x) => seriesFunction(4, x),
+  'Phi_{5}': (x) => seriesFunction(5, x),
 };
 
 /** Value of a formula's TeX; symbols are `\pi` and `v_{1}`, `v_{2}` … */
