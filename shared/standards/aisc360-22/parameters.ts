@@ -16,6 +16,25 @@ const CONSTANTS = {
     ASD: ['Omegac', '1.67'],
   },
   flexure: { clause: 'F1', title: 'Flexure', LRFD: ['phib', '0.90'], ASD: ['Omegab', '1.67'] },
+  tensionYielding: {
+    clause: 'D2',
+    title: 'Tensile yielding',
+    LRFD: ['phit', '0.90'],
+    ASD: ['Omegat', '1.67'],
+  },
+  tensionRupture: {
+    clause: 'D2',
+    title: 'Tensile rupture',
+    LRFD: ['phitu', '0.75'],
+    ASD: ['Omegatu', '2.00'],
+  },
+  shear: { clause: 'G1', title: 'Shear', LRFD: ['phiv', '0.90'], ASD: ['Omegav', '1.67'] },
+  shearStockyWeb: {
+    clause: 'G2.1',
+    title: 'Shear of a rolled I-shape with a stocky web',
+    LRFD: ['phiv', '1.00'],
+    ASD: ['Omegav', '1.50'],
+  },
   loadLevel: {
     clause: 'C2.1',
     title: 'Load level of the stability checks',
@@ -24,16 +43,20 @@ const CONSTANTS = {
   },
 } as const;
 
-/** φ or Ω of E1 and F1(a), α of C2.1(d), as a line. */
+/**
+ * φ or Ω of D2, E1, F1(a), G1 and G2.1(a), α of C2.1(d), as a line; under its clause, or under `at`
+ * where a member has it twice.
+ */
 export function methodConstant(
   r: Recorder,
   name: keyof typeof CONSTANTS,
   design: Design,
+  at?: string,
 ): Quantity {
   const entry = CONSTANTS[name];
   const [symbol, published] = entry[design];
   return r.lookup(
-    `${entry.clause}/${symbol}`,
+    `${at ?? entry.clause}/${symbol}`,
     symbol,
     'none',
     {
@@ -46,36 +69,4 @@ export function methodConstant(
     },
     { title: `${entry.title}, ${design}`, clause: clause(entry.clause) },
   );
-}
-
-/** c1 and c2 of Table E7.1 for an element kind. */
-export const EFFECTIVE_WIDTH = {
-  web: { row: '(a) stiffened elements except walls of HSS', c1: '0.18', c2: '1.31' },
-  flange: { row: '(c) all other elements', c1: '0.22', c2: '1.49' },
-} as const;
-
-export function effectiveWidthConstants(
-  r: Recorder,
-  element: 'web' | 'flange',
-): { c1: Quantity; c2: Quantity } {
-  const entry = EFFECTIVE_WIDTH[element];
-  const read = (column: 'c1' | 'c2') =>
-    r.lookup(
-      `E7/${element}/${column}`,
-      column,
-      'none',
-      {
-        value: Number(entry[column]),
-        published: entry[column],
-        table: 'Table E7.1',
-        row: entry.row,
-        column,
-        tableSource: SPECIFICATION,
-      },
-      {
-        title: column === 'c1' ? 'Imperfection factor' : 'Effective-width factor',
-        clause: clause('E7.1', 'Table E7.1'),
-      },
-    );
-  return { c1: read('c1'), c2: read('c2') };
 }
