@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto';
-import type { DraftCombination, DraftQuantity } from '#shared/contracts/members.ts';
+import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import type { DraftCombination } from '#shared/contracts/members.ts';
 
 /** Builders of the demo's form values, by where a value comes from. */
 

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { verdictSchema } from '#shared/calc/line.ts';
+import { PROVISIONS, SWAYS } from '#shared/members/input.ts';
 import { roles } from '#shared/policy/permissions.ts';
 import { contract, permitted } from './contract.ts';
 import { id, line, name, text, timestamp, version } from './fields.ts';
@@ -18,9 +19,14 @@ export const basisDraft = z.object({
     secondOrder: z.enum(['from-analysis', 'amplified', 'exact']),
     /** P-δ is in the analysis; asked only where moments come from a second-order analysis. */
     includesMemberEffect: z.boolean().nullable(),
-    sway: z.literal('none'),
-    /** Where "no sway" is known from. */
+    sway: z.enum(SWAYS),
+    /** Where it is known from whether the stories sway. */
     swaySource: text(400),
+    /** Second-order over first-order drift, and where it is known from; stored drafts may lack both. */
+    driftRatio: line(60).optional(),
+    driftSource: text(400).optional(),
+    /** Optional provisions that this calculation uses. */
+    provisions: z.array(z.enum(PROVISIONS)).optional(),
     notionalLoads: text(400),
     program: line(120),
     file: line(200),

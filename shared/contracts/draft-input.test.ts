@@ -2,7 +2,8 @@ import { expect, it } from 'vitest';
 import type { BasisDraft } from './calculations.ts';
 import { inputOf } from './draft-input.ts';
 import { problemsOf, problemsOfMember } from './draft-problems.ts';
-import type { DraftQuantity, MemberDraft } from './members.ts';
+import type { DraftQuantity } from './draft-quantity.ts';
+import type { MemberDraft } from './members.ts';
 
 const none: DraftQuantity = { text: '', confirmed: false };
 const typed = (text: string): DraftQuantity => ({ text, confirmed: true });

@@ -1,9 +1,21 @@
 import type { BasisDraft } from './calculations.ts';
 import {
+  asked,
+  chartInputOf,
+  given,
+  loadInputOf,
+  netSectionInputOf,
+  restraintInputOf,
+  sourceInputOf,
+  springsInputOf,
+  supportInputOf,
+  swayInputOf,
+} from './draft-input-parts.ts';
+import type { DraftRestraint } from './draft-parts.ts';
+import {
   actionNames,
+  actionOf,
   type DraftCombination,
-  type DraftQuantity,
-  type DraftSource,
   type DraftSteel,
   type MemberDraft,
 } from './members.ts';
@@ -21,21 +33,29 @@ export interface DraftOfMember {
 export function inputOf(basis: BasisDraft, members: readonly DraftOfMember[]) {
   const { standard, design, units, constants, analysis } = basis;
   const { method, secondOrder, includesMemberEffect, sway, swaySource } = analysis;
-  const note = swaySource.trim();
+  const { driftRatio = '', driftSource = '', provisions = [] } = analysis;
   return {
     format: 1,
     ...{ standard, design, units, constants },
     analysis: {
       ...{ method, secondOrder },
-      sway: note ? { value: sway, source: { kind: 'typed', note }, confirmed: true } : sway,
+      sway: noted(sway, swaySource),
       ...(includesMemberEffect === null ? {} : { includesMemberEffect }),
+      ...(driftRatio.trim() === '' ? {} : { driftRatio: noted(driftRatio.trim(), driftSource) }),
+      ...(provisions.length === 0 ? {} : { provisions }),
     },
     members: members.map(({ id, draft }) => memberInputOf(id, draft)),
   };
 }
 
+/** A statement of the basis: confirmed where the engineer says what it is known from. */
+function noted(value: string, source: string) {
+  const note = source.trim();
+  return note ? { value, source: { kind: 'typed', note }, confirmed: true } : value;
+}
+
 function memberInputOf(id: string, draft: MemberDraft) {
-  const { mark, endMomentSign } = draft;
+  const { mark, endMomentSign, restraints, springs, charts, netSection, stiffeners } = draft;
   return {
     ...{ id, mark },
     ...given('section', draft.section),
@@ -48,15 +68,28 @@ function memberInputOf(id: string, draft: MemberDraft) {
     ...given('Lb', draft.Lb),
     ...given('Cb', draft.Cb),
     ...(endMomentSign === '' ? {} : { endMomentSign }),
-    combinations: draft.combinations.map(combinationInputOf),
+    ...(restraints ? { restraints: restraints.map(restraintInputOf) } : {}),
+    ...(springs ? { springs: springsInputOf(springs) } : {}),
+    ...(charts ? { charts: chartsInputOf(charts) } : {}),
+    ...(netSection ? { netSection: netSectionInputOf(netSection) } : {}),
+    ...(stiffeners ? asked('stiffeners', stiffeners) : {}),
+    combinations: draft.combinations.map((row) => combinationInputOf(row, restraints ?? [])),
   };
 }
 
-const combinationInputOf = (row: DraftCombination) => ({
+const chartsInputOf = ({ x, y }: NonNullable<MemberDraft['charts']>) => ({
+  ...(x ? { x: chartInputOf(x) } : {}),
+  ...(y ? { y: chartInputOf(y) } : {}),
+});
+
+const combinationInputOf = (row: DraftCombination, restraints: readonly DraftRestraint[]) => ({
   ...{ id: row.id, name: row.name },
   ...(row.design ? { design: row.design } : {}),
   ...(row.analysedWith?.trim() ? { analysedWith: row.analysedWith.trim() } : {}),
-  ...Object.assign({}, ...actionNames.map((action) => given(action, row[action]))),
+  ...Object.assign({}, ...actionNames.map((action) => given(action, actionOf(row, action)))),
+  ...(row.loads?.length ? { loads: row.loads.map(loadInputOf) } : {}),
+  ...(row.supports?.length ? { supports: row.supports.map(supportInputOf(restraints)) } : {}),
+  ...(row.sway ? { sway: swayInputOf(row.sway) } : {}),
 });
 
 const steelInputOf = ({ name, Fy, Fu, source, confirmed }: DraftSteel) => ({
@@ -64,20 +97,3 @@ const steelInputOf = ({ name, Fy, Fu, source, confirmed }: DraftSteel) => ({
   ...(Fu.trim() === '' ? {} : { Fu }),
   ...(source ? { source: sourceInputOf(source) } : {}),
 });
-
-const given = (name: string, { text, source, confirmed }: DraftQuantity) =>
-  text.trim() === ''
-    ? {}
-    : {
-        [name]: {
-          value: text.trim(),
-          source: sourceInputOf(source ?? { kind: 'typed' }),
-          confirmed,
-        },
-      };
-
-function sourceInputOf(source: DraftSource) {
-  if (source.kind !== 'file') return source;
-  const { row, ...file } = source;
-  return /^\d+$/.test(row ?? '') ? { ...file, row: Number(row) } : file;
-}

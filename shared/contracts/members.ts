@@ -1,38 +1,18 @@
 import { z } from 'zod';
 import { summarySchema } from '#shared/calc/record.ts';
 import { contract, permitted } from './contract.ts';
+import {
+  draftChart,
+  draftLoad,
+  draftNetSection,
+  draftRestraint,
+  draftSprings,
+  draftSupport,
+  draftSway,
+} from './draft-parts.ts';
+import { type DraftQuantity, draftQuantity, draftSource, notGiven } from './draft-quantity.ts';
 import { id, line, timestamp, version } from './fields.ts';
 import { problemPlace } from './problems.ts';
-
-/**
- * Where a given value comes from, as the form holds it: the fields of `shared/calc`'s source, each
- * of which may still be empty while typing.
- */
-export const draftSource = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('typed'), note: line(200).optional() }),
-  z.object({
-    kind: z.literal('file'),
-    file: line(200),
-    row: line(12).optional(),
-    sha256: line(64).optional(),
-  }),
-  z.object({
-    kind: z.literal('drawing'),
-    number: line(60),
-    revision: line(20),
-    detail: line(120).optional(),
-  }),
-  z.object({ kind: z.literal('assumption'), basis: line(400) }),
-]);
-export type DraftSource = z.infer<typeof draftSource>;
-
-/** A quantity or word as typed, such as `22 ft` or `held`; empty while it is not given. */
-export const draftQuantity = z.object({
-  text: line(60),
-  source: draftSource.optional(),
-  confirmed: z.boolean(),
-});
-export type DraftQuantity = z.infer<typeof draftQuantity>;
 
 /** A steel of the user's own; its source is needed. */
 export const draftSteel = z.object({
@@ -44,7 +24,8 @@ export const draftSteel = z.object({
 });
 export type DraftSteel = z.infer<typeof draftSteel>;
 
-export const actionNames = ['P', 'MxA', 'MxB', 'MyA', 'MyB', 'MxMax', 'MyMax'] as const;
+/** Member forces of a combination; the shears, largest along the member, are given by few. */
+export const actionNames = ['P', 'MxA', 'MxB', 'MyA', 'MyB', 'MxMax', 'MyMax', 'Vx', 'Vy'] as const;
 export type ActionName = (typeof actionNames)[number];
 
 /** One row of member forces. `id` is made by the client and stays with the row; `name` is a label. */
@@ -62,8 +43,18 @@ export const draftCombination = z.object({
   MyB: draftQuantity,
   MxMax: draftQuantity,
   MyMax: draftQuantity,
+  /** From here on what is absent is not part of the combination; stored drafts may lack it. */
+  Vx: draftQuantity.optional(),
+  Vy: draftQuantity.optional(),
+  loads: z.array(draftLoad).max(60, 'at most 60 loads').optional(),
+  supports: z.array(draftSupport).max(60, 'at most 60 supports').optional(),
+  sway: draftSway.optional(),
 });
 export type DraftCombination = z.infer<typeof draftCombination>;
+
+/** A force of a combination, empty where it is not part of it. */
+export const actionOf = (row: DraftCombination, action: ActionName): DraftQuantity =>
+  row[action] ?? notGiven;
 
 export const lengthNames = ['length', 'Lcx', 'Lcy', 'Lcz', 'Lb'] as const;
 export type LengthName = (typeof lengthNames)[number];
@@ -92,6 +83,12 @@ export const memberDraft = z.object({
   Cb: draftQuantity,
   /** Which sense the end moments' signs follow; empty until chosen. */
   endMomentSign: z.enum(['bending', 'joint', '']),
+  /** From here on what is absent is not part of the member; stored drafts may lack it. */
+  restraints: z.array(draftRestraint).max(60, 'at most 60 restraints').optional(),
+  springs: draftSprings.optional(),
+  charts: z.object({ x: draftChart.optional(), y: draftChart.optional() }).optional(),
+  netSection: draftNetSection.optional(),
+  stiffeners: draftQuantity.optional(),
   combinations: z.array(draftCombination).max(500, 'at most 500 combinations'),
 });
 export type MemberDraft = z.infer<typeof memberDraft>;

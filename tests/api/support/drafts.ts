@@ -1,5 +1,6 @@
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
-import type { DraftQuantity, MemberDraft } from '#shared/contracts/members.ts';
+import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import type { MemberDraft } from '#shared/contracts/members.ts';
 
 const typed = (text: string): DraftQuantity => ({
   text,
