@@ -1,9 +1,5 @@
-import type {
-  ActionName,
-  DraftCombination,
-  DraftQuantity,
-  MemberDraft,
-} from '#shared/contracts/members.ts';
+import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import type { ActionName, DraftCombination, MemberDraft } from '#shared/contracts/members.ts';
 import { normalDesignation } from '#shared/sections/table.ts';
 import type { StatedName } from './member-fields.ts';
 

@@ -1,4 +1,5 @@
-import type { DraftCombination, DraftQuantity, MemberDraft } from '#shared/contracts/members.ts';
+import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import type { DraftCombination, MemberDraft } from '#shared/contracts/members.ts';
 
 /** A quantity nobody has given yet. */
 const notGiven: DraftQuantity = { text: '', confirmed: false };

@@ -1,8 +1,7 @@
-import { actionNames, type DraftQuantity, type MemberDraft } from '#shared/contracts/members.ts';
+import { type DraftValue, valuesOf } from '#shared/contracts/draft-input-values.ts';
+import type { MemberDraft } from '#shared/contracts/members.ts';
 import type { ProblemPlace } from '#shared/contracts/problems.ts';
 import { sourceLack } from './source-words.ts';
-
-const statedNames = ['section', 'ends', 'length', 'Lcx', 'Lcy', 'Lcz', 'Lb', 'Cb'] as const;
 
 /**
  * The problems of one member's input, by the paths of its own fields. A source that lacks
@@ -12,26 +11,39 @@ export function inputProblems(
   draft: MemberDraft,
   found: readonly { readonly path: string; readonly message: string }[],
 ): ProblemPlace[] {
-  const stated = quantitiesOf(draft);
-  const own = found.map(({ path, message }) => {
-    const place = path.replace(/^members\[0\]\.?/, '');
-    const quantity = stated.get(place);
-    const lack = quantity && quantity.text.trim() !== '' ? sourceLack(quantity.source) : null;
-    if (lack) return { path: place, message: lack };
-    if (quantity?.text.trim() === '' && /^(must be|Invalid)/.test(message)) {
-      return { path: place, message: 'is needed' };
-    }
-    return { path: place, message };
+  const values = new Map(valuesOf(draft).map((value) => [value.path, value]));
+  const own = found.flatMap(({ path, message }) => {
+    const place = placeOf(path.replace(/^members\[0\]\.?/, ''));
+    return isAnswered(draft, place)
+      ? []
+      : [{ path: place, message: said(values.get(place), place, message) }];
   });
   const seen = new Set<string>();
   return own.filter(({ path }) => !seen.has(path) && seen.add(path));
 }
 
-function quantitiesOf(draft: MemberDraft): ReadonlyMap<string, DraftQuantity> {
-  return new Map<string, DraftQuantity>([
-    ...statedNames.map((name) => [name, draft[name]] as const),
-    ...draft.combinations.flatMap((row, index) =>
-      actionNames.map((action) => [`combinations[${index}].${action}`, row[action]] as const),
-    ),
-  ]);
+/** A point of the member shows the problems of its source beside its distance. */
+const placeOf = (path: string): string =>
+  path.replace(/^(restraints\[\d+\])(?:\.(?:source|confirmed).*)?$/, '$1.at');
+
+function said(value: DraftValue | undefined, place: string, message: string): string {
+  if (!value) return /\.sidesway$/.test(place) ? 'is needed: whether the story is held' : message;
+  if (value.text.trim() === '') {
+    return /^(must be|Invalid|is empty)/.test(message) ? 'is needed' : message;
+  }
+  return sourceLack(value.source) ?? message;
+}
+
+/** Problems that another field answers for, since the form does not ask for the one they name. */
+function isAnswered(draft: MemberDraft, path: string): boolean {
+  const found = /^combinations\[(\d+)\]\.(?:sway\.([xy])\.(\w+)|supports\[(\d+)\]\.at)/.exec(path);
+  if (!found) return false;
+  const [, row, axis, name = '', support] = found;
+  const combination = draft.combinations[Number(row)];
+  if (axis === 'x' || axis === 'y') {
+    const critical = combination?.sway?.[axis]?.by === 'critical';
+    return critical && ['H', 'height', 'drift'].includes(name);
+  }
+  const over = combination?.supports?.[Number(support)]?.restraint;
+  return (draft.restraints ?? []).some(({ id }) => id === over);
 }

@@ -13,7 +13,7 @@ export interface FieldWords {
   readonly shown: boolean;
 }
 
-const words = (
+export const words = (
   label: string,
   tex: string,
   spoken: string,
@@ -54,6 +54,20 @@ export const actionWords: Readonly<Record<ActionName, FieldWords>> = {
     'M_{y,max}',
     'M y max',
     'Largest moment about y from the analysis, anywhere along the member.',
+    false,
+  ),
+  Vx: words(
+    'Shear, major',
+    'V_x',
+    'V x',
+    'Largest shear force from the analysis that goes with bending about x.',
+    false,
+  ),
+  Vy: words(
+    'Shear, minor',
+    'V_y',
+    'V y',
+    'Largest shear force from the analysis that goes with bending about y.',
     false,
   ),
 };

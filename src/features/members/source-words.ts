@@ -1,5 +1,5 @@
 import type { SourceLetter } from '#client/ui/source-ring.tsx';
-import type { DraftSource } from '#shared/contracts/members.ts';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
 
 export type SourceKind = DraftSource['kind'];
 

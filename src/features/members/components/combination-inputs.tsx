@@ -1,6 +1,11 @@
 import { Button } from '#client/ui/button.tsx';
 import { fieldClass } from '#client/ui/field.tsx';
-import { actionNames, type DraftCombination, type MemberDraft } from '#shared/contracts/members.ts';
+import {
+  actionNames,
+  actionOf,
+  type DraftCombination,
+  type MemberDraft,
+} from '#shared/contracts/members.ts';
 import { normalDesignation, printedDesignation } from '#shared/sections/table.ts';
 import { analysedAgain, sectionLeft, withAction, withCombination } from '../edit-draft.ts';
 import { actionWords } from '../member-fields.ts';
@@ -19,7 +24,7 @@ export function CombinationInputs(props: {
   const { draft, edit, editable, problemAt } = useMemberForm();
   const at = `combinations[${draft.combinations.indexOf(row)}]`;
   const shown = actionNames.filter(
-    (action) => props.withLargest || !action.endsWith('Max') || row[action].text !== '',
+    (action) => props.withLargest || !action.endsWith('Max') || actionOf(row, action).text !== '',
   );
   const nameProblem = problemAt(`${at}.name`) ?? problemAt(`${at}.design`);
   return (
@@ -47,7 +52,7 @@ export function CombinationInputs(props: {
           key={action}
           path={`${at}.${action}`}
           words={actionWords[action]}
-          quantity={row[action]}
+          quantity={actionOf(row, action)}
           placeholder={placeholders[units][action === 'P' ? 'force' : 'moment']}
           onChange={(quantity) =>
             edit(withAction(draft, row.id, action, quantity), `${row.id}/${action}`)

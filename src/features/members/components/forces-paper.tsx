@@ -3,7 +3,7 @@ import { Button } from '#client/ui/button.tsx';
 import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
 import { Empty } from '#client/ui/state-panels.tsx';
 import { SymbolMark } from '#client/ui/symbol.tsx';
-import { actionNames } from '#shared/contracts/members.ts';
+import { actionNames, actionOf } from '#shared/contracts/members.ts';
 import { withForcesOf } from '../edit-draft.ts';
 import { firstCombination } from '../first-draft.ts';
 import { actionWords } from '../member-fields.ts';
@@ -24,7 +24,9 @@ export function ForcesPaper(props: {
   const rows = draft.combinations;
   const actions = actionNames.filter(
     (action) =>
-      props.withLargest || !action.endsWith('Max') || rows.some((row) => row[action].text !== ''),
+      props.withLargest ||
+      !action.endsWith('Max') ||
+      rows.some((row) => actionOf(row, action).text !== ''),
   );
   const onPaste = (event: ClipboardEvent) => {
     const text = event.clipboardData.getData('text/plain');

@@ -1,11 +1,12 @@
 import { Button } from '#client/ui/button.tsx';
 import { classNames } from '#client/ui/class-names.ts';
 import { Row } from '#client/ui/ledger.tsx';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
 import {
   type ActionName,
   actionNames,
+  actionOf,
   type DraftCombination,
-  type DraftSource,
 } from '#shared/contracts/members.ts';
 import { withAction, withCombination, withoutCombination, withText } from '../edit-draft.ts';
 import { actionWords } from '../member-fields.ts';
@@ -69,12 +70,17 @@ export function ForcesRow(props: {
                 {...described}
                 aria-label={`${actionWords[action].label} of ${called}`}
                 {...(problem ? { 'aria-invalid': true } : {})}
-                value={row[action].text}
+                value={actionOf(row, action).text}
                 readOnly={!editable}
                 maxLength={60}
                 onChange={(event) =>
                   edit(
-                    withAction(draft, row.id, action, withText(row[action], event.target.value)),
+                    withAction(
+                      draft,
+                      row.id,
+                      action,
+                      withText(actionOf(row, action), event.target.value),
+                    ),
                     `${row.id}/${action}`,
                   )
                 }
@@ -127,7 +133,7 @@ export function ForcesRow(props: {
 }
 
 const filled = (row: DraftCombination) =>
-  actionNames.map((action) => row[action]).filter(({ text }) => text.trim() !== '');
+  actionNames.map((action) => actionOf(row, action)).filter(({ text }) => text.trim() !== '');
 
 /** The source of the row's first value, confirmed when all of them are. */
 const rowStated = (row: DraftCombination) => ({
@@ -144,7 +150,7 @@ const withRowStated = (
     ...row,
     ...Object.fromEntries(
       actionNames
-        .filter((action) => row[action].text.trim() !== '')
-        .map((action) => [action, { ...row[action], ...stated }]),
+        .filter((action) => actionOf(row, action).text.trim() !== '')
+        .map((action) => [action, { ...actionOf(row, action), ...stated }]),
     ),
   }));

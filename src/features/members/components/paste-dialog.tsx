@@ -3,7 +3,8 @@ import { count } from '#client/lib/count.ts';
 import { Button } from '#client/ui/button.tsx';
 import { Dialog } from '#client/ui/dialog.tsx';
 import { TextArea, TextField } from '#client/ui/text-field.tsx';
-import type { DraftCombination, DraftSource } from '#shared/contracts/members.ts';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
+import { actionNames, actionOf, type DraftCombination } from '#shared/contracts/members.ts';
 import { forcesFromTable, pastedTable } from '../forces/forces-from-table.ts';
 import type { ColumnUse } from '../forces/recognise-columns.ts';
 import { PastedRows, PasteProblems } from './pasted-rows.tsx';
@@ -54,7 +55,7 @@ export function PasteDialog(props: {
     >
       <TextArea
         label="Paste the table here, with its header row"
-        hint="Columns such as Combination, P (kip), MxA (kip ft), MxB, MyA, MyB; numbers may carry their own units."
+        hint="Columns such as Combination, P (kip), MxA (kip ft), MxB, MyA, MyB; Vx, Vy; numbers may carry their own units."
         rows={table.rows.length > 0 ? 4 : 9}
         spellCheck={false}
         wrap="off"
@@ -101,4 +102,7 @@ export function PasteDialog(props: {
 
 const isBlank = (row: DraftCombination): boolean =>
   row.name === '' &&
-  Object.values(row).every((value) => typeof value !== 'object' || value.text === '');
+  actionNames.every((action) => actionOf(row, action).text === '') &&
+  !row.loads?.length &&
+  !row.supports?.length &&
+  row.sway === undefined;

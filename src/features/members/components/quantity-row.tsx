@@ -1,5 +1,5 @@
 import { fieldClass } from '#client/ui/field.tsx';
-import type { DraftQuantity } from '#shared/contracts/members.ts';
+import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
 import { withText } from '../edit-draft.ts';
 import type { FieldWords } from '../member-fields.ts';
 import { placeWords } from '../place-words.ts';

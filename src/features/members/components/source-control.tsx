@@ -2,7 +2,7 @@ import { Popover } from 'radix-ui';
 import { useState } from 'react';
 import { Hint } from '#client/ui/hint.tsx';
 import { SourceRingButton } from '#client/ui/source-ring.tsx';
-import type { DraftSource } from '#shared/contracts/members.ts';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
 import { draftSourceLetter, draftSourceText, type StatedBy } from '../source-words.ts';
 import { useMemberForm } from './member-form-context.ts';
 import { SourceForm } from './source-form.tsx';

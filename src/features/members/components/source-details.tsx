@@ -1,5 +1,5 @@
 import { TextArea, TextField } from '#client/ui/text-field.tsx';
-import type { DraftSource } from '#shared/contracts/members.ts';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
 
 /** The fields of a source of one kind. */
 export function SourceDetails(props: {

@@ -2,7 +2,7 @@ import { useId } from 'react';
 import { Button } from '#client/ui/button.tsx';
 import { ProblemText } from '#client/ui/field.tsx';
 import { SourceRing } from '#client/ui/source-ring.tsx';
-import type { DraftSource } from '#shared/contracts/members.ts';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
 import {
   draftSourceLetter,
   emptySource,

@@ -1,4 +1,5 @@
-import { actionNames, type DraftCombination, type DraftSource } from '#shared/contracts/members.ts';
+import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
+import { actionNames, actionOf, type DraftCombination } from '#shared/contracts/members.ts';
 import { parseQuantity } from '#shared/units/parse.ts';
 import { firstCombination } from '../first-draft.ts';
 import { readTable } from './read-table.ts';
@@ -77,7 +78,7 @@ export function forcesFromTable(
       const text = quantityText(cell, unit ?? usualUnit(use, options.units));
       if (text.length > LONGEST) add(header, `is longer than ${LONGEST} characters: "${cell}"`);
       else {
-        const parsed = parseQuantity(text, use === 'P' ? 'force' : 'moment');
+        const parsed = parseQuantity(text, isForce(use) ? 'force' : 'moment');
         if (!parsed.ok) add(header, `"${cell}" ${said(parsed.reason)}`);
       }
       const quantity = {
@@ -88,7 +89,7 @@ export function forcesFromTable(
       combination = { ...combination, [use]: quantity };
     });
     if (combination.name === '') add('Combination', 'has no name');
-    if (actionNames.every((action) => combination[action].text === '')) {
+    if (actionNames.every((action) => actionOf(combination, action).text === '')) {
       add('Forces', 'has no force or moment');
     }
     combinations.push(combination);
@@ -96,8 +97,10 @@ export function forcesFromTable(
   return { combinations, problems };
 }
 
+const isForce = (use: Column['use']): boolean => use === 'P' || use === 'Vx' || use === 'Vy';
+
 const usualUnit = (use: Column['use'], units: 'us' | 'si'): string => {
-  if (use === 'P') return units === 'us' ? 'kip' : 'kN';
+  if (isForce(use)) return units === 'us' ? 'kip' : 'kN';
   return units === 'us' ? 'kip ft' : 'kN m';
 };
 

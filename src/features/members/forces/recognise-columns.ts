@@ -25,6 +25,12 @@ const largest = (axis: 'x' | 'y', word: 'major' | 'minor') => [
   ...[`m${axis}largest`, `m${axis}span`, `${word}span`],
 ];
 
+/** Named by the axis that the load bends about, as the moments are. */
+const shears = (axis: 'x' | 'y', word: 'major' | 'minor') => [
+  ...[`v${axis}`, `vu${axis}`, `vr${axis}`, `va${axis}`, `v${axis}max`],
+  ...[`shear${axis}`, `shear${word}`, `${word}shear`],
+];
+
 const spellings: Readonly<Record<Exclude<ColumnUse, 'leave'>, readonly string[]>> = {
   name: ['name', 'combination', 'combo', 'loadcombination', 'loadcombo', 'case', 'loadcase', 'lc'],
   P: ['p', 'pu', 'pa', 'pr', 'n', 'axial', 'axialforce', 'axialp', 'compression'],
@@ -34,6 +40,8 @@ const spellings: Readonly<Record<Exclude<ColumnUse, 'leave'>, readonly string[]>
   MyB: ends('y', 'minor', 'b', 2),
   MxMax: largest('x', 'major'),
   MyMax: largest('y', 'minor'),
+  Vx: shears('x', 'major'),
+  Vy: shears('y', 'minor'),
 };
 
 const uses = new Map(
