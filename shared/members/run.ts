@@ -146,8 +146,8 @@ function memberStrengths(
             r,
             input.design,
             steel,
-            section,
-            { ...q, Lcx, Lcy, Lcz },
+            { kind: 'i', made: 'rolled', ...section },
+            { Lcx, Lcy, Lcz, offset: null },
             phic,
             input.analysis.method !== 'effective-length',
           )

@@ -1,12 +1,9 @@
 import type { LineOf } from '#shared/calc/line.ts';
 import { createRecorder } from '#shared/calc/recorder.ts';
-import { findSteel, MODULI } from '#shared/members/material.ts';
-import { findShape, type PropertyName, W_TABLE } from '#shared/sections/table.ts';
-import {
-  effectiveWidthConstants,
-  methodConstant,
-  SPECIFICATION,
-} from '#shared/standards/aisc360-22/parameters.ts';
+import { findGrade, MODULI, rowsOf } from '#shared/members/material.ts';
+import { findShape, type Property, type Shape, TABLE_NAMES } from '#shared/sections/table.ts';
+import { publishedEffectiveWidth } from '#shared/standards/aisc360-22/e7-constants.ts';
+import { methodConstant, SPECIFICATION } from '#shared/standards/aisc360-22/parameters.ts';
 import type { LineContext } from './line-context.ts';
 
 type Lookup = LineOf<'lookup'>;
@@ -14,24 +11,39 @@ type Lookup = LineOf<'lookup'>;
 export type Published = Pick<Lookup, 'published' | 'row' | 'column' | 'tableSource'>;
 type Read = (line: Lookup, context: LineContext) => Published | null;
 
-/** The shape table: the member's row, the column of the symbol. */
-const shape: Read = ({ symbol }, { member }) => {
+/** A shape's table: the member's row, the column of the key's last part (`section/Ix`). */
+const shape: Read = ({ key, table }, { member }) => {
   const found = findShape(member.section);
-  const property = found?.properties[symbol as PropertyName];
-  if (!found || !property) return null;
-  return {
-    published: property.published,
-    row: found.designation,
-    column: property.column,
-    tableSource: `${W_TABLE.title}, ${W_TABLE.publisher}`,
-  };
+  if (!found || found.table.name !== table) return null;
+  const property = propertyOf(found, key.slice(key.lastIndexOf('/') + 1));
+  return (
+    property && {
+      published: property.published,
+      row: found.designation,
+      column: property.column,
+      tableSource: `${found.table.title}, ${found.table.publisher}`,
+    }
+  );
 };
 
-const steel: Read = ({ symbol }, { member, constants }) => {
-  const found = findSteel(member.material);
-  if (!found || (symbol !== 'Fy' && symbol !== 'Fu')) return null;
-  const published = found[constants][symbol];
-  return { published, row: found.key, column: symbol, tableSource: found.title };
+const propertyOf = ({ properties }: Shape, name: string): Property | null =>
+  Object.hasOwn(properties, name)
+    ? ((properties as Readonly<Record<string, Property>>)[name] ?? null)
+    : null;
+
+/** The grade's row that the member's own input leads to; any of its rows where that is no input. */
+const steel: Read = ({ symbol, row }, { member, constants, input }) => {
+  if (symbol !== 'Fy' && symbol !== 'Fu') return null;
+  const grade = findGrade(member.material);
+  const resolved = input?.steel.kind === 'grade' ? input.steel.steel : null;
+  const found = resolved ?? (grade && rowsOf(grade).find((r) => r.row === row));
+  if (!found) return null;
+  return {
+    published: found[constants][symbol],
+    row: found.row,
+    column: symbol,
+    tableSource: found.title,
+  };
 };
 
 const modulus: Read = ({ symbol }, { constants }) => {
@@ -47,8 +59,6 @@ function constantsOf(design: 'LRFD' | 'ASD'): ReadonlyMap<string, Lookup> {
   methodConstant(r, 'compression', design);
   methodConstant(r, 'flexure', design);
   methodConstant(r, 'loadLevel', design);
-  effectiveWidthConstants(r, 'web');
-  effectiveWidthConstants(r, 'flange');
   return new Map(r.lines.flatMap((l) => (l.kind === 'lookup' ? [[l.key, l]] : [])));
 }
 
@@ -58,9 +68,10 @@ const constant: Read = ({ key, table }, { record }) => {
 };
 
 const TABLES: Readonly<Record<string, Read>> = {
-  'W shapes': shape,
+  ...Object.fromEntries(TABLE_NAMES.map((name) => [name, shape])),
   'Steels by grade': steel,
   Symbols: modulus,
+  'Table E7.1': ({ row, column }) => publishedEffectiveWidth(row, column),
 };
 
 /** What the shipped tables have for a look-up line; null where they have no such place. */

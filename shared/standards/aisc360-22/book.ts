@@ -3,13 +3,16 @@ import { app7Formulas } from './app7.ts';
 import { app8Formulas } from './app8.ts';
 import { app8B1Formulas } from './app8-b1.ts';
 import { app8B2Formulas } from './app8-b2.ts';
-import { b4Formulas } from './b4.ts';
+import { b4CompressionFormulas } from './b4-compression.ts';
 import { b4FlexureFormulas } from './b4-flexure.ts';
 import { kcFormulas } from './b4-kc.ts';
 import { c2Formulas } from './c2.ts';
 import { e3Formulas } from './e3.ts';
 import { e4Formulas } from './e4.ts';
+import { e4ConstrainedFormulas } from './e4-constrained.ts';
+import { e4FlexuralTorsionalFormulas } from './e4-flexural-torsional.ts';
 import { e7Formulas } from './e7.ts';
+import { e7RoundFormulas } from './e7-round.ts';
 import { f1Formulas } from './f1.ts';
 import { f2Formulas } from './f2.ts';
 import { f3Formulas } from './f3.ts';
@@ -23,13 +26,16 @@ import { BOOK } from './writer.ts';
 export const aisc360 = defineBook(
   { id: BOOK, name: 'ANSI/AISC 360-22', title: SPECIFICATION, symbols },
   [
-    b4Formulas,
+    b4CompressionFormulas,
     b4FlexureFormulas,
     kcFormulas,
     c2Formulas,
     e3Formulas,
     e4Formulas,
+    e4ConstrainedFormulas,
+    e4FlexuralTorsionalFormulas,
     e7Formulas,
+    e7RoundFormulas,
     f1Formulas,
     f2Formulas,
     f3Formulas,

@@ -152,8 +152,9 @@ export function availableCompression(
   design: 'LRFD' | 'ASD',
   constant: Quantity,
   Pn: Quantity,
+  more: { title?: string; symbol?: string } = {},
 ): Quantity {
   return design === 'LRFD'
-    ? r.formula(e3Formulas.availableLrfd, 'E1/Pc', { phic: constant, Pn })
-    : r.formula(e3Formulas.availableAsd, 'E1/Pc', { Omegac: constant, Pn });
+    ? r.formula(e3Formulas.availableLrfd, 'E1/Pc', { phic: constant, Pn }, more)
+    : r.formula(e3Formulas.availableAsd, 'E1/Pc', { Omegac: constant, Pn }, more);
 }

@@ -61,3 +61,13 @@ export function elasticTorsionalStress(r: Recorder, q: TorsionalBuckling): Quant
   const { E, Cw, Lcz, G, J, Ix, Iy } = q;
   return r.formula(e4Formulas.elasticStress, 'E4/Fe', { E, Cw, Lcz, G, J, Ix, Iy });
 }
+
+/** E1: closed shapes do not buckle in torsion before they buckle in flexure; a note says so. */
+export const closedShapeNote = (r: Recorder): void =>
+  r.notice(
+    'E4/closed',
+    'note',
+    'closed-shape',
+    'A closed shape is stiff in torsion: flexural buckling governs whatever the torsional length (User Note of E1), so E4 is not evaluated.',
+    { title: 'Torsional buckling of a closed shape', clause: clause('E1') },
+  );
