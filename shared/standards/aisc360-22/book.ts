@@ -1,4 +1,5 @@
 import { defineBook } from '../book.ts';
+import { alignmentChartFormulas } from './alignment-chart.ts';
 import { app7Formulas } from './app7.ts';
 import { app8Formulas } from './app8.ts';
 import { app8B1Formulas } from './app8-b1.ts';
@@ -18,7 +19,9 @@ import { f2Formulas } from './f2.ts';
 import { f3Formulas } from './f3.ts';
 import { f6Formulas } from './f6.ts';
 import { h1Formulas } from './h1.ts';
+import { jointRatioFormulas } from './joint-ratio.ts';
 import { SPECIFICATION } from './parameters.ts';
+import { storyStiffnessFormulas } from './story-stiffness.ts';
 import { symbols } from './symbols.ts';
 import { BOOK } from './writer.ts';
 
@@ -44,6 +47,9 @@ export const aisc360 = defineBook(
     app8Formulas,
     app8B1Formulas,
     app8B2Formulas,
+    jointRatioFormulas,
+    alignmentChartFormulas,
+    storyStiffnessFormulas,
     h1Formulas,
   ].flatMap((group) => Object.values(group)),
 );
