@@ -81,7 +81,7 @@ it('names the place of a use as the sheet has it', async () => {
 });
 
 it('counts the combinations of lines that stand in them', async () => {
-  const { members: seen } = await usesSeenBy('engineer', { book: 'aisc360-22', clause: 'H1' });
+  const { members: seen } = await usesSeenBy('engineer', { book: 'aisc360-22', clause: 'H1.1' });
   const [first] = seen;
   const { combinations } = memberDraft;
   for (const { address, combinations: count } of first?.uses ?? []) {
