@@ -45,9 +45,9 @@ export interface FlangeOfI {
   readonly Iyf: Quantity;
   /** Elastic modulus of the section referred to this flange's outer face. */
   readonly S: Quantity;
-  /** Twice the distance from the centroid to the inside of this flange. */
+  /** Twice the distance from the centroid to the inside of this flange; below zero: it lies in it. */
   readonly hc: Quantity;
-  /** Twice the distance from the plastic neutral axis to the inside of this flange. */
+  /** Twice the distance from the plastic neutral axis to the inside of this flange; below zero: it lies in it. */
   readonly hp: Quantity;
 }
 
@@ -74,6 +74,8 @@ export interface ChannelSection extends Common {
   readonly bf: Quantity;
   readonly tf: Quantity;
   readonly tw: Quantity;
+  /** Centroid from the back of the web. */
+  readonly xbar: Quantity;
   /** bf/tf. */
   readonly lambdaf: Quantity;
   readonly lambdaw: Quantity;

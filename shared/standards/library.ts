@@ -2,9 +2,10 @@ import type { Formula } from '../calc/formula.ts';
 import { aisc360 } from './aisc360-22/book.ts';
 import type { Book, BookSymbol } from './book.ts';
 import { elasticTheory } from './elastic-theory/book.ts';
+import { sectionProperties } from './section-properties/book.ts';
 
 /** All books, the standard first. */
-export const BOOKS: readonly Book[] = [aisc360, elasticTheory];
+export const BOOKS: readonly Book[] = [aisc360, elasticTheory, sectionProperties];
 
 export const bookNamed = (id: string): Book | undefined => BOOKS.find((b) => b.id === id);
 

@@ -23,6 +23,8 @@ export const general = {
   b: symbol('b', 'width of an element', 'length'),
   h: symbol('h', 'clear depth of the web', 'length'),
   t: symbol('t', 'thickness of an element', 'length'),
+  tnom: symbol('t_{nom}', 'nominal wall thickness', 'length'),
+  Bout: symbol('B', 'outside width of a wall', 'length'),
   be: symbol('b_e', 'effective width of an element', 'length'),
   he: symbol('h_e', 'effective depth of the web', 'length'),
   lambda: symbol('\\lambda', 'width-to-thickness ratio'),
