@@ -1,7 +1,7 @@
 import { textsOfLoad } from './draft-input-parts.ts';
 import { springNames, swayNames } from './draft-parts.ts';
 import type { DraftQuantity, DraftSource } from './draft-quantity.ts';
-import { actionNames, actionOf, lengthNames, type MemberDraft } from './members.ts';
+import { actionNames, actionOf, inSprings, lengthNames, type MemberDraft } from './members.ts';
 
 /** A text of a member's form that carries a source, by the path of its problems. */
 export interface DraftValue {
@@ -19,7 +19,9 @@ export function valuesOf(draft: MemberDraft): DraftValue[] {
     ...(draft.restraints ?? []).map(({ at: text, source, confirmed }, i) => ({
       ...{ path: `restraints[${i}].at`, text, source, confirmed },
     })),
-    ...(springs ? springNames.map((name) => at(`springs.${name}`, springs[name])) : []),
+    ...(springs && inSprings(draft)
+      ? springNames.map((name) => at(`springs.${name}`, springs[name]))
+      : []),
     ...(['x', 'y'] as const).flatMap((axis) => {
       const chart = charts?.[axis];
       return chart ? [at(`charts.${axis}.GA`, chart.GA), at(`charts.${axis}.GB`, chart.GB)] : [];

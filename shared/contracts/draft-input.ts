@@ -17,6 +17,7 @@ import {
   actionOf,
   type DraftCombination,
   type DraftSteel,
+  inSprings,
   type MemberDraft,
 } from './members.ts';
 
@@ -69,7 +70,7 @@ function memberInputOf(id: string, draft: MemberDraft) {
     ...given('Cb', draft.Cb),
     ...(endMomentSign === '' ? {} : { endMomentSign }),
     ...(restraints ? { restraints: restraints.map(restraintInputOf) } : {}),
-    ...(springs ? { springs: springsInputOf(springs) } : {}),
+    ...(springs && inSprings(draft) ? { springs: springsInputOf(springs) } : {}),
     ...(charts ? { charts: chartsInputOf(charts) } : {}),
     ...(netSection ? { netSection: netSectionInputOf(netSection) } : {}),
     ...(stiffeners ? asked('stiffeners', stiffeners) : {}),

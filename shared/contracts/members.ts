@@ -93,6 +93,9 @@ export const memberDraft = z.object({
 });
 export type MemberDraft = z.infer<typeof memberDraft>;
 
+/** Whether the ends turn against springs; the stiffnesses are kept and not sent where not. */
+export const inSprings = ({ ends }: MemberDraft): boolean => ends.text.trim() === 'springs';
+
 /** What a list shows of a member: the summary of the server's run of its stored draft. */
 export const memberSummary = summarySchema.extend({
   unconfirmed: z.int(),

@@ -1,17 +1,9 @@
-import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import { notGiven } from '#shared/contracts/draft-quantity.ts';
 import type { DraftCombination, MemberDraft } from '#shared/contracts/members.ts';
-
-/** A quantity nobody has given yet. */
-const notGiven: DraftQuantity = { text: '', confirmed: false };
-
-/** An id for a row of forces; it stays with the row whatever it is called. */
-function freshCombinationId(taken: readonly { id: string }[]): string {
-  const numbers = taken.map(({ id }) => Number(/^c(\d+)$/.exec(id)?.[1] ?? 0));
-  return `c${Math.max(0, ...numbers) + 1}`;
-}
+import { freshId } from './fresh-id.ts';
 
 export const firstCombination = (taken: readonly DraftCombination[]): DraftCombination => ({
-  id: freshCombinationId(taken),
+  id: freshId('c', taken),
   name: '',
   P: notGiven,
   MxA: notGiven,

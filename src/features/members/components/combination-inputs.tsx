@@ -11,6 +11,7 @@ import { analysedAgain, sectionLeft, withAction, withCombination } from '../edit
 import { actionWords } from '../member-fields.ts';
 import { InputRow } from './input-row.tsx';
 import { useMemberForm } from './member-form-context.ts';
+import { CombinationParts } from './parts/combination-parts.tsx';
 import { QuantityRow } from './quantity-row.tsx';
 
 /** The forces of the combination whose sheet is shown. */
@@ -19,12 +20,16 @@ export function CombinationInputs(props: {
   units: 'us' | 'si';
   /** Largest moments are asked for only where an analysis gives them. */
   withLargest: boolean;
+  /** The basis takes sway by B2. */
+  withSway: boolean;
 }) {
   const { row, units } = props;
   const { draft, edit, editable, problemAt } = useMemberForm();
   const at = `combinations[${draft.combinations.indexOf(row)}]`;
   const shown = actionNames.filter(
-    (action) => props.withLargest || !action.endsWith('Max') || actionOf(row, action).text !== '',
+    (action) =>
+      !action.startsWith('V') &&
+      (props.withLargest || !action.endsWith('Max') || actionOf(row, action).text !== ''),
   );
   const nameProblem = problemAt(`${at}.name`) ?? problemAt(`${at}.design`);
   return (
@@ -61,6 +66,7 @@ export function CombinationInputs(props: {
       ))}
       <SenseRow />
       <SectionLeft row={row} />
+      <CombinationParts row={row} units={units} withSway={props.withSway} />
     </>
   );
 }

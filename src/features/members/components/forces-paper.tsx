@@ -3,7 +3,7 @@ import { Button } from '#client/ui/button.tsx';
 import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
 import { Empty } from '#client/ui/state-panels.tsx';
 import { SymbolMark } from '#client/ui/symbol.tsx';
-import { actionNames, actionOf } from '#shared/contracts/members.ts';
+import { type ActionName, actionNames, actionOf } from '#shared/contracts/members.ts';
 import { withForcesOf } from '../edit-draft.ts';
 import { firstCombination } from '../first-draft.ts';
 import { actionWords } from '../member-fields.ts';
@@ -22,11 +22,11 @@ export function ForcesPaper(props: {
   const { draft, edit, editable } = useMemberForm();
   const [pasting, setPasting] = useState<string | null>(null);
   const rows = draft.combinations;
+  const [withShears, setWithShears] = useState(() => rows.some(({ Vx, Vy }) => Vx || Vy));
+  const asked = (action: ActionName) =>
+    action.startsWith('V') ? withShears : props.withLargest || !action.endsWith('Max');
   const actions = actionNames.filter(
-    (action) =>
-      props.withLargest ||
-      !action.endsWith('Max') ||
-      rows.some((row) => actionOf(row, action).text !== ''),
+    (action) => asked(action) || rows.some((row) => actionOf(row, action).text !== ''),
   );
   const onPaste = (event: ClipboardEvent) => {
     const text = event.clipboardData.getData('text/plain');
@@ -45,7 +45,12 @@ export function ForcesPaper(props: {
           <h1 className="font-serif text-title font-semibold">Member forces of {draft.mark}</h1>
           <p className="text-zinc-7">
             Compression positive; moments at the ends A and B about x (major) and y (minor). An
-            empty moment is zero.
+            empty moment is zero.{' '}
+            {editable && !actions.includes('Vx') && (
+              <button type="button" className="link" onClick={() => setWithShears(true)}>
+                Shear forces too
+              </button>
+            )}
           </p>
         </div>
         {editable && (

@@ -14,6 +14,8 @@ export function InputRow(props: {
   path: string;
   label: ReactNode;
   problem: string | undefined;
+  /** A word beside the label, such as what deletes the row. */
+  beside?: ReactNode;
   /** The ring; left out, the control takes its room too. */
   source?: ReactNode;
   children: (control: RowControl) => ReactNode;
@@ -26,7 +28,14 @@ export function InputRow(props: {
   }
   return (
     <div className={props.source === undefined ? 'input-row is-wide' : 'input-row'}>
-      <label htmlFor={id}>{props.label}</label>
+      {props.beside ? (
+        <div className="flex min-w-0 items-baseline gap-2">
+          <label htmlFor={id}>{props.label}</label>
+          {props.beside}
+        </div>
+      ) : (
+        <label htmlFor={id}>{props.label}</label>
+      )}
       <div className="min-w-0">{props.children(control)}</div>
       {props.source !== undefined && (
         <div className="flex h-8 items-center justify-end">{props.source}</div>
@@ -41,7 +50,7 @@ export function InputRow(props: {
 }
 
 /** Problems follow a field's name in lists; beside the field they begin a sentence. */
-const readable = (problem: string): string => {
+export const readable = (problem: string): string => {
   const text = problem.charAt(0).toUpperCase() + problem.slice(1);
   return /[.!?)]$/.test(text) ? text : `${text}.`;
 };

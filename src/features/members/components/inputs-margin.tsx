@@ -68,6 +68,7 @@ export function InputsMargin(props: {
             row={row}
             units={basis.units}
             withLargest={basis.analysis.secondOrder === 'from-analysis'}
+            withSway={basis.analysis.sway === 'B2'}
           />
         </section>
       )}

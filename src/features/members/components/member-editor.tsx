@@ -5,7 +5,8 @@ import { ConflictDialog } from '#client/ui/conflict-dialog.tsx';
 import { useFormKeys } from '#client/ui/use-form-keys.ts';
 import type { MemberRecord } from '#shared/calc/record.ts';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
-import type { MemberDraft } from '#shared/contracts/members.ts';
+import type { LengthName, MemberDraft } from '#shared/contracts/members.ts';
+import { derivedLength } from '../derived-length.ts';
 import { firstCombination } from '../first-draft.ts';
 import { memberRules } from '../member-rules.ts';
 import { useLivePreview } from '../use-preview.ts';
@@ -20,7 +21,7 @@ import { type CentreView, MemberStrip } from './member-strip.tsx';
 import { SheetCautions } from './sheet-cautions.tsx';
 import { SheetContents } from './sheet-contents.tsx';
 import { SheetPaper } from './sheet-paper.tsx';
-import { goToControl, StaleNotice } from './stale-notice.tsx';
+import { focusControl, StaleNotice } from './stale-notice.tsx';
 import { TraceMargin } from './trace-margin.tsx';
 import { WorseElsewhere } from './worse-elsewhere.tsx';
 
@@ -98,7 +99,7 @@ export function MemberEditor(props: {
     const row = /^combinations\[(\d+)\]/.exec(path)?.[1];
     const combination = row === undefined ? undefined : value.combinations[Number(row)];
     if (combination && combination.id !== sheet.combination) place.showCombination(combination.id);
-    requestAnimationFrame(() => requestAnimationFrame(() => goToControl(path)));
+    focusControl(path);
   };
 
   const problems = preview.problems;
@@ -108,9 +109,11 @@ export function MemberEditor(props: {
       draft: value,
       edit,
       editable,
+      derived: (name: LengthName) =>
+        problems.length === 0 ? derivedLength(sheet.blocks, name) : null,
       problemAt: (path: string) => messages.get(path),
     };
-  }, [value, edit, editable, problems]);
+  }, [value, edit, editable, problems, sheet.blocks]);
 
   return (
     <MemberFormContext value={form}>

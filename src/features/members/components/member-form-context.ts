@@ -1,5 +1,5 @@
 import { createContext, useContext } from 'react';
-import type { MemberDraft } from '#shared/contracts/members.ts';
+import type { LengthName, MemberDraft } from '#shared/contracts/members.ts';
 
 /** The member's form, for the fields in it. */
 export interface MemberForm {
@@ -7,6 +7,8 @@ export interface MemberForm {
   readonly edit: (draft: MemberDraft, field: string) => void;
   readonly editable: boolean;
   /** Why the value at a path is refused. */
+  /** A length that follows from the points held, as the sheet prints it; null where none does. */
+  readonly derived: (name: LengthName) => string | null;
   readonly problemAt: (path: string) => string | undefined;
 }
 

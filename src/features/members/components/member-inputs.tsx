@@ -5,6 +5,12 @@ import { withStated, withText } from '../edit-draft.ts';
 import { CbWords, lengthWords } from '../member-fields.ts';
 import { InputRow } from './input-row.tsx';
 import { useMemberForm } from './member-form-context.ts';
+import { ChartsPart } from './parts/charts-part.tsx';
+import { MemberPartLinks } from './parts/member-part-links.tsx';
+import { NetSectionPart } from './parts/net-section-part.tsx';
+import { RestraintsPart } from './parts/restraints-part.tsx';
+import { SpringsRows } from './parts/springs-rows.tsx';
+import { StiffenersPart } from './parts/stiffeners-part.tsx';
 import { QuantityRow } from './quantity-row.tsx';
 import { SectionField } from './section-field.tsx';
 import { SourceControl } from './source-control.tsx';
@@ -30,11 +36,17 @@ export function MemberInputs({ units }: { units: 'us' | 'si' }) {
           Restraints
         </h2>
         <EndsRow />
+        <SpringsRows units={units} />
         {lengthNames.slice(1).map((name) => (
           <LengthRow key={name} name={name} units={units} />
         ))}
         <CbRow />
       </section>
+      <RestraintsPart units={units} />
+      <ChartsPart />
+      <NetSectionPart units={units} />
+      <StiffenersPart units={units} />
+      <MemberPartLinks />
     </>
   );
 }
@@ -60,13 +72,14 @@ function LabelRow({ name, label }: { name: 'mark' | 'place'; label: string }) {
 }
 
 function LengthRow({ name, units }: { name: LengthName; units: 'us' | 'si' }) {
-  const { draft, edit } = useMemberForm();
+  const { draft, edit, derived } = useMemberForm();
+  const unit = units === 'us' ? 'ft' : 'm';
   return (
     <QuantityRow
       path={name}
       words={lengthWords[name]}
       quantity={draft[name]}
-      placeholder={units === 'us' ? 'ft' : 'm'}
+      placeholder={name === 'length' ? unit : (derived(name) ?? unit)}
       onChange={(quantity) => edit(withStated(draft, name, quantity), name)}
     />
   );

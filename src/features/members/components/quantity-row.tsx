@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { fieldClass } from '#client/ui/field.tsx';
 import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
 import { withText } from '../edit-draft.ts';
@@ -13,6 +14,9 @@ export function QuantityRow(props: {
   words: FieldWords;
   quantity: DraftQuantity;
   placeholder?: string;
+  beside?: ReactNode;
+  /** false where another field's ring stands for this value too. */
+  withSource?: boolean;
   onChange: (quantity: DraftQuantity) => void;
 }) {
   const { path, words, quantity, onChange } = props;
@@ -23,7 +27,9 @@ export function QuantityRow(props: {
       path={path}
       problem={problem}
       label={<SymbolLabel words={words} />}
+      beside={props.beside}
       source={
+        props.withSource !== false &&
         quantity.text.trim() !== '' && (
           <SourceControl
             what={`${words.label} ${words.spoken}`}

@@ -42,6 +42,11 @@ function wantsOf(problems: readonly ProblemPlace[]): string {
   return `${count(problems.length, 'input')} ${verb ?? (one ? 'wants correcting' : 'want correcting')}`;
 }
 
+/** The same after the next drawing, for a control that is only then there. */
+export const focusControl = (path: string): void => {
+  requestAnimationFrame(() => requestAnimationFrame(() => goToControl(path)));
+};
+
 /** Moves to the control of a path, if it is in the margin. */
 export function goToControl(path: string): boolean {
   const control = document.getElementById(controlId(path));

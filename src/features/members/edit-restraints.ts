@@ -1,0 +1,73 @@
+import type { DraftRestraint } from '#shared/contracts/draft-parts.ts';
+import type { MemberDraft } from '#shared/contracts/members.ts';
+import type { Hold } from '#shared/members/restraint-input.ts';
+import { parseQuantity } from '#shared/units/parse.ts';
+import { freshId } from './fresh-id.ts';
+
+export const restraintsOf = (draft: MemberDraft): readonly DraftRestraint[] =>
+  draft.restraints ?? [];
+
+/** Adds a point of which nothing is said yet. */
+export const withNewRestraint = (draft: MemberDraft): MemberDraft => ({
+  ...draft,
+  restraints: [
+    ...restraintsOf(draft),
+    { id: freshId('r', restraintsOf(draft)), at: '', holds: [], confirmed: false },
+  ],
+});
+
+export const withRestraint = (
+  draft: MemberDraft,
+  id: string,
+  change: Partial<DraftRestraint>,
+): MemberDraft => ({
+  ...draft,
+  restraints: restraintsOf(draft).map((row) => (row.id === id ? { ...row, ...change } : row)),
+});
+
+/** Another thing held, or one less: what was confirmed was what it held before. */
+export const withHold = (draft: MemberDraft, { id, holds }: DraftRestraint, hold: Hold) =>
+  withRestraint(draft, id, {
+    holds: holds.includes(hold) ? holds.filter((held) => held !== hold) : [...holds, hold],
+    confirmed: false,
+  });
+
+/** Takes a point away, with the moments over it. */
+export const withoutRestraint = (draft: MemberDraft, id: string): MemberDraft => ({
+  ...draft,
+  restraints: restraintsOf(draft).filter((row) => row.id !== id),
+  combinations: draft.combinations.map((row) =>
+    row.supports
+      ? { ...row, supports: row.supports.filter(({ restraint }) => restraint !== id) }
+      : row,
+  ),
+});
+
+/** Takes all of them away: the lengths are then stated again. */
+export const withoutRestraints = (draft: MemberDraft): MemberDraft => {
+  const { restraints: _, ...rest } = restraintsOf(draft).reduce(
+    (without, { id }) => withoutRestraint(without, id),
+    draft,
+  );
+  return rest;
+};
+
+/** Points in the order of their distances from end A; those that cannot be read yet come last. */
+export function withOrder(draft: MemberDraft): MemberDraft {
+  const rows = restraintsOf(draft);
+  const place = ({ at }: DraftRestraint): number => {
+    const parsed = parseQuantity(at, 'length');
+    return parsed.ok ? parsed.quantity.value : Number.POSITIVE_INFINITY;
+  };
+  const ordered = rows.toSorted((a, b) => {
+    const [first, second] = [place(a), place(b)];
+    return first === second ? 0 : first - second;
+  });
+  return ordered.every((row, index) => row === rows[index])
+    ? draft
+    : { ...draft, restraints: ordered };
+}
+
+/** Whether a restraint supports the member in the plane in which it bends about an axis. */
+export const holdsAcross = ({ holds }: DraftRestraint, axis: 'x' | 'y'): boolean =>
+  holds.some((hold) => (hold === 'in-plane' ? axis === 'x' : hold !== 'twist' && axis === 'y'));
