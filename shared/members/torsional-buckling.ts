@@ -1,6 +1,10 @@
 import type { Quantity } from '../calc/quantity.ts';
 import type { Recorder } from '../calc/recorder.ts';
-import { closedShapeNote, elasticTorsionalStress } from '../standards/aisc360-22/e4.ts';
+import {
+  closedShapeNote,
+  doublySymmetricStress,
+  elasticTorsionalStress,
+} from '../standards/aisc360-22/e4.ts';
 import {
   closedConstrainedStress,
   constrainedTorsionalStress,
@@ -24,7 +28,7 @@ export interface TorsionalQuantities {
 }
 
 /**
- * Elastic stress of E4 by kind of section: (a) doubly symmetric I-shapes where Lcz exceeds Lcy,
+ * Elastic stress of E4 by kind of section: (a) built-up I-shapes, rolled ones where Lcz exceeds Lcy,
  * (b) channels and mono-symmetric I-shapes always, (d), (e), (f) where a restraint is offset from
  * the shear centre. null where E4 asks for nothing; `outside` after an outside-scope notice.
  */
@@ -38,10 +42,14 @@ export function torsionalStress(
   const { Lcy, Lcz, offset, Fex, Fey } = q;
   const { J, Ix, Iy, rx, ry, A: Ag } = s;
   switch (s.kind) {
-    case 'i':
-      return offset
-        ? constrainedTorsionalStress(r, offset, { E, G, J, Ix, Iy, rx, ry, ho: s.ho, Ag, Lcz })
-        : elasticTorsionalStress(r, { E, G, Cw: s.Cw, J, Ix, Iy, Lcy, Lcz });
+    case 'i': {
+      const { ho, Cw } = s;
+      if (offset)
+        return constrainedTorsionalStress(r, offset, { E, G, J, Ix, Iy, rx, ry, ho, Ag, Lcz });
+      return s.made === 'rolled'
+        ? elasticTorsionalStress(r, { E, G, Cw, J, Ix, Iy, Lcy, Lcz })
+        : doublySymmetricStress(r, { E, G, Cw, J, Ix, Iy, Lcz });
+    }
     case 'rect-hss':
     case 'box':
     case 'round':

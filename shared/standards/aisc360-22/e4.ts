@@ -45,7 +45,16 @@ export interface TorsionalBuckling {
   readonly Lcz: Quantity;
 }
 
-/** E4: applies to doubly symmetric shapes when Lcz exceeds Lcy; null where it doesn't. */
+/** E4-2: a doubly symmetric shape that twists about its shear centre. */
+export function doublySymmetricStress(r: Recorder, q: Omit<TorsionalBuckling, 'Lcy'>): Quantity {
+  const { E, Cw, Lcz, G, J, Ix, Iy } = q;
+  return r.formula(e4Formulas.elasticStress, 'E4/Fe', { E, Cw, Lcz, G, J, Ix, Iy });
+}
+
+/**
+ * E4-2 of a rolled doubly symmetric shape, which E4 covers when Lcz exceeds Lcy; null where it
+ * doesn't. Built-up shapes are covered always.
+ */
 export function elasticTorsionalStress(r: Recorder, q: TorsionalBuckling): Quantity | null {
   const taken = r.choice(
     'E4/applies',
@@ -57,9 +66,7 @@ export function elasticTorsionalStress(r: Recorder, q: TorsionalBuckling): Quant
       because: 'E4 applies where the torsional buckling length exceeds the lateral one.',
     },
   );
-  if (taken < 0) return null;
-  const { E, Cw, Lcz, G, J, Ix, Iy } = q;
-  return r.formula(e4Formulas.elasticStress, 'E4/Fe', { E, Cw, Lcz, G, J, Ix, Iy });
+  return taken < 0 ? null : doublySymmetricStress(r, q);
 }
 
 /** E1: closed shapes do not buckle in torsion before they buckle in flexure; a note says so. */

@@ -20,8 +20,8 @@ export const e7RoundFormulas = {
     title: 'Effective area, slender wall',
     symbol: 'Ae',
     dimension: 'area',
-    expression: '(0.038*E/(Fy*lambdad)+2/3)*Ag',
-    operands: { E: 'stress', Fy: 'stress', lambdad: 'none', Ag: 'area' },
+    expression: '(0.038*E/(Fy*lambda)+2/3)*Ag',
+    operands: { E: 'stress', Fy: 'stress', lambda: 'none', Ag: 'area' },
   }),
 };
 
@@ -58,5 +58,5 @@ export const roundEffectiveArea = (
   Ag: Quantity,
 ): Quantity => {
   const { E, Fy } = steel;
-  return r.formula(e7RoundFormulas.area, 'E7/Ae', { E, Fy, lambdad, Ag });
+  return r.formula(e7RoundFormulas.area, 'E7/Ae', { E, Fy, lambda: lambdad, Ag });
 };
