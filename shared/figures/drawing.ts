@@ -47,13 +47,39 @@ export interface MemberDrawing {
   readonly planes: readonly PlaneDrawing[];
 }
 
-/** Outline of a W shape, mm. */
-export interface SectionDrawing {
-  readonly section: string;
-  readonly depth: NamedDrawn;
-  readonly flangeWidth: NamedDrawn;
-  readonly webThickness: NamedDrawn;
-  readonly flangeThickness: NamedDrawn;
+/** Outline of a section, mm. */
+export type SectionDrawing = { readonly section: string } & (
+  | {
+      readonly form: 'i';
+      readonly depth: NamedDrawn;
+      readonly top: PlateDrawn;
+      readonly bottom: PlateDrawn;
+      readonly web: NamedDrawn;
+      /** From the top face. */
+      readonly centroid: number;
+    }
+  | {
+      readonly form: 'channel';
+      readonly depth: NamedDrawn;
+      readonly flange: PlateDrawn;
+      readonly web: NamedDrawn;
+      /** From the back of the web. */
+      readonly centroid: number;
+    }
+  | {
+      /** Flange and web thickness are one for a tube of one wall; `radius` outside, 0 for plates. */
+      readonly form: 'box';
+      readonly depth: NamedDrawn;
+      readonly flange: PlateDrawn;
+      readonly web: NamedDrawn;
+      readonly radius: number;
+    }
+  | { readonly form: 'round'; readonly diameter: NamedDrawn; readonly wall: NamedDrawn }
+);
+
+export interface PlateDrawn {
+  readonly width: NamedDrawn;
+  readonly thickness: NamedDrawn;
 }
 
 /** One combination in the interaction diagram. */

@@ -254,12 +254,18 @@ describe('interaction diagram', () => {
 });
 
 it('draws the section at one scale', () => {
+  const flange = {
+    width: named('bf', 307.34, '12.1 in'),
+    thickness: named('tf', 18.67, '0.735 in'),
+  };
   const scene = sectionOutline({
     section: 'W12×79',
+    form: 'i',
     depth: named('d', 314.96, '12.4 in'),
-    flangeWidth: named('bf', 307.34, '12.1 in'),
-    webThickness: named('tw', 11.94, '0.470 in'),
-    flangeThickness: named('tf', 18.67, '0.735 in'),
+    top: flange,
+    bottom: flange,
+    web: named('tw', 11.94, '0.470 in'),
+    centroid: 157.48,
   });
   sound(scene);
   const [outline = []] = areas(scene, 'zinc1');

@@ -25,8 +25,8 @@ export function readMember(
     mark: member.mark,
     section: sectionText(member.section),
     length: drawn(length, set),
-    depth: value('d'),
-    width: value('bf'),
+    depth: value('d') ?? value('Ht') ?? value('D'),
+    width: value('bf') ?? value('bfmax') ?? value('B') ?? value('D'),
     lengths: LENGTHS.map(ofMember)
       .filter((line) => line !== undefined)
       .map((line) => drawn(line, set)),

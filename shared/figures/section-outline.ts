@@ -1,56 +1,186 @@
-import type { NamedDrawn, SectionDrawing } from './drawing.ts';
+import type { NamedDrawn, PlateDrawn, SectionDrawing } from './drawing.ts';
 import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path } from './shapes.ts';
 
 const WIDTH = 236;
-const HEIGHT = 210;
 const BOX = 128;
 const LEFT = 18;
 const TOP = 28;
+const MIDDLE: Point = [LEFT + BOX / 2, TOP + BOX / 2];
 
-/** A W shape to scale from its depth, flange width and thicknesses; fillets are not drawn. */
+/** A section to scale from its sizes; the fillets of rolled shapes are not drawn. */
 export function sectionOutline(section: SectionDrawing): Scene {
-  const { depth, flangeWidth, webThickness, flangeThickness } = section;
-  const perMm = BOX / Math.max(depth.value, flangeWidth.value);
-  const [d, bf, tw, tf] = [depth, flangeWidth, webThickness, flangeThickness].map(
-    (q) => q.value * perMm,
-  ) as [number, number, number, number];
-  const x = LEFT + BOX / 2;
-  const y = TOP + (BOX - d) / 2;
-  const right: Point[] = [
-    [x + bf / 2, y],
-    [x + bf / 2, y + tf],
-    [x + tw / 2, y + tf],
-    [x + tw / 2, y + d - tf],
-    [x + bf / 2, y + d - tf],
-    [x + bf / 2, y + d],
-  ];
-  const left = right.map(([px, py]): Point => [2 * x - px, py]).reverse();
-  const text = (q: NamedDrawn): string => `${q.symbol} ${q.text}`;
+  const { wide, deep, more } = sizesOf(section);
+  const perMm = BOX / Math.max(deep.value, wide.value);
+  const [w, d] = [wide.value * perMm, deep.value * perMm];
+  const [x, y] = MIDDLE;
+  const below = (line: number) => TOP + BOX + 32 + 16 * line;
+  const words = [text(wide), ...more.map((sizes) => sizes.map(text).join(' · '))];
   const shapes: Shape[] = [
     label(section.section, [x, 13], { anchor: 'middle', weight: 600, within: 2 * x }),
-    { kind: 'area', points: [...right, ...left], fill: 'zinc1', stroke: PENS.outline },
-    ...axes(x, y + d / 2, BOX / 2 + 10),
-    ...measure([x + BOX / 2 + 22, y], [x + BOX / 2 + 22, y + d]),
-    label(text(depth), [x + BOX / 2 + 30, y + d / 2 - 8], { within: WIDTH - x - BOX / 2 - 30 }),
-    ...measure([x - bf / 2, TOP + BOX + 16], [x + bf / 2, TOP + BOX + 16]),
-    label(text(flangeWidth), [x, TOP + BOX + 32], { anchor: 'middle' }),
-    label(`${text(flangeThickness)} · ${text(webThickness)}`, [x, TOP + BOX + 48], {
-      anchor: 'middle',
-      within: 2 * x,
-    }),
+    ...bodyOf(section, perMm),
+    ...axes(centroidOf(section, perMm), BOX / 2 + 10),
+    ...measure([x + BOX / 2 + 22, y - d / 2], [x + BOX / 2 + 22, y + d / 2]),
+    label(text(deep), [x + BOX / 2 + 30, y - 8], { within: WIDTH - x - BOX / 2 - 30 }),
+    ...measure([x - w / 2, TOP + BOX + 16], [x + w / 2, TOP + BOX + 16]),
+    ...words.map((said, line) =>
+      label(said, [x, below(line)], { anchor: 'middle', within: 2 * x }),
+    ),
   ];
-  const description = `Outline of ${section.section} to scale: ${[depth, flangeWidth, flangeThickness, webThickness].map(text).join(', ')}. Fillets are not drawn.`;
-  return { width: WIDTH, height: HEIGHT, shapes, description };
+  const sizes = [deep, wide, ...more.flat()].map(text).join(', ');
+  const fillets = section.form === 'i' || section.form === 'channel';
+  const description = `Outline of ${section.section} to scale: ${sizes}.${fillets ? ' Fillets are not drawn.' : ''}`;
+  return { width: WIDTH, height: below(words.length - 1) + 6, shapes, description };
 }
 
-function axes(x: number, y: number, reach: number): Shape[] {
+const text = (q: NamedDrawn): string => `${q.symbol} ${q.text}`;
+
+/** The sizes that are measured, and the lines of others. */
+function sizesOf(s: SectionDrawing): {
+  readonly wide: NamedDrawn;
+  readonly deep: NamedDrawn;
+  readonly more: readonly (readonly NamedDrawn[])[];
+} {
+  switch (s.form) {
+    case 'i': {
+      const { top, bottom, web, depth } = s;
+      if (top === bottom) return { wide: top.width, deep: depth, more: [[top.thickness, web]] };
+      const [wider, other] = top.width.value > bottom.width.value ? [top, bottom] : [bottom, top];
+      return {
+        ...{ wide: wider.width, deep: depth },
+        more: [
+          [other.width, other.thickness],
+          [wider.thickness, web],
+        ],
+      };
+    }
+    case 'channel':
+      return { wide: s.flange.width, deep: s.depth, more: [[s.flange.thickness, s.web]] };
+    case 'box': {
+      const walls =
+        s.web.symbol === s.flange.thickness.symbol ? [s.web] : [s.flange.thickness, s.web];
+      return { wide: s.flange.width, deep: s.depth, more: [walls] };
+    }
+    case 'round':
+      return { wide: s.diameter, deep: s.diameter, more: [[s.wall]] };
+  }
+}
+
+/** The cut area about the middle of the drawing. */
+function bodyOf(s: SectionDrawing, perMm: number): Shape[] {
+  const [x, y] = MIDDLE;
+  const cut = (points: readonly Point[]): Shape => ({
+    kind: 'area',
+    points,
+    fill: 'zinc1',
+    stroke: PENS.outline,
+  });
+  const hole = (points: readonly Point[]): Shape => ({
+    kind: 'area',
+    points,
+    fill: 'paper',
+    stroke: PENS.outline,
+  });
+  const mm = (q: NamedDrawn) => q.value * perMm;
+  switch (s.form) {
+    case 'i': {
+      const [d, tw] = [mm(s.depth), mm(s.web)];
+      const right = flangedEdge(x, y - d / 2, d, tw / 2, s.top, s.bottom, (q) => mm(q) / 2, mm);
+      return [cut([...right, ...right.map(([px, py]): Point => [2 * x - px, py]).reverse()])];
+    }
+    case 'channel': {
+      const [d, tw, back] = [mm(s.depth), mm(s.web), x - mm(s.flange.width) / 2];
+      const right = flangedEdge(back, y - d / 2, d, tw, s.flange, s.flange, mm, mm);
+      return [cut([...right, [back, y + d / 2], [back, y - d / 2]])];
+    }
+    case 'box': {
+      const [w, d] = [mm(s.flange.width) / 2, mm(s.depth) / 2];
+      const [tw, tf] = [mm(s.web), mm(s.flange.thickness)];
+      const radius = s.radius * perMm;
+      return [
+        cut(roundedRectangle(MIDDLE, w, d, radius)),
+        hole(roundedRectangle(MIDDLE, w - tw, d - tf, Math.max(0, radius - tw))),
+      ];
+    }
+    case 'round': {
+      const radius = mm(s.diameter) / 2;
+      const circle = (r: number, fill: 'zinc1' | 'paper'): Shape => ({
+        kind: 'circle',
+        center: MIDDLE,
+        radius: r,
+        fill,
+        stroke: PENS.outline,
+      });
+      return [circle(radius, 'zinc1'), circle(radius - mm(s.wall), 'paper')];
+    }
+  }
+}
+
+/** The right edge of flanges and web from the top down; `reach` is how far a width goes right of `x`. */
+function flangedEdge(
+  x: number,
+  y: number,
+  d: number,
+  web: number,
+  top: PlateDrawn,
+  bottom: PlateDrawn,
+  reach: (width: NamedDrawn) => number,
+  mm: (q: NamedDrawn) => number,
+): Point[] {
+  const [a, b] = [x + reach(top.width), x + reach(bottom.width)];
+  const [ta, tb] = [mm(top.thickness), mm(bottom.thickness)];
+  return [
+    [a, y],
+    [a, y + ta],
+    [x + web, y + ta],
+    [x + web, y + d - tb],
+    [b, y + d - tb],
+    [b, y + d],
+  ];
+}
+
+const STEPS = 8;
+
+/** Half width and half height about a centre, corners in short chords. */
+function roundedRectangle([x, y]: Point, w: number, h: number, radius: number): Point[] {
+  if (radius === 0)
+    return [
+      [x + w, y - h],
+      [x + w, y + h],
+      [x - w, y + h],
+      [x - w, y - h],
+    ];
+  return [
+    [1, 1],
+    [-1, 1],
+    [-1, -1],
+    [1, -1],
+  ].flatMap(([sx = 1, sy = 1], quarter) =>
+    Array.from({ length: STEPS + 1 }, (_, i): Point => {
+      const angle = (Math.PI / 2) * (quarter + i / STEPS);
+      return [
+        x + sx * (w - radius) + radius * Math.cos(angle),
+        y + sy * (h - radius) + radius * Math.sin(angle),
+      ];
+    }),
+  );
+}
+
+function centroidOf(s: SectionDrawing, perMm: number): Point {
+  const [x, y] = MIDDLE;
+  if (s.form === 'channel') return [x + (s.centroid - s.flange.width.value / 2) * perMm, y];
+  return s.form === 'i' ? [x, y + (s.centroid - s.depth.value / 2) * perMm] : MIDDLE;
+}
+
+/** The axes through the centroid; they reach as far from the middle on all sides. */
+function axes([x, y]: Point, reach: number): Shape[] {
+  const [mx, my] = MIDDLE;
   const line = (from: Point, to: Point): Shape => path([from, to], PENS.axis);
   return [
-    line([x - reach, y], [x + reach, y]),
-    line([x, y - reach], [x, y + reach]),
-    label('x', [x + reach + 2, y + 4], { ink: 'zinc7' }),
-    label('y', [x + 4, y - reach + 6], { ink: 'zinc7' }),
+    line([mx - reach, y], [mx + reach, y]),
+    line([x, my - reach], [x, my + reach]),
+    label('x', [mx + reach + 2, y + 4], { ink: 'zinc7' }),
+    label('y', [x + 4, my - reach + 6], { ink: 'zinc7' }),
   ];
 }
 

@@ -1,15 +1,10 @@
 import { SceneView } from '#client/document/figure-block.tsx';
 import { SymbolMark } from '#client/ui/symbol.tsx';
+import { sectionDrawing } from '#shared/figures/section-drawing.ts';
 import { sectionOutline } from '#shared/figures/section-outline.ts';
-import {
-  findShape,
-  type PropertyName,
-  printedDesignation,
-  W_TABLE,
-  type WShape,
-} from '#shared/sections/table.ts';
+import { findShape, type Property, printedDesignation } from '#shared/sections/table.ts';
 
-const shown: readonly (readonly [PropertyName, string])[] = [
+const shown = [
   ['A', 'A_g'],
   ['Ix', 'I_x'],
   ['Zx', 'Z_x'],
@@ -18,17 +13,20 @@ const shown: readonly (readonly [PropertyName, string])[] = [
   ['Zy', 'Z_y'],
   ['ry', 'r_y'],
   ['J', 'J'],
-];
+] as const;
 
 /** A section's outline to scale and the properties an engineer chooses by. */
 export function SectionPreview({ designation }: { designation: string }) {
   const shape = findShape(designation);
   if (!shape) return null;
+  const properties: Readonly<Record<string, Property>> = shape.properties;
+  const drawing = sectionDrawing(printedDesignation(shape.designation), (symbol) => {
+    const found = Object.hasOwn(properties, symbol) ? properties[symbol] : undefined;
+    return found ? { symbol, value: found.value, text: found.published } : null;
+  });
   return (
     <div className="grid gap-2">
-      <div className="mx-auto w-64">
-        <SceneView scene={sectionOutline(drawingOf(shape))} />
-      </div>
+      <div className="mx-auto w-64">{drawing && <SceneView scene={sectionOutline(drawing)} />}</div>
       <dl className="grid grid-cols-2 gap-x-4 font-condensed text-small">
         {shown.map(([name, tex]) => (
           <div key={name} className="flex justify-between gap-2">
@@ -40,22 +38,7 @@ export function SectionPreview({ designation }: { designation: string }) {
           </div>
         ))}
       </dl>
-      <p className="text-tiny text-zinc-7">{W_TABLE.title}</p>
+      <p className="text-tiny text-zinc-7">{shape.table.title}</p>
     </div>
   );
-}
-
-function drawingOf({ designation, properties }: WShape) {
-  const drawn = (symbol: PropertyName) => ({
-    symbol,
-    value: properties[symbol].value,
-    text: properties[symbol].published,
-  });
-  return {
-    section: printedDesignation(designation),
-    depth: drawn('d'),
-    flangeWidth: drawn('bf'),
-    webThickness: drawn('tw'),
-    flangeThickness: drawn('tf'),
-  };
 }
