@@ -2,20 +2,18 @@ import { evaluate } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import type { Line } from '#shared/calc/line.ts';
 import type { Quantity } from '#shared/calc/quantity.ts';
-import { createRecorder, type Recorder } from '#shared/calc/recorder.ts';
-import type { SectionQuantities, SteelQuantities } from '#shared/members/section-quantities.ts';
+import { createRecorder } from '#shared/calc/recorder.ts';
 import { shearStrength } from '#shared/members/shear.ts';
 import { tensionStrength } from '#shared/members/tension.ts';
 import type { Expected } from '#shared/published-cases/published-cases.ts';
 import { designationsOf, findShape } from '#shared/sections/table.ts';
 import { tensionSlenderness } from '#shared/standards/aisc360-22/d2.ts';
 import { h2Formulas, stressInteractionChecks } from '#shared/standards/aisc360-22/h2.ts';
-import type { DimensionName } from '#shared/units/dimension.ts';
-import { inUnit, UNIT_SIZES } from './in-unit.ts';
+import { base, quantities, quantity, sectionOf, steelOf, type Texts } from './given-texts.ts';
+import { inUnit } from './in-unit.ts';
 import { roundsTo } from './printed-digits.ts';
 import { readPublished } from './published-cases.ts';
 
-type Texts = Readonly<Record<string, string>>;
 type Method = 'LRFD' | 'ASD';
 interface Case {
   readonly example: string;
@@ -26,7 +24,7 @@ interface Case {
   readonly section: Texts;
   readonly net?: { readonly An: string; readonly U: string };
   readonly L?: string;
-  readonly forces?: readonly (Texts & { readonly method: Method })[];
+  readonly forces?: Readonly<Record<Method, Texts>>;
   readonly expected: readonly Expected[];
 }
 interface Row {
@@ -43,52 +41,12 @@ const data = readPublished('strength.json') as {
   readonly formulas: readonly Row[];
 };
 
-const DIMENSION_OF: Readonly<Record<string, DimensionName>> = {
-  '': 'none',
-  in: 'length',
-  ft: 'length',
-  'in²': 'area',
-  'in³': 'modulus',
-  kip: 'force',
-  ksi: 'stress',
-  'kip ft': 'moment',
-};
-
-/** `5.27 in` in N and mm, without the program's own reading of units. */
-function base(text: string): { readonly value: number; readonly dimension: DimensionName } {
-  const [number, ...rest] = text.split(' ');
-  const unit = rest.join(' ');
-  const [size, dimension] = [UNIT_SIZES[unit], DIMENSION_OF[unit]];
-  if (size === undefined || dimension === undefined) throw new Error(`no unit ${unit}`);
-  return { value: Number(number) * size, dimension };
-}
-
-const WORDS = ['kind', 'made', 'method'];
-
-/** The texts of a case as given lines. */
-const quantities = (r: Recorder, texts: Texts): Record<string, Quantity> =>
-  Object.fromEntries(
-    Object.entries(texts)
-      .filter(([name]) => !WORDS.includes(name))
-      .map(([name, text]) => {
-        const { value, dimension } = base(text);
-        const given = { value, text, source: { kind: 'typed' }, confirmed: false } as const;
-        return [name, r.given(`given/${name}`, name, dimension, given, { title: name })];
-      }),
-  );
-
-/** A section with the quantities that the case gives; the others are undefined. */
-const sectionOf = (r: Recorder, texts: Texts): SectionQuantities =>
-  ({ ...texts, ...quantities(r, texts) }) as unknown as SectionQuantities;
-const steelOf = (r: Recorder, texts: Texts): SteelQuantities =>
-  ({ Fu: null, ...quantities(r, texts) }) as unknown as SteelQuantities;
-
 function linesOf(c: Case, method: Method): readonly Line[] {
   const r = createRecorder('');
   if (c.run === 'stress') {
     const s = quantities(r, c.section);
-    const f = quantities(r, c.forces?.find((x) => x.method === method) as Texts);
-    const of = (q: typeof s, name: string) => q[name] as Quantity;
+    const f = quantities(r, c.forces?.[method] ?? {});
+    const of = (q: Record<string, Quantity>, name: string) => q[name] as Quantity;
     stressInteractionChecks(r, { Pr: of(f, 'P'), Pc: of(f, 'Pc'), Ag: of(s, 'A') }, [
       {
         name: 'corner',
@@ -103,9 +61,10 @@ function linesOf(c: Case, method: Method): readonly Line[] {
   const section = sectionOf(r, c.section);
   if (c.run === 'shear') shearStrength(r, method, steel, section, c.axis as 'x' | 'y');
   else {
-    const { An, U, L } = quantities(r, { ...(c.net as Texts), L: c.L as string });
-    tensionSlenderness(r, L as Quantity, [section.rx, section.ry]);
-    tensionStrength(r, method, steel, section, { An: An as Quantity, U: U as Quantity });
+    const { An, U } = c.net as { An: string; U: string };
+    const net = quantities(r, { An, U });
+    tensionSlenderness(r, quantity(r, 'L', c.L as string), [section.rx, section.ry]);
+    tensionStrength(r, method, steel, section, net);
   }
   return r.lines;
 }
