@@ -56,24 +56,31 @@ export const criticalLoad = (
 ): Quantity =>
   r.formula(app8Formulas.criticalLoad, at(axis, 'Pe1'), { EIstar, L1 }, { symbol: `Pe1${axis}` });
 
-/**
- * αPr against Pe1: true where a second-order moment exists. At or above the critical load the
- * member is unstable in that plane: a failed notice, never a number.
- */
-export function belowCriticalLoad(
+/** αPr/Pe1 as a line; Pr in compression. */
+export const criticalLoadShare = (
   r: Recorder,
   axis: 'x' | 'y',
   alpha: Quantity,
   Pr: Quantity,
   Pe1: Quantity,
-): boolean {
+): Quantity =>
+  r.formula(app8Formulas.share, at(axis, 'share'), { alpha, Pr, Pe1 }, { symbol: `rho${axis}` });
+
+/** αPr against Pe1, both lines: true where a second-order moment exists. */
+export const belowCriticalLoad = (
+  r: Recorder,
+  axis: 'x' | 'y',
+  alpha: Quantity,
+  Pr: Quantity,
+  Pe1: Quantity,
+): boolean => isStable(r, axis, criticalLoadShare(r, axis, alpha, Pr, Pe1));
+
+/**
+ * Whether the share αPr/Pe1 leaves a second-order moment. At or above the critical load the member
+ * is unstable in that plane: a failed notice, never a number.
+ */
+export function isStable(r: Recorder, axis: 'x' | 'y', share: Quantity): boolean {
   const word = axis === 'x' ? 'major' : 'minor';
-  const share = r.formula(
-    app8Formulas.share,
-    at(axis, 'share'),
-    { alpha, Pr, Pe1 },
-    { symbol: `rho${axis}` },
-  );
   const taken = r.choice(
     at(axis, 'stable'),
     [
