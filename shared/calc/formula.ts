@@ -18,7 +18,7 @@ export interface Formula {
   readonly prints: 'working' | 'display';
   /** The result is a utilisation: it prints with three decimals. */
   readonly ratio: boolean;
-  /** Where the equation holds, in our own words; null where it always does. */
+  /** Where it holds, in words that follow "Holds": `where Fy/Fe ≤ 2.25`; null where nothing is said. */
   readonly validity: string | null;
 }
 

@@ -6,6 +6,10 @@ export const paths = {
   signIn: '/sign-in',
   account: '/account',
   gallery: '/gallery',
+  library: '/library',
+  /** A clause of a book, or one of its formulas by the formula's id. */
+  clause: (book: string, clause: string, formula?: string) =>
+    `/library/${segment(book)}/${segment(clause)}${formula ? `#${segment(formula)}` : ''}`,
   project: (projectId: string) => `/projects/${segment(projectId)}`,
   calculation: (calculationId: string) => `/calculations/${segment(calculationId)}`,
   basis: (calculationId: string) => `/calculations/${segment(calculationId)}/basis`,

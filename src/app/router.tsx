@@ -20,6 +20,11 @@ export const router = createBrowserRouter([
               { path: '/', lazy: () => import('#client/routes/desk-page.tsx') },
               { path: '/account', lazy: () => import('#client/routes/account-page.tsx') },
               { path: '/gallery', lazy: () => import('#client/gallery/gallery-page.tsx') },
+              { path: '/library', lazy: () => import('#client/routes/library-page.tsx') },
+              {
+                path: '/library/:book/:clause',
+                lazy: () => import('#client/routes/clause-page.tsx'),
+              },
               {
                 path: '/projects/:projectId',
                 lazy: () => import('#client/routes/project-page.tsx'),

@@ -57,6 +57,14 @@ export function TopBar(props: {
       )}
       <div className="ml-auto flex items-center gap-4 font-condensed text-body">
         {props.status}
+        <NavLink
+          to={paths.library}
+          className={({ isActive }) =>
+            classNames('hover:text-paper hover:underline', isActive ? 'text-paper' : 'text-zinc-2')
+          }
+        >
+          Library
+        </NavLink>
         <AccountMenu />
       </div>
     </header>

@@ -5,5 +5,7 @@ export const keys = {
   project: (projectId: string) => ['project', projectId],
   calculation: (calculationId: string) => ['calculation', calculationId],
   member: (memberId: string) => ['member', memberId],
+  published: ['published'],
+  clauseUses: (book: string, clause: string) => ['clause-uses', book, clause],
   report: (calculationId: string) => ['report', calculationId],
 } as const;
