@@ -134,6 +134,8 @@ plainMath.import(SERIES);
 
 // Where an operand of that kind has no value: a root of a negative number, an arc of more than 1.
 const IMPOSSIBLE: Readonly<Record<string, readonly string[]>> = {
+  'aisc360-22/G5-2a': ['lambda negative'],
+  'aisc360-22/G5-2b': ['lambda negative'],
   'aisc360-22/B4.1-kc': ['lambdaw negative'],
   'elastic-theory/threshold': ['psi large', 'psi thousands'],
 };
