@@ -18,7 +18,17 @@ import { f1Formulas } from './f1.ts';
 import { f2Formulas } from './f2.ts';
 import { f3Formulas } from './f3.ts';
 import { f6Formulas } from './f6.ts';
+import { d2Formulas } from './d2.ts';
+import { d3Formulas } from './d3.ts';
+import { g2Formulas } from './g2.ts';
+import { g2BucklingFormulas } from './g2-buckling.ts';
+import { g4Formulas } from './g4.ts';
+import { g5Formulas } from './g5.ts';
+import { g6Formulas } from './g6.ts';
 import { h1Formulas } from './h1.ts';
+import { h1SingleAxisFormulas } from './h1-single-axis.ts';
+import { h1TensionFormulas } from './h1-tension.ts';
+import { h2Formulas } from './h2.ts';
 import { jointRatioFormulas } from './joint-ratio.ts';
 import { SPECIFICATION } from './parameters.ts';
 import { storyStiffnessFormulas } from './story-stiffness.ts';
@@ -50,6 +60,16 @@ export const aisc360 = defineBook(
     jointRatioFormulas,
     alignmentChartFormulas,
     storyStiffnessFormulas,
+    d2Formulas,
+    d3Formulas,
+    g2Formulas,
+    g2BucklingFormulas,
+    g4Formulas,
+    g5Formulas,
+    g6Formulas,
     h1Formulas,
+    h1TensionFormulas,
+    h1SingleAxisFormulas,
+    h2Formulas,
   ].flatMap((group) => Object.values(group)),
 );
