@@ -1,22 +1,24 @@
 import type { Line, LineOf } from '../calc/line.ts';
 import type { Quantity } from '../calc/quantity.ts';
-import { createRecorder, NotComputable } from '../calc/recorder.ts';
+import { createRecorder, NotComputable, type Recorder } from '../calc/recorder.ts';
 import { firstOrderAxialLimit } from '../standards/aisc360-22/app7.ts';
-import { interaction, interactionChecks, separateChecks } from '../standards/aisc360-22/h1.ts';
+import { requiredAxial } from '../standards/aisc360-22/app8-b2.ts';
+import { stiffnessByNotionalLoad, stiffnessReduction } from '../standards/aisc360-22/c2.ts';
+import type { Axial } from '../standards/aisc360-22/h1.ts';
+import { requiredTension } from '../standards/aisc360-22/h1-tension.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
+import { AXES, type AxialState, type Axis } from './bay-moments.ts';
+import { checkSegments } from './check-segments.ts';
 import type { CompressionStrength } from './compression.ts';
-import { availableMajor, type MajorStrength } from './flexure.ts';
-import type { MemberQuantities, SectionQuantities, SteelQuantities } from './member-lines.ts';
-import { automaticCb } from './modification-factor.ts';
+import type { MajorStrengths } from './major-strengths.ts';
+import type { MemberQuantities } from './member-quantities.ts';
+import { bends, type PlaneMoments, planeMoments } from './plane-moments.ts';
 import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolved.ts';
-import {
-  AXES,
-  type Axis,
-  axialState,
-  bends,
-  type PlaneResult,
-  requiredMoment,
-} from './second-order.ts';
+import type { SectionQuantities, SteelQuantities } from './section-quantities.ts';
+import { type Segment, segmentsOf } from './segments.ts';
+import { checkShear } from './shear-demand.ts';
+import { storyMultiplier, translationMoment } from './sway.ts';
+import type { TensionStrength } from './tension.ts';
 
 /** What the member lines made available to every combination; null where it does not apply or is outside scope. */
 export interface MemberStrengths {
@@ -27,48 +29,58 @@ export interface MemberStrengths {
   readonly section: SectionQuantities;
   readonly alpha: Quantity | null;
   readonly compression: CompressionStrength | null;
-  readonly major: MajorStrength | null;
-  /** Available major-axis strength where it does not depend on the combination. */
-  readonly Mcx: Quantity | null;
+  readonly tension: TensionStrength | null;
+  readonly major: MajorStrengths | null;
   readonly Mcy: Quantity | null;
   readonly Cb: Quantity | null;
+  /** Available shear strengths by the axis of bending. */
+  readonly shear: Readonly<Record<Axis, Quantity | null>>;
 }
 
 export interface CombinationRun {
   readonly lines: readonly Line[];
   readonly checks: readonly LineOf<'check'>[];
-  readonly planes: Readonly<Record<Axis, PlaneResult | null>>;
+  readonly planes: Readonly<Record<Axis, PlaneMoments | null>>;
+  /** Ids of its segments; one without id is the member. */
+  readonly segments: readonly (string | null)[];
   /** Compressed, so that Chapter E and the second-order clauses apply. */
   readonly compressed: boolean;
   readonly tension: boolean;
 }
 
+/** A run that has no lines, where nothing of the member is checked. */
+export const noRun = (c: ResolvedCombination): CombinationRun => ({
+  ...{ lines: [], checks: [], planes: { x: null, y: null }, segments: [null] },
+  ...{ compressed: c.P.value > 0, tension: c.P.value < 0 },
+});
+
+interface Done {
+  checks: LineOf<'check'>[];
+  planes: Record<Axis, PlaneMoments | null>;
+  segments: (string | null)[];
+  compressed: boolean;
+  tension: boolean;
+}
+
 /** All lines of one combination. */
 export function runCombination(m: MemberStrengths, c: ResolvedCombination): CombinationRun {
   const r = createRecorder(':');
-  const done: { checks: LineOf<'check'>[]; planes: Record<Axis, PlaneResult | null> } = {
-    checks: [],
-    planes: { x: null, y: null },
+  const done: Done = {
+    ...{ checks: [], planes: { x: null, y: null }, segments: [null] },
+    ...{ compressed: c.P.value > 0, tension: c.P.value < 0 },
   };
-  const compressed = c.P.value > 0;
-  const tension = c.P.value < 0;
   try {
     steps(m, c, r, done);
   } catch (error) {
     if (!(error instanceof NotComputable)) throw error;
   }
-  return { lines: r.lines, ...done, compressed, tension };
+  return { lines: r.lines, ...done };
 }
 
-function steps(
-  m: MemberStrengths,
-  c: ResolvedCombination,
-  r: ReturnType<typeof createRecorder>,
-  done: { checks: LineOf<'check'>[]; planes: Record<Axis, PlaneResult | null> },
-): void {
-  const { input, member, steel, section, q } = m;
+function steps(m: MemberStrengths, c: ResolvedCombination, r: Recorder, done: Done): void {
+  const { input, member } = m;
   r.section('given', `Forces of ${c.name}`, clause('C2'));
-  const Pr = r.given('given/P', 'P', 'force', c.P, {
+  const P = r.given('given/P', 'P', 'force', c.P, {
     title:
       input.design === 'ASD'
         ? 'Axial force, ASD load level, compression positive'
@@ -82,7 +94,10 @@ function steps(
       `These forces were analysed with ${c.analysedWith}, the member is ${member.section.value}: they are not confirmed until the analysis is run again.`,
       { title: 'Forces of another section', clause: clause('C2') },
     );
-  const noTension = r.choice(
+  const sway = swayOf(r, m, c);
+  if (sway === 'stopped') return;
+  const Pr = axialWithSway(r, c, P, sway);
+  const sense = r.choice(
     'given/sense',
     [
       { left: Pr, relation: '<', right: 0, outcome: 'the member is in tension' },
@@ -94,95 +109,145 @@ function steps(
       },
     ],
     'the member is in compression',
-    {
-      title: 'Sense of the axial force',
-    },
+    { title: 'Sense of the axial force' },
   );
-  if (noTension === 0) {
+  done.tension = sense === 0;
+  done.compressed = sense < 0;
+  const axial = done.tension ? tensionOf(r, m, Pr) : compressionOf(r, m, Pr, done.compressed);
+  const state =
+    done.compressed && m.compression && m.alpha && AXES.some((a) => bends(c, a))
+      ? axialState(r, input, Pr, m.alpha, m.compression.Pns)
+      : null;
+  let start: Quantity | null = null;
+  const context = {
+    ...m,
+    start: () => (start ??= startOfPlaces(r, m)),
+  };
+  for (const axis of AXES)
+    done.planes[axis] = planeMoments(r, context, c, axis, state, () => {
+      const direction = c.sway?.[axis];
+      const B2 = sway?.[axis];
+      const Mlt = direction && B2 ? translationMoment(r, axis, direction) : null;
+      return B2 && Mlt ? { B2, Mlt } : null;
+    });
+  const { x, y } = done.planes;
+  if (!x || !y) return;
+  const segments: readonly Segment[] = segmentsOf(r, context, x);
+  done.segments = segments.map((s) => s.id);
+  const unknown = done.compressed && !m.compression;
+  done.checks.push(
+    ...checkSegments(
+      r,
+      context,
+      c,
+      { ...axial, unknown, compressed: done.compressed },
+      { x, y },
+      segments,
+    ),
+    ...checkShear(r, m, c, { x, y }),
+  );
+}
+
+interface AxialUse {
+  readonly axial: Axial | null;
+  readonly clause: 'H1.1' | 'H1.2';
+}
+
+/** Compression against Pc; in the first-order method its limit too. */
+function compressionOf(
+  r: Recorder,
+  m: MemberStrengths,
+  Pr: Quantity,
+  compressed: boolean,
+): AxialUse {
+  const { compression, alpha, input } = m;
+  if (!compressed || !compression || !alpha) return { axial: null, clause: 'H1.1' };
+  if (compression.Pns && input.analysis.method === 'first-order')
+    firstOrderAxialLimit(r, alpha, Pr, compression.Pns);
+  return { axial: { Pr, Pc: compression.Pc }, clause: 'H1.1' };
+}
+
+/** Tension as a positive force against the strength of D2, as far as that is known. */
+function tensionOf(r: Recorder, m: MemberStrengths, P: Quantity): AxialUse {
+  const { tension } = m;
+  if (!tension) return { axial: null, clause: 'H1.2' };
+  const Pr = requiredTension(r, P);
+  if (!tension.Pc)
     r.notice(
       'D2/outside',
       'outside scope',
       'tension',
-      'The member is in tension. Tension (D2) and its combination with flexure (H1.2) are outside the scope of this version; nothing is checked for this combination.',
-      {
-        title: 'Tension',
-        clause: clause('H1.2'),
-      },
+      'The member is in tension, and its rupture strength is not known, as said with the member. Yielding alone is checked.',
+      { title: 'Tension', clause: clause('D2', 'D2-2') },
     );
-    return;
-  }
-  const axial = c.P.value > 0 && m.compression && m.alpha ? { Pr, Pc: m.compression.Pc } : null;
-  if (axial && m.compression?.Pns && m.alpha && input.analysis.method === 'first-order')
-    firstOrderAxialLimit(r, m.alpha, Pr, m.compression.Pns);
-  const state =
-    axial && m.compression && m.alpha && AXES.some((a) => bends(c, a))
-      ? axialState(r, input, Pr, m.alpha, m.compression.Pns)
-      : null;
-  for (const axis of AXES) {
-    const Lc = axis === 'x' ? q.Lcx : q.Lcy;
-    done.planes[axis] = requiredMoment(
-      r,
-      input,
-      c,
-      {
-        axis,
-        L: q.L,
-        E: steel.E,
-        I: axis === 'x' ? section.Ix : section.Iy,
-        heldBetween: Lc !== null && Lc.value < q.L.value,
-        sense: member.endMomentSign,
-      },
-      state,
-    );
-  }
-  const { x, y } = done.planes;
-  const incomplete = [x, y].some((p) => p?.state === 'failed' || p?.state === 'outside scope');
-  const Mcx = x?.Mr ? (m.Mcx ?? majorCapacity(m, c, r, x)) : null;
-  const major = x?.Mr && Mcx ? { Mr: x.Mr, Mc: Mcx } : null;
-  const minor = y?.Mr && m.Mcy ? { Mr: y.Mr, Mc: m.Mcy } : null;
-  if (incomplete || (x?.Mr && !Mcx)) {
-    // Without the interaction a strength that is exceeded by itself still says NOT OK.
-    if (axial || major || minor) r.section('H1', 'Checks', clause('H1.1'));
-    done.checks.push(...separateChecks(r, axial, major, minor));
-    return;
-  }
-  r.section('H1', 'Checks', clause('H1.1'));
-  done.checks.push(...interactionChecks(r, axial, major, minor));
-  if (!axial && !major && !minor)
-    r.notice(
-      'H1/nothing',
-      'note',
-      'no-forces',
-      'This combination has neither axial force nor moment; there is nothing to check.',
-      { title: 'No forces', clause: clause('H1') },
-    );
-  if (r.lines.some((l) => l.key.endsWith('/lower') && l.key.startsWith('theory/'))) {
-    const exact = (p: PlaneResult | null, used: { Mr: Quantity; Mc: Quantity } | null) =>
-      used && p?.exact ? { Mr: p.exact.Mmax, Mc: used.Mc } : used;
-    r.section(
-      'theory/H1',
-      'The interaction with the exact moments, for comparison',
-      clause('H1.1'),
-    );
-    interaction(r, 'theory/H1', axial, exact(x, major), exact(y, minor));
-  }
+  return { axial: { Pr, Pc: tension.Pc ?? tension.yielding }, clause: 'H1.2' };
 }
 
-/** Major-axis strength where Cb comes from this combination's diagram. */
-function majorCapacity(
-  m: MemberStrengths,
+type Multipliers = Readonly<Record<Axis, Quantity | null>>;
+
+/** B2 of each direction that sways; 'stopped' where a story has none. */
+function swayOf(
+  r: Recorder,
+  { input, alpha }: MemberStrengths,
   c: ResolvedCombination,
-  r: ReturnType<typeof createRecorder>,
-  x: PlaneResult,
-): Quantity | null {
-  const { major, q } = m;
-  if (!major || !q.Lb) return null;
-  const Cb = automaticCb(r, m.input, x, {
-    L: q.L,
-    Lb: q.Lb,
-    givenMax: c.moments.x.max !== null,
-    compressed: c.P.value > 0,
-  });
-  r.section('F2', 'Major-axis flexural strength of this combination', clause('F2'));
-  return availableMajor(r, m.input.design, major, Cb);
+): Multipliers | null | 'stopped' {
+  if (input.analysis.sway !== 'B2' || !c.sway || !alpha) return null;
+  const { sway } = c;
+  const of = (axis: Axis) => {
+    const direction = sway[axis];
+    return direction ? storyMultiplier(r, input, axis, alpha, direction) : null;
+  };
+  const [x, y] = [of('x'), of('y')];
+  if (typeof x === 'string' || typeof y === 'string') return 'stopped';
+  return { x, y };
 }
+
+/** A-8-2 with the larger of the multipliers; the given force where nothing sways. */
+function axialWithSway(
+  r: Recorder,
+  c: ResolvedCombination,
+  Pnt: Quantity,
+  sway: Multipliers | null,
+): Quantity {
+  if (!sway || !c.sway?.P || c.sway.P.value === 0) return Pnt;
+  const candidates = AXES.flatMap((axis) => sway[axis] ?? []);
+  const [first] = candidates;
+  if (!first) return Pnt;
+  const Plt = r.given('given/sway/P', 'Plt', 'force', c.sway.P, {
+    title: 'Axial force from lateral translation, compression positive',
+  });
+  const B2 =
+    candidates.length === 1
+      ? first
+      : r.governing('App8/B2', 'max', candidates, {
+          title: 'The larger story multiplier',
+          symbol: 'B2',
+          clause: clause('App. 8.1.1', 'A-8-2'),
+        });
+  return requiredAxial(r, Pnt, Plt, B2);
+}
+
+/** C2.1(d) and C2.3(b), (c): α, and τb where the analysis is direct. Pr is above zero. */
+function axialState(
+  r: Recorder,
+  input: ResolvedInput,
+  Pr: Quantity,
+  alpha: Quantity,
+  Pns: Quantity | null,
+): AxialState {
+  if (input.analysis.method !== 'direct' || !Pns) return { Pr, alpha, taub: null };
+  r.section('C2', 'Stiffness of the direct analysis', clause('C2.3'));
+  if (input.provisions.has('C2.3-taub'))
+    return { Pr, alpha, taub: stiffnessByNotionalLoad(r, { alpha, Pr, Pns }, null) };
+  return { Pr, alpha, taub: stiffnessReduction(r, alpha, Pr, Pns) ?? 'failed' };
+}
+
+/** The origin of distances along the member. */
+const startOfPlaces = (r: Recorder, { input, member }: MemberStrengths): Quantity =>
+  r.given(
+    'given/start',
+    'z',
+    'length',
+    { ...member.length, value: 0, text: input.units === 'us' ? '0 ft' : '0 m' },
+    { title: 'Start of the member, end A' },
+  );

@@ -7,6 +7,7 @@ import {
   textSchema,
   wordSchema,
 } from '../calc/quantity-input.ts';
+import { sectionSizesSchema } from '../sections/sizes.ts';
 import { loadInputSchema, supportInputSchema } from './load-input.ts';
 import {
   chartInputSchema,
@@ -67,7 +68,8 @@ export const memberInputSchema = z.strictObject({
     .regex(/^[a-z0-9-]{1,40}$/)
     .optional(),
   mark: labelSchema(40),
-  section: wordSchema,
+  /** A designation of the tables, or sizes. */
+  section: z.union([wordSchema, sectionSizesSchema]),
   material: z.union([textSchema(40), ownSteelSchema]),
   length: quantitySchema,
   ends: z.union(

@@ -4,7 +4,10 @@ import { availableFlexure } from '../standards/aisc360-22/f1.ts';
 import { type LtbRange, ltbRangeOf } from '../standards/aisc360-22/ltb-range.ts';
 import type { Design } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
-import { majorRolledI } from './major-i.ts';
+import { axesInOrder } from './axes-in-order.ts';
+import { majorClosed, majorRound } from './major-closed.ts';
+import { majorChannel, majorI } from './major-i.ts';
+import { majorMonoI } from './major-mono-i.ts';
 import type { MajorSection } from './major-section.ts';
 import type { SectionQuantities, SteelQuantities } from './section-quantities.ts';
 
@@ -27,15 +30,23 @@ export function majorSection(
   r: Recorder,
   steel: SteelQuantities,
   section: SectionQuantities,
-  _compressed: 'top' | 'bottom',
+  compressed: 'top' | 'bottom',
   longest: Quantity | null,
   phib: Quantity,
 ): MajorSection | null {
+  if (!axesInOrder(r, 'x', section)) return null;
   switch (section.kind) {
     case 'i':
-      return majorRolledI(r, steel, section, longest, phib);
-    default:
-      return null;
+      return majorI(r, steel, section, longest, phib);
+    case 'mono-i':
+      return majorMonoI(r, steel, section, compressed, longest, phib);
+    case 'channel':
+      return majorChannel(r, steel, section, longest, phib);
+    case 'rect-hss':
+    case 'box':
+      return majorClosed(r, steel, section, longest, phib);
+    case 'round':
+      return majorRound(r, steel, section, phib);
   }
 }
 

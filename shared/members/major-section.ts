@@ -18,7 +18,7 @@ export interface MajorLtb {
 
 /** Major-axis strength as far as it depends neither on an unbraced length nor on Cb. */
 export interface MajorSection {
-  /** Plastic moment FyZx, with the limit of its clause. */
+  /** Plastic moment FyZx, with the limit of its clause; with a slender web (F5) Rpg Fy Sxc. */
   readonly Mp: Quantity;
   /** φb or Ωb. */
   readonly phib: Quantity;

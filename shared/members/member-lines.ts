@@ -1,50 +1,15 @@
 import type { Quantity } from '../calc/quantity.ts';
 import type { Recorder } from '../calc/recorder.ts';
-import { PROPERTY_NAMES, type PropertyName, W_TABLE, type WShape } from '../sections/table.ts';
-import { SPECIFICATION } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
-import { parseQuantity } from '../units/parse.ts';
-import { MODULI } from './material.ts';
 import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolved.ts';
 
-export interface SteelQuantities {
-  readonly E: Quantity;
-  readonly G: Quantity;
-  readonly Fy: Quantity;
-}
-
-export type SectionQuantities = Readonly<Record<PropertyName, Quantity>>;
-
-export interface MemberQuantities {
+export interface GivenLengths {
   readonly L: Quantity;
   readonly Lcx: Quantity | null;
   readonly Lcy: Quantity | null;
   readonly Lcz: Quantity | null;
   readonly Lb: Quantity | null;
 }
-
-const PROPERTY_TITLES: Record<PropertyName, string> = {
-  A: 'Gross area',
-  d: 'Depth',
-  bf: 'Flange width',
-  tw: 'Web thickness',
-  tf: 'Flange thickness',
-  kdes: 'Outer face to web toe of fillet',
-  lambdaf: 'Flange width-to-thickness ratio',
-  lambdaw: 'Web width-to-thickness ratio',
-  Ix: 'Second moment of area, major axis',
-  Sx: 'Elastic modulus, major axis',
-  Zx: 'Plastic modulus, major axis',
-  rx: 'Radius of gyration, major axis',
-  Iy: 'Second moment of area, minor axis',
-  Sy: 'Elastic modulus, minor axis',
-  Zy: 'Plastic modulus, minor axis',
-  ry: 'Radius of gyration, minor axis',
-  J: 'Torsional constant',
-  Cw: 'Warping constant',
-  rts: 'Effective radius of gyration',
-  ho: 'Distance between flange centroids',
-};
 
 const METHOD_WORDS = {
   direct: 'direct analysis method',
@@ -76,7 +41,7 @@ export function givenLines(
   r: Recorder,
   member: ResolvedMember,
   input: ResolvedInput,
-): MemberQuantities {
+): GivenLengths {
   const { analysis } = input;
   r.section('given', 'Member as given');
   const basis = { kind: 'typed', note: 'Basis of the calculation' } as const;
@@ -98,7 +63,11 @@ export function givenLines(
     { title: 'Second-order moments' },
   );
   const { sway } = input;
-  r.statement('given/sway', 'none: the ends do not translate', sway.source, sway.confirmed, {
+  const swayWords =
+    sway.value === 'none'
+      ? 'none: the ends do not translate'
+      : 'the stories sway: moments from lateral translation are multiplied by B2';
+  r.statement('given/sway', swayWords, sway.source, sway.confirmed, {
     title: 'Sway',
     clause: clause('App. 8.1'),
   });
@@ -141,8 +110,10 @@ export function givenLines(
       true,
       { title: 'Sense of the end moments' },
     );
-  const length = (symbol: 'Lcx' | 'Lcy' | 'Lcz' | 'Lb', title: string): Quantity | null => {
+  const instead = member.restraints ? ', in place of that from the restraints' : '';
+  const length = (symbol: 'Lcx' | 'Lcy' | 'Lcz' | 'Lb', words: string): Quantity | null => {
     const given = member[symbol];
+    const title = `${words}${instead}`;
     return given ? r.given(`given/${symbol}`, symbol, 'length', given, { title }) : null;
   };
   const lengths = {
@@ -161,99 +132,4 @@ export function givenLines(
       { title: 'Continuous lateral support', clause: clause('F2.2') },
     );
   return lengths;
-}
-
-const baseValue = (published: string, dimension: 'stress'): number => {
-  const parsed = parseQuantity(published, dimension);
-  if (!parsed.ok) throw new Error(`${published}: ${parsed.reason}`);
-  return parsed.quantity.value;
-};
-
-/** In MPa: A514 and A709 Grade HPS 100W [690], the strongest that A3.1 lists. */
-const HIGHEST_YIELD_STRESS = 690;
-
-/** Constants of the steel: of its grade from the table, or as given; E and G of the standard. */
-export function steelLines(
-  r: Recorder,
-  member: ResolvedMember,
-  constants: 'us' | 'si',
-): SteelQuantities {
-  r.section('steel', 'Steel');
-  const { steel } = member;
-  const stress = (
-    key: string,
-    symbol: string,
-    title: string,
-    published: string,
-    table: string,
-    row: string,
-    source: string,
-  ) =>
-    r.lookup(
-      `steel/${key}`,
-      symbol,
-      'stress',
-      {
-        value: baseValue(published, 'stress'),
-        published,
-        table,
-        row,
-        column: symbol,
-        tableSource: source,
-      },
-      { title },
-    );
-  const Fy =
-    steel.kind === 'grade'
-      ? stress(
-          'Fy',
-          'Fy',
-          `Yield stress, ${steel.steel.title}`,
-          steel.steel[constants].Fy,
-          'Steels by grade',
-          steel.steel.key,
-          steel.steel.title,
-        )
-      : r.given('steel/Fy', 'Fy', 'stress', steel.Fy, { title: `Yield stress, ${steel.name}` });
-  if (steel.kind === 'own' && Fy.value > HIGHEST_YIELD_STRESS)
-    r.notice(
-      'steel/unusual',
-      'caution',
-      'yield-stress-above-listed',
-      'The yield stress exceeds 100 ksi (690 MPa), more than any steel that A3.1 lists has: see the number and its unit.',
-      { title: 'Yield stress above those of the standard', clause: clause('A3.1') },
-    );
-  const standard = (symbol: 'E' | 'G', title: string) =>
-    stress(
-      symbol,
-      symbol,
-      title,
-      MODULI[constants][symbol],
-      'Symbols',
-      constants === 'us' ? 'US customary' : 'SI',
-      SPECIFICATION,
-    );
-  return { Fy, E: standard('E', 'Modulus of elasticity'), G: standard('G', 'Shear modulus') };
-}
-
-/** Every property of the shape that the checks use, as published. */
-export function sectionLines(r: Recorder, shape: WShape): SectionQuantities {
-  r.section('section', `Section ${shape.designation.replace(/X/g, '×')}`);
-  return Object.fromEntries(
-    PROPERTY_NAMES.map((name) => {
-      const { value, dimension, published, column } = shape.properties[name];
-      const found = {
-        value,
-        published,
-        table: 'W shapes',
-        row: shape.designation,
-        column,
-        tableSource: `${W_TABLE.title}, ${W_TABLE.publisher}`,
-      };
-      return [
-        name,
-        r.lookup(`section/${name}`, name, dimension, found, { title: PROPERTY_TITLES[name] }),
-      ];
-    }),
-  ) as Record<PropertyName, Quantity>;
 }

@@ -3,8 +3,8 @@ import type { Recorder } from '../calc/recorder.ts';
 import { f1Formulas, firstOrderQuarters, modificationFactor } from '../standards/aisc360-22/f1.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { secondOrderQuarters } from '../standards/elastic-theory/second-order.ts';
+import type { BayMoments } from './bay-moments.ts';
 import type { ResolvedInput } from './resolved.ts';
-import type { PlaneResult } from './second-order.ts';
 
 /** The second-order factor may be lower by this share before the sheet cautions. */
 const LOWER_BY = 0.05;
@@ -22,8 +22,8 @@ const one = (r: Recorder, code: string, text: string): Quantity => {
 export function automaticCb(
   r: Recorder,
   input: ResolvedInput,
-  plane: PlaneResult,
-  q: { L: Quantity; Lb: Quantity; givenMax: boolean; compressed: boolean },
+  plane: { readonly bay: BayMoments; readonly givenMax: boolean },
+  q: { L: Quantity; Lb: Quantity; compressed: boolean },
 ): Quantity {
   r.section('F1', 'Lateral-torsional buckling modification factor', clause('F1'));
   if (q.Lb.value !== q.L.value)
@@ -32,8 +32,9 @@ export function automaticCb(
       'segment-not-member',
       'The unbraced length is not the length of the member and the places of the braces are not given: the moments of the segment are not known. Cb is taken as 1, which is on the safe side.',
     );
-  const { ends, exact } = plane;
-  if (!ends?.psi || q.givenMax)
+  const { ends, exact: along } = plane.bay;
+  const exact = along?.endMomentsOnly ?? null;
+  if (!ends.psi || plane.givenMax)
     return one(
       r,
       'diagram-unknown',
@@ -68,6 +69,12 @@ export function automaticCb(
     { Mmax: exact.Mmax, ...secondOrderQuarters(r, 'F1/second', MA, MB, exact.kL) },
     { title: 'The same from the second-order diagram', symbol: 'Cb2' },
   );
+  compareFactors(r, Cb, second);
+  return Cb;
+}
+
+/** Says by how much the factor used differs from the second-order one; a caution if that is lower. */
+export function compareFactors(r: Recorder, Cb: Quantity, second: Quantity): void {
   const difference = r.comparison(
     'F1/comparison',
     Cb,
@@ -89,5 +96,4 @@ export function automaticCb(
         clause: clause('F1', 'F1-1'),
       },
     );
-  return Cb;
 }

@@ -1,17 +1,16 @@
 import type { Source } from '../calc/line.ts';
 import type { GivenValue } from '../calc/quantity.ts';
-import { findShape, normalDesignation } from '../sections/table.ts';
 import { partsOf, quantityReader, stateOf, TYPED } from './given-values.ts';
 import type { CalculationInput, MemberInput } from './input.ts';
 import { repeated } from './repeated.ts';
 import { resolveCombination } from './resolve-combination.ts';
 import { resolveDetails } from './resolve-details.ts';
 import { resolveRestraints } from './resolve-restraints.ts';
+import { resolveSection } from './resolve-section.ts';
 import { resolveSteel } from './resolve-steel.ts';
 import type { Problem, ResolvedCombination, ResolvedMember } from './resolved.ts';
 
 const DEFAULT_CB: Source = { kind: 'typed', note: 'Not given: 1.0, on the safe side' };
-const OTHER_FAMILY = /^(HSS|PIPE|2L|WT|MT|ST|MC|HP|C|M|S|L)\d/;
 
 /** One member with its quantities read; problems are added with their paths. */
 export function resolveMember(
@@ -35,14 +34,7 @@ export function resolveMember(
   };
   const none: GivenValue = { value: 0, text: '0', source: TYPED, confirmed: false };
 
-  const section = stateOf(m.section);
-  const shape = findShape(section.value);
-  if (!shape && !OTHER_FAMILY.test(normalDesignation(section.value)))
-    problem(
-      'section',
-      `"${section.value}" is not in the table of W shapes (AISC Shapes Database v15.0); write it like W12X79`,
-    );
-
+  const { name: section, section: shape } = resolveSection(m.section, problem, quantity);
   const memberLength = length('length', false) ?? none;
   const restraints = resolveRestraints(m, memberLength, problem, quantity);
   const combinations = m.combinations.map((c, j) =>
@@ -85,9 +77,9 @@ export function resolveMember(
   return {
     id: m.id ?? `m${index + 1}`,
     mark: m.mark,
-    section: { ...section, value: shape?.designation ?? section.value },
-    shape: shape?.family === 'W' ? shape : null,
-    steel: resolveSteel(m, problem, quantity, shape && { by: 'table', shape }),
+    section,
+    shape,
+    steel: resolveSteel(m, problem, quantity, shape),
     length: memberLength,
     ends: stateOf(m.ends),
     ...lengths,

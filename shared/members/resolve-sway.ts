@@ -32,7 +32,7 @@ function readDirection(
   problem: (path: string, message: string) => void,
   read: Read,
 ): SwayDirection | null {
-  const positive = (field: keyof SwayDirectionInput, dimension: DimensionName) => {
+  const positive = (field: 'PeStory' | 'H' | 'height' | 'drift', dimension: DimensionName) => {
     const found = read(`${at}.${field}`, given[field], dimension);
     if (found && found.value <= 0)
       problem(`${at}.${field}`, `is ${found.text}; it must be above zero`);
@@ -57,10 +57,18 @@ function readDirection(
       );
   if (!H || !height || !drift) return null;
   const Pmf = read(`${at}.Pmf`, given.Pmf, 'force');
-  const RM = positive('RM', 'none');
-  if (RM && (RM.value < 0.85 || RM.value > 1))
-    problem(`${at}.RM`, `is ${RM.text}; by A-8-8 it lies between 0.85 and 1`);
+  if (!Pmf && !given.RM)
+    problem(
+      `${at}.Pmf`,
+      'is needed for R_M (A-8-8), or say with RM that the story is "braced" or that the "lower bound" of 0.85 is taken',
+    );
   if (Pmf && (Pmf.value < 0 || Pmf.value > Pstory.value))
     problem(`${at}.Pmf`, `is ${Pmf.text}; it must lie between zero and the load of the story`);
-  return { MA, MB, Pstory, PeStory: null, stiffness: { H, height, drift, Pmf, RM } };
+  return {
+    MA,
+    MB,
+    Pstory,
+    PeStory: null,
+    stiffness: { H, height, drift, RM: Pmf ?? given.RM ?? 'lower bound' },
+  };
 }

@@ -1,9 +1,9 @@
 import type { Source } from '../calc/line.ts';
 import type { GivenValue } from '../calc/quantity.ts';
-import type { WShape } from '../sections/table.ts';
+import type { Section } from '../sections/section.ts';
 import type { CalculationInput, Ends, Provision } from './input.ts';
 import type { LoadHeight } from './load-input.ts';
-import type { Steel } from './material.ts';
+import type { ResolvedSteel } from './material.ts';
 import type { Hold } from './restraint-input.ts';
 
 /** What is wrong with an input, where, and what would be right. */
@@ -67,8 +67,8 @@ export interface SwayDirection {
     readonly H: GivenValue;
     readonly height: GivenValue;
     readonly drift: GivenValue;
-    readonly Pmf: GivenValue | null;
-    readonly RM: GivenValue | null;
+    /** Load on the columns of moment frames, or what R_M is without it. */
+    readonly RM: GivenValue | 'braced' | 'lower bound';
   } | null;
 }
 
@@ -109,10 +109,8 @@ export interface ResolvedMember {
   readonly mark: string;
   readonly section: Stated<string>;
   /** null: a shape of another family, outside the scope of the book. */
-  readonly shape: WShape | null;
-  readonly steel:
-    | { readonly kind: 'grade'; readonly steel: Steel }
-    | { readonly kind: 'own'; readonly name: string; readonly Fy: GivenValue };
+  readonly shape: Section | null;
+  readonly steel: ResolvedSteel;
   readonly length: GivenValue;
   readonly ends: Stated<Ends>;
   readonly Lcx: GivenValue | null;

@@ -1,19 +1,31 @@
 import { closeLines } from '../calc/closure.ts';
 import { ENGINE_VERSION } from '../calc/engine.ts';
 import type { Line } from '../calc/line.ts';
+import type { GivenValue } from '../calc/quantity.ts';
 import type { CalculationRecord, MemberRecord } from '../calc/record.ts';
-import { createRecorder, NotComputable } from '../calc/recorder.ts';
+import { createRecorder, NotComputable, type Recorder } from '../calc/recorder.ts';
+import { secondOrderRatio } from '../standards/aisc360-22/c2.ts';
 import { methodConstant } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { UNIT_SETS } from '../units/unit-set.ts';
-import { type CombinationRun, type MemberStrengths, runCombination } from './combination.ts';
+import type { Axis } from './bay-moments.ts';
+import { type CombinationRun, type MemberStrengths, noRun, runCombination } from './combination.ts';
 import { completenessOf } from './completeness.ts';
 import { compressionStrength } from './compression.ts';
-import { availableMajor, majorStrength, minorStrength } from './flexure.ts';
-import { givenLines, sectionLines, steelLines } from './member-lines.ts';
-import type { ResolvedInput, ResolvedMember } from './resolved.ts';
-import { bends } from './second-order.ts';
+import { fixedStrength, majorStrengths, withStatedLength } from './major-strengths.ts';
+import { type GivenLengths, givenLines } from './member-lines.ts';
+import { memberQuantities } from './member-quantities.ts';
+import { minorStrength } from './minor-flexure.ts';
+import { bends } from './plane-moments.ts';
+import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolved.ts';
+import { type Places, restraintLines } from './restraint-lines.ts';
+import { sectionLines } from './section-lines.ts';
+import type { SectionQuantities, SteelQuantities } from './section-quantities.ts';
+import { shearStrength } from './shear.ts';
+import { shearKnown } from './shear-demand.ts';
+import { steelLines } from './steel-lines.ts';
 import { combinationSummary, memberSummary, recordSummary } from './summary.ts';
+import { type NetSection, tensionStrength } from './tension.ts';
 
 /**
  * Runs the book over a calculation's inputs. The record has no hashes: those are put on by
@@ -41,18 +53,7 @@ export function runMember(input: ResolvedInput, member: ResolvedMember): MemberR
   const r = createRecorder('');
   const strengths = memberStrengths(input, member, r);
   const runs = new Map<string, CombinationRun>(
-    member.combinations.map((c) => [
-      c.id,
-      strengths
-        ? runCombination(strengths, c)
-        : {
-            lines: [],
-            checks: [],
-            planes: { x: null, y: null },
-            compressed: c.P.value > 0,
-            tension: c.P.value < 0,
-          },
-    ]),
+    member.combinations.map((c) => [c.id, strengths ? runCombination(strengths, c) : noRun(c)]),
   );
   const placed = [
     ...r.lines.map((line) => ({ address: line.key, combination: null, line })),
@@ -92,19 +93,17 @@ export function runMember(input: ResolvedInput, member: ResolvedMember): MemberR
 function memberStrengths(
   input: ResolvedInput,
   member: ResolvedMember,
-  r: ReturnType<typeof createRecorder>,
+  r: Recorder,
 ): MemberStrengths | null {
-  const q = givenLines(r, member, input);
+  const given = givenLines(r, member, input);
+  const places = restraintLines(r, member);
   if (!member.shape) {
     r.notice(
       'B4/outside',
       'outside scope',
       'other-shape',
-      `${member.section.value} is not a rolled W shape. Other shapes are outside the scope of this version; nothing is checked.`,
-      {
-        title: 'Shape outside the scope',
-        clause: clause('B4'),
-      },
+      `${member.section.value} is a shape of a family that is outside the scope; nothing is checked.`,
+      { title: 'Shape outside the scope', clause: clause('B4') },
     );
     return null;
   }
@@ -118,7 +117,7 @@ function memberStrengths(
       'C2/outside',
       'outside scope',
       `ends-${member.ends.value}`,
-      `${words}. Only members held at both ends, in both planes and against twist, are within the scope of this version; nothing is checked.`,
+      `${words}. Only members held at both ends, in both planes and against twist, are within the scope; nothing is checked.`,
       {
         title: 'Ends outside the scope',
         clause: clause(member.ends.value === 'sway' ? 'App. 8.1.3' : 'App. 7.2'),
@@ -126,46 +125,102 @@ function memberStrengths(
     );
     return null;
   }
-  const steel = steelLines(r, member, input.constants);
-  const section = sectionLines(r, member.shape);
-  const { combinations } = member;
-  const { Lcx, Lcy, Lcz, Lb } = q;
+  const steel = steelLines(r, member.steel, input.constants);
+  const section = sectionLines(r, member.shape, member.steel);
   try {
-    const compressed = combinations.some((c) => c.P.value > 0);
-    const [bentX, bentY] = [
-      combinations.some((c) => bends(c, 'x')),
-      combinations.some((c) => bends(c, 'y')),
-    ];
-    r.section('factors', `Factors, ${input.design}`);
-    const alpha = compressed ? methodConstant(r, 'loadLevel', input.design) : null;
-    const phic = compressed ? methodConstant(r, 'compression', input.design) : null;
-    const phib = bentX || bentY ? methodConstant(r, 'flexure', input.design) : null;
-    const compression =
-      phic && Lcx && Lcy && Lcz
-        ? compressionStrength(
-            r,
-            input.design,
-            steel,
-            { kind: 'i', made: 'rolled', ...section },
-            { Lcx, Lcy, Lcz, offset: null },
-            phic,
-            input.analysis.method !== 'effective-length',
-          )
-        : null;
-    const major = bentX && Lb && phib ? majorStrength(r, steel, section, Lb, phib) : null;
-    const Cb =
-      major && member.Cb !== 'auto'
-        ? r.given('given/Cb', 'Cb', 'none', member.Cb, {
-            title: 'Modification factor as given',
-            clause: clause('F1'),
-          })
-        : null;
-    const fixed =
-      major && (Cb || major.limits.Lr === null) ? availableMajor(r, input.design, major, Cb) : null;
-    const Mcy = bentY && phib ? minorStrength(r, input.design, steel, section, phib) : null;
-    return { input, member, q, steel, section, alpha, compression, major, Mcx: fixed, Mcy, Cb };
+    return strengthsOf(input, member, r, { given, places, steel, section });
   } catch (error) {
     if (!(error instanceof NotComputable)) throw error;
     return null;
   }
+}
+
+function strengthsOf(
+  input: ResolvedInput,
+  member: ResolvedMember,
+  r: Recorder,
+  parts: {
+    readonly given: GivenLengths;
+    readonly places: Places;
+    readonly steel: SteelQuantities;
+    readonly section: SectionQuantities;
+  },
+): MemberStrengths {
+  const { steel, section } = parts;
+  const { combinations } = member;
+  const { design } = input;
+  // Lateral translation may turn tension into compression and the other way round.
+  const swayed = (c: ResolvedCombination) => (c.sway?.P?.value ?? 0) !== 0;
+  const compressed = combinations.some((c) => c.P.value > 0 || swayed(c));
+  const pulled = combinations.some((c) => c.P.value < 0 || swayed(c));
+  const bent = (axis: Axis) => combinations.some((c) => bends(c, axis));
+  const sheared = (axis: Axis) =>
+    combinations.some((c) => (bends(c, axis) || c.shears[axis]) && shearKnown(c, axis));
+  const q = memberQuantities(r, member, parts.given, parts.places, section, compressed);
+  const { Lcx, Lcy, Lcz } = q;
+
+  r.section('factors', `Factors, ${design}`);
+  const usesAlpha = compressed || input.analysis.sway === 'B2' || input.provisions.has('H1.2-Cb');
+  const alpha = usesAlpha ? methodConstant(r, 'loadLevel', design) : null;
+  const phic = compressed ? methodConstant(r, 'compression', design) : null;
+  const phib = bent('x') || bent('y') ? methodConstant(r, 'flexure', design) : null;
+  if (input.driftRatio) driftRatioLine(r, input, input.driftRatio);
+  const offset = q.offset && ({ axis: 'y', distance: q.offset } as const);
+  const compression =
+    phic && Lcx && Lcy && Lcz
+      ? compressionStrength(
+          r,
+          design,
+          steel,
+          section,
+          { Lcx, Lcy, Lcz, offset },
+          phic,
+          input.analysis.method !== 'effective-length',
+        )
+      : null;
+  const net = pulled ? netSectionLines(r, member) : null;
+  const tension = pulled ? tensionStrength(r, design, steel, section, net) : null;
+  const Lb = q.Lb ?? (member.restraints ? q.L : null);
+  const plain = bent('x') && Lb && phib ? majorStrengths(r, steel, section, Lb, phib) : null;
+  const major = plain && member.restraints === null ? withStatedLength(r, plain, Lb) : plain;
+  const Cb =
+    major && member.Cb !== 'auto'
+      ? r.given('given/Cb', 'Cb', 'none', member.Cb, {
+          title: 'Modification factor as given',
+          clause: clause('F1'),
+        })
+      : null;
+  const Mcy = bent('y') && phib ? minorStrength(r, design, steel, section, phib) : null;
+  const a = member.stiffeners
+    ? r.given('given/a', 'a', 'length', member.stiffeners, {
+        title: 'Clear distance between transverse stiffeners',
+      })
+    : null;
+  const shear = (axis: Axis) =>
+    sheared(axis) ? shearStrength(r, design, steel, section, axis, a ? { a } : {}) : null;
+  return {
+    ...{ input, member, q, steel, section, alpha, compression, tension, Mcy, Cb },
+    major: major && fixedStrength(r, design, major, Cb),
+    shear: { x: shear('x'), y: shear('y') },
+  };
+}
+
+/** Second-order over first-order drift against the limit of the method. */
+function driftRatioLine(r: Recorder, input: ResolvedInput, given: GivenValue): void {
+  const ratio = r.given('given/driftRatio', 'driftRatio', 'none', given, {
+    title: 'Second-order over first-order drift of the structure',
+  });
+  secondOrderRatio(r, input.analysis.method, ratio);
+}
+
+function netSectionLines(r: Recorder, { netSection }: ResolvedMember): NetSection | null {
+  if (!netSection) return null;
+  if ('Ae' in netSection)
+    return {
+      Ae: r.given('given/Ae', 'Ae', 'area', netSection.Ae, { title: 'Effective net area' }),
+    };
+  return {
+    An: r.given('given/An', 'An', 'area', netSection.An, { title: 'Net area' }),
+    U: r.given('given/U', 'U', 'none', netSection.U, { title: 'Shear lag factor' }),
+  };
 }

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { plainSchema, quantitySchema } from '../calc/quantity-input.ts';
+import { quantitySchema } from '../calc/quantity-input.ts';
 
 /**
  * Sway of one direction for App. 8.1.3: moments from lateral translation at the ends, and the
@@ -14,9 +14,9 @@ const directionSchema = z.strictObject({
   H: quantitySchema.optional(),
   height: quantitySchema.optional(),
   drift: quantitySchema.optional(),
-  /** Load on moment-frame columns of the story (A-8-8), or RM itself. */
+  /** Load on moment-frame columns of the story (A-8-8), or what RM is without it. */
   Pmf: quantitySchema.optional(),
-  RM: plainSchema.optional(),
+  RM: z.enum(['braced', 'lower bound'], 'must be "braced" or "lower bound"').optional(),
 });
 
 export const swayInputSchema = z.strictObject({

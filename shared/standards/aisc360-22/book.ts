@@ -7,7 +7,11 @@ import { app8B2Formulas } from './app8-b2.ts';
 import { b4CompressionFormulas } from './b4-compression.ts';
 import { b4FlexureFormulas } from './b4-flexure.ts';
 import { kcFormulas } from './b4-kc.ts';
+import { b4WallFormulas } from './b4-wall.ts';
 import { c2Formulas } from './c2.ts';
+import { d2Formulas } from './d2.ts';
+import { d3Formulas } from './d3.ts';
+import { e2Formulas, placeFormulas } from './e2.ts';
 import { e3Formulas } from './e3.ts';
 import { e4Formulas } from './e4.ts';
 import { e4ConstrainedFormulas } from './e4-constrained.ts';
@@ -17,9 +21,12 @@ import { e7RoundFormulas } from './e7-round.ts';
 import { f1Formulas } from './f1.ts';
 import { f2Formulas } from './f2.ts';
 import { f3Formulas } from './f3.ts';
+import { f4All } from './f4-formulas.ts';
+import { f5Formulas } from './f5.ts';
 import { f6Formulas } from './f6.ts';
-import { d2Formulas } from './d2.ts';
-import { d3Formulas } from './d3.ts';
+import { f7Formulas } from './f7-formulas.ts';
+import { f8Formulas } from './f8.ts';
+import { f13Formulas } from './f13.ts';
 import { g2Formulas } from './g2.ts';
 import { g2BucklingFormulas } from './g2-buckling.ts';
 import { g4Formulas } from './g4.ts';
@@ -42,7 +49,10 @@ export const aisc360 = defineBook(
     b4CompressionFormulas,
     b4FlexureFormulas,
     kcFormulas,
+    b4WallFormulas,
     c2Formulas,
+    e2Formulas,
+    placeFormulas,
     e3Formulas,
     e4Formulas,
     e4ConstrainedFormulas,
@@ -52,7 +62,12 @@ export const aisc360 = defineBook(
     f1Formulas,
     f2Formulas,
     f3Formulas,
+    f4All,
+    f5Formulas,
     f6Formulas,
+    f7Formulas,
+    f8Formulas,
+    f13Formulas,
     app7Formulas,
     app8Formulas,
     app8B1Formulas,

@@ -2,11 +2,12 @@ import type { BookSymbol } from '../book.ts';
 import { compression } from './symbols/compression.ts';
 import { flexure } from './symbols/flexure.ts';
 import { general } from './symbols/general.ts';
+import { member } from './symbols/member.ts';
 import { stability } from './symbols/stability.ts';
 import { strength } from './symbols/strength.ts';
 
 /** All symbols of the standard; throws where two chapters name one. */
-export const symbols = merged(general, compression, flexure, strength, stability);
+export const symbols = merged(general, compression, flexure, strength, stability, member);
 
 function merged(
   ...groups: readonly Readonly<Record<string, BookSymbol>>[]
