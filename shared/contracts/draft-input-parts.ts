@@ -3,6 +3,7 @@ import type {
   DraftLoad,
   DraftNetSection,
   DraftRestraint,
+  DraftSizes,
   DraftSprings,
   DraftSupport,
   DraftSway,
@@ -10,6 +11,7 @@ import type {
 } from './draft-parts.ts';
 import { springNames } from './draft-parts.ts';
 import type { DraftQuantity, DraftSource } from './draft-quantity.ts';
+import { hasWall, mayBeEmpty, sizesOf } from './draft-section.ts';
 
 /** What says where a text is from. */
 interface Stated {
@@ -36,6 +38,18 @@ export function sourceInputOf(source: DraftSource) {
   const { row, ...file } = source;
   return /^\d+$/.test(row ?? '') ? { ...file, row: Number(row) } : file;
 }
+
+/** Their source and state stand beside the sizes, which hold for all of them. */
+export const sizesInputOf = (sizes: DraftSizes) => ({
+  shape: sizes.shape,
+  ...(hasWall(sizes) && sizes.wall !== '' ? { wall: sizes.wall } : {}),
+  ...Object.fromEntries(
+    sizesOf(sizes)
+      .filter((name) => !mayBeEmpty(name) || sizes[name].trim() !== '')
+      .map((name) => [name, sizes[name].trim()]),
+  ),
+  ...statedInputOf(sizes),
+});
 
 export const restraintInputOf = ({ at, holds, source, confirmed }: DraftRestraint) => ({
   ...asked('at', { text: at, source, confirmed }),
@@ -105,8 +119,8 @@ const directionInputOf = (sway: DraftSwayDirection) => ({
         ...given('H', sway.H),
         ...given('height', sway.height),
         ...given('drift', sway.drift),
-        ...given('Pmf', sway.Pmf),
-        ...given('RM', sway.RM),
+        ...(sway.frames === 'share' ? asked('Pmf', sway.Pmf) : {}),
+        ...(sway.frames === 'braced' || sway.frames === 'lower bound' ? { RM: sway.frames } : {}),
       }),
 });
 

@@ -1,6 +1,12 @@
 import { textsOfLoad } from './draft-input-parts.ts';
-import { springNames, swayNames } from './draft-parts.ts';
+import {
+  type DraftSizes,
+  type DraftSwayDirection,
+  type SwayName,
+  springNames,
+} from './draft-parts.ts';
 import type { DraftQuantity, DraftSource } from './draft-quantity.ts';
+import { sizesOf } from './draft-section.ts';
 import { actionNames, actionOf, inSprings, lengthNames, type MemberDraft } from './members.ts';
 
 /** A text of a member's form that carries a source, by the path of its problems. */
@@ -15,7 +21,8 @@ export interface DraftValue {
 export function valuesOf(draft: MemberDraft): DraftValue[] {
   const { springs, charts, netSection, stiffeners } = draft;
   return [
-    ...(['section', 'ends', 'Cb', ...lengthNames] as const).map((name) => at(name, draft[name])),
+    ...(draft.sizes ? sizeValues(draft.sizes) : [at('section', draft.section)]),
+    ...(['ends', 'Cb', ...lengthNames] as const).map((name) => at(name, draft[name])),
     ...(draft.restraints ?? []).map(({ at: text, source, confirmed }, i) => ({
       ...{ path: `restraints[${i}].at`, text, source, confirmed },
     })),
@@ -54,6 +61,12 @@ export function valuesOf(draft: MemberDraft): DraftValue[] {
 
 const at = (path: string, quantity: DraftQuantity): DraftValue => ({ path, ...quantity });
 
+const sizeValues = (sizes: DraftSizes): DraftValue[] =>
+  sizesOf(sizes).map((name) => ({
+    ...{ path: `section.${name}`, text: sizes[name] },
+    ...{ source: sizes.source, confirmed: sizes.confirmed },
+  }));
+
 /** Those of the story's stiffness that are not chosen are kept in the form and not sent. */
 function swayValues(path: string, sway: MemberDraft['combinations'][number]['sway']): DraftValue[] {
   if (!sway) return [];
@@ -62,14 +75,13 @@ function swayValues(path: string, sway: MemberDraft['combinations'][number]['swa
     ...(['x', 'y'] as const).flatMap((axis) => {
       const direction = sway[axis];
       if (!direction) return [];
-      return swayNames
-        .filter((name) => !unused[direction.by].some((left) => left === name))
-        .map((name) => at(`${path}.${axis}.${name}`, direction[name]));
+      return usesOf(direction).map((name) => at(`${path}.${axis}.${name}`, direction[name]));
     }),
   ];
 }
 
-const unused = {
-  critical: ['H', 'height', 'drift', 'Pmf', 'RM'],
-  drift: ['PeStory'],
-} as const;
+const usesOf = ({ by, frames }: DraftSwayDirection): readonly SwayName[] => [
+  ...(['MA', 'MB', 'Pstory'] as const),
+  ...(by === 'critical' ? (['PeStory'] as const) : (['H', 'height', 'drift'] as const)),
+  ...(by === 'drift' && frames === 'share' ? (['Pmf'] as const) : []),
+];

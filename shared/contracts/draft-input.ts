@@ -6,6 +6,7 @@ import {
   loadInputOf,
   netSectionInputOf,
   restraintInputOf,
+  sizesInputOf,
   sourceInputOf,
   springsInputOf,
   supportInputOf,
@@ -59,7 +60,7 @@ function memberInputOf(id: string, draft: MemberDraft) {
   const { mark, endMomentSign, restraints, springs, charts, netSection, stiffeners } = draft;
   return {
     ...{ id, mark },
-    ...given('section', draft.section),
+    ...(draft.sizes ? { section: sizesInputOf(draft.sizes) } : given('section', draft.section)),
     material: draft.ownSteel ? steelInputOf(draft.ownSteel) : draft.material,
     ...given('length', draft.length),
     ...given('ends', draft.ends),
@@ -86,12 +87,20 @@ const chartsInputOf = ({ x, y }: NonNullable<MemberDraft['charts']>) => ({
 const combinationInputOf = (row: DraftCombination, restraints: readonly DraftRestraint[]) => ({
   ...{ id: row.id, name: row.name },
   ...(row.design ? { design: row.design } : {}),
-  ...(row.analysedWith?.trim() ? { analysedWith: row.analysedWith.trim() } : {}),
+  ...analysedWithOf(row),
   ...Object.assign({}, ...actionNames.map((action) => given(action, actionOf(row, action)))),
   ...(row.loads?.length ? { loads: row.loads.map(loadInputOf) } : {}),
   ...(row.supports?.length ? { supports: row.supports.map(supportInputOf(restraints)) } : {}),
   ...(row.sway ? { sway: swayInputOf(row.sway) } : {}),
 });
+
+const LONGEST_SECTION = 40;
+
+/** Names are compared without spaces; sizes whose name is then still too long are not claimed. */
+function analysedWithOf({ analysedWith = '' }: DraftCombination) {
+  const name = analysedWith.replace(/\s+/g, '');
+  return name === '' || name.length > LONGEST_SECTION ? {} : { analysedWith: name };
+}
 
 const steelInputOf = ({ name, Fy, Fu, source, confirmed }: DraftSteel) => ({
   ...{ name, Fy, confirmed },

@@ -12,6 +12,32 @@ import { line } from './fields.ts';
 const row = { id: line(40).min(1), source: draftSource.optional(), confirmed: z.boolean() };
 const text = line(60);
 
+export const sizedShapes = ['i', 'mono-i', 'box', 'tube', 'round'] as const;
+
+/** A section by its sizes; those that its shape has no use for are kept, not sent. */
+export const draftSizes = z.object({
+  shape: z.enum(sizedShapes),
+  /** What the thickness of a tube is; empty until chosen. */
+  wall: z.enum(['nominal', 'design', '']),
+  d: text,
+  bf: text,
+  tf: text,
+  tw: text,
+  bfTop: text,
+  tfTop: text,
+  bfBottom: text,
+  tfBottom: text,
+  B: text,
+  Ht: text,
+  t: text,
+  Ro: text,
+  D: text,
+  source: draftSource.optional(),
+  confirmed: z.boolean(),
+});
+export type DraftSizes = z.infer<typeof draftSizes>;
+export type SizeName = Exclude<keyof DraftSizes, 'shape' | 'wall' | 'source' | 'confirmed'>;
+
 /** What is held between the ends, at a distance from end A. */
 export const draftRestraint = z.object({ ...row, at: text, holds: z.array(z.enum(HOLDS)).max(5) });
 export type DraftRestraint = z.infer<typeof draftRestraint>;
@@ -43,18 +69,11 @@ export const draftSupport = z.object({
 });
 export type DraftSupport = z.infer<typeof draftSupport>;
 
-export const swayNames = [
-  'MA',
-  'MB',
-  'Pstory',
-  'PeStory',
-  'H',
-  'height',
-  'drift',
-  'Pmf',
-  'RM',
-] as const;
+export const swayNames = ['MA', 'MB', 'Pstory', 'PeStory', 'H', 'height', 'drift', 'Pmf'] as const;
 export type SwayName = (typeof swayNames)[number];
+
+/** What is known of the moment frames of a story, for R_M: Pmf, that there are none, or nothing. */
+export const frameShares = ['share', 'braced', 'lower bound'] as const;
 
 /** Sway that bends the member about one axis; `by` says how the story's stiffness is given. */
 export const draftSwayDirection = z.object({
@@ -67,7 +86,7 @@ export const draftSwayDirection = z.object({
   height: draftQuantity,
   drift: draftQuantity,
   Pmf: draftQuantity,
-  RM: draftQuantity,
+  frames: z.enum([...frameShares, '']),
 });
 export type DraftSwayDirection = z.infer<typeof draftSwayDirection>;
 

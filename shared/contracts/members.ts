@@ -6,6 +6,7 @@ import {
   draftLoad,
   draftNetSection,
   draftRestraint,
+  draftSizes,
   draftSprings,
   draftSupport,
   draftSway,
@@ -35,7 +36,7 @@ export const draftCombination = z.object({
   /** The load level that the forces say they are of; empty where they do not say. */
   design: z.enum(['LRFD', 'ASD', '']).optional(),
   /** The section that the member had when the forces came: forces belong to it. */
-  analysedWith: line(60).optional(),
+  analysedWith: line(160).optional(),
   P: draftQuantity,
   MxA: draftQuantity,
   MxB: draftQuantity,
@@ -84,6 +85,8 @@ export const memberDraft = z.object({
   /** Which sense the end moments' signs follow; empty until chosen. */
   endMomentSign: z.enum(['bending', 'joint', '']),
   /** From here on what is absent is not part of the member; stored drafts may lack it. */
+  /** In place of the designation, which is kept. */
+  sizes: draftSizes.optional(),
   restraints: z.array(draftRestraint).max(60, 'at most 60 restraints').optional(),
   springs: draftSprings.optional(),
   charts: z.object({ x: draftChart.optional(), y: draftChart.optional() }).optional(),

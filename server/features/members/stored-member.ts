@@ -3,6 +3,7 @@ import type { Runs } from '#server/runs/runs.ts';
 import { ENGINE_VERSION } from '#shared/calc/engine.ts';
 import { canonicalText } from '#shared/calc/hashes.ts';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import { sectionTextOf } from '#shared/contracts/draft-section.ts';
 import type { Member, MemberDraft, MemberRow, MemberSummary } from '#shared/contracts/members.ts';
 
 export type StoredMember = typeof members.$inferSelect;
@@ -40,10 +41,11 @@ export function memberOf(stored: StoredMember, changedBy: string): Member {
 }
 
 export function memberRowOf(stored: StoredMember): MemberRow {
-  const { mark, place, section, material, ownSteel, length, combinations } = draftOf(stored);
+  const draft = draftOf(stored);
+  const { mark, place, material, ownSteel, length, combinations } = draft;
   return {
     ...{ id: stored.id, version: stored.version },
-    ...{ mark, place, section: section.text, material: ownSteel?.name ?? material },
+    ...{ mark, place, section: sectionTextOf(draft), material: ownSteel?.name ?? material },
     length: length.text,
     combinations: combinations.length,
     summary: summaryOf(stored),
@@ -51,11 +53,11 @@ export function memberRowOf(stored: StoredMember): MemberRow {
 }
 
 export function deletedMemberRowOf(stored: StoredMember, deletedBy: string, deletedAt: Date) {
-  const { mark, section } = draftOf(stored);
+  const draft = draftOf(stored);
   return {
     id: stored.id,
-    mark,
-    section: section.text,
+    mark: draft.mark,
+    section: sectionTextOf(draft),
     deletedBy,
     deletedAt: deletedAt.toISOString(),
   };

@@ -1,4 +1,5 @@
 import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import { sectionTextOf } from '#shared/contracts/draft-section.ts';
 import type { ActionName, DraftCombination, MemberDraft } from '#shared/contracts/members.ts';
 import { normalDesignation } from '#shared/sections/table.ts';
 import type { StatedName } from './member-fields.ts';
@@ -32,7 +33,7 @@ export const withAction = (
   quantity: DraftQuantity,
 ): MemberDraft =>
   withCombination(draft, id, (row) =>
-    withForcesOf(draft.section.text, { ...row, [action]: quantity }),
+    withForcesOf(sectionTextOf(draft), { ...row, [action]: quantity }),
   );
 
 /** Forces belong to the section they came with; a row that has none yet takes the member's. */
@@ -43,12 +44,12 @@ export const withForcesOf = (section: string, row: DraftCombination): DraftCombi
 
 /** Says that the forces come from an analysis with the section the member has now. */
 export const analysedAgain = (draft: MemberDraft, id: string): MemberDraft =>
-  withCombination(draft, id, (row) => ({ ...row, analysedWith: draft.section.text.trim() }));
+  withCombination(draft, id, (row) => ({ ...row, analysedWith: sectionTextOf(draft) }));
 
 /** The section the forces were analysed with, where the member has another one now. */
 export function sectionLeft(draft: MemberDraft, row: DraftCombination): string | null {
   const analysed = normalDesignation(row.analysedWith ?? '');
-  const now = normalDesignation(draft.section.text);
+  const now = normalDesignation(sectionTextOf(draft));
   return analysed === '' || now === '' || analysed === now ? null : analysed;
 }
 

@@ -90,5 +90,5 @@ export const withoutSway = (draft: MemberDraft, row: string): MemberDraft =>
 
 export const noSwayAbout: DraftSwayDirection = {
   ...{ by: 'drift', MA: notGiven, MB: notGiven, Pstory: notGiven, PeStory: notGiven },
-  ...{ H: notGiven, height: notGiven, drift: notGiven, Pmf: notGiven, RM: notGiven },
+  ...{ H: notGiven, height: notGiven, drift: notGiven, Pmf: notGiven, frames: '' },
 };

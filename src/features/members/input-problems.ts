@@ -1,4 +1,5 @@
 import { type DraftValue, valuesOf } from '#shared/contracts/draft-input-values.ts';
+import { lacksWall } from '#shared/contracts/draft-section.ts';
 import type { MemberDraft } from '#shared/contracts/members.ts';
 import type { ProblemPlace } from '#shared/contracts/problems.ts';
 import { sourceLack } from './source-words.ts';
@@ -13,7 +14,7 @@ export function inputProblems(
 ): ProblemPlace[] {
   const values = new Map(valuesOf(draft).map((value) => [value.path, value]));
   const own = found.flatMap(({ path, message }) => {
-    const place = placeOf(path.replace(/^members\[0\]\.?/, ''));
+    const place = placeOf(draft, path.replace(/^members\[0\]\.?/, ''));
     return isAnswered(draft, place)
       ? []
       : [{ path: place, message: said(values.get(place), place, message) }];
@@ -22,12 +23,26 @@ export function inputProblems(
   return own.filter(({ path }) => !seen.has(path) && seen.add(path));
 }
 
-/** A point of the member shows the problems of its source beside its distance. */
-const placeOf = (path: string): string =>
-  path.replace(/^(restraints\[\d+\])(?:\.(?:source|confirmed).*)?$/, '$1.at');
+/** The field that a problem stands beside: of a row's source its first, of a choice the choice. */
+function placeOf(draft: MemberDraft, path: string): string {
+  const [, row, direction, axis] = /^combinations\[(\d+)\]\.(sway\.([xy]))\.Pmf$/.exec(path) ?? [];
+  const sway = row && draft.combinations[Number(row)]?.sway;
+  if (sway && (axis === 'x' || axis === 'y') && sway[axis]?.frames === '')
+    return `combinations[${row}].${direction}.frames`;
+  if (path === 'section' && draft.sizes && lacksWall(draft.sizes)) return 'section.wall';
+  return path.replace(/^(restraints\[\d+\])(?:\.(?:source|confirmed).*)?$/, '$1.at');
+}
+
+/** What is said of a choice not made yet. */
+const choices: readonly (readonly [RegExp, string])[] = [
+  [/\.sidesway$/, 'is needed: whether the story is held'],
+  [/\.frames$/, 'is needed: what of the load moment frames carry'],
+  [/^section\.wall$/, 'is needed: what the thickness is'],
+  [/\.holds$/, 'is needed: what is held there'],
+];
 
 function said(value: DraftValue | undefined, place: string, message: string): string {
-  if (!value) return /\.sidesway$/.test(place) ? 'is needed: whether the story is held' : message;
+  if (!value) return choices.find(([path]) => path.test(place))?.[1] ?? message;
   if (value.text.trim() === '') {
     return /^(must be|Invalid|is empty)/.test(message) ? 'is needed' : message;
   }

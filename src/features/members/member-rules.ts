@@ -1,5 +1,6 @@
 import type { DraftField, MergeRules } from '#client/lib/draft/merge.ts';
 import type { DraftQuantity } from '#shared/contracts/draft-quantity.ts';
+import { sectionTextOf } from '#shared/contracts/draft-section.ts';
 import {
   actionNames,
   actionOf,
@@ -43,6 +44,7 @@ export const memberRules: MergeRules<MemberDraft> = {
     field('mark', 'Mark', draft.mark, draft.mark),
     field('place', 'Where', draft.place, draft.place),
     field('section', 'Section', quantityText(draft.section), draft.section),
+    field('sizes', 'Section by its sizes', draft.sizes ? sectionTextOf(draft) : '', draft.sizes),
     field('material', 'Steel', draft.material, draft.material),
     field('ownSteel', 'Own steel', draft.ownSteel?.name ?? '', draft.ownSteel),
     field('ends', 'Ends', quantityText(draft.ends), draft.ends),

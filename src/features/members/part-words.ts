@@ -1,5 +1,13 @@
 import type { LoadText } from '#shared/contracts/draft-input-parts.ts';
-import type { DraftChart, DraftLoad, SpringName, SwayName } from '#shared/contracts/draft-parts.ts';
+import type {
+  DraftChart,
+  DraftLoad,
+  DraftSizes,
+  DraftSwayDirection,
+  SizeName,
+  SpringName,
+  SwayName,
+} from '#shared/contracts/draft-parts.ts';
 import type { LoadHeight } from '#shared/members/load-input.ts';
 import type { Hold } from '#shared/members/restraint-input.ts';
 import { type FieldWords, words } from './member-fields.ts';
@@ -25,6 +33,48 @@ export const holdWords: readonly Word<Hold>[] = [
 
 export const holdText = (hold: Hold): string =>
   holdWords.find(({ value }) => value === hold)?.text ?? hold;
+
+export const sizedShapeWords: Readonly<Record<DraftSizes['shape'], string>> = {
+  i: 'welded I',
+  'mono-i': 'welded I, unequal',
+  box: 'welded box',
+  tube: 'rectangular tube',
+  round: 'round tube',
+};
+
+export const sizeWords: Readonly<Record<SizeName, FieldWords>> = {
+  d: words('Depth', 'd', 'd', 'Overall depth.'),
+  bf: words('Flange width', 'b_f', 'b f', 'Both flanges.'),
+  tf: words('Flange', 't_f', 't f', 'Thickness of the flanges.'),
+  tw: words('Web', 't_w', 't w', 'Thickness of the web, or of each web of a box.'),
+  bfTop: words(
+    'Top, width',
+    'b',
+    'b f top',
+    'The flange that a positive moment compresses.',
+    false,
+  ),
+  tfTop: words(
+    'Top, thickness',
+    't',
+    't f top',
+    'The flange that a positive moment compresses.',
+    false,
+  ),
+  bfBottom: words('Bottom, width', 'b', 'b f bottom', 'The other flange.', false),
+  tfBottom: words('Bottom, thickness', 't', 't f bottom', 'The other flange.', false),
+  B: words('Width', 'B', 'B', 'Outside width.'),
+  Ht: words('Height', 'H', 'H', 'Outside height, not less than the width.'),
+  t: words('Wall', 't', 't', 'Thickness of the wall.'),
+  Ro: words('Corner radius', 'R', 'R', 'Outside; empty is twice the wall thickness.', false),
+  D: words('Diameter', 'D', 'D', 'Outside diameter.'),
+};
+
+export const wallWords: Readonly<Record<DraftSizes['wall'], string>> = {
+  '': 'choose',
+  nominal: 'nominal',
+  design: 'design (B4.2)',
+};
 
 export const heightWords: readonly Word<LoadHeight>[] = [
   { value: 'top', text: 'top', about: 'On the flange that a positive moment compresses' },
@@ -111,6 +161,13 @@ export const swayAxialWords = words(
   'Axial force from lateral translation; compression is positive.',
 );
 
+export const frameWords: Readonly<Record<DraftSwayDirection['frames'], string>> = {
+  '': 'choose',
+  share: 'carry a part of it',
+  braced: 'none: braced',
+  'lower bound': 'not known: 0.85',
+};
+
 export const swayWords: Readonly<Record<SwayName, FieldWords>> = {
   MA: words('Moment, end A', 'M', 'M A', 'From lateral translation.', false),
   MB: words('Moment, end B', 'M', 'M B', 'From lateral translation.', false),
@@ -120,5 +177,4 @@ export const swayWords: Readonly<Record<SwayName, FieldWords>> = {
   height: words('Height', 'L', 'L', 'Height of the story.'),
   drift: words('Drift', '\\Delta_H', 'delta H', 'First-order drift between the floors.'),
   Pmf: words('On frames', 'P_{mf}', 'P m f', 'Load on columns of moment frames (A-8-8).'),
-  RM: words('Factor', 'R_M', 'R M', 'Empty: from Pmf, else 0.85.'),
 };

@@ -1,12 +1,13 @@
+import { sectionName } from '#client/document/section-name.ts';
 import { Button } from '#client/ui/button.tsx';
 import { fieldClass } from '#client/ui/field.tsx';
+import { sectionTextOf } from '#shared/contracts/draft-section.ts';
 import {
   actionNames,
   actionOf,
   type DraftCombination,
   type MemberDraft,
 } from '#shared/contracts/members.ts';
-import { normalDesignation, printedDesignation } from '#shared/sections/table.ts';
 import { analysedAgain, sectionLeft, withAction, withCombination } from '../edit-draft.ts';
 import { actionWords } from '../member-fields.ts';
 import { InputRow } from './input-row.tsx';
@@ -76,12 +77,12 @@ function SectionLeft({ row }: { row: DraftCombination }) {
   const { draft, edit, editable } = useMemberForm();
   const left = sectionLeft(draft, row);
   if (!left) return null;
-  const now = printedDesignation(normalDesignation(draft.section.text));
+  const now = sectionName(sectionTextOf(draft));
   return (
     <div role="status" className="mt-2 border-l-2 border-oxide pl-3 text-small">
       <p>
-        These forces were analysed with {printedDesignation(left)}, the member is {now} now. They
-        are not confirmed until the analysis is run again.
+        These forces were analysed with {sectionName(left)}, the member is {now} now. They are not
+        confirmed until the analysis is run again.
       </p>
       {editable && (
         <Button

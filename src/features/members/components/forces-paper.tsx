@@ -3,6 +3,7 @@ import { Button } from '#client/ui/button.tsx';
 import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
 import { Empty } from '#client/ui/state-panels.tsx';
 import { SymbolMark } from '#client/ui/symbol.tsx';
+import { sectionTextOf } from '#shared/contracts/draft-section.ts';
 import { type ActionName, actionNames, actionOf } from '#shared/contracts/members.ts';
 import { withForcesOf } from '../edit-draft.ts';
 import { firstCombination } from '../first-draft.ts';
@@ -108,7 +109,7 @@ export function ForcesPaper(props: {
           present={rows}
           onClose={() => setPasting(null)}
           onTake={(combinations) => {
-            const here = combinations.map((row) => withForcesOf(draft.section.text, row));
+            const here = combinations.map((row) => withForcesOf(sectionTextOf(draft), row));
             edit({ ...draft, combinations: here }, 'rows/paste');
             setPasting(null);
           }}

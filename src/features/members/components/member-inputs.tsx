@@ -27,7 +27,7 @@ export function MemberInputs({ units }: { units: 'us' | 'si' }) {
         </h2>
         <LabelRow name="mark" label="Mark" />
         <LabelRow name="place" label="Where" />
-        <SectionField />
+        <SectionField units={units} />
         <SteelFields />
         <LengthRow name="length" units={units} />
       </section>

@@ -1,5 +1,5 @@
 import { classNames } from '#client/ui/class-names.ts';
-import { printedDesignation } from '#shared/sections/table.ts';
+import { findShape, printedDesignation } from '#shared/sections/table.ts';
 import { SectionPreview } from './section-preview.tsx';
 
 /** The designations that hold what was typed, beside the outline of the one pointed at. */
@@ -19,7 +19,7 @@ export function SectionChoice(props: {
         role="listbox"
         id={list}
         aria-label="Sections"
-        className="max-h-84 w-32 shrink-0 overflow-y-auto py-1"
+        className="max-h-84 w-56 shrink-0 overflow-y-auto py-1"
       >
         {found.map((designation, index) => (
           <SectionOption
@@ -37,7 +37,8 @@ export function SectionChoice(props: {
           <SectionPreview designation={shown} />
         ) : (
           <p className="text-zinc-7">
-            No W shape is called “{props.typed}”. Designations read like W12X79.
+            No shape of the tables is called “{props.typed}”. Designations read like W12X79,
+            C15X33.9, HSS8X6X1/2 or Pipe8STD.
           </p>
         )}
       </div>
@@ -52,6 +53,7 @@ function SectionOption(props: {
   onPoint: () => void;
   onChoose: () => void;
 }) {
+  const shape = findShape(props.designation);
   return (
     // biome-ignore lint/a11y/useFocusableInteractive: the combobox keeps the focus and points here
     // biome-ignore lint/a11y/useKeyWithClickEvents: the combobox has the keys
@@ -64,9 +66,17 @@ function SectionOption(props: {
       }}
       onPointerMove={props.onPoint}
       onClick={props.onChoose}
-      className={classNames('figures px-3 py-0.5', props.active && 'bg-ink text-paper')}
+      className={classNames(
+        'figures grid grid-cols-[minmax(0,1fr)_auto] gap-x-2 px-3 py-0.5',
+        props.active && 'bg-ink text-paper',
+      )}
     >
-      {printedDesignation(props.designation)}
+      <span className="whitespace-nowrap">{printedDesignation(props.designation)}</span>
+      {shape && (
+        <span
+          className={classNames('font-condensed text-small', !props.active && 'text-zinc-7')}
+        >{`${shape.family}, ${shape.weight} lb/ft`}</span>
+      )}
     </div>
   );
 }

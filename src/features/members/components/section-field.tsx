@@ -7,10 +7,17 @@ import { withStated, withText } from '../edit-draft.ts';
 import { InputRow } from './input-row.tsx';
 import { useMemberForm } from './member-form-context.ts';
 import { SectionChoice } from './section-choice.tsx';
+import { SizesFields } from './sizes-fields.tsx';
 import { SourceControl } from './source-control.tsx';
 
+/** The section by its designation, or by sizes of its own. */
+export function SectionField({ units }: { units: 'us' | 'si' }) {
+  const { draft } = useMemberForm();
+  return draft.sizes ? <SizesFields sizes={draft.sizes} units={units} /> : <DesignationField />;
+}
+
 /** The section by typing part of its designation: `12x79`, `w14`; its outline stands beside the list. */
-export function SectionField() {
+function DesignationField() {
   const { draft, edit, editable, problemAt } = useMemberForm();
   const [open, setOpen] = useState(false);
   const [active, setActive] = useState(0);
@@ -98,7 +105,7 @@ export function SectionField() {
           // The field keeps the focus, so that typing goes on.
           onPointerDown={(event) => event.preventDefault()}
           onInteractOutside={(event) => event.preventDefault()}
-          className="z-40 flex w-[480px] rounded-field border border-ink bg-paper shadow-sheet"
+          className="z-40 flex w-[540px] rounded-field border border-ink bg-paper shadow-sheet"
         >
           <SectionChoice
             list={list}

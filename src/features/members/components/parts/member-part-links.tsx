@@ -1,5 +1,5 @@
 import { notGiven } from '#shared/contracts/draft-quantity.ts';
-import { noJoints, noNetSection, withChart } from '../../edit-parts.ts';
+import { noJoints, noNetSection, noSizes, withChart } from '../../edit-parts.ts';
 import { withNewRestraint } from '../../edit-restraints.ts';
 import { useMemberForm } from '../member-form-context.ts';
 import { type PartLink, PartLinks } from './part.tsx';
@@ -22,6 +22,11 @@ export function MemberPartLinks() {
       text: 'a net section',
       open: () => edit({ ...draft, netSection: noNetSection }, 'netSection/open'),
       first: 'netSection.by',
+    },
+    draft.sizes === undefined && {
+      text: 'a section by its sizes',
+      open: () => edit({ ...draft, sizes: noSizes }, 'sizes/open'),
+      first: 'section.d',
     },
     draft.stiffeners === undefined && {
       text: 'web stiffeners',

@@ -2,7 +2,7 @@ import { fieldClass } from '#client/ui/field.tsx';
 import type { DraftSway, DraftSwayDirection, SwayName } from '#shared/contracts/draft-parts.ts';
 import type { DraftCombination } from '#shared/contracts/members.ts';
 import { noSwayAbout, withoutSway, withSway } from '../../edit-loads.ts';
-import { swayAxialWords, swayWords } from '../../part-words.ts';
+import { frameWords, swayAxialWords, swayWords } from '../../part-words.ts';
 import { InputRow } from '../input-row.tsx';
 import { useMemberForm } from '../member-form-context.ts';
 import { QuantityRow } from '../quantity-row.tsx';
@@ -73,7 +73,7 @@ const placeholders = (of: 'us' | 'si'): Readonly<Partial<Record<SwayName, string
   const { force, moment, height, drift } = units[of];
   return {
     ...{ MA: moment, MB: moment, Pstory: force, PeStory: force, H: force, Pmf: force },
-    ...{ height, drift, RM: '0.85 to 1' },
+    ...{ height, drift },
   };
 };
 
@@ -85,7 +85,8 @@ function SwayRows(props: {
   onChange: (next: DraftSwayDirection | undefined, field: string) => void;
 }) {
   const { path, sway, onChange } = props;
-  const { editable } = useMemberForm();
+  const { editable, problemAt } = useMemberForm();
+  const framesProblem = problemAt(`${path}.frames`);
   const usual = placeholders(props.units);
   const rows = (names: readonly SwayName[]) =>
     names.map((name) => (
@@ -119,7 +120,33 @@ function SwayRows(props: {
           </select>
         )}
       </InputRow>
-      {rows(sway.by === 'critical' ? ['PeStory'] : ['H', 'height', 'drift', 'Pmf', 'RM'])}
+      {rows(sway.by === 'critical' ? ['PeStory'] : ['H', 'height', 'drift'])}
+      {sway.by === 'drift' && (
+        <InputRow path={`${path}.frames`} label="Frames" problem={framesProblem}>
+          {(control) => (
+            <select
+              {...control}
+              value={sway.frames}
+              disabled={!editable}
+              title="What of the story’s load stands on columns of moment frames, for R_M (A-8-8)"
+              onChange={({ target }) =>
+                onChange(
+                  { ...sway, frames: target.value as DraftSwayDirection['frames'] },
+                  'frames',
+                )
+              }
+              className={fieldClass(framesProblem !== undefined)}
+            >
+              {Object.entries(frameWords).map(([value, text]) => (
+                <option key={value} value={value}>
+                  {text}
+                </option>
+              ))}
+            </select>
+          )}
+        </InputRow>
+      )}
+      {sway.by === 'drift' && sway.frames === 'share' && rows(['Pmf'])}
     </div>
   );
 }
