@@ -11,7 +11,11 @@ const labels: Readonly<Record<string, string>> = {
   'basis.analysis.method': 'Method of analysis',
   'basis.analysis.secondOrder': 'Second-order moments',
   'basis.analysis.includesMemberEffect': 'Member effect in the analysis',
-  'basis.analysis.swaySource': 'No sway known from',
+  'basis.analysis.sway': 'Sway of the stories',
+  'basis.analysis.swaySource': 'Sway known from',
+  'basis.analysis.driftRatio': 'Drift ratio',
+  'basis.analysis.driftSource': 'Drift ratio known from',
+  'basis.analysis.provisions': 'Optional provisions',
   'basis.analysis.notionalLoads': 'Notional loads',
   'basis.analysis.program': 'Program of the analysis',
   'basis.analysis.file': 'File of the analysis',
@@ -24,7 +28,8 @@ const labels: Readonly<Record<string, string>> = {
 };
 
 type Tree = Readonly<Record<string, unknown>>;
-const isTree = (value: unknown): value is Tree => typeof value === 'object' && value !== null;
+const isTree = (value: unknown): value is Tree =>
+  typeof value === 'object' && value !== null && !Array.isArray(value);
 
 function leaves(tree: Tree, at = ''): [string, unknown][] {
   return Object.entries(tree).flatMap(([name, value]) =>
@@ -46,7 +51,7 @@ export const basisRules: MergeRules<HeadAndBasis> = {
     leaves(value as unknown as Tree).map(([id, field]) => ({
       id,
       label: labels[id] ?? id,
-      text: field === null ? '' : String(field),
+      text: field === null ? '' : Array.isArray(field) ? field.join(', ') : String(field),
       value: field,
     })),
   take: (into, from, id) => {

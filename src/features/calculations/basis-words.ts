@@ -1,4 +1,5 @@
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import type { Provision } from '#shared/members/input.ts';
 
 type Words<T extends string> = readonly { readonly value: T; readonly text: string }[];
 
@@ -29,6 +30,38 @@ export const secondOrderWords: Words<BasisDraft['analysis']['secondOrder']> = [
   { value: 'from-analysis', text: 'from the second-order analysis' },
 ];
 
+export const swayWords: Words<BasisDraft['analysis']['sway']> = [
+  { value: 'none', text: 'no: held against it' },
+  { value: 'B2', text: 'yes: amplified by B2, Appendix 8' },
+];
+
+export const provisionWords: readonly {
+  readonly value: Provision;
+  readonly text: string;
+  readonly about: string;
+}[] = [
+  {
+    value: 'H1.3',
+    text: 'Out-of-plane check apart where bending is about the major axis alone',
+    about: 'H1.3, for doubly symmetric rolled compact members; the ordinary check stays beside it.',
+  },
+  {
+    value: 'H2',
+    text: 'Stresses added at the points of the section',
+    about: 'H2, beside H1.1.',
+  },
+  {
+    value: 'H1.2-Cb',
+    text: 'Axial tension raises Cb',
+    about: 'H1.2, for doubly symmetric members in tension.',
+  },
+  {
+    value: 'C2.3-taub',
+    text: 'τb = 1, with further notional loads in the analysis',
+    about: 'C2.3(c): 0.001 of the gravity load at each level, beside those of C2.2b.',
+  },
+];
+
 const wordFor = <T extends string>(words: Words<T>, value: T) =>
   words.find((word) => word.value === value)?.text ?? value;
 
@@ -44,6 +77,7 @@ export const basisLine = (basis: BasisDraft): string =>
     `ANSI/AISC 360-22, ${basis.design}`,
     wordFor(methodWords, basis.analysis.method),
     moments[basis.analysis.secondOrder],
+    ...(basis.analysis.sway === 'B2' ? ['sway by B2'] : []),
     basis.units === 'us' ? 'US units' : 'SI units',
   ].join(' · ');
 

@@ -5,7 +5,7 @@ import { useFormKeys } from '#client/ui/use-form-keys.ts';
 import type { Calculation } from '#shared/contracts/calculations.ts';
 import { basisRules } from '../basis-fields.ts';
 import { type HeadAndBasis, useUpdateCalculation } from '../mutations.ts';
-import { AnalysisPart, BookPart, CodePart, HeadPart } from './basis-parts.tsx';
+import { AnalysisPart, BookPart, CodePart, HeadPart, ProvisionsPart } from './basis-parts.tsx';
 
 const storedOf = (calculation: Calculation) => ({
   version: calculation.version,
@@ -50,6 +50,12 @@ export function BasisForm(props: { draft: VersionedDraft<HeadAndBasis>; editable
           about="How the member forces were found decides what is still to be added to them."
         >
           <AnalysisPart {...part} />
+        </Part>
+        <Part
+          title="Optional provisions"
+          about="The standard permits them; each is used only where it is chosen here."
+        >
+          <ProvisionsPart {...part} />
         </Part>
         <Part
           title="Codes and assumptions"

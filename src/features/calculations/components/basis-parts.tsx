@@ -1,10 +1,13 @@
 import { SelectField, TextArea, TextField } from '#client/ui/text-field.tsx';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import { parseQuantity } from '#shared/units/parse.ts';
 import {
   constantWords,
   designWords,
   methodWords,
+  provisionWords,
   secondOrderWords,
+  swayWords,
   unitWords,
 } from '../basis-words.ts';
 import type { HeadAndBasis } from '../mutations.ts';
@@ -121,14 +124,40 @@ export function AnalysisPart(props: PartProps) {
           }
         />
       )}
+      <SelectField
+        label="Do the stories sway?"
+        value={analysis.sway}
+        options={swayWords}
+        hint={
+          analysis.sway === 'none'
+            ? 'The ends of the members do not move sideways relative to each other.'
+            : 'Each combination then gives what goes with the sway, and its story.'
+        }
+        onValue={(sway) => set.analysis({ sway }, 'sway')}
+      />
       <TextField
-        label="No sway: known from"
+        label="Known from"
         optional
         maxLength={400}
-        fieldClassName="col-span-2"
-        hint="The ends of the members do not move sideways relative to each other."
         value={analysis.swaySource}
         onChange={(event) => set.analysis({ swaySource: event.target.value }, 'swaySource')}
+      />
+      <TextField
+        label="Second-order over first-order drift"
+        optional
+        maxLength={60}
+        inputMode="decimal"
+        placeholder="Δ2nd / Δ1st"
+        value={analysis.driftRatio ?? ''}
+        problem={driftProblem(analysis.driftRatio ?? '')}
+        onChange={(event) => set.analysis({ driftRatio: event.target.value }, 'driftRatio')}
+      />
+      <TextField
+        label="Drift known from"
+        optional
+        maxLength={400}
+        value={analysis.driftSource ?? ''}
+        onChange={(event) => set.analysis({ driftSource: event.target.value }, 'driftSource')}
       />
       <TextField
         label="Notional loads"
@@ -153,6 +182,52 @@ export function AnalysisPart(props: PartProps) {
         onChange={(event) => set.analysis({ file: event.target.value }, 'file')}
       />
     </>
+  );
+}
+
+/** A ratio of drifts is a number of at least 1. */
+function driftProblem(text: string): string | undefined {
+  if (text.trim() === '') return undefined;
+  const parsed = parseQuantity(text, 'none');
+  if (!parsed.ok) return `It ${parsed.reason}`;
+  return parsed.quantity.value < 1
+    ? 'Second-order drift is not below first-order drift'
+    : undefined;
+}
+
+/** What the standard leaves to the engineer, for all members of the calculation. */
+export function ProvisionsPart(props: PartProps) {
+  const { analysis } = props.value.basis;
+  const chosen = analysis.provisions ?? [];
+  const set = setters(props);
+  return (
+    <ul className="col-span-2 grid gap-2.5">
+      {provisionWords.map(({ value, text, about }) => (
+        <li key={value}>
+          <label className="flex items-baseline gap-2.5">
+            <input
+              type="checkbox"
+              checked={chosen.includes(value)}
+              onChange={() =>
+                set.analysis(
+                  {
+                    provisions: chosen.includes(value)
+                      ? chosen.filter((other) => other !== value)
+                      : [...chosen, value],
+                  },
+                  `provision/${value}`,
+                )
+              }
+              className="translate-y-0.5 accent-oxide"
+            />
+            <span>
+              {text}
+              <span className="block text-small text-zinc-7">{about}</span>
+            </span>
+          </label>
+        </li>
+      ))}
+    </ul>
   );
 }
 
