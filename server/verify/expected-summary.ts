@@ -34,7 +34,7 @@ const haltOf = ({ lines }: MemberRecord): Line | undefined =>
   lines.find(
     (l) =>
       l.kind === 'notice' &&
-      (l.severity === 'failed' || (l.severity === 'outside scope' && /^(B4|C2)\//.test(l.key))),
+      (l.severity === 'failed' || l.key === 'B4/outside' || l.key === 'C2/outside'),
   );
 
 /** What the summary of a combination must say, from its lines and its member's. */
@@ -43,21 +43,13 @@ export function expectedOfCombination(
   { id, lines }: MemberRecord['combinations'][number],
 ): ExpectedSummary {
   const halt = haltOf(member);
-  const noStrength = member.lines.find((l) => l.kind === 'notice' && l.code === 'web-not-compact');
-  const bent = lines.some((l) => l.key === 'theory/x/absA');
   const idle = lines.find((l) => l.kind === 'notice' && l.code === 'no-forces');
   const own = lines.map(verdictOf).filter((v) => v !== null);
-  const open: Verdict[] = noStrength && bent ? ['NOT CHECKED'] : [];
-  const verdict = halt
-    ? (verdictOf(halt) ?? 'OK')
-    : idle
-      ? 'NOT CHECKED'
-      : worst([...own, ...open]);
+  const verdict = halt ? (verdictOf(halt) ?? 'OK') : idle ? 'NOT CHECKED' : worst(own);
   const place = (line: Line | undefined): string | null => (line ? `${id}:${line.key}` : null);
   if (!hasRatio(verdict)) {
     const reason = idle ?? lines.find((l) => l.kind === 'notice' && verdictOf(l) === verdict);
-    const address = halt?.key ?? place(reason) ?? noStrength?.key ?? null;
-    return { verdict, ratio: null, ratioText: null, address };
+    return { verdict, ratio: null, ratioText: null, address: halt?.key ?? place(reason) };
   }
   const checks = lines.filter((l): l is LineOf<'check'> => l.kind === 'check');
   const ratio = Math.max(0, ...checks.map((c) => c.ratio));

@@ -19,7 +19,14 @@ import { automaticCb } from './modification-factor.ts';
 import type { PlaneMoments } from './plane-moments.ts';
 import type { ResolvedCombination } from './resolved.ts';
 import { segmentCb } from './segment-cb.ts';
-import { largestIn, largestOn, type Segment, type SegmentContext, sidesIn } from './segments.ts';
+import {
+  largestIn,
+  largestOn,
+  type Segment,
+  type SegmentContext,
+  sidesIn,
+  unbracedLength,
+} from './segments.ts';
 
 /** The axial force of a combination as the checks use it. */
 export interface AxialCase {
@@ -66,11 +73,14 @@ function checkSegment(
   segment: Segment,
 ): LineOf<'check'>[] {
   const { r } = segment;
+  const Lb = unbracedLength(segment, m, x);
   const exactMoments = m.input.analysis.secondOrder === 'exact';
   const Mx = largestIn(segment, m, x, exactMoments);
   const My = largestIn(segment, m, y, exactMoments);
   const Mcx =
-    Mx && Mx.value > 0 ? majorCapacity(m, c, segment, x, axial, number, compressed) : null;
+    Mx && Mx.value > 0 && Lb
+      ? majorCapacity(m, c, segment, Lb, x, { axial, clause: number, compressed })
+      : null;
   const major: Flexure | null = Mx && Mx.value > 0 && Mcx ? { Mr: Mx, Mc: Mcx } : null;
   const minor: Flexure | null = My && My.value > 0 && m.Mcy ? { Mr: My, Mc: m.Mcy } : null;
   const lacking = lackingStrengths(r, { unknown, Mx, My, Mcx, Mcy: m.Mcy });
@@ -128,15 +138,13 @@ function majorCapacity(
   m: Context,
   c: ResolvedCombination,
   segment: Segment,
+  Lb: Quantity,
   x: PlaneMoments,
-  axial: Axial | null,
-  number: 'H1.1' | 'H1.2',
-  compressed: boolean,
+  { axial, clause: number, compressed }: Omit<AxialCase, 'unknown'>,
 ): Quantity | null {
   const { major, input } = m;
-  const { r, Lb } = segment;
-  if (!major || !Lb) return null;
-  if (major.fixed) return major.fixed;
+  const { r } = segment;
+  if (!major || major.fixed) return major?.fixed ?? null;
   const factor = (): Quantity | null => {
     if (destabilisingLoad(r, m.member, c, segment)) return null;
     const Cb = m.Cb ?? modification(m, segment, x, Lb, compressed);

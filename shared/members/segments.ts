@@ -23,8 +23,6 @@ import { placeQuantity } from './restraint-lines.ts';
 export interface Segment extends Stretch {
   readonly id: string | null;
   readonly r: Recorder;
-  /** null where no combination bends the major axis. */
-  readonly Lb: Quantity | null;
 }
 
 export interface SegmentContext {
@@ -38,9 +36,8 @@ export interface SegmentContext {
  * that is in compression there; a point of inflection ends none.
  */
 export function segmentsOf(r: Recorder, m: SegmentContext, x: PlaneMoments): readonly Segment[] {
-  const { member, q } = m;
-  if (!member.restraints || x.state !== 'done')
-    return [{ from: 'A', to: 'B', id: null, r, Lb: q.Lb ?? (member.restraints ? q.L : null) }];
+  const { member } = m;
+  if (!member.restraints || x.state !== 'done') return [{ from: 'A', to: 'B', id: null, r }];
   const flanged = member.restraints.some((one) => !holdsTwist(one) && holdsAFlange(one));
   if (flanged)
     r.section('F1/restraints', 'Which restraints hold the compressed flange', clause('F1'));
@@ -48,24 +45,27 @@ export function segmentsOf(r: Recorder, m: SegmentContext, x: PlaneMoments): rea
   const parts = stretches(member, (one) => ending.has(one));
   return parts.map((part, i) => {
     const id = parts.length === 1 ? null : `s${i + 1}`;
-    const rs = id ? r.within(id) : r;
-    if (id)
-      rs.section(
-        'segment',
-        `Segment ${i + 1}, ${placeName(part.from)} to ${placeName(part.to)}`,
-        clause('F1'),
-      );
-    const Lb =
-      q.Lb ??
-      stretchLength(
-        rs,
-        'F2/Lb',
-        q.L,
-        placeQuantity(q.places, part.from),
-        placeQuantity(q.places, part.to),
-        { title: 'Laterally unbraced length of the segment', symbol: 'Lb' },
-      );
-    return { ...part, id, r: rs, Lb };
+    return { ...part, id, r: id ? r.within(id) : r };
+  });
+}
+
+/** Begins the lines of a segment; its unbraced length, null where the major axis is not bent. */
+export function unbracedLength(
+  { id, r, from, to }: Segment,
+  { member, q }: SegmentContext,
+  x: PlaneMoments,
+): Quantity | null {
+  if (id !== null)
+    r.section(
+      'segment',
+      `Segment ${id.replace('s', '')}, ${placeName(from)} to ${placeName(to)}`,
+      clause('F1'),
+    );
+  if (q.Lb || !member.restraints || x.state !== 'done') return q.Lb;
+  const [za, zb] = [placeQuantity(q.places, from), placeQuantity(q.places, to)];
+  return stretchLength(r, 'F2/Lb', q.L, za, zb, {
+    title: 'Laterally unbraced length of the segment',
+    symbol: 'Lb',
   });
 }
 

@@ -55,7 +55,7 @@ function required(
       : []),
     ...(known
       ? plane.bays.flatMap((bay) =>
-          bay.state === 'done' ? (bay.first().largestShear?.(bay.r, `G/${axis}/Vmax`) ?? []) : [],
+          bay.state === 'done' ? (bay.first().largestShear?.(bay.r, `G/${axis}`) ?? []) : [],
         )
       : []),
   ];

@@ -19,11 +19,11 @@ const ratioText = (check: LineOf<'check'>): string =>
   printNumber(check.ratio, check.print.working ?? { dec: 3 }).text;
 
 /** A member notice that nothing could be checked stops every combination. */
+const HALTS: ReadonlySet<string> = new Set(['B4/outside', 'C2/outside']);
 const stopped = (memberLines: readonly Line[]): LineOf<'notice'> | undefined =>
   memberLines.find(
     (l): l is LineOf<'notice'> =>
-      l.kind === 'notice' &&
-      (l.severity === 'failed' || (l.severity === 'outside scope' && /^(B4|C2)\//.test(l.key))),
+      l.kind === 'notice' && (l.severity === 'failed' || HALTS.has(l.key)),
   );
 
 /** Verdict, ratio and what governs one combination. */
@@ -38,33 +38,14 @@ export function combinationSummary(
     null,
   );
   const halt = stopped(memberLines);
-  const quiet = lines.some((l) => l.kind === 'notice' && l.code === 'no-forces');
-  const flexureOutside = memberLines.some(
-    (l) => l.kind === 'notice' && l.code === 'web-not-compact',
-  );
-  const bentMajor = lines.some((l) => l.key === 'theory/x/absA');
+  const found = verdictsOf(lines);
   const verdict = halt
     ? worstVerdict(verdictsOf([halt]))
-    : quiet
+    : found.length === 0
       ? 'NOT CHECKED'
-      : worstVerdict([
-          ...verdictsOf(lines),
-          ...(flexureOutside && bentMajor ? (['NOT CHECKED'] as const) : []),
-          ...(checks.length === 0 && verdictsOf(lines).length === 0
-            ? (['NOT CHECKED'] as const)
-            : []),
-        ]);
+      : worstVerdict(found);
   const numeric = verdict === 'OK' || verdict === 'NOT OK';
-  const reason = numeric
-    ? null
-    : (halt ??
-      lines.find(
-        (l) =>
-          l.kind === 'notice' &&
-          (l.code === 'no-forces' ||
-            l.severity === (verdict === 'FAILED' ? 'failed' : 'outside scope')),
-      ) ??
-      memberLines.find((l) => l.kind === 'notice' && l.code === 'web-not-compact'));
+  const reason = numeric ? null : (halt ?? reasonOf(lines, verdict));
   const governs = numeric ? worst : reason;
   return {
     verdict,
@@ -81,6 +62,15 @@ export function combinationSummary(
       : null,
   };
 }
+
+/** The notice that a verdict without a ratio rests on. */
+const reasonOf = (lines: readonly Line[], verdict: Verdict): Line | undefined =>
+  lines.find(
+    (l) =>
+      l.kind === 'notice' &&
+      (l.code === 'no-forces' ||
+        l.severity === (verdict === 'FAILED' ? 'failed' : 'outside scope')),
+  );
 
 const rank = (s: Summary): number => (s.ratio === null ? -1 : s.ratio);
 
