@@ -49,6 +49,62 @@ export const b4FlexureFormulas = {
   minorNoncompact: limit(13, 'r', 'lambdarf', 'flange, minor-axis flexure', '1.0'),
   webCompact: limit(15, 'p', 'lambdapw', 'web in flexure', '3.76'),
   webNoncompact: limit(15, 'r', 'lambdarw', 'web in flexure', '5.70'),
+  hc: formula({
+    id: 'B4.1-hc',
+    clause: 'B4.1',
+    title: 'Clear depth of the web',
+    symbol: 'hc',
+    dimension: 'length',
+    expression: 'lambdaw*tw',
+    operands: { lambdaw: 'none', tw: 'length' },
+  }),
+  lambdahc: formula({
+    id: 'B4.1-lambdahc',
+    clause: 'B4.1',
+    title: 'Width-to-thickness ratio of the web by its compressed part',
+    symbol: 'lambdahc',
+    dimension: 'none',
+    expression: 'hc/tw',
+    operands: { hc: 'length', tw: 'length' },
+  }),
+  plasticMoment: formula({
+    id: 'B4.1b-16-Mp',
+    clause: 'B4.1',
+    equation: 'Table B4.1b, 16',
+    title: 'Plastic moment of the section',
+    symbol: 'FyZx',
+    dimension: 'moment',
+    expression: 'Fy*Zx',
+    operands: { Fy: 'stress', Zx: 'modulus' },
+  }),
+  yieldMoment: formula({
+    id: 'B4.1b-16-My',
+    clause: 'B4.1',
+    equation: 'Table B4.1b, 16',
+    title: 'Moment at which the first face yields',
+    symbol: 'My',
+    dimension: 'moment',
+    expression: 'Fy*Sx',
+    operands: { Fy: 'stress', Sx: 'modulus' },
+  }),
+  monoWebTrial: formula({
+    id: 'B4.1b-16p',
+    clause: 'B4.1',
+    equation: 'Table B4.1b, 16',
+    title: 'Compact limit of the web in flexure before its bound',
+    symbol: 'lambdapwtrial',
+    dimension: 'none',
+    expression: 'hc/hp*sqrt(E/Fy)/(0.54*Mp/My-0.09)^2',
+    operands: {
+      hc: 'length',
+      hp: 'length',
+      E: 'stress',
+      Fy: 'stress',
+      Mp: 'moment',
+      My: 'moment',
+    },
+  }),
+  monoWebNoncompact: limit(16, 'r', 'lambdarw', 'web in flexure', '5.70'),
   hssFlangeCompact: limit(17, 'p', 'lambdapf', 'flange in flexure', '1.12'),
   hssFlangeNoncompact: limit(17, 'r', 'lambdarf', 'flange in flexure', '1.40'),
   boxWebCompact: limit(19, 'p', 'lambdapw', 'webs in flexure', '2.42'),
@@ -115,6 +171,67 @@ function classOfRow(
 }
 
 const f = b4FlexureFormulas;
+
+export interface MonoWeb {
+  readonly Zx: Quantity;
+  /** The smaller of both faces. */
+  readonly Sx: Quantity;
+  readonly hc: Quantity;
+  /** Zero or less where the plastic neutral axis lies in the compression flange. */
+  readonly hp: Quantity;
+  /** hc/tw. */
+  readonly lambdahc: Quantity;
+}
+
+/**
+ * Table B4.1b row 16: web of a singly symmetric I-shape. λp is at most λr; it is λr too where the
+ * plastic neutral axis lies in the compression flange, so that the plastic stresses don't compress
+ * the web (row 16 grows beyond all bounds as hp goes to zero).
+ */
+export function monoWebClass(r: Recorder, steel: Steel, q: MonoWeb): ClassWithLimits {
+  const { E, Fy } = steel;
+  const { Zx, Sx, hc, hp, lambdahc } = q;
+  const key = 'B4/x/web';
+  const row = 'Table B4.1b, 16';
+  const lambdar = r.formula(f.monoWebNoncompact, `${key}/lambdar`, { E, Fy });
+  const stretched = r.choice(
+    `${key}/plastic`,
+    [
+      {
+        left: hp,
+        relation: '<=',
+        right: 0,
+        outcome:
+          'the plastic stresses do not compress the web: its compact limit is the noncompact one',
+      },
+    ],
+    'the plastic stresses compress a part of the web',
+    { title: 'Place of the plastic neutral axis', clause: clause('B4.1', row) },
+  );
+  if (stretched === 0) return classBy(r, key, 'web', row, lambdahc, { lambdap: lambdar, lambdar });
+  const Mp = r.formula(f.plasticMoment, `${key}/Mp`, { Fy, Zx });
+  const My = r.formula(f.yieldMoment, `${key}/My`, { Fy, Sx });
+  const trial = r.formula(f.monoWebTrial, `${key}/lambdap/trial`, { hc, hp, E, Fy, Mp, My });
+  const lambdap = r.governing(`${key}/lambdap`, 'min', [trial, lambdar], {
+    title: 'Compact limit of the web in flexure, not more than the noncompact limit',
+    symbol: 'lambdapw',
+    clause: clause('B4.1', row),
+  });
+  return classBy(r, key, 'web', row, lambdahc, { lambdap, lambdar });
+}
+
+/** Twice the compressed depth of a doubly symmetric web: its clear depth. Key `${at}/hc`. */
+export const clearDepth = (
+  r: Recorder,
+  at: string,
+  q: { readonly lambdaw: Quantity; readonly tw: Quantity },
+): Quantity => r.formula(f.hc, `${at}/hc`, { lambdaw: q.lambdaw, tw: q.tw });
+
+/** hc/tw of a singly symmetric I-shape. */
+export const compressedWebRatio = (
+  r: Recorder,
+  q: { readonly hc: Quantity; readonly tw: Quantity },
+): Quantity => r.formula(f.lambdahc, 'B4/x/web/lambdahc', { hc: q.hc, tw: q.tw });
 
 /** Table B4.1b row 10: flange of a rolled I-shape or a channel, major-axis flexure. */
 export const rolledFlangeClass = (r: Recorder, steel: Steel, lambdaf: Quantity): ClassWithLimits =>

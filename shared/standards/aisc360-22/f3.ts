@@ -43,7 +43,7 @@ export interface FlangeLocalBuckling {
   readonly lambdaf: Quantity;
   readonly lambdaw: Quantity;
   /** Where the flange's limit has already taken it (built-up shapes). */
-  readonly kc?: Quantity;
+  readonly kc?: Quantity | null;
 }
 
 /** F3.2; null for a compact flange, where it does not apply. */

@@ -3,7 +3,7 @@ import type { Recorder } from '../../calc/recorder.ts';
 import type { ClassWithLimits } from './b4-flexure.ts';
 import { clause, formula } from './writer.ts';
 
-// F6 I-shapes bent about the minor axis.
+// F6 I-shapes and channels bent about the minor axis.
 export const f6Formulas = {
   plastic: formula({
     id: 'F6-1',
