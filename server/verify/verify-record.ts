@@ -108,6 +108,7 @@ function memberProblems(
       member,
       placed: p,
       input: input?.members.find((m) => m.id === member.id) ?? null,
+      basis: input,
       constants: input?.constants ?? record.units,
       valued: (ref) => {
         const line = before.get(addressOf(ref, p.combination))?.line;

@@ -10,8 +10,9 @@ export function* checkGiven(line: LineOf<'given'>, context: LineContext): Iterab
   if (!read.ok) yield `typed "${line.typed}" ${read.reason}`;
   else if (read.quantity.value !== line.value)
     yield `is ${line.value} in base units, but "${line.typed}" is ${read.quantity.value}`;
-  if (!context.input) return;
-  const given = givenIn(context.input, context.placed.combination, line.key);
+  const { input, basis, placed } = context;
+  if (!input || !basis) return;
+  const given = givenIn(basis, input, placed.combination, line.key);
   if (!given) {
     yield 'is not among the values of the input';
     return;

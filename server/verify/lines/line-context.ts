@@ -2,7 +2,7 @@ import type { PlacedLine } from '#shared/calc/address.ts';
 import type { Formula } from '#shared/calc/formula.ts';
 import type { Line, ValuedLine } from '#shared/calc/line.ts';
 import type { CalculationRecord, MemberRecord } from '#shared/calc/record.ts';
-import type { ResolvedMember } from '#shared/members/resolved.ts';
+import type { ResolvedInput, ResolvedMember } from '#shared/members/resolved.ts';
 
 /** What checking a line needs to know of the record around it. */
 export interface LineContext {
@@ -11,6 +11,8 @@ export interface LineContext {
   readonly placed: PlacedLine;
   /** The member in the record's own input, read again; null where that is no input. */
   readonly input: ResolvedMember | null;
+  /** The whole of that input. */
+  readonly basis: ResolvedInput | null;
   /** Which published set of material constants the input pins. */
   readonly constants: 'us' | 'si';
   /** The line a reference leads to if it has a value and stands before this one. */

@@ -10,11 +10,17 @@ export function* checkStatement(
 ): Iterable<string> {
   if (line.key === 'given/section' && line.statement !== member.section)
     yield `says ${line.statement}, but the member is ${member.section}`;
+  const restraint = input?.restraints?.find((r) => line.key === `given/${r.id}/holds`);
   const stated =
-    line.key === 'given/section' ? input?.section : line.key === 'given/ends' ? input?.ends : null;
+    restraint ??
+    (line.key === 'given/section'
+      ? input?.section
+      : line.key === 'given/ends'
+        ? input?.ends
+        : null);
   if (!stated) return;
-  if (line.key === 'given/section' && stated.value !== line.statement)
-    yield `says ${line.statement}, but the input says ${stated.value}`;
+  if (line.key === 'given/section' && input && input.section.value !== line.statement)
+    yield `says ${line.statement}, but the input says ${input.section.value}`;
   if (stated.confirmed !== line.confirmed)
     yield `says ${stateWord(line.confirmed)}, but the input says ${stateWord(stated.confirmed)}`;
   if (canonicalText(stated.source) !== canonicalText(line.source))
