@@ -180,10 +180,7 @@ function writerOf(prefix: '' | ':', part: string, lines: Line[], keys: Set<strin
           throw new Error(
             `${formula.id}: ${name} is ${operands[name]?.dimension}, not ${dimension}`,
           );
-      const value = withoutNoise(
-        formula.expression.evaluate(valuesOf(operands)),
-        formula.dimension,
-      );
+      const value = withoutNoise(formula.expression.settle(valuesOf(operands)), formula.dimension);
       if (!Number.isFinite(value)) {
         notice(
           `${key}/failed`,

@@ -4,7 +4,6 @@ import {
   addDependencies,
   atan2Dependencies,
   atanDependencies,
-  atanhDependencies,
   cosDependencies,
   coshDependencies,
   create,
@@ -46,7 +45,6 @@ const used = {
   acosDependencies,
   atanDependencies,
   atan2Dependencies,
-  atanhDependencies,
   absDependencies,
 };
 const math = create(used as FactoryFunctionMap);
@@ -69,7 +67,6 @@ export const FUNCTIONS = [
   'acos',
   'atan',
   'atan2',
-  'atanh',
   'abs',
   'Phi2',
   'Phi3',
@@ -114,7 +111,12 @@ export interface ParsedExpression {
   readonly symbols: readonly string[];
   /** Value at these operands; not a finite number where the formula has none. */
   evaluate(operands: Readonly<Record<string, number>>): number;
+  /** As `evaluate`, but a sum whose terms cancel, all but their last bits, is zero. */
+  settle(operands: Readonly<Record<string, number>>): number;
 }
+
+/** What is left of cancelled terms is their rounding below this share of the largest one. */
+const LAST_BITS = 5e-13;
 
 const cache = new Map<string, ParsedExpression>();
 
@@ -125,15 +127,34 @@ export function parseExpression(text: string): ParsedExpression {
   const node = math.parse(text);
   const tree = Object.freeze(fromNode(node, text, literals(text)));
   const code = node.compile();
+  const terms = termsOf(node).map((term) => term.compile());
+  const evaluate: ParsedExpression['evaluate'] = (operands) =>
+    Number(code.evaluate({ ...operands, pi: Math.PI }));
   const parsed: ParsedExpression = Object.freeze({
     text,
     tree,
     symbols: Object.freeze([...symbolsOf(tree)]),
-    evaluate: (operands: Readonly<Record<string, number>>) =>
-      Number(code.evaluate({ ...operands, pi: Math.PI })),
+    evaluate,
+    settle: (operands: Readonly<Record<string, number>>) => {
+      const value = evaluate(operands);
+      if (terms.length < 2 || !Number.isFinite(value)) return value;
+      const sizes = terms.map((term) =>
+        Math.abs(Number(term.evaluate({ ...operands, pi: Math.PI }))),
+      );
+      return Math.abs(value) <= LAST_BITS * Math.max(...sizes) ? 0 : value;
+    },
   });
   cache.set(text, parsed);
   return parsed;
+}
+
+/** The terms of a sum, without their signs; an expression that is no sum is its one term. */
+function termsOf(node: MathNode): MathNode[] {
+  if (node.type === 'ParenthesisNode') return termsOf((node as unknown as ParenthesisLike).content);
+  const { fn, args } = node as unknown as OperatorLike;
+  return node.type === 'OperatorNode' && (fn === 'add' || fn === 'subtract')
+    ? args.flatMap(termsOf)
+    : [node];
 }
 
 /** Number literals as written, in order; mathjs keeps their values only, and `5.70` prints as such. */

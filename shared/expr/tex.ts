@@ -33,7 +33,6 @@ const CALLS: Record<Exclude<FunctionName, 'sqrt' | 'abs'>, string> = {
   acos: '\\arccos',
   atan: '\\arctan',
   atan2: '\\operatorname{atan2}',
-  atanh: '\\operatorname{artanh}',
   Phi2: '\\Phi_{2}',
   Phi3: '\\Phi_{3}',
   Phi4: '\\Phi_{4}',
@@ -134,8 +133,9 @@ const isBareValue = (e: Expr, leaf: LeafOf): boolean => {
 function factor(e: Expr, leaf: LeafOf, inline: boolean, first: boolean): string {
   if (e.kind === 'binary' && e.op === '*' && first) return print(e, leaf, inline);
   const tex = print(e, leaf, inline);
-  const found = leafOf(e, leaf);
-  const later = !first && found !== null && found.kind === 'value';
+  // So does a power of a value, unless its base stands in brackets already.
+  const raised = e.kind === 'binary' && e.op === '^' && !isBareValue(e.left, leaf) ? e.left : e;
+  const later = !first && leafOf(raised, leaf)?.kind === 'value';
   // `sin kL` before a factor would take it in; `sin(kL/2)` closes itself.
   const openCall = first && e.kind === 'call' && printsBare(e.fn, e.args, leaf);
   const quotient = inline && e.kind === 'binary' && e.op === '/' && !first;

@@ -4,7 +4,6 @@ import type { Expr, FunctionName } from './parse.ts';
 const NAMES: Readonly<Partial<Record<FunctionName, string>>> = {
   acos: 'arccos',
   atan: 'arctan',
-  atanh: 'artanh',
   Phi2: 'Φ₂',
   Phi3: 'Φ₃',
   Phi4: 'Φ₄',

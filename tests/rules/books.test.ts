@@ -121,7 +121,6 @@ const textValue = (text: string): number =>
         .replace(/√/g, 'sqrt')
         .replace(/arccos/g, 'acos')
         .replace(/arctan/g, 'atan')
-        .replace(/artanh/g, 'atanh')
         .replace(/Φ([₂₃₄₅])/g, (_, n: string) => `Phi${'₀₁₂₃₄₅'.indexOf(n)}`)
         .replace(/\|([^|]*)\|/g, 'abs($1)'),
     ),

@@ -84,10 +84,7 @@ const MARKS: readonly (readonly [RegExp, (found: string, c: Characters) => Node[
   ],
   [/\\sqrt/y, (_, c) => [{ kind: 'root', of: nodesOf(group(c)) }]],
   [/\^/y, (_, c) => [{ kind: 'raised', by: nodesOf(group(c)) }]],
-  [
-    /\\operatorname\{(?:atan2|artanh)\}/y,
-    (found) => [{ kind: 'function', name: found.slice('\\operatorname{'.length, -1) }],
-  ],
+  [/\\operatorname\{atan2\}/y, () => [{ kind: 'function', name: 'atan2' }]],
   [
     /\\(?:sinh?|cosh?|tanh?|arccos|arctan|Phi_\{\d\})(?![a-z])/y,
     (found) => [{ kind: 'function', name: found.slice(1) }],
@@ -124,7 +121,6 @@ const CALLS: Readonly<Record<string, (a: number, b: number) => number>> = {
   arccos: Math.acos,
   arctan: Math.atan,
   atan2: Math.atan2,
-  artanh: Math.atanh,
   'Phi_{2}': (x) => seriesFunction(2, x),
   'Phi_{3}': (x) => seriesFunction(3, x),
   'Phi_{4}': (x) => seriesFunction(4, x),

@@ -106,8 +106,8 @@ export type FirstOrderBay = (r: Recorder, at: string, bay: Bay) => BayResult;
 /**
  * Writes the lines of a bay with axial force under `${at}/`. Compression: αP must be below Pe1; at or
  * above it answers 'failed' and writes nothing, for the caller has said so (`belowCriticalLoad`).
- * 'outside scope', with a notice: loads in a bay under so much tension that kL exceeds 20; its
- * moments are then those of a tie, to be taken from first order or another analysis.
+ * 'outside scope', with a notice: a bay under so much tension that kL exceeds 10
+ * (T above ten times Pe1); it carries load as a tie, and the first-order moments stand.
  */
 export type SecondOrderBay = (
   r: Recorder,

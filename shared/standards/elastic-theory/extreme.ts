@@ -1,39 +1,36 @@
-import { byOrder, type Order } from './transfer.ts';
 import { formula } from './writer.ts';
 
 /*
- * The extreme moment of a stretch without load or with a uniform one, between whose ends the shear
- * changes sign. M′² + k²M² + 2wM is the same all along the stretch, so the moment there is
- * Mi + Vi²/h, h = g ± √(g² + k²Vi²), g = w + k²Mi, with + for a crest (Vi > 0) and − for a trough,
- * and tan(kξ/2) = kVi/h. Where g and the root have opposite signs, h is written k²Vi²/(±√… − g), which
- * doesn't cancel. In tension k² is negative, and g has the sign of the root. By hand.
+ * The extreme moment of a stretch between whose ends the shear changes sign: without load or with a
+ * uniform one, in first order and in compression. M′² + k²M² + 2wM is the same all along the stretch,
+ * so the moment there is Mi + Vi²/h, h = g ± √(g² + k²Vi²), g = w + k²Mi, with + for a crest (Vi > 0)
+ * and − for a trough, and tan(kξ/2) = kVi/h. Where g and the root have opposite signs, h is written
+ * k²Vi²/(±√… − g), which doesn't cancel. First order: h = 2w. By hand.
  */
-const SQUARE = { compression: '(kL/L1)^2', tension: '-(kL/L1)^2' } as const;
 const ROOT = 'sqrt(gi^2+(kL*Vi/L1)^2)';
-type Axial = Exclude<Order, 'first'>;
 
-const g = (order: Axial, loaded: boolean) =>
-  formula({
-    id: `g-${order}${loaded ? '-uniform' : ''}`,
+/** k² Mi, and the load. */
+export const startLoad = {
+  none: formula({
+    id: 'g',
     clause: '2.1',
-    title: loaded
-      ? 'Load with that of the axial force on the bent axis, at the start of the stretch'
-      : 'Load of the axial force on the bent axis, at the start of the stretch',
+    title: 'Load of the axial force on the bent axis, at the start of the stretch',
     symbol: 'gi',
     dimension: 'lineLoad',
-    expression: loaded ? `wi${order === 'tension' ? '-' : '+'}(kL/L1)^2*Mi` : `${SQUARE[order]}*Mi`,
-    operands: {
-      ...(loaded ? ({ wi: 'lineLoad' } as const) : {}),
-      kL: 'angle',
-      L1: 'length',
-      Mi: 'moment',
-    },
+    expression: '(kL/L1)^2*Mi',
+    operands: { kL: 'angle', L1: 'length', Mi: 'moment' },
     prints: 'display',
-  });
-
-export const startLoad = {
-  compression: { none: g('compression', false), uniform: g('compression', true) },
-  tension: { none: g('tension', false), uniform: g('tension', true) },
+  }),
+  uniform: formula({
+    id: 'g-uniform',
+    clause: '2.1',
+    title: 'Load with that of the axial force on the bent axis, at the start of the stretch',
+    symbol: 'gi',
+    dimension: 'lineLoad',
+    expression: 'wi+(kL/L1)^2*Mi',
+    operands: { wi: 'lineLoad', kL: 'angle', L1: 'length', Mi: 'moment' },
+    prints: 'display',
+  }),
 };
 
 const h = (id: string, title: string, expression: string) =>
@@ -48,53 +45,37 @@ const h = (id: string, title: string, expression: string) =>
     prints: 'display',
   });
 
-/** Compression; `against`: g has the other sign than the root. */
+/** `Against`: g has the other sign than the root. */
 export const auxiliaryLoad = {
-  compression: {
-    crest: h('crest', 'Auxiliary load of the crest', `gi+${ROOT}`),
-    crestAgainst: h('crest-against', 'Auxiliary load of the crest', `(kL*Vi/L1)^2/(${ROOT}-gi)`),
-    trough: h('trough', 'Auxiliary load of the trough', `gi-${ROOT}`),
-    troughAgainst: h(
-      'trough-against',
-      'Auxiliary load of the trough',
-      `-(kL*Vi/L1)^2/(${ROOT}+gi)`,
-    ),
-  },
-  tension: {
-    crest: h(
-      'crest-tension',
-      'Auxiliary load of the crest',
-      'gi+sqrt((gi-kL*Vi/L1)*(gi+kL*Vi/L1))',
-    ),
-    trough: h(
-      'trough-tension',
-      'Auxiliary load of the trough',
-      'gi-sqrt((gi-kL*Vi/L1)*(gi+kL*Vi/L1))',
-    ),
-  },
+  crest: h('crest', 'Auxiliary load of the crest', `gi+${ROOT}`),
+  crestAgainst: h('crest-against', 'Auxiliary load of the crest', `(kL*Vi/L1)^2/(${ROOT}-gi)`),
+  trough: h('trough', 'Auxiliary load of the trough', `gi-${ROOT}`),
+  troughAgainst: h('trough-against', 'Auxiliary load of the trough', `-(kL*Vi/L1)^2/(${ROOT}+gi)`),
 };
 
-const distance = (order: Order) =>
-  formula({
-    id: `extreme-xi-${order}`,
+export const extremeDistance = {
+  first: formula({
+    id: 'extreme-xi-first',
     clause: '2.1',
-    title: 'Its distance from the start of the stretch',
+    title: 'Distance of the extreme from the start of the stretch',
     symbol: 'xi',
     dimension: 'length',
-    expression: {
-      first: 'Vi/wi',
-      compression: '2*L1*atan(kL*Vi/(L1*hi))/kL',
-      tension: '2*L1*atanh(kL*Vi/(L1*hi))/kL',
-    }[order],
-    operands:
-      order === 'first'
-        ? { Vi: 'force', wi: 'lineLoad' }
-        : { L1: 'length', kL: 'angle', Vi: 'force', hi: 'lineLoad' },
+    expression: 'Vi/wi',
+    operands: { Vi: 'force', wi: 'lineLoad' },
     prints: 'display',
-  });
-export const extremeDistance = byOrder(distance);
+  }),
+  compression: formula({
+    id: 'extreme-xi',
+    clause: '2.1',
+    title: 'Distance of the extreme from the start of the stretch',
+    symbol: 'xi',
+    dimension: 'length',
+    expression: '2*L1*atan(kL*Vi/(L1*hi))/kL',
+    operands: { L1: 'length', kL: 'angle', Vi: 'force', hi: 'lineLoad' },
+    prints: 'display',
+  }),
+};
 
-/** Auxiliary load is 2w in first order. */
 export const extremeMoment = {
   first: formula({
     id: 'extreme-M-first',
@@ -106,7 +87,7 @@ export const extremeMoment = {
     operands: { Mi: 'moment', Vi: 'force', wi: 'lineLoad' },
     prints: 'display',
   }),
-  second: formula({
+  compression: formula({
     id: 'extreme-M',
     clause: '2.1',
     title: 'Extreme moment in the stretch',
@@ -130,9 +111,8 @@ export const placeFromStart = formula({
 });
 
 export const extremeFormulas = [
-  ...Object.values(startLoad).flatMap((o) => Object.values(o)),
-  ...Object.values(auxiliaryLoad.compression),
-  ...Object.values(auxiliaryLoad.tension),
+  ...Object.values(startLoad),
+  ...Object.values(auxiliaryLoad),
   ...Object.values(extremeDistance),
   ...Object.values(extremeMoment),
   placeFromStart,

@@ -1,3 +1,4 @@
+import type { Formula } from '../../calc/formula.ts';
 import type { Quantity } from '../../calc/quantity.ts';
 import type { Recorder } from '../../calc/recorder.ts';
 import {
@@ -9,7 +10,7 @@ import {
 } from './extreme.ts';
 import { type OrderOf, operandsAt, type SolvedStretch, withSeries } from './solve-stretches.ts';
 import { numbered } from './stretches.ts';
-import { momentAt, shearAt, turningShear, zeroShear } from './transfer.ts';
+import { type LoadShape, momentAt, shearAt, turningShear, zeroShear } from './transfer.ts';
 import { clause } from './writer.ts';
 
 /** A moment inside a stretch where the shear is zero, with its sign, and its place from end A. */
@@ -52,7 +53,11 @@ function extremesOf(f: Found): InnerExtreme[] {
   }
   const word = Vi.value >= 0 ? 'crest' : 'trough';
   if (!shearChanges(f, word)) return [];
-  return [load.shape === 'linear' ? rootExtreme(f, '', [0, length.value]) : closedExtreme(f, word)];
+  return [
+    load.shape === 'linear' || f.solution.order === 'tension'
+      ? rootExtreme(f, '', [0, length.value])
+      : closedExtreme(f, word),
+  ];
 }
 
 /** Whether the shear, which doesn't turn, is zero inside the stretch. */
@@ -94,7 +99,7 @@ function turnChanges({ r, at, s }: Found, V: Quantity): boolean {
   );
 }
 
-/** Without load, or under a uniform one. */
+/** Without load or under a uniform one, in first order and in compression. */
 function closedExtreme({ r, at, L1, solution, s }: Found, word: 'crest' | 'trough'): InnerExtreme {
   const { Mi, Vi, stretch } = s;
   const { index, load } = stretch;
@@ -111,30 +116,26 @@ function closedExtreme({ r, at, L1, solution, s }: Found, word: 'crest' | 'troug
     );
     return { place, M: r.formula(extremeMoment.first, `${at}/Me${index}`, known, words) };
   }
-  const { order, kL } = solution;
+  const { kL } = solution;
   const gi = r.formula(
-    startLoad[order][wi ? 'uniform' : 'none'],
+    startLoad[wi ? 'uniform' : 'none'],
     `${at}/g${index}`,
     { kL, L1, Mi, ...(wi ? { wi } : {}) },
     { symbol: numbered('g', index) },
   );
   const against = word === 'crest' ? gi.value < 0 : gi.value > 0;
-  const auxiliary =
-    order === 'tension'
-      ? auxiliaryLoad.tension[word]
-      : auxiliaryLoad.compression[against ? (`${word}Against` as const) : word];
   const hi = r.formula(
-    auxiliary,
+    auxiliaryLoad[against ? (`${word}Against` as const) : word],
     `${at}/h${index}`,
     { gi, kL, Vi, L1 },
     { symbol: numbered('h', index) },
   );
   const { place } = placed(r, at, stretch, (key, named) =>
-    r.formula(extremeDistance[order], key, { L1, kL, Vi, hi }, { ...title, ...named }),
+    r.formula(extremeDistance.compression, key, { L1, kL, Vi, hi }, { ...title, ...named }),
   );
   return {
     place,
-    M: r.formula(extremeMoment.second, `${at}/Me${index}`, { Mi, Vi, hi }, words),
+    M: r.formula(extremeMoment.compression, `${at}/Me${index}`, { Mi, Vi, hi }, words),
   };
 }
 
@@ -157,17 +158,17 @@ function placed(
   return { xi, place: r.formula(placeFromStart, key, { zi: from, xi }, { title, symbol }) };
 }
 
-/** Under a varying load: the root of the shear between the bounds, and the moment there. */
+/** Without a closed form: the root of the shear between the bounds, and the moment there. */
 function rootExtreme(
   { r, at, L1, solution, s }: Found,
   suffix: '' | 'b',
   bracket: readonly [number, number],
 ): InnerExtreme {
-  const { stretch, Mi, Vi } = s;
-  const { index, load, length: li } = stretch;
-  if (load.shape !== 'linear') throw new Error('a load in a straight line is needed');
-  const { wi, wj } = load;
+  const { stretch } = s;
+  const { index, load } = stretch;
   const { order, kL } = solution;
+  const zero = (zeroShear[order] as Partial<Record<LoadShape, Formula>>)[load.shape];
+  if (!zero) throw new Error(`a closed form stands for ${order}, ${load.shape}`);
   const title = `Distance of zero shear from the start of stretch ${index}`;
   const { xi, place } = placed(
     r,
@@ -175,17 +176,17 @@ function rootExtreme(
     stretch,
     (key) =>
       r.root(
-        zeroShear[order],
+        zero,
         key,
         { symbol: 'xi', dimension: 'length', bracket },
-        { ...(kL ? { Mi, kL, L1 } : {}), Vi, wi, wj, li },
+        { ...shearOperands(s), ...(kL ? { Mi: s.Mi, kL, L1 } : {}) },
         { title },
       ),
     suffix,
   );
   const key = `${at}/Me${index}${suffix}`;
   const M = r.formula(
-    momentAt[order].linear,
+    momentAt[order][load.shape],
     key,
     operandsAt(r, `${key}/k`, L1, solution, s, xi, {
       title: 'Axial parameter up to there',
@@ -198,6 +199,12 @@ function rootExtreme(
   );
   return { place, M };
 }
+
+const shearOperands = ({ Vi, stretch }: SolvedStretch): Record<string, Quantity> => {
+  const { load, length: li } = stretch;
+  if (load.shape === 'none') return { Vi };
+  return load.shape === 'uniform' ? { Vi, wi: load.wi } : { Vi, wi: load.wi, wj: load.wj, li };
+};
 
 /**
  * Where the shear of a stretch with varying load turns inside it, with the shear there; null where it

@@ -46,10 +46,10 @@ export const bayFormulas = {
 };
 
 /**
- * kL up to which the lines from end to end keep their digits in tension; the part of the start's
- * state that grows along the bay is then e¹⁵/2 times itself.
+ * kL up to which the lines from end to end keep their digits in tension: moment and shear at the
+ * start hold a part that grows along the bay and one that decays, e²⁰ apart at its end.
  */
-const MOST_KL_IN_TENSION = 15;
+const MOST_KL_IN_TENSION = 10;
 
 /** Moments of a bay with axial force, exact in elastic theory. */
 export const secondOrderBay: SecondOrderBay = (r, at, bay, axial) => {
@@ -119,7 +119,7 @@ function isWithin(r: Recorder, at: string, kL: Quantity): boolean {
       `${at}/tie`,
       'outside scope',
       'tension-beyond-beam',
-      `The tension is more than 22 times the critical load of the bay (kL above ${MOST_KL_IN_TENSION}): it carries its load as a tie does, and the elastic solution of the beam loses its digits. The first-order moments stand.`,
+      `The tension is more than ten times the critical load of the bay (kL above ${MOST_KL_IN_TENSION}): it carries its load as a tie does, and the elastic solution of the beam loses its digits. The first-order moments stand.`,
       titled,
     );
   return !beyond;

@@ -39,7 +39,7 @@ function largestShear(
     const { wi, wj } = load;
     const xi = r.root(
       turningShear.first,
-      `${key}/turn${index}`,
+      `${key}/Vturn${index}`,
       { symbol: 'xi', dimension: 'length', bracket: [0, li.value] },
       { wi, wj, li },
       { title: `Distance of the zero of the load from the start of stretch ${index}` },
@@ -49,7 +49,7 @@ function largestShear(
       ? [
           r.formula(
             shear,
-            `${key}/turn${index}/V`,
+            `${key}/Vturn${index}/V`,
             { Vi: s.Vi, wi, wj, xi, li },
             { title: 'Shear there', symbol: 'Vz' },
           ),

@@ -59,6 +59,20 @@ const SHEAR: typeof MOMENT = {
     varying: '-2*(wj-wi)*(xi*sinh(kxi/2)/kxi)^2/li',
   },
 };
+/** The shear once more, with the angles written out: its root is the distance ξ of a zero. */
+const ZERO: typeof MOMENT = {
+  first: SHEAR.first,
+  compression: {
+    state: 'Vi*cos(kL*xi/L1)-Mi*kL*sin(kL*xi/L1)/L1',
+    uniform: '-wi*L1*sin(kL*xi/L1)/kL',
+    varying: '-2*(wj-wi)*(L1*sin(kL*xi/(2*L1))/kL)^2/li',
+  },
+  tension: {
+    state: 'Vi*cosh(kL*xi/L1)+Mi*kL*sinh(kL*xi/L1)/L1',
+    uniform: '-wi*L1*sinh(kL*xi/L1)/kL',
+    varying: '-2*(wj-wi)*(L1*sinh(kL*xi/(2*L1))/kL)^2/li',
+  },
+};
 /** Change of the shear along the stretch, times −1; zero where the shear turns. */
 const TURN: typeof MOMENT = {
   first: { state: '', uniform: 'wi', varying: '+(wj-wi)*xi/li' },
@@ -130,11 +144,10 @@ export const shearAt = byOrder((order) =>
   }),
 );
 
-/** Zero shear under a varying load: its root is ξ. */
-export const zeroShear = byOrder((order) => {
-  const expression = textOf(SHEAR[order], 'linear').replaceAll('kxi', '(kL*xi/L1)');
+const zero = (order: Order, shape: LoadShape): Formula => {
+  const expression = textOf(ZERO[order], shape);
   return formula({
-    id: `zero-shear-${order}`,
+    id: `zero-shear-${order}-${shape}`,
     clause: '2.1',
     title: 'Distance of zero shear from the start of the stretch',
     symbol: 'Vz',
@@ -142,7 +155,14 @@ export const zeroShear = byOrder((order) => {
     expression,
     operands: operandsOf(expression),
   });
-});
+};
+
+/** Zero shear where no closed form stands: under a varying load, and in tension. */
+export const zeroShear = {
+  first: { linear: zero('first', 'linear') },
+  compression: { linear: zero('compression', 'linear') },
+  tension: byShape((shape) => zero('tension', shape)),
+};
 
 /** Extreme shear under a varying load: its root is ξ. */
 export const turningShear = byOrder((order) => {
@@ -161,6 +181,6 @@ export const turningShear = byOrder((order) => {
 export const transferFormulas: readonly Formula[] = ORDERS.flatMap((order) => [
   ...SHAPES.map((shape) => momentAt[order][shape]),
   ...SHAPES.flatMap((shape) => shearAt[order][shape] ?? []),
-  zeroShear[order],
+  ...Object.values<Formula>(zeroShear[order]),
   turningShear[order],
 ]);
