@@ -26,7 +26,7 @@ export const e4ConstrainedFormulas = {
     title: TITLE,
     symbol: 'Fea',
     dimension: 'stress',
-    expression: '(pi^2*E*Iy/Lcz^2*(ho^2/4+ya^2)+G*J)/(Ag*roa^2)',
+    expression: '(pi^2*E*Iy*(ho^2/4+ya^2)/Lcz^2+G*J)/(Ag*roa^2)',
     operands: {
       E: 'stress',
       Iy: 'inertia',
@@ -45,7 +45,7 @@ export const e4ConstrainedFormulas = {
     title: TITLE,
     symbol: 'Fea',
     dimension: 'stress',
-    expression: '(pi^2*E*Iy/Lcz^2*(ho^2/4+Ix/Iy*xa^2)+G*J)/(Ag*roa^2)',
+    expression: '(pi^2*E*Iy*(ho^2/4+Ix*xa^2/Iy)/Lcz^2+G*J)/(Ag*roa^2)',
     operands: {
       E: 'stress',
       Iy: 'inertia',
