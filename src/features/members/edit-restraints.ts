@@ -1,5 +1,5 @@
 import type { DraftRestraint } from '#shared/contracts/draft-parts.ts';
-import type { MemberDraft } from '#shared/contracts/members.ts';
+import type { DraftCombination, MemberDraft } from '#shared/contracts/members.ts';
 import type { Hold } from '#shared/members/restraint-input.ts';
 import { parseQuantity } from '#shared/units/parse.ts';
 import { freshId } from './fresh-id.ts';
@@ -67,6 +67,11 @@ export function withOrder(draft: MemberDraft): MemberDraft {
     ? draft
     : { ...draft, restraints: ordered };
 }
+
+/** Whether the forces or loads of a combination bend the member about an axis. */
+export const bendsAbout = (row: DraftCombination, axis: 'x' | 'y'): boolean =>
+  (['A', 'B', 'Max'] as const).some((end) => row[`M${axis}${end}`].text.trim() !== '') ||
+  (row.loads ?? []).some(({ bends }) => bends === axis);
 
 /** Whether a restraint supports the member in the plane in which it bends about an axis. */
 export const holdsAcross = ({ holds }: DraftRestraint, axis: 'x' | 'y'): boolean =>

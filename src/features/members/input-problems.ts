@@ -38,6 +38,7 @@ const choices: readonly (readonly [RegExp, string])[] = [
   [/\.sidesway$/, 'is needed: whether the story is held'],
   [/\.frames$/, 'is needed: what of the load moment frames carry'],
   [/^section\.wall$/, 'is needed: what the thickness is'],
+  [/\.height$/, 'is needed: where on the section the load acts'],
   [/\.holds$/, 'is needed: what is held there'],
 ];
 

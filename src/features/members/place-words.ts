@@ -53,7 +53,7 @@ function partWords(path: string): string {
   const field = names[0] ?? '';
   switch (head) {
     case 'restraints':
-      return `Point ${number} held, ${field === 'at' ? 'from end A' : fieldWords(field)}`;
+      return `Point r${number}, ${field === 'at' ? 'distance from end A' : fieldWords(field)}`;
     case 'loads':
       return `load ${number}, ${field in loadWords ? named(loadWords[field as LoadText]) : fieldWords(field)}`;
     case 'supports':

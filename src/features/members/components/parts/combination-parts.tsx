@@ -79,19 +79,19 @@ function CombinationPartLinks(props: { row: DraftCombination; at: string; withSw
       },
     points.length > 0 &&
       !row.supports && {
-        text: 'moments over the points held',
+        text: 'moments over held points',
         open: () => edit(opened({ supports: [] }), `${row.id}/supports/open`),
         first: `${at}.supports[${points[0]?.id}].Mx`,
       },
     !row.Vx &&
       !row.Vy && {
-        text: 'shear forces from the analysis',
+        text: 'shear forces',
         open: () => edit(opened({ Vx: notGiven, Vy: notGiven }), `${row.id}/shears/open`),
         first: `${at}.Vx`,
       },
     props.withSway &&
       !row.sway && {
-        text: 'the sway of its story',
+        text: 'sway',
         open: () => edit(withSway(draft, row.id, { P: notGiven }), `${row.id}/sway/open`),
         first: `${at}.sway.P`,
       },

@@ -9,12 +9,12 @@ export function MemberPartLinks() {
   const { draft, edit } = useMemberForm();
   const links: (PartLink | false)[] = [
     draft.restraints === undefined && {
-      text: 'points held between the ends',
+      text: 'held points',
       open: () => edit(withNewRestraint(draft), 'restraints/open'),
       first: 'restraints[0].at',
     },
     draft.charts === undefined && {
-      text: 'joints for the alignment chart',
+      text: 'joints by alignment chart',
       open: () => edit(withChart(draft, 'x', noJoints), 'charts/open'),
       first: 'charts.x.sidesway',
     },
@@ -24,7 +24,7 @@ export function MemberPartLinks() {
       first: 'netSection.by',
     },
     draft.sizes === undefined && {
-      text: 'a section by its sizes',
+      text: 'sizes of its own',
       open: () => edit({ ...draft, sizes: noSizes }, 'sizes/open'),
       first: 'section.d',
     },

@@ -1,5 +1,4 @@
 import { Fragment, type ReactNode, useId } from 'react';
-import { Button } from '#client/ui/button.tsx';
 import { useMemberForm } from '../member-form-context.ts';
 import { focusControl } from '../stale-notice.tsx';
 
@@ -14,15 +13,14 @@ export function Part(props: { title: string; onRemove?: () => void; children: Re
           {props.title}
         </h2>
         {editable && props.onRemove && (
-          <Button
-            size="small"
-            rank="quiet"
+          <button
+            type="button"
             aria-label={`Remove ${props.title.toLowerCase()}`}
             onClick={props.onRemove}
-            className="-mr-2"
+            className="link font-condensed text-small text-zinc-7"
           >
             Remove
-          </Button>
+          </button>
         )}
       </div>
       {props.children}

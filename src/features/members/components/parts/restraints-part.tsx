@@ -64,7 +64,7 @@ export function RestraintsPart({ units }: { units: 'us' | 'si' }) {
 }
 
 const distance = (number: number) =>
-  words(`Point ${number}`, 'z', 'from end A', 'Distance from end A.', false);
+  words(`Point r${number}`, 'z', 'from end A', 'Distance from end A.', false);
 
 function RestraintRow(props: { row: DraftRestraint; index: number; units: 'us' | 'si' }) {
   const { row, index } = props;
@@ -102,16 +102,18 @@ function RestraintRow(props: { row: DraftRestraint; index: number; units: 'us' |
           )
         }
       />
-      <WordChoice
-        id={id}
-        label={`Held at ${called}`}
-        words={holdWords}
-        chosen={row.holds}
-        invalid={problem !== undefined}
-        describedBy={problem ? `${id}-problem` : undefined}
-        disabled={!editable}
-        onChoose={(hold) => edit(withHold(draft, row, hold), `restraints/${row.id}/${hold}`)}
-      />
+      <div className="mt-0.5">
+        <WordChoice
+          id={id}
+          label={`Held at ${called}`}
+          words={holdWords}
+          chosen={row.holds}
+          invalid={problem !== undefined}
+          describedBy={problem ? `${id}-problem` : undefined}
+          disabled={!editable}
+          onChoose={(hold) => edit(withHold(draft, row, hold), `restraints/${row.id}/${hold}`)}
+        />
+      </div>
       {problem && <ProblemText id={`${id}-problem`}>{readable(problem)}</ProblemText>}
     </li>
   );

@@ -1,7 +1,7 @@
 import { notGiven } from '#shared/contracts/draft-quantity.ts';
 import type { DraftCombination } from '#shared/contracts/members.ts';
 import { withoutSupports, withSupport } from '../../edit-loads.ts';
-import { holdsAcross, restraintsOf } from '../../edit-restraints.ts';
+import { bendsAbout, holdsAcross, restraintsOf } from '../../edit-restraints.ts';
 import { words } from '../../member-fields.ts';
 import { useMemberForm } from '../member-form-context.ts';
 import { QuantityRow } from '../quantity-row.tsx';
@@ -18,21 +18,21 @@ export function SupportsPart(props: { row: DraftCombination; at: string; units: 
   const { draft, edit, problemAt } = useMemberForm();
   const points = restraintsOf(draft);
   const supports = row.supports ?? [];
-  const continuous = points.some((point) => holdsAcross(point, 'x'));
-  if (!row.supports && !continuous) return null;
   const rows = points.flatMap((point) =>
     axes.flatMap(({ axis, name, label }) => {
       const index = supports.findIndex(({ restraint }) => restraint === point.id);
       const quantity = supports[index]?.[name] ?? notGiven;
-      if (!holdsAcross(point, axis) && quantity.text === '') return [];
+      const asked = holdsAcross(point, axis) && (row.supports || bendsAbout(row, axis));
+      if (!asked && quantity.text === '') return [];
       const path = `${at}.supports[${index < 0 ? point.id : index}].${name}`;
       return [{ key: `${point.id}/${name}`, point, name, label, quantity, path }];
     }),
   );
   const left = supports.filter(({ restraint }) => !points.some(({ id }) => id === restraint));
+  if (rows.length === 0 && left.length === 0 && !row.supports) return null;
   return (
     <Part
-      title="Moments over the points held"
+      title="Moments over the held points"
       {...(row.supports
         ? { onRemove: () => edit(withoutSupports(draft, row.id), `${row.id}/supports/remove`) }
         : {})}
