@@ -14,6 +14,7 @@ const DIMENSION_OF: Readonly<Record<string, DimensionName>> = {
   'in²': 'area',
   'in³': 'modulus',
   'in⁴': 'inertia',
+  'in⁶': 'warping',
   kip: 'force',
   ksi: 'stress',
   'kip ft': 'moment',

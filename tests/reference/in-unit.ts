@@ -11,6 +11,7 @@ export const UNIT_SIZES: Readonly<Record<string, number>> = {
   'in²': IN ** 2,
   'in³': IN ** 3,
   'in⁴': IN ** 4,
+  'in⁶': IN ** 6,
   kip: KIP,
   ksi: KIP / IN ** 2,
   'kip in': KIP * IN,
