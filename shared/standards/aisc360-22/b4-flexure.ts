@@ -94,7 +94,7 @@ export const b4FlexureFormulas = {
     title: 'Compact limit of the web in flexure before its bound',
     symbol: 'lambdapwtrial',
     dimension: 'none',
-    expression: 'hc/hp*sqrt(E/Fy)/(0.54*Mp/My-0.09)^2',
+    expression: 'hc*sqrt(E/Fy)/(hp*(0.54*Mp/My-0.09)^2)',
     operands: {
       hc: 'length',
       hp: 'length',

@@ -188,12 +188,12 @@ const single = {
     dimension: 'length',
     expression: '1.95*rt*E/FL*sqrt(J/(Sxc*ho)+sqrt((J/(Sxc*ho))^2+6.76*(FL/E)^2))',
     operands: {
-      rt: 'length',
-      E: 'stress',
-      FL: 'stress',
       J: 'inertia',
       Sxc: 'modulus',
       ho: 'length',
+      rt: 'length',
+      E: 'stress',
+      FL: 'stress',
     },
   }),
   LrWithoutJ: formula({
