@@ -18,7 +18,7 @@ export const e7RoundFormulas = {
     clause: 'E7.2',
     equation: 'E7-7',
     title: 'Effective area, slender wall',
-    symbol: 'Ae',
+    symbol: 'Aetrial',
     dimension: 'area',
     expression: '(0.038*E/(Fy*lambda)+2/3)*Ag',
     operands: { E: 'stress', Fy: 'stress', lambda: 'none', Ag: 'area' },
@@ -50,13 +50,21 @@ export function roundWithinRules(
   return false;
 }
 
-/** E7-7; it does not depend on Fn, so the same area serves Pn and Pns. */
-export const roundEffectiveArea = (
+/**
+ * E7-7, not more than Ag: just above its limit E7-7 gives 1.2 % more than the whole section. It does
+ * not depend on Fn, so the same area serves Pn and Pns.
+ */
+export function roundEffectiveArea(
   r: Recorder,
   steel: { readonly E: Quantity; readonly Fy: Quantity },
   lambdad: Quantity,
   Ag: Quantity,
-): Quantity => {
+): Quantity {
   const { E, Fy } = steel;
-  return r.formula(e7RoundFormulas.area, 'E7/Ae', { E, Fy, lambda: lambdad, Ag });
-};
+  const trial = r.formula(e7RoundFormulas.area, 'E7/wall/Ae', { E, Fy, lambda: lambdad, Ag });
+  return r.governing('E7/Ae', 'min', [trial, Ag], {
+    title: 'Effective area, not more than the whole',
+    symbol: 'Ae',
+    clause: clause('E7.2', 'E7-7'),
+  });
+}

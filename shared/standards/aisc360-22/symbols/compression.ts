@@ -16,6 +16,7 @@ export const compression = {
   Feft: symbol('F_{e,ft}', 'elastic flexural-torsional buckling stress', 'stress'),
   Fea: symbol('F_{e,a}', 'elastic torsional buckling stress about the lateral restraint', 'stress'),
   cubic: symbol('f(F_e)', 'left side of E4-4 over the product of the three stresses'),
+  Aetrial: symbol('A_{e,calc}', 'effective area before its limit', 'area'),
   lambdaend: symbol('0.45E/F_y', 'slenderness of a round wall at which the rules end'),
   b2: symbol('b_2', 'width of the other flange', 'length'),
   be2: symbol('b_{e,2}', 'effective width of the other flange', 'length'),
