@@ -14,8 +14,9 @@ import { clause } from '../standards/aisc360-22/writer.ts';
 import type { Axis } from './bay-moments.ts';
 import type { MemberStrengths } from './combination.ts';
 import { destabilisingLoad } from './load-height.ts';
-import { segmentStrength } from './major-strengths.ts';
+import { type Side, segmentStrength } from './major-strengths.ts';
 import { automaticCb } from './modification-factor.ts';
+import { optionalChecks } from './optional-checks.ts';
 import type { PlaneMoments } from './plane-moments.ts';
 import type { ResolvedCombination } from './resolved.ts';
 import { segmentCb } from './segment-cb.ts';
@@ -77,10 +78,11 @@ function checkSegment(
   const exactMoments = m.input.analysis.secondOrder === 'exact';
   const Mx = largestIn(segment, m, x, exactMoments);
   const My = largestIn(segment, m, y, exactMoments);
-  const Mcx =
+  const capacity =
     Mx && Mx.value > 0 && Lb
       ? majorCapacity(m, c, segment, Lb, x, { axial, clause: number, compressed })
-      : null;
+      : NO_CAPACITY;
+  const { Mcx } = capacity;
   const major: Flexure | null = Mx && Mx.value > 0 && Mcx ? { Mr: Mx, Mc: Mcx } : null;
   const minor: Flexure | null = My && My.value > 0 && m.Mcy ? { Mr: My, Mc: m.Mcy } : null;
   const lacking = lackingStrengths(r, { unknown, Mx, My, Mcx, Mcy: m.Mcy });
@@ -92,7 +94,9 @@ function checkSegment(
   }
   if (!axial && !major && !minor) return [];
   r.section('H1', 'Checks', clause(number));
-  const checks = interactionChecks(r, axial, major, minor, number);
+  const checks =
+    optionalChecks(m, segment, { axial, compressed, major, minor, Lb, ...capacity }) ??
+    interactionChecks(r, axial, major, minor, number);
   if (compressed && axial) besideExact(m, segment, axial, { x, y }, { major, minor });
   return checks;
 }
@@ -133,6 +137,14 @@ function lackingStrengths(
   return lacking.includes(true);
 }
 
+interface Capacity {
+  readonly Mcx: Quantity | null;
+  /** Modification factor, where the strength needed one. */
+  readonly Cb: Quantity | null;
+  readonly sides: readonly Side[];
+}
+const NO_CAPACITY: Capacity = { Mcx: null, Cb: null, sides: [] };
+
 /** Major-axis strength of a segment; Cb from the diagram only where it is needed. */
 function majorCapacity(
   m: Context,
@@ -141,11 +153,12 @@ function majorCapacity(
   Lb: Quantity,
   x: PlaneMoments,
   { axial, clause: number, compressed }: Omit<AxialCase, 'unknown'>,
-): Quantity | null {
+): Capacity {
   const { major, input } = m;
   const { r } = segment;
-  if (!major || major.fixed) return major?.fixed ?? null;
-  const factor = (): Quantity | null => {
+  if (!major) return NO_CAPACITY;
+  if (major.fixed) return { Mcx: major.fixed, Cb: m.Cb, sides: ['top'] };
+  const factorOf = (): Quantity | null => {
     if (destabilisingLoad(r, m.member, c, segment)) return null;
     const Cb = m.Cb ?? modification(m, segment, x, Lb, compressed);
     if (number !== 'H1.2' || !axial || !m.alpha || !input.provisions.has('H1.2-Cb')) return Cb;
@@ -156,7 +169,14 @@ function majorCapacity(
         : 'a doubly symmetric section',
     });
   };
-  return segmentStrength(r, input.design, major, sidesIn(segment, m, x, major.sided), Lb, factor);
+  let Cb: Quantity | null = null;
+  const factor = () => {
+    Cb = factorOf();
+    return Cb;
+  };
+  const sides = sidesIn(segment, m, x, major.sided);
+  const Mcx = segmentStrength(r, input.design, major, sides, Lb, factor);
+  return { Mcx, Cb, sides };
 }
 
 function modification(

@@ -43,7 +43,7 @@ export function majorI(
   const web = webClass(r, steel, s.lambdaw);
   if (web.class === 'compact') {
     const kc = builtUp?.kc ?? null;
-    return compactWeb(r, steel, s, null, { flange, lambdaw: s.lambdaw, kc }, longest, phib);
+    return compactWeb(r, steel, s, null, { flange, web, kc }, longest, phib);
   }
   const chapter = web.class === 'noncompact' ? 'F4' : 'F5';
   r.section(chapter, 'Major-axis flexural strength', clause(chapter));
@@ -87,7 +87,7 @@ export function majorChannel(
     );
     return null;
   }
-  const of = { flange, lambdaw: s.lambdaw, kc: null };
+  const of = { flange, web, kc: null };
   return compactWeb(r, steel, s, { Iy: s.Iy, Cw: s.Cw }, of, longest, phib);
 }
 
@@ -99,24 +99,21 @@ function compactWeb(
   warping: ChannelWarping,
   of: {
     readonly flange: ClassWithLimits;
-    readonly lambdaw: Quantity;
+    readonly web: ClassWithLimits;
     readonly kc: Quantity | null;
   },
   longest: Quantity | null,
   phib: Quantity,
 ): MajorSection {
   const { E, Fy } = steel;
-  const { flange, lambdaw, kc } = of;
+  const { flange, web, kc } = of;
+  const { lambdaf, lambdaw } = s;
   const chapter = flange.class === 'compact' ? 'F2' : 'F3';
   r.section('F2', 'Major-axis flexural strength', clause(chapter));
   const q = { E, Fy, Sx: s.Sx, Zx: s.Zx, ry: s.ry, rts: s.rts, J: s.J, ho: s.ho };
   const Mp = plasticMomentMajor(r, q);
   const limits = ltbLimitsF2(r, q, warping, longest);
-  const FLB = flangeLocalBucklingMajor(
-    r,
-    { E, Fy, Sx: s.Sx, Mp, lambdaf: s.lambdaf, lambdaw, kc },
-    flange,
-  );
+  const FLB = flangeLocalBucklingMajor(r, { E, Fy, Sx: s.Sx, Mp, lambdaf, lambdaw, kc }, flange);
   return {
     Mp,
     phib,
@@ -128,6 +125,10 @@ function compactWeb(
       words: F2_LTB,
       limits,
       strength: (w, segment) => ltbStrengthF2(w, q, limits, Mp, segment),
+    },
+    elements: {
+      flange: { lambda: lambdaf, lambdap: flange.lambdap },
+      web: { lambda: lambdaw, lambdap: web.lambdap },
     },
   };
 }

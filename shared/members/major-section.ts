@@ -32,4 +32,12 @@ export interface MajorSection {
   readonly others: readonly Quantity[];
   /** null for a section whose bending does not buckle laterally. */
   readonly ltb: MajorLtb | null;
+  /** Elements of an I-shape or a channel with a compact web, with their compact limits. */
+  readonly elements?: Readonly<Record<'flange' | 'web', ElementLimit>>;
+}
+
+/** A width-to-thickness ratio with its compact limit in flexure (Table B4.1b). */
+export interface ElementLimit {
+  readonly lambda: Quantity;
+  readonly lambdap: Quantity;
 }

@@ -30,6 +30,23 @@ export function parseInput(json: unknown): ParsedInput {
       message:
         'is needed with moments from an analysis: whether the effect of the axial force between the ends (P-δ) is in them',
     });
+  if ((typeof analysis.sway === 'string' ? analysis.sway : analysis.sway.value) === 'B2') {
+    if (analysis.secondOrder !== 'amplified')
+      problems.push({
+        path: 'analysis.secondOrder',
+        message:
+          'must be "amplified" where sway is by B2: the multiplier belongs to first-order moments; moments of a second-order analysis hold the sway already',
+      });
+  } else
+    input.members.forEach((m, i) => {
+      m.combinations.forEach((c, j) => {
+        if (c.sway)
+          problems.push({
+            path: `members[${i}].combinations[${j}].sway`,
+            message: 'is given, but the basis says that the ends do not translate',
+          });
+      });
+    });
   const sway =
     typeof analysis.sway === 'string'
       ? {
