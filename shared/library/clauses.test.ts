@@ -5,9 +5,20 @@ import { clauseNamed, clausesOf, compareClauses } from './clauses.ts';
 
 describe('the clauses of a book', () => {
   it('stand in the order of the standard', () => {
-    const clauses = ['H1.1', 'App. 8.1.2', 'E7', 'F13.2', 'E7.1', 'F2.1', 'App. 7.3', 'B4.1'];
+    const clauses = [
+      'Commentary App. 7.2',
+      'H1.1',
+      'App. 8.1.2',
+      'E7',
+      'F13.2',
+      'E7.1',
+      'F2.1',
+      'App. 7.3',
+      'B4.1',
+    ];
     expect(clauses.sort(compareClauses)).toEqual([
       ...['B4.1', 'E7', 'E7.1', 'F2.1', 'F13.2', 'H1.1', 'App. 7.3', 'App. 8.1.2'],
+      'Commentary App. 7.2',
     ]);
   });
 

@@ -16,7 +16,7 @@ export interface LibraryClause {
   readonly formulas: readonly Formula[];
 }
 
-/** The clauses of a book in the standard's order: chapters by letter, then the appendices. */
+/** The clauses of a book in the standard's order: chapters, appendices, what the commentary gives. */
 export function clausesOf(book: Book): LibraryClause[] {
   const byClause = new Map<string, Formula[]>();
   for (const formula of book.formulas.values()) {
@@ -39,10 +39,11 @@ export function clauseNamed(bookId: string, clause: string): LibraryClause | und
   return book && clausesOf(book).find((one) => one.clause === clause);
 }
 
-const APPENDIX = /^App(endix|\.) /;
+/** In which part of a standard a clause stands. */
+const partOf = (clause: string): number =>
+  clause.startsWith('Commentary') ? 2 : clause.startsWith('App') ? 1 : 0;
 
-/** Order of two clauses of one book: numbers as numbers, an appendix after every chapter. */
+/** Order of two clauses of one book: by parts of the standard, then by letters and numbers. */
 export function compareClauses(a: string, b: string): number {
-  const appendix = Number(APPENDIX.test(a)) - Number(APPENDIX.test(b));
-  return appendix || a.localeCompare(b, 'en', { numeric: true });
+  return partOf(a) - partOf(b) || a.localeCompare(b, 'en', { numeric: true });
 }

@@ -58,7 +58,10 @@ export const PUBLISHED_RUNS: readonly (() => PublishedRun)[] = [
     (['LRFD', 'ASD'] as const).map((design) => () => runStrength(row, design)),
   ),
   ...PUBLISHED_TABLES.limits.map((row) => () => runLimits(row)),
-  () => ({ values: PUBLISHED_EQUATIONS.formulas.flatMap(equationValue), facts: [] }),
+  ...PUBLISHED_EQUATIONS.map(({ source, formulas }) => () => ({
+    values: formulas.flatMap((row) => equationValue(source, row)),
+    facts: [],
+  })),
 ];
 
 function designsOf(data: PublishedCase): Design[] {
@@ -158,7 +161,7 @@ function lineValue(line: Line): number {
 }
 
 /** Of a single equation with its printed operands; nothing where the source prints no number. */
-function equationValue(row: PublishedEquation): PublishedValue[] {
+function equationValue(source: PublishedSource, row: PublishedEquation): PublishedValue[] {
   const formula = formulaNamed(row.formula);
   if (!formula) throw new Error(`a published case uses ${row.formula}, which is not there`);
   if (row.printed === null) return [];
@@ -172,7 +175,7 @@ function equationValue(row: PublishedEquation): PublishedValue[] {
   const value = formula.expression.evaluate(Object.fromEntries(operands));
   return [
     {
-      ...{ source: PUBLISHED_EQUATIONS.source, example: row.example, what, design: null, unit },
+      ...{ source, example: row.example, what, design: null, unit },
       ...{ printed, computed: fromBase(value, unitNamed(unit)) },
       rounding: explained ? roundedOnTheWay(explained.by) : null,
       ...{ clause: { book, clause, equation }, formulas: [formula.id] },

@@ -44,6 +44,10 @@ describe('a formula in its own symbols', () => {
     expect(showFormula(formula).text).toBe('Fn = 0.658^(Fy/Fe) · Fy');
     expect(showFormula(formula).tex).toBe('F_n={0.658}^{{F_y}/{F_e}}\\,{F_y}');
   });
+  it('does not say twice what its symbol says', () => {
+    const [ratio] = searchFormulas('Yield stress over elastic buckling stress');
+    expect(ratio && showFormula(ratio).text).toBe('Fy/Fe');
+  });
   it('comes with its symbols, the result first, in both unit sets', () => {
     expect(symbolsOf([formula]).map(({ name, units }) => [name, units.us, units.si])).toEqual([
       ['Fn', ['ksi'], ['MPa']],

@@ -5,7 +5,10 @@ import { isCompound, symbolText } from '../report/symbol-text.ts';
 import { symbolNamed, symbolTex } from '../standards/library.ts';
 import { UNIT_SETS, type UnitSetName } from '../units/unit-set.ts';
 
-/** A formula in its own symbols: `F_n = 0.658^{F_y/F_e} F_y`, for the eye and in one line of text. */
+/**
+ * A formula in its own symbols: `F_n = 0.658^{F_y/F_e} F_y`, for the eye and in one line of text.
+ * A quantity whose symbol says how it is computed (`Fy/Fe`) stands without its equation.
+ */
 export function showFormula(formula: Formula): { readonly tex: string; readonly text: string } {
   const { book, symbol, expression } = formula;
   const leaf: LeafOf = (name) => {
@@ -16,11 +19,16 @@ export function showFormula(formula: Formula): { readonly tex: string; readonly 
     const tex = symbolTex(name, book);
     return isCompound(tex) ? `(${symbolText(tex)})` : symbolText(tex);
   };
-  return {
-    tex: `${symbolTex(symbol, book)}=${texOf(expression.tree, leaf)}`,
-    text: `${symbolText(symbolTex(symbol, book))} = ${textOf(expression.tree, words)}`,
-  };
+  const left = symbolTex(symbol, book);
+  const [tex, text] = [texOf(expression.tree, leaf), textOf(expression.tree, words)];
+  const letters = (one: string) => one.replace(/[\s()·]/g, '');
+  if (letters(symbolText(left)) === letters(text)) return { tex, text };
+  return { tex: `${left}=${tex}`, text: `${symbolText(left)} = ${text}` };
 }
+
+/** How a formula is called in a list: its equation's number, or the symbol of what it gives. */
+export const shortNameOf = ({ equation, symbol, book }: Formula): string =>
+  equation ?? symbolText(symbolTex(symbol, book));
 
 /** One row of a table of symbols. */
 export interface SymbolRow {

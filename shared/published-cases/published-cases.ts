@@ -18,6 +18,7 @@ import iiiBraced from './aisc360-22/iii-braced.json' with { type: 'json' };
 import iiiSelmAsd from './aisc360-22/iii-selm-asd.json' with { type: 'json' };
 import iiiSelmLrfd from './aisc360-22/iii-selm-lrfd.json' with { type: 'json' };
 import tables from './aisc360-22/tables-w.json' with { type: 'json' };
+import theory from './elastic-theory/equations.json' with { type: 'json' };
 
 export interface PublishedSource {
   readonly title: string;
@@ -54,7 +55,7 @@ export interface PublishedCase {
   readonly expected: readonly Expected[];
 }
 
-/** A published value of one equation from printed operands. */
+/** A published, or numerically found, value of one equation from its operands. */
 export interface PublishedEquation {
   readonly example: string;
   readonly what: string;
@@ -101,11 +102,11 @@ export const PUBLISHED_CASES = [
   ...[f11b, f12b, f3b, f5, h1a, h1b, h4, iiiBraced, iiiSelmLrfd, iiiSelmAsd],
 ] as readonly PublishedCase[];
 
-/** Single equations of examples that the program doesn't run as members. */
-export const PUBLISHED_EQUATIONS = equations as {
+/** Single equations: of examples that the program doesn't run as members, and of the theory. */
+export const PUBLISHED_EQUATIONS = [equations, theory] as readonly {
   readonly source: PublishedSource;
   readonly formulas: readonly PublishedEquation[];
-};
+}[];
 
 /** Rows of the Manual's tables that the examples quote. */
 export const PUBLISHED_TABLES = tables as {

@@ -34,21 +34,21 @@ function ClausePage({ clause }: { clause: LibraryClause }) {
   );
   return (
     <Shell
-      title={`${clause.clause}, ${book.name}`}
+      title={`${clause.reference}, ${book.name}`}
       crumbs={[
         { text: 'Library', to: paths.library },
         { text: book.name },
-        { text: clause.clause },
+        { text: clause.reference },
       ]}
     >
       <Paper className="px-10 pt-9 pb-14">
         <PaperHead
-          title={`${clause.clause} ${clause.title}`}
+          title={`${clause.reference} ${clause.title}`}
           sub={`${book.name} as engine ${ENGINE_VERSION} computes it; titles and meanings are in our own words`}
           actions={<Neighbours clause={clause} />}
         />
         <div className="grid gap-x-10 lg:grid-cols-[minmax(0,1fr)_404px]">
-          <section aria-label="Formulas" className="-mx-6 pt-1">
+          <section aria-label="Formulas" className="-mx-6 pt-3">
             {formulas.map((formula) => (
               <FormulaLine
                 key={formula.id}
@@ -90,12 +90,12 @@ function Neighbours({ clause }: { clause: LibraryClause }) {
     <nav aria-label="Neighbouring clauses" className="flex gap-5 pb-0.5 font-condensed">
       {before && (
         <Link to={paths.clause(before.book.id, before.clause)} className="link">
-          before: {before.clause}
+          before: {before.reference}
         </Link>
       )}
       {after && (
         <Link to={paths.clause(after.book.id, after.clause)} className="link">
-          after: {after.clause}
+          after: {after.reference}
         </Link>
       )}
     </nav>

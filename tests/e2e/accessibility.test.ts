@@ -51,6 +51,16 @@ describe('each screen is accessible (axe, WCAG 2.2 AA)', () => {
       await page.getByRole('link', { name: 'Report', exact: true }).click();
       await page.getByRole('heading', { name: 'Summary of results' }).waitFor();
       await expectAccessible(page, 'report');
+      await page.goto('/library');
+      await page.getByLabel('Find a formula').waitFor();
+      await expectAccessible(page, 'library');
+      await page.getByLabel('Find a formula').fill('buckling');
+      await page.locator('[data-formula]').first().waitFor();
+      await expectAccessible(page, 'formulas found');
+      await page.goto('/library/aisc360-22/E3#aisc360-22%2FE3-2');
+      await page.locator('[data-published]').first().waitFor();
+      await page.getByText(/values that follow from this clause/).click();
+      await expectAccessible(page, 'clause');
       await page.goto('/account');
       await page.getByLabel('Present password').waitFor();
       await expectAccessible(page, 'account');
@@ -128,5 +138,11 @@ describe.each([1024, 1280, 1600])('at %i px', (width) => {
     await page.getByRole('link', { name: 'Basis', exact: true }).click();
     await page.getByLabel('Building code').waitFor();
     await expectFits('basis');
+    await page.goto('/library/aisc360-22/H1.1');
+    await page.locator('[data-published]').first().waitFor();
+    await expectFits('clause');
+    await page.goto('/library?q=moment');
+    await page.locator('[data-formula]').first().waitFor();
+    await expectFits('library');
   });
 });

@@ -28,21 +28,24 @@ function base(text: string): number {
   return Number(number) * size;
 }
 
-describe('Design Examples v16.0, single equations', () => {
-  for (const row of PUBLISHED_EQUATIONS.formulas)
-    it(`${row.example}: ${row.what} = ${row.printed ?? row.fromInputs} ${row.unit} by ${row.formula}`, () => {
-      const formula = formulaNamed(row.formula);
-      if (!formula) throw new Error(`no formula ${row.formula}`);
-      const operands = Object.fromEntries(
-        Object.entries(row.operands).map(([name, text]) => [name, base(text)]),
-      );
-      const value = inUnit(formula.expression.evaluate(operands), row.unit);
-      expect(Math.abs(value / row.fromInputs - 1)).toBeLessThan(1e-6);
-      if (row.printed === null) return;
-      const source = row.explained ? Number(evaluate(row.explained.expression)) : value;
-      expect(roundsTo(source, row.printed), `${source}`).toBe(true);
-    });
-});
+describe.each(PUBLISHED_EQUATIONS.map(({ source, formulas }) => [source.title, formulas] as const))(
+  'single equations: %s',
+  (_, rows) => {
+    for (const row of rows)
+      it(`${row.example}: ${row.what} = ${row.printed ?? row.fromInputs} ${row.unit} by ${row.formula}`, () => {
+        const formula = formulaNamed(row.formula);
+        if (!formula) throw new Error(`no formula ${row.formula}`);
+        const operands = Object.fromEntries(
+          Object.entries(row.operands).map(([name, text]) => [name, base(text)]),
+        );
+        const value = inUnit(formula.expression.evaluate(operands), row.unit);
+        expect(Math.abs(value / row.fromInputs - 1)).toBeLessThan(1e-6);
+        if (row.printed === null) return;
+        const source = row.explained ? Number(evaluate(row.explained.expression)) : value;
+        expect(roundsTo(source, row.printed), `${source}`).toBe(true);
+      });
+  },
+);
 
 const given = (value: number): GivenValue => ({
   value,

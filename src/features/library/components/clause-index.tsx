@@ -26,7 +26,7 @@ export function ClauseIndex({ book }: { book: Book }) {
           <Row key={clause.clause}>
             <RowHead>
               <Link to={paths.clause(book.id, clause.clause)} className="link">
-                {clause.clause}
+                {clause.reference}
               </Link>
             </RowHead>
             <Cell className="font-sans">{clause.title}</Cell>

@@ -7,8 +7,7 @@ import { Empty } from '#client/ui/state-panels.tsx';
 import { splitAddress } from '#shared/calc/address.ts';
 import type { Formula } from '#shared/calc/formula.ts';
 import type { MemberUse } from '#shared/contracts/library.ts';
-import { symbolText } from '#shared/report/symbol-text.ts';
-import { symbolTex } from '#shared/standards/library.ts';
+import { shortNameOf } from '#shared/library/show-formula.ts';
 
 /** Members of one's calculations whose sheets use a clause, each line a link to it. */
 export function ClauseUses(props: {
@@ -49,7 +48,6 @@ export function ClauseUses(props: {
 
 function UseRow({ use, formulas }: { use: MemberUse; formulas: readonly Formula[] }) {
   const { project, calculation, member } = use;
-  const named = (id: string) => formulas.find((formula) => formula.id === id);
   return (
     <Row>
       <Cell className="text-zinc-7">
@@ -69,31 +67,27 @@ function UseRow({ use, formulas }: { use: MemberUse; formulas: readonly Formula[
       <Cell>{sectionName(member.section)}</Cell>
       <Cell className="pr-0">
         <ul className="flex flex-wrap gap-x-4">
-          {use.uses.map(({ formula, address, combinations }) => (
-            <li key={formula} className="whitespace-nowrap">
-              <Link
-                to={paths.member(calculation.id, member.id, {
-                  combination: splitAddress(address).combination ?? undefined,
-                  line: address,
-                })}
-                aria-label={`${member.mark}: ${named(formula)?.title ?? formula}`}
-                className="link"
-              >
-                {labelOf(named(formula))}
-              </Link>
-              {combinations > 0 && (
-                <span className="text-zinc-7"> in {count(combinations, 'combination')}</span>
-              )}
-            </li>
-          ))}
+          {use.uses.flatMap(({ formula: id, address, combinations }) => {
+            const formula = formulas.find((one) => one.id === id);
+            if (!formula) return [];
+            const { combination } = splitAddress(address);
+            const place = { combination: combination ?? undefined, line: address };
+            return (
+              <li key={id} className="whitespace-nowrap">
+                <Link to={paths.member(calculation.id, member.id, place)} className="link">
+                  {shortNameOf(formula)}
+                  <span className="sr-only">
+                    , {formula.title}, {member.mark}
+                  </span>
+                </Link>
+                {combinations > 0 && (
+                  <span className="text-zinc-7"> in {count(combinations, 'combination')}</span>
+                )}
+              </li>
+            );
+          })}
         </ul>
       </Cell>
     </Row>
   );
 }
-
-/** The equation's number, or the symbol of what it gives. */
-const labelOf = (formula: Formula | undefined): string => {
-  if (!formula) return 'line';
-  return formula.equation ?? symbolText(symbolTex(formula.symbol, formula.book));
-};

@@ -23,7 +23,7 @@ export function FormulaLine({ formula, chosen }: { formula: Formula; chosen: boo
       aria-label={`${equation ?? 'Without a number'}, ${title}: ${text}`}
       {...(chosen ? { 'aria-current': true as const } : {})}
       data-formula={id}
-      className={classNames('sheet-line outline-none', chosen && 'is-chosen')}
+      className={classNames('sheet-line', chosen && 'is-chosen')}
     >
       <div className="line-reference">
         <span className={equation ? 'line-number' : 'text-zinc-7'}>{equation ?? 'no number'}</span>

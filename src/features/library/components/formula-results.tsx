@@ -16,7 +16,7 @@ export function FormulaResults({ formulas }: { formulas: readonly Formula[] }) {
   const more = formulas.length - FIRST;
   return (
     <>
-      <ul className="mt-4 -mx-6 border-t-2 border-ink">
+      <ul className="mt-4 -mx-6 before:mx-6 before:block before:border-t-2 before:border-ink">
         {(all ? formulas : formulas.slice(0, FIRST)).map((formula) => (
           <Result key={formula.id} formula={formula} />
         ))}

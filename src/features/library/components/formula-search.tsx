@@ -1,15 +1,19 @@
+import { useState } from 'react';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
 import { count } from '#client/lib/count.ts';
 import { TextField } from '#client/ui/text-field.tsx';
 import type { Formula } from '#shared/calc/formula.ts';
 
-/** What is looked for, kept in the address so that the way back leads to the results. */
+/** What is looked for; kept in the address too, so that the way back leads to the results. */
 export function useFormulaQuery() {
   const [parameters, setParameters] = useSearchParams();
-  const setQuery = (text: string) =>
+  const [query, setQuery] = useState(parameters.get('q') ?? '');
+  const change = (text: string) => {
+    setQuery(text);
     setParameters(text === '' ? {} : { q: text }, { replace: true });
-  return [parameters.get('q') ?? '', setQuery] as const;
+  };
+  return [query, change] as const;
 }
 
 export function FormulaSearch(props: {
@@ -33,6 +37,7 @@ export function FormulaSearch(props: {
           label="Find a formula"
           hint="By its equation number, clause, symbol, or words of its title. Enter opens the first."
           type="search"
+          className="[&::-webkit-search-cancel-button]:hidden"
           autoComplete="off"
           spellCheck={false}
           value={query}

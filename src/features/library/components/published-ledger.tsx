@@ -3,9 +3,11 @@ import { Cell, HeadCell, Ledger, Row, RowHead } from '#client/ui/ledger.tsx';
 import { PartHead } from '#client/ui/paper.tsx';
 import { Empty } from '#client/ui/state-panels.tsx';
 import { ENGINE_VERSION } from '#shared/calc/engine.ts';
+import type { Formula } from '#shared/calc/formula.ts';
 import { besidePrinted, differenceText, roundsToPrinted } from '#shared/library/agreement.ts';
 import type { LibraryClause } from '#shared/library/clauses.ts';
 import type { PublishedValue } from '#shared/library/published-values.ts';
+import { shortNameOf } from '#shared/library/show-formula.ts';
 
 /** Published values that a clause meets: its own lines first, then what follows from them. */
 export function PublishedLedger(props: {
@@ -24,26 +26,26 @@ export function PublishedLedger(props: {
   const sources = [...new Map(met.map(({ source }) => [source.title, source])).values()];
   return (
     <section aria-labelledby="published">
-      <PartHead id="published" title="Beside published values" />
+      <PartHead id="published" title="Beside published and reference values" />
       {met.length === 0 && (
         <Empty>
           No published example that this program runs comes to this clause. Its formulas are tested
-          against values worked by hand or by another route.
+          against values worked by hand or found by another route.
         </Empty>
       )}
       {own.length > 0 && (
-        <Values values={own} caption="Published values of this clause" ids={ids} />
+        <Values values={own} caption="Values of this clause" formulas={formulas} />
       )}
       {after.length > 0 && (
         <details className="mt-3" open={own.length === 0}>
           <summary className="link w-fit">
-            {count(after.length, 'published value')} that follow from this clause
+            {count(after.length, 'value')} that follow from this clause
           </summary>
           <div className="mt-2">
             <Values
               values={after}
-              caption="Published values that follow from this clause"
-              ids={ids}
+              caption="Values that follow from this clause"
+              formulas={formulas}
             />
           </div>
         </details>
@@ -51,9 +53,8 @@ export function PublishedLedger(props: {
       {met.length > 0 && (
         <p className="mt-3 max-w-[88ch] text-small text-zinc-7">
           {sources.map(({ title, edition }) => `${title}. ${edition}. `)}
-          The values under “here” are computed as you read, by engine {ENGINE_VERSION} in this page,
-          from the inputs of each example; a value is shown with two digits more than the published
-          one.
+          What stands under “here” is computed as you read, by engine {ENGINE_VERSION} in this page,
+          from the inputs of each example, and shown with two digits more than the source prints.
         </p>
       )}
     </section>
@@ -63,7 +64,7 @@ export function PublishedLedger(props: {
 function Values(props: {
   values: readonly PublishedValue[];
   caption: string;
-  ids: ReadonlySet<string>;
+  formulas: readonly Formula[];
 }) {
   return (
     <Ledger
@@ -75,7 +76,7 @@ function Values(props: {
           <HeadCell className="w-[26%]">Value</HeadCell>
           <HeadCell className="w-[11%]">Through</HeadCell>
           <HeadCell className="w-[6%]">Design</HeadCell>
-          <HeadCell className="text-right">Published</HeadCell>
+          <HeadCell className="text-right">Source</HeadCell>
           <HeadCell className="text-right">Here</HeadCell>
           <HeadCell className="w-[8%] text-right">Difference</HeadCell>
           <HeadCell className="w-[18%] pr-0">To the last digit</HeadCell>
@@ -86,20 +87,20 @@ function Values(props: {
         <ValueRow
           key={`${value.example} ${value.what} ${value.design} ${value.printed} ${value.unit}`}
           value={value}
-          ids={props.ids}
+          formulas={props.formulas}
         />
       ))}
     </Ledger>
   );
 }
 
-function ValueRow({ value, ids }: { value: PublishedValue; ids: ReadonlySet<string> }) {
+function ValueRow({ value, formulas }: { value: PublishedValue; formulas: readonly Formula[] }) {
   const { example, what, design, printed, unit, computed } = value;
   return (
     <Row data-published={example}>
       <RowHead className="py-1.5">{example}</RowHead>
       <Cell className="py-1.5 font-sans text-small">{what}</Cell>
-      <Cell className="py-1.5 text-zinc-7">{throughOf(value, ids)}</Cell>
+      <Cell className="py-1.5 text-zinc-7">{throughOf(value, formulas)}</Cell>
       <Cell className="py-1.5 text-zinc-7">{design ?? 'both'}</Cell>
       <Cell className="py-1.5 text-right whitespace-nowrap">
         {printed} {unit}
@@ -118,11 +119,10 @@ function ValueRow({ value, ids }: { value: PublishedValue; ids: ReadonlySet<stri
 }
 
 /** Equations of the clause that the value comes through. */
-const throughOf = ({ formulas }: PublishedValue, ids: ReadonlySet<string>): string =>
-  formulas
-    .filter((id) => ids.has(id))
-    .map((id) => id.slice(id.indexOf('/') + 1))
-    .join(', ');
+function throughOf(value: PublishedValue, formulas: readonly Formula[]): string {
+  const through = value.formulas.flatMap((id) => formulas.find((one) => one.id === id) ?? []);
+  return [...new Set(through.map(shortNameOf))].join(', ');
+}
 
 function Agreement({ value: { computed, printed, rounding } }: { value: PublishedValue }) {
   if (roundsToPrinted(computed, printed)) return 'agrees';

@@ -10,10 +10,10 @@ export function SymbolTable({ formulas }: { formulas: readonly Formula[] }) {
       caption="Symbols of the clause"
       head={
         <>
-          <HeadCell className="w-[21%]">Symbol</HeadCell>
+          <HeadCell className="w-[19%]">Symbol</HeadCell>
           <HeadCell>Meaning</HeadCell>
-          <HeadCell className="w-[15%]">US</HeadCell>
-          <HeadCell className="w-[14%] pr-0">SI</HeadCell>
+          <HeadCell className="w-[16%]">US</HeadCell>
+          <HeadCell className="w-[16%] pr-0">SI</HeadCell>
         </>
       }
     >
@@ -24,10 +24,25 @@ export function SymbolTable({ formulas }: { formulas: readonly Formula[] }) {
             <span className="sr-only">{text}</span>
           </RowHead>
           <Cell className="py-1.5 font-sans text-small">{meaning}</Cell>
-          <Cell className="py-1.5 text-zinc-7">{units.us.join(', ') || '–'}</Cell>
-          <Cell className="py-1.5 pr-0 text-zinc-7">{units.si.join(', ') || '–'}</Cell>
+          <Cell className="py-1.5 text-zinc-7">
+            <Units units={units.us} />
+          </Cell>
+          <Cell className="py-1.5 pr-0 text-zinc-7">
+            <Units units={units.si} />
+          </Cell>
         </Row>
       ))}
     </Ledger>
   );
+}
+
+/** One beside the other, each whole; a dash for a plain number. */
+function Units({ units }: { units: readonly string[] }) {
+  if (units.length === 0) return '–';
+  return units.map((unit, index) => (
+    <span key={unit} className="inline-block whitespace-nowrap">
+      {unit}
+      {index < units.length - 1 && ',\u00a0'}
+    </span>
+  ));
 }
