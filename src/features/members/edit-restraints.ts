@@ -73,6 +73,12 @@ export const bendsAbout = (row: DraftCombination, axis: 'x' | 'y'): boolean =>
   (['A', 'B', 'Max'] as const).some((end) => row[`M${axis}${end}`].text.trim() !== '') ||
   (row.loads ?? []).some(({ bends }) => bends === axis);
 
+/** Whether a combination bends the member in a plane that a point between the ends holds. */
+export const runsOverPoints = (draft: MemberDraft, row: DraftCombination): boolean =>
+  restraintsOf(draft).some((point) =>
+    (['x', 'y'] as const).some((axis) => holdsAcross(point, axis) && bendsAbout(row, axis)),
+  );
+
 /** Whether a restraint supports the member in the plane in which it bends about an axis. */
 export const holdsAcross = ({ holds }: DraftRestraint, axis: 'x' | 'y'): boolean =>
   holds.some((hold) => (hold === 'in-plane' ? axis === 'x' : hold !== 'twist' && axis === 'y'));

@@ -33,17 +33,11 @@ function placeOf(draft: MemberDraft, path: string): string {
   return path.replace(/^(restraints\[\d+\])(?:\.(?:source|confirmed).*)?$/, '$1.at');
 }
 
-/** What is said of a choice not made yet. */
-const choices: readonly (readonly [RegExp, string])[] = [
-  [/\.sidesway$/, 'is needed: whether the story is held'],
-  [/\.frames$/, 'is needed: what of the load moment frames carry'],
-  [/^section\.wall$/, 'is needed: what the thickness is'],
-  [/\.height$/, 'is needed: where on the section the load acts'],
-  [/\.holds$/, 'is needed: what is held there'],
-];
+/** Words to choose from, empty until chosen. */
+const choice = /(^section\.wall|\.(sidesway|frames|height|holds))$/;
 
 function said(value: DraftValue | undefined, place: string, message: string): string {
-  if (!value) return choices.find(([path]) => path.test(place))?.[1] ?? message;
+  if (!value) return choice.test(place) ? 'is needed' : message;
   if (value.text.trim() === '') {
     return /^(must be|Invalid|is empty)/.test(message) ? 'is needed' : message;
   }

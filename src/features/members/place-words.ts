@@ -10,6 +10,7 @@ import {
   chartWords,
   loadWords,
   netSectionWords,
+  sizeWords,
   springWords,
   stiffenerWords,
   swayAxialWords,
@@ -19,6 +20,8 @@ import {
 const others: Readonly<Record<string, string>> = {
   mark: 'Mark',
   section: 'Section',
+  wall: 'what the wall is',
+  frames: 'what moment frames carry',
   material: 'Steel',
   ends: 'Ends',
   Cb: 'Cb',
@@ -41,7 +44,7 @@ export function placeWords(path: string): string {
     return [`Combination ${Number(index) + 1}`, words].filter(Boolean).join(', ');
   }
   if (path.startsWith('analysis') || path.startsWith('constants')) return 'Basis of design';
-  return /^(restraints\[|springs\.|charts\.|netSection\.|stiffeners)/.test(path)
+  return /^(section\.|restraints\[|springs\.|charts\.|netSection\.|stiffeners)/.test(path)
     ? partWords(path)
     : fieldWords(path.split(/[.[]/)[0] ?? '');
 }
@@ -62,6 +65,8 @@ function partWords(path: string): string {
       return index === 'P'
         ? `sway, ${named(swayAxialWords)}`
         : `sway about ${index}, ${wordsFrom(swayWords, field)}`;
+    case 'section':
+      return `Section, ${wordsFrom(sizeWords, index)}`;
     case 'springs':
       return wordsFrom(springWords, index);
     case 'charts':

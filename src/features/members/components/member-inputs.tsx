@@ -1,4 +1,5 @@
 import { fieldClass } from '#client/ui/field.tsx';
+import { notGiven } from '#shared/contracts/draft-quantity.ts';
 import { type LengthName, lengthNames } from '#shared/contracts/members.ts';
 import { ENDS } from '#shared/members/input.ts';
 import { withStated, withText } from '../edit-draft.ts';
@@ -74,13 +75,20 @@ function LabelRow({ name, label }: { name: 'mark' | 'place'; label: string }) {
 function LengthRow({ name, units }: { name: LengthName; units: 'us' | 'si' }) {
   const { draft, edit, derived } = useMemberForm();
   const unit = units === 'us' ? 'ft' : 'm';
+  const follows = name !== 'length' && draft.restraints !== undefined;
   return (
     <QuantityRow
       path={name}
       words={lengthWords[name]}
       quantity={draft[name]}
-      placeholder={name === 'length' ? unit : (derived(name) ?? unit)}
-      onChange={(quantity) => edit(withStated(draft, name, quantity), name)}
+      placeholder={follows ? (derived(name) ?? (name === 'Lb' ? 'by segment' : 'follows')) : unit}
+      // A length that follows again has no source of its own any more.
+      onChange={(quantity) =>
+        edit(
+          withStated(draft, name, follows && quantity.text.trim() === '' ? notGiven : quantity),
+          name,
+        )
+      }
     />
   );
 }

@@ -2,7 +2,7 @@ import { notGiven } from '#shared/contracts/draft-quantity.ts';
 import type { DraftCombination } from '#shared/contracts/members.ts';
 import { withAction, withCombination } from '../../edit-draft.ts';
 import { withLoadsOf, withNewLoad, withoutShears, withSway } from '../../edit-loads.ts';
-import { restraintsOf } from '../../edit-restraints.ts';
+import { restraintsOf, runsOverPoints } from '../../edit-restraints.ts';
 import { actionWords } from '../../member-fields.ts';
 import { useMemberForm } from '../member-form-context.ts';
 import { QuantityRow } from '../quantity-row.tsx';
@@ -78,7 +78,8 @@ function CombinationPartLinks(props: { row: DraftCombination; at: string; withSw
         first: `${at}.loads[0].kind`,
       },
     points.length > 0 &&
-      !row.supports && {
+      !row.supports &&
+      !runsOverPoints(draft, row) && {
         text: 'moments over held points',
         open: () => edit(opened({ supports: [] }), `${row.id}/supports/open`),
         first: `${at}.supports[${points[0]?.id}].Mx`,

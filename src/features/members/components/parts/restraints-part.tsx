@@ -46,6 +46,11 @@ export function RestraintsPart({ units }: { units: 'us' | 'si' }) {
           <RestraintRow key={row.id} row={row} index={index} units={units} />
         ))}
       </ol>
+      {rows.length > 0 && (
+        <p className="mt-1.5 text-small text-zinc-7">
+          Lengths in grey follow from these points. One typed in their place says why in its source.
+        </p>
+      )}
       {editable && (
         <Button
           size="small"

@@ -122,7 +122,7 @@ function SwayRows(props: {
       </InputRow>
       {rows(sway.by === 'critical' ? ['PeStory'] : ['H', 'height', 'drift'])}
       {sway.by === 'drift' && (
-        <InputRow path={`${path}.frames`} label="Frames" problem={framesProblem}>
+        <InputRow path={`${path}.frames`} label="Moment frames" problem={framesProblem}>
           {(control) => (
             <select
               {...control}
