@@ -53,10 +53,12 @@ describe('ends that the equation of the chart does not reach', () => {
   });
   // From both sides: ends a trifle off a limit lie a trifle off its factor.
   for (const [kind, A, B, K] of [
-    ['inhibited', 1e-6, 1e-6, 0.5],
+    ['inhibited', 1e-9, 1e-6, 0.5],
+    ['inhibited', 1.1e-6, 0, 0.5],
     ['inhibited', 1e6, 1e6, 1],
     ['inhibited', 1e6, 'pinned', 1],
-    ['uninhibited', 1e-6, 1e-6, 1],
+    ['uninhibited', 1e-9, 1e-6, 1],
+    ['uninhibited', 0, 1.1e-6, 1],
     ['uninhibited', 0, 1e6, 2],
   ] as const)
     it(`${kind}, ${A} and ${B}: close to ${K}`, () =>

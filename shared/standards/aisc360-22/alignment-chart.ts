@@ -69,6 +69,10 @@ const BRACKETS = {
   uninhibited: [1e-3, Math.PI * (1 - OFF_POLE)],
 } as const;
 
+// Ends up to this ratio are rigid: the factor is then within a millionth of theirs, and its root too
+// close to the pole.
+const RIGID = 1e-6;
+
 /**
  * K of a column by C-A-7-1 or C-A-7-2 under `at` (`K/x`). An end is its stiffness ratio G ≥ 0 or
  * 'pinned' (G without bound). null, with a failed notice, for a column that sways on two pins.
@@ -107,7 +111,7 @@ export function alignmentK(
   const soft = 'the equation of the chart has a root';
   const taken = r.choice(
     `${key}/ends`,
-    [GA, GB].map((left) => ({ left, relation: '>', right: 0, outcome: soft }) as const),
+    [GA, GB].map((left) => ({ left, relation: '>', right: RIGID, outcome: soft }) as const),
     'both ends are rigid',
     { title: 'Ends of the column', clause: place },
   );
