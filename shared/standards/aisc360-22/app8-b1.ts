@@ -29,6 +29,7 @@ export const app8B1Formulas = {
     title: 'Equivalent uniform moment factor',
     expression: '0.6-0.4*M1M2',
     operands: { M1M2: 'none' },
+    validity: 'without load between the supports',
   }),
   CmTransverse: formula({
     ...CM,
@@ -53,6 +54,7 @@ export const app8B1Formulas = {
     expression: 'Cm/(1-alpha*Pr/Pe1)',
     operands: { Cm: 'none', alpha: 'none', Pr: 'force', Pe1: 'force' },
     prints: 'display',
+    validity: 'where αPr < Pe1',
   }),
   B1least: formula({
     id: 'A-8-3-least',

@@ -52,6 +52,7 @@ export const app8B2Formulas = {
     expression: '1/(1-alpha*Pstory/Pestory)',
     operands: { alpha: 'none', Pstory: 'force', Pestory: 'force' },
     prints: 'display',
+    validity: 'where αPstory < Pe,story',
   }),
   B2least: formula({
     id: 'A-8-6-least',

@@ -12,6 +12,7 @@ export const c2Formulas = {
     dimension: 'force',
     expression: 'Fy*Ag',
     operands: { Fy: 'stress', Ag: 'area' },
+    validity: 'where no element is slender in compression',
   }),
   crossSectionSlender: formula({
     id: 'C2.3-Pns-slender',
@@ -21,6 +22,7 @@ export const c2Formulas = {
     dimension: 'force',
     expression: 'Fy*Ae',
     operands: { Fy: 'stress', Ae: 'area' },
+    validity: 'where an element is slender in compression, with Ae of E7 at Fn = Fy',
   }),
   share: formula({
     id: 'C2.3-share',
@@ -41,6 +43,7 @@ export const c2Formulas = {
     dimension: 'none',
     expression: '1',
     operands: {},
+    validity: 'where αPr/Pns ≤ 0.5',
   }),
   taubReduced: formula({
     id: 'C2-2b',
@@ -51,6 +54,7 @@ export const c2Formulas = {
     dimension: 'none',
     expression: '4*Pu*(1-Pu)',
     operands: { Pu: 'none' },
+    validity: 'where αPr/Pns > 0.5',
   }),
   reducedRigidity: formula({
     id: 'C2.3-EI',

@@ -41,6 +41,7 @@ export const e3Formulas = {
     dimension: 'stress',
     expression: '0.658^(Fy/Fe)*Fy',
     operands: { Fy: 'stress', Fe: 'stress' },
+    validity: 'where Fy/Fe ≤ 2.25',
   }),
   elastic: formula({
     id: 'E3-3',
@@ -51,6 +52,7 @@ export const e3Formulas = {
     dimension: 'stress',
     expression: '0.877*Fe',
     operands: { Fe: 'stress' },
+    validity: 'where Fy/Fe > 2.25',
   }),
   strength: formula({
     id: 'E3-1',
@@ -61,6 +63,7 @@ export const e3Formulas = {
     dimension: 'force',
     expression: 'Fn*Ag',
     operands: { Fn: 'stress', Ag: 'area' },
+    validity: 'where no element is slender in compression',
   }),
   availableLrfd: formula({
     id: 'E1-LRFD',

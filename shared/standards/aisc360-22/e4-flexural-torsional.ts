@@ -53,6 +53,7 @@ export const e4FlexuralTorsionalFormulas = {
     // E4-3 without its difference: multiplied above and below by its bracket with a plus sign.
     expression: '2*Fey*Fez/(Fey+Fez+sqrt((Fey-Fez)^2+4*(1-H)*Fey*Fez))',
     operands: { Fey: 'stress', Fez: 'stress', H: 'none' },
+    validity: 'for shapes with one axis of symmetry',
   }),
   unsymmetric: formula({
     id: 'E4-4',
@@ -73,6 +74,7 @@ export const e4FlexuralTorsionalFormulas = {
       yo: 'length',
       ro: 'length',
     },
+    validity: 'for shapes without an axis of symmetry',
   }),
 };
 

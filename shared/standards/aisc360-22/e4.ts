@@ -21,6 +21,7 @@ export const e4Formulas = {
       Ix: 'inertia',
       Iy: 'inertia',
     },
+    validity: 'for doubly symmetric shapes',
   }),
   strength: formula({
     id: 'E4-1',

@@ -22,6 +22,7 @@ export const e7RoundFormulas = {
     dimension: 'area',
     expression: '(0.038*E/(Fy*lambda)+2/3)*Ag',
     operands: { E: 'stress', Fy: 'stress', lambda: 'none', Ag: 'area' },
+    validity: 'where 0.11E/Fy < D/t < 0.45E/Fy',
   }),
 };
 

@@ -50,6 +50,7 @@ export const f1Formulas = {
     expression: '12.5*Mmax/(2.5*Mmax+3*MA4+4*MB4+3*MC4)',
     operands: { Mmax: 'moment', MA4: 'moment', MB4: 'moment', MC4: 'moment' },
     prints: 'display',
+    validity: 'for doubly symmetric members, and for others in single curvature',
   }),
   availableLrfd: formula({
     id: 'F1-LRFD',

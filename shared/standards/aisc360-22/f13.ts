@@ -22,6 +22,7 @@ export const f13Formulas = {
     dimension: 'none',
     expression: '0.40*E/Fy',
     operands: { E: 'stress', Fy: 'stress' },
+    validity: 'where a/h > 1.5',
   }),
   webRatio: formula({
     id: 'F13-AwAfc',

@@ -80,6 +80,7 @@ export const f2Formulas = {
       Lp: 'length',
       Lr: 'length',
     },
+    validity: 'where Lp < Lb ≤ Lr, up to Mp',
   }),
   criticalStress: formula({
     id: 'F2-4',
@@ -99,6 +100,7 @@ export const f2Formulas = {
       Sx: 'modulus',
       ho: 'length',
     },
+    validity: 'where Lb > Lr',
   }),
   elastic: formula({
     id: 'F2-3',
@@ -109,6 +111,7 @@ export const f2Formulas = {
     dimension: 'moment',
     expression: 'Fcr*Sx',
     operands: { Fcr: 'stress', Sx: 'modulus' },
+    validity: 'where Lb > Lr, up to Mp',
   }),
 };
 

@@ -22,6 +22,7 @@ export const f3Formulas = {
       lambdapf: 'none',
       lambdarf: 'none',
     },
+    validity: 'where λpf < λ ≤ λrf',
   }),
   slender: formula({
     id: 'F3-2',
@@ -32,6 +33,7 @@ export const f3Formulas = {
     dimension: 'moment',
     expression: '0.9*E*kc*Sx/lambda^2',
     operands: { E: 'stress', kc: 'none', Sx: 'modulus', lambda: 'none' },
+    validity: 'where λ > λrf',
   }),
 };
 

@@ -109,6 +109,7 @@ const single = {
     dimension: 'moment',
     expression: 'Rpt*Myt',
     operands: { Rpt: 'none', Myt: 'moment' },
+    validity: 'where Sxt < Sxc',
   }),
   SxtSxc: formula({
     id: 'F4-SxtSxc',
@@ -128,6 +129,7 @@ const single = {
     dimension: 'stress',
     expression: '0.7*Fy',
     operands: { Fy: 'stress' },
+    validity: 'where Sxt/Sxc ≥ 0.7',
   }),
   FLPart: formula({
     id: 'F4-6b',
@@ -138,6 +140,7 @@ const single = {
     dimension: 'stress',
     expression: 'Fy*Sxt/Sxc',
     operands: { Fy: 'stress', Sxt: 'modulus', Sxc: 'modulus' },
+    validity: 'where Sxt/Sxc < 0.7, not below 0.5Fy',
   }),
   FLLeast: formula({
     id: 'F4-6b-min',
@@ -195,6 +198,7 @@ const single = {
       E: 'stress',
       FL: 'stress',
     },
+    validity: 'where Iyc/Iy > 0.23',
   }),
   LrWithoutJ: formula({
     id: 'F4-8-J0',
@@ -205,6 +209,7 @@ const single = {
     dimension: 'length',
     expression: '1.95*rt*E/FL*sqrt(sqrt(6.76*(FL/E)^2))',
     operands: { rt: 'length', E: 'stress', FL: 'stress' },
+    validity: 'where Iyc/Iy ≤ 0.23',
   }),
   inelastic: formula({
     id: 'F4-2',
@@ -224,6 +229,7 @@ const single = {
       Lp: 'length',
       Lr: 'length',
     },
+    validity: 'where Lp < Lb ≤ Lr, up to Rpc Myc',
   }),
   criticalStress: formula({
     id: 'F4-5',
@@ -242,6 +248,7 @@ const single = {
       Sxc: 'modulus',
       ho: 'length',
     },
+    validity: 'where Lb > Lr and Iyc/Iy > 0.23',
   }),
   criticalStressWithoutJ: formula({
     id: 'F4-5-J0',
@@ -252,6 +259,7 @@ const single = {
     dimension: 'stress',
     expression: 'Cb*pi^2*E/(Lb/rt)^2',
     operands: { Cb: 'none', E: 'stress', Lb: 'length', rt: 'length' },
+    validity: 'where Lb > Lr and Iyc/Iy ≤ 0.23',
   }),
   elastic: formula({
     id: 'F4-3',
@@ -262,6 +270,7 @@ const single = {
     dimension: 'moment',
     expression: 'Fcr*Sxc',
     operands: { Fcr: 'stress', Sxc: 'modulus' },
+    validity: 'where Lb > Lr, up to Rpc Myc',
   }),
   FLBNoncompact: formula({
     id: 'F4-13',
@@ -280,6 +289,7 @@ const single = {
       lambdapf: 'none',
       lambdarf: 'none',
     },
+    validity: 'where λpf < λ ≤ λrf',
   }),
   FLBSlender: formula({
     id: 'F4-14',
@@ -290,6 +300,7 @@ const single = {
     dimension: 'moment',
     expression: '0.9*E*kc*Sxc/lambda^2',
     operands: { E: 'stress', kc: 'none', Sxc: 'modulus', lambda: 'none' },
+    validity: 'where λ > λrf',
   }),
 };
 

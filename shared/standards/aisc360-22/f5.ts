@@ -17,6 +17,7 @@ export const f5Formulas = {
     dimension: 'none',
     expression: '1-aw/(1200+300*aw)*(lambda-5.7*sqrt(E/Fy))',
     operands: { aw: 'none', lambda: 'none', E: 'stress', Fy: 'stress' },
+    validity: 'up to 1.0, with aw not above 10',
   }),
   CFY: formula({
     id: 'F5-1',
@@ -47,6 +48,7 @@ export const f5Formulas = {
     dimension: 'stress',
     expression: 'Cb*(Fy-0.3*Fy*(Lb-Lp)/(Lr-Lp))',
     operands: { Cb: 'none', Fy: 'stress', Lb: 'length', Lp: 'length', Lr: 'length' },
+    validity: 'where Lp < Lb ≤ Lr, up to Fy',
   }),
   elastic: formula({
     id: 'F5-4',
@@ -57,6 +59,7 @@ export const f5Formulas = {
     dimension: 'stress',
     expression: 'Cb*pi^2*E/(Lb/rt)^2',
     operands: { Cb: 'none', E: 'stress', Lb: 'length', rt: 'length' },
+    validity: 'where Lb > Lr, up to Fy',
   }),
   Lr: formula({
     id: 'F5-5',
@@ -87,6 +90,7 @@ export const f5Formulas = {
     dimension: 'stress',
     expression: 'Fy-0.3*Fy*(lambda-lambdapf)/(lambdarf-lambdapf)',
     operands: { Fy: 'stress', lambda: 'none', lambdapf: 'none', lambdarf: 'none' },
+    validity: 'where λpf < λ ≤ λrf',
   }),
   FLBSlender: formula({
     id: 'F5-9',
@@ -97,6 +101,7 @@ export const f5Formulas = {
     dimension: 'stress',
     expression: '0.9*E*kc/lambda^2',
     operands: { E: 'stress', kc: 'none', lambda: 'none' },
+    validity: 'where λ > λrf',
   }),
   TFY: formula({
     id: 'F5-10',
@@ -107,6 +112,7 @@ export const f5Formulas = {
     dimension: 'moment',
     expression: 'Fy*Sxt',
     operands: { Fy: 'stress', Sxt: 'modulus' },
+    validity: 'where Sxt < Sxc',
   }),
 };
 

@@ -41,6 +41,7 @@ export const f6Formulas = {
       lambdapf: 'none',
       lambdarf: 'none',
     },
+    validity: 'where λpf < λ ≤ λrf',
   }),
   criticalStress: formula({
     id: 'F6-4',
@@ -51,6 +52,7 @@ export const f6Formulas = {
     dimension: 'stress',
     expression: '0.70*E/lambda^2',
     operands: { E: 'stress', lambda: 'none' },
+    validity: 'where λ > λrf',
   }),
   slender: formula({
     id: 'F6-3',
@@ -61,6 +63,7 @@ export const f6Formulas = {
     dimension: 'moment',
     expression: 'Fcr*Sy',
     operands: { Fcr: 'stress', Sy: 'modulus' },
+    validity: 'where λ > λrf',
   }),
 };
 

@@ -58,6 +58,7 @@ export const f7Formulas = {
       lambdapf: 'none',
       lambdarf: 'none',
     },
+    validity: 'where λpf < λ ≤ λrf, up to Mp',
   }),
   FLBSlender: formula({
     id: 'F7-3',
@@ -68,6 +69,7 @@ export const f7Formulas = {
     dimension: 'moment',
     expression: 'Fy*Se',
     operands: { Fy: 'stress', Se: 'modulus' },
+    validity: 'where λ > λrf',
   }),
   widthHss: width('F7-4', '0.38'),
   widthBox: width('F7-5', '0.34'),
@@ -139,6 +141,7 @@ export const f7Formulas = {
       lambdapw: 'none',
       lambdarw: 'none',
     },
+    validity: 'where λpw < λ ≤ λrw, up to Mp',
   }),
   aw: formula({
     id: 'F7-aw',
@@ -158,6 +161,7 @@ export const f7Formulas = {
     dimension: 'moment',
     expression: 'Rpg*Fy*S',
     operands: { Rpg: 'none', Fy: 'stress', S: 'modulus' },
+    validity: 'for boxes whose webs are slender and whose flanges are not',
   }),
   Lp: formula({
     id: 'F7-12',
@@ -203,6 +207,7 @@ export const f7Formulas = {
       Lp: 'length',
       Lr: 'length',
     },
+    validity: 'where Lp < Lb ≤ Lr, up to Mp',
   }),
   elastic: formula({
     id: 'F7-11',
@@ -220,5 +225,6 @@ export const f7Formulas = {
       Lb: 'length',
       ry: 'length',
     },
+    validity: 'where Lb > Lr, up to Mp',
   }),
 };

@@ -23,6 +23,7 @@ export const f8Formulas = {
     dimension: 'moment',
     expression: 'Fy*Z',
     operands: { Fy: 'stress', Z: 'modulus' },
+    validity: 'where D/t < 0.45E/Fy',
   }),
   noncompact: formula({
     id: 'F8-2',
@@ -33,6 +34,7 @@ export const f8Formulas = {
     dimension: 'moment',
     expression: '(0.021*E/lambda+Fy)*S',
     operands: { E: 'stress', lambda: 'none', Fy: 'stress', S: 'modulus' },
+    validity: 'where 0.07E/Fy < D/t ≤ 0.31E/Fy',
   }),
   criticalStress: formula({
     id: 'F8-4',
@@ -43,6 +45,7 @@ export const f8Formulas = {
     dimension: 'stress',
     expression: '0.33*E/lambda',
     operands: { E: 'stress', lambda: 'none' },
+    validity: 'where 0.31E/Fy < D/t < 0.45E/Fy',
   }),
   slender: formula({
     id: 'F8-3',
@@ -53,6 +56,7 @@ export const f8Formulas = {
     dimension: 'moment',
     expression: 'Fcr*S',
     operands: { Fcr: 'stress', S: 'modulus' },
+    validity: 'where 0.31E/Fy < D/t < 0.45E/Fy',
   }),
 };
 

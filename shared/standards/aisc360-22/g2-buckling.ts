@@ -23,6 +23,7 @@ export const g2BucklingFormulas = {
     dimension: 'none',
     expression: '1',
     operands: {},
+    validity: 'where h/tw ≤ 1.10√(kv E/Fy)',
   }),
   inelastic: formula({
     id: 'G2-10',
@@ -33,6 +34,7 @@ export const g2BucklingFormulas = {
     dimension: 'none',
     expression: '1.10*sqrt(kv*E/Fy)/lambda',
     operands: { kv: 'none', E: 'stress', Fy: 'stress', lambda: 'none' },
+    validity: 'where 1.10√(kv E/Fy) < h/tw ≤ 1.37√(kv E/Fy)',
   }),
   elastic: formula({
     id: 'G2-11',
@@ -43,6 +45,7 @@ export const g2BucklingFormulas = {
     dimension: 'none',
     expression: '1.51*kv*E/(lambda^2*Fy)',
     operands: { kv: 'none', E: 'stress', lambda: 'none', Fy: 'stress' },
+    validity: 'where h/tw > 1.37√(kv E/Fy)',
   }),
 };
 

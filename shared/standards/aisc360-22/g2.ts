@@ -53,6 +53,7 @@ export const g2Formulas = {
     dimension: 'none',
     expression: '1',
     operands: {},
+    validity: 'for webs of rolled I-shapes where h/tw ≤ 2.24√(E/Fy)',
   }),
   kvUnstiffened: formula({
     id: 'G2-kv',
@@ -90,6 +91,7 @@ export const g2Formulas = {
     dimension: 'none',
     expression: '5+5/ah^2',
     operands: { ah: 'none' },
+    validity: 'where a/h ≤ 3',
   }),
   yieldLimit: formula({
     id: 'G2-1.10',
@@ -109,6 +111,7 @@ export const g2Formulas = {
     dimension: 'none',
     expression: '1',
     operands: {},
+    validity: 'where h/tw ≤ 1.10√(kv E/Fy)',
   }),
   CvSlender: formula({
     id: 'G2-4',
@@ -119,6 +122,7 @@ export const g2Formulas = {
     dimension: 'none',
     expression: '1.10*sqrt(kv*E/Fy)/lambdaw',
     operands: { ...PLATE, lambdaw: 'none' },
+    validity: 'where h/tw > 1.10√(kv E/Fy)',
   }),
   strength: formula({
     id: 'G2-1',

@@ -28,6 +28,8 @@ export const h1SingleAxisFormulas = {
     operands: { Pr: 'force', Pc: 'force', Mrx: 'moment', Cb: 'none', Mcx: 'moment' },
     prints: 'display',
     ratio: true,
+    validity:
+      'for rolled compact doubly symmetric members bent about the major axis, where Lcz ≤ Lcy and Mry/Mcy < 0.05',
   }),
 };
 

@@ -24,6 +24,7 @@ export const h1TensionFormulas = {
     dimension: 'force',
     expression: 'pi^2*E*Iy/Lb^2',
     operands: { E: 'stress', Iy: 'inertia', Lb: 'length' },
+    validity: 'for doubly symmetric members in tension',
   }),
   Cb: formula({
     id: 'H1.2-Cb',
@@ -34,6 +35,7 @@ export const h1TensionFormulas = {
     expression: 'Cb*sqrt(1+alpha*Pr/Pey)',
     operands: { Cb: 'none', alpha: 'none', Pr: 'force', Pey: 'force' },
     prints: 'display',
+    validity: 'for doubly symmetric members in tension',
   }),
 };
 

@@ -13,11 +13,13 @@ const MINOR = { Mry: 'moment', Mcy: 'moment' } as const;
 /** The clause that sends to H1-1a and H1-1b: H1.1 compression, H1.2 tension, H1.3 in the plane. */
 export type InteractionClause = 'H1.1' | 'H1.2' | 'H1.3';
 
+const VALIDITY = { 'H1-1a': 'where Pr/Pc ≥ 0.2', 'H1-1b': 'where Pr/Pc < 0.2' } as const;
+
 /** `suffix` tells the ids of one clause from those of the others. */
 function interactionFormulas(number: InteractionClause, suffix: string) {
   const one = (
     id: string,
-    equation: string,
+    equation: keyof typeof VALIDITY,
     title: string,
     expression: string,
     operands: FormulaText['operands'],
@@ -25,6 +27,7 @@ function interactionFormulas(number: InteractionClause, suffix: string) {
     formula({
       ...{ id: `${id}${suffix}`, clause: number, equation, title, symbol: 'ratio' },
       ...{ dimension: 'none', expression, operands, prints: 'display', ratio: true },
+      validity: VALIDITY[equation],
     });
   const noMinor = 'Interaction, no minor-axis moment';
   const noMajor = 'Interaction, no major-axis moment';

@@ -37,6 +37,7 @@ export const secondOrderFormulas = {
     expression: 'M2abs*sqrt((1-psi)^2+4*psi*sin(kL/2)^2)/sin(kL)',
     operands: { M2abs: 'moment', psi: 'none', kL: 'angle' },
     prints: 'display',
+    validity: 'where arccos ψ < kL < π',
   }),
   largestAtEnd: formula({
     id: 'Mmax-end',
@@ -47,6 +48,7 @@ export const secondOrderFormulas = {
     expression: 'M2abs',
     operands: { M2abs: 'moment' },
     prints: 'display',
+    validity: 'where kL ≤ arccos ψ',
   }),
   place: formula({
     id: 'z2',
@@ -57,6 +59,7 @@ export const secondOrderFormulas = {
     expression: 'atan2((psi-1)+2*sin(kL/2)^2,sin(kL))*L1/kL',
     operands: { psi: 'none', kL: 'angle', L1: 'length' },
     prints: 'display',
+    validity: 'where arccos ψ < kL < π',
   }),
   placeFromA: formula({
     id: 'zmax-A',
@@ -96,6 +99,7 @@ export const secondOrderFormulas = {
     dimension: 'none',
     expression: '1/cos(kL/2)',
     operands: { kL: 'angle' },
+    validity: 'where kL < π',
   }),
   CmSecant: formula({
     id: 'Cm-sec',
@@ -105,6 +109,7 @@ export const secondOrderFormulas = {
     dimension: 'none',
     expression: 'sqrt((1-psi)^2+4*psi*sin(kL/2)^2)/(2*sin(kL/2))',
     operands: { psi: 'none', kL: 'angle' },
+    validity: 'where arccos ψ < kL < π',
   }),
   CmSecantEnd: formula({
     id: 'Cm-sec-end',
@@ -114,6 +119,7 @@ export const secondOrderFormulas = {
     dimension: 'none',
     expression: 'cos(kL/2)',
     operands: { kL: 'angle' },
+    validity: 'where kL ≤ arccos ψ',
   }),
   CmAmplifier: formula({
     id: 'Cm-B1',
