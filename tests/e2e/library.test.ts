@@ -78,7 +78,7 @@ describe('looking up a clause', () => {
       await neighbours.getByRole('link', { name: /after: E3/ }).click();
       await page.getByText(/buckling is inelastic: E3-2 applies/).waitFor();
       await page.getByRole('link', { name: 'Library', exact: true }).first().click();
-      await page.getByRole('link', { name: 'theory 0' }).click();
+      await page.getByRole('link', { name: 'App. 7.3', exact: true }).click();
       await page.getByText(/No published example/).waitFor();
     },
     patience,
