@@ -68,7 +68,7 @@ function partWords(path: string): string {
     case 'section':
       return `Section, ${wordsFrom(sizeWords, index)}`;
     case 'springs':
-      return wordsFrom(springWords, index);
+      return `Ends, ${wordsFrom(springWords, index)}`;
     case 'charts':
       return `Alignment chart about ${index}, ${wordsFrom(chartWords, field)}`;
     case 'netSection':

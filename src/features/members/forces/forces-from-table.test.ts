@@ -37,6 +37,11 @@ describe('a table of forces from a spreadsheet', () => {
     ]);
   });
 
+  it('takes shear forces by the axis that their load bends about', () => {
+    const [row] = understood('name\tP\tVx (kip)\tShear minor\nA\t10\t24\t3.5').combinations;
+    expect([row?.Vx?.text, row?.Vy?.text]).toEqual(['24 kip', '3.5 kip']);
+  });
+
   it('takes the units of the calculation where none are said', () => {
     expect(understood('name\tP\tMy1\nA\t10\t2', 'si').combinations[0]?.MyA.text).toBe('2 kN m');
     expect(understood('name\tP\tMy1\nA\t10\t2', 'us').combinations[0]?.P.text).toBe('10 kip');
