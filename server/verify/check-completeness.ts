@@ -16,9 +16,12 @@ export function* checkCompleteness(member: MemberRecord): Iterable<CoverageProbl
   const lines = new Map(placedLines(member).map((p) => [p.address, p.line]));
   const names = new Map(member.combinations.map((c) => [c.id, c.name]));
   for (const row of member.completeness) {
-    const covered = row.cells.map((cell) => cell.combination).join(' ');
-    if (covered !== [...names.keys()].join(' '))
-      yield { address: null, reason: `${row.title}: does not cover each combination once` };
+    const parts = row.cells.map((cell) => `${cell.combination} ${cell.segment ?? ''}`);
+    const covered = new Set(row.cells.map((cell) => cell.combination));
+    if ([...covered].join(' ') !== [...names.keys()].join(' '))
+      yield { address: null, reason: `${row.title}: does not cover each combination` };
+    if (new Set(parts).size !== parts.length)
+      yield { address: null, reason: `${row.title}: covers a part of the member twice` };
     for (const cell of row.cells)
       for (const reason of cellReasons(cell, member, lines))
         yield { address: null, reason: `${row.title}, ${names.get(cell.combination)}: ${reason}` };

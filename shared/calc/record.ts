@@ -39,6 +39,8 @@ export const COVERAGE = [
 /** One cell of the completeness table: a limit state under one combination. */
 const coverageCellSchema = z.object({
   combination: z.string(),
+  /** The segment it is for; null or absent: the whole member. */
+  segment: z.string().nullable().optional(),
   state: z.enum(COVERAGE),
   because: z.string(),
   /** Address of the line that says so, or null. */

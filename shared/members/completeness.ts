@@ -17,36 +17,33 @@ export function completenessOf(
   const halted = memberLines.find(
     (l) => l.kind === 'notice' && (l.key === 'B4/outside' || l.key === 'C2/outside'),
   );
-  const stopOf = (record: CombinationRecord): Told | null => {
-    if (halted) return { state: 'outside scope', because: halted.title, address: halted.key };
-    const tension = record.lines.find((l) => l.key === 'D2/outside');
-    return tension
-      ? {
-          state: 'outside scope',
-          because: 'the member is in tension',
-          address: `${record.id}:${tension.key}`,
-        }
-      : null;
-  };
+  const haltOf = (): Told | null =>
+    halted ? { state: 'outside scope', because: halted.title, address: halted.key } : null;
   return LIMIT_STATES.map((state) => ({
     id: state.id,
     title: state.title,
     clause: clause(state.clause[0], state.clause[1] ?? null),
-    cells: combinations.map((record): Cell => {
+    cells: combinations.flatMap((record): Cell[] => {
       const run = runs.get(record.id);
-      const told: Told =
-        (state.never ? null : stopOf(record)) ??
-        (run ? state.tell({ run, record, memberLines }) : notReached('no run'));
-      return {
-        combination: record.id,
-        state: told.state,
-        because: told.because,
-        address: told.address ?? null,
-        ratio: told.check?.ratio ?? null,
-        ratioText: told.check
-          ? printNumber(told.check.ratio, told.check.print.working ?? { dec: 3 }).text
-          : null,
-      };
+      const segments = state.bySegment && run ? run.segments : [null];
+      return segments.map((segment) => {
+        const told: Told =
+          (state.never ? null : haltOf()) ??
+          (run
+            ? state.tell({ run, record, memberLines, segment: segment ?? run.segments[0] ?? null })
+            : notReached('no run'));
+        return {
+          combination: record.id,
+          segment,
+          state: told.state,
+          because: told.because,
+          address: told.address ?? null,
+          ratio: told.check?.ratio ?? null,
+          ratioText: told.check
+            ? printNumber(told.check.ratio, told.check.print.working ?? { dec: 3 }).text
+            : null,
+        };
+      });
     }),
   }));
 }

@@ -1,5 +1,6 @@
 import type { Line, LineOf } from '../calc/line.ts';
 import type { CombinationRecord, CoverageRow } from '../calc/record.ts';
+import type { Axis } from './bay-moments.ts';
 import type { CombinationRun } from './combination.ts';
 
 type Cell = CoverageRow['cells'][number];
@@ -14,6 +15,8 @@ export interface Context {
   readonly run: CombinationRun;
   readonly record: CombinationRecord;
   readonly memberLines: readonly Line[];
+  /** The part of the member that the cell is for; null for the whole. */
+  readonly segment: string | null;
 }
 
 /** Limit states that stand in every table, whether or not they apply. */
@@ -23,10 +26,10 @@ export interface LimitState {
   readonly clause: readonly [clause: string, equation?: string];
   /** Outside every sheet, whatever the member and its forces. */
   readonly never?: true;
+  /** It has a cell for every segment. */
+  readonly bySegment?: true;
   readonly tell: (c: Context) => Told;
 }
-
-export type Axis = 'x' | 'y';
 
 export const na = (because: string): Told => ({ state: 'not applicable', because });
 export const outside = (because: string, address: string | null = null): Told => ({
@@ -40,9 +43,18 @@ export const notReached = (because: string, address: string | null = null): Told
   address,
 });
 
-export const find = (c: Context, key: string): { line: Line; address: string } | null => {
-  const own = c.record.lines.find((l) => l.key === key);
-  if (own) return { line: own, address: `${c.record.id}:${key}` };
+export interface Found {
+  readonly line: Line;
+  readonly address: string;
+}
+
+/** The line of that key in the segment, else in the combination, else in the member. */
+export const find = (c: Context, key: string): Found | null => {
+  const keys = c.segment === null ? [key] : [`${c.segment}/${key}`, key];
+  for (const wanted of keys) {
+    const own = c.record.lines.find((l) => l.key === wanted);
+    if (own) return { line: own, address: `${c.record.id}:${wanted}` };
+  }
   const line = c.memberLines.find((l) => l.key === key);
   return line ? { line, address: key } : null;
 };
@@ -53,12 +65,14 @@ export const takenBy = (c: Context, governing: string): string | null => {
   return found?.line.kind === 'governing' ? found.line.governs.replace(/^:/, '') : null;
 };
 
-export const strength = (c: Context, key: string, governs: boolean, otherwise: string): Told => {
-  const address = find(c, key)?.address ?? null;
-  return governs
+export const strength = (
+  address: string | null,
+  governs: boolean,
+  otherwise: string = LESS,
+): Told =>
+  governs
     ? { state: 'governs', because: 'gives the strength', address }
     : { state: 'does not govern', because: otherwise, address };
-};
 
 export const LESS = 'another limit state gives less';
 export const noMoment = (axis: Axis): string =>
@@ -71,32 +85,46 @@ export const bent = (c: Context, axis: Axis): boolean =>
 export function unreached(c: Context, axes: readonly Axis[]): Told {
   for (const axis of axes) {
     const state = c.run.planes[axis]?.state;
-    const at = (...keys: string[]) => keys.map((k) => find(c, k)).find((f) => f !== null) ?? null;
     if (state === 'failed') {
-      const notice = at(`App8/${axis}/unstable`, 'C2/squash');
-      return notReached('no finite second-order moment exists', notice?.address ?? null);
+      const notice = c.record.lines.find(
+        (l) => l.key.endsWith(`App8/${axis}/unstable`) || l.key === 'C2/squash',
+      );
+      const address = notice ? `${c.record.id}:${notice.key}` : null;
+      return notReached('no finite second-order moment exists', address);
     }
     if (state === 'outside scope') {
-      const notice = at(`theory/${axis}/outside`);
+      const notice = find(c, `theory/${axis}/outside`);
       return outside(notice?.line.title ?? 'see the notice on the sheet', notice?.address ?? null);
     }
   }
-  const web = axes.includes('x') && bent(c, 'x') ? find(c, 'F4/outside') : null;
-  return web ? outside(web.line.title, web.address) : notReached('a step before it has no value');
+  const lacking = ['axial', ...axes]
+    .map((part) => find(c, `H1/${part}/lacking`))
+    .find((f) => f !== null);
+  return lacking
+    ? outside(lacking.line.title, lacking.address)
+    : notReached('a step before it has no value');
 }
 
-export const check = (c: Context, key: string): LineOf<'check'> | undefined =>
-  c.record.lines.find((l): l is LineOf<'check'> => l.kind === 'check' && l.key === key);
+/** A check of the segment, or of the combination. */
+export const check = (
+  c: Context,
+  key: string,
+): { readonly line: LineOf<'check'>; readonly address: string } | null => {
+  const found = find(c, key);
+  return found?.line.kind === 'check' ? { line: found.line, address: found.address } : null;
+};
 
-export function checked(c: Context, found: LineOf<'check'>): Told {
+export function checked(
+  c: Context,
+  { line, address }: { readonly line: LineOf<'check'>; readonly address: string },
+): Told {
   const { governing, verdict, ratio } = c.record.summary;
-  const address = `${c.record.id}:${found.key}`;
   if (governing?.address === address)
-    return { state: 'governs', because: 'largest utilisation', address, check: found };
+    return { state: 'governs', because: 'largest utilisation', address, check: line };
   return {
     state: 'does not govern',
     because: ratio === null ? `the combination is ${verdict}` : 'no larger utilisation',
     address,
-    check: found,
+    check: line,
   };
 }

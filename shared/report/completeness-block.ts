@@ -55,7 +55,22 @@ function alike(cells: readonly Cell[]): [Cell, ...Cell[]][] {
   return [...groups.values()];
 }
 
+/** The combinations of some cells, with the segments where these are for parts of the member. */
 function combinationWords(cells: readonly Cell[], names: ReadonlyMap<string, string>): string {
-  if (cells.length === names.size && cells.length > 1) return `all ${cells.length}`;
-  return cells.map((c) => names.get(c.combination) ?? c.combination).join('; ');
+  const whole = cells.every((c) => !c.segment);
+  if (whole && cells.length === names.size && cells.length > 1) return `all ${cells.length}`;
+  const segments = new Map<string, string[]>();
+  for (const { combination, segment } of cells)
+    segments.set(combination, [
+      ...(segments.get(combination) ?? []),
+      ...(segment ? [segment.replace('s', '')] : []),
+    ]);
+  return [...segments]
+    .map(([id, parts]) => {
+      const name = names.get(id) ?? id;
+      return parts.length === 0
+        ? name
+        : `${name}, segment${parts.length > 1 ? 's' : ''} ${parts.join(', ')}`;
+    })
+    .join('; ');
 }
