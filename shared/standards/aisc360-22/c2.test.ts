@@ -41,6 +41,7 @@ describe('τb = 1 by a further notional load', () => {
   it('says what the analysis has to hold above: 0.001·1.6·500 = 0.8', () => {
     const { r, taub } = solve(400, 500);
     expect(taub.value).toBe(1);
+    expect(r.lines.at(-1)?.clause).toMatchObject({ clause: 'C2.3', equation: null });
     expect(notices(r)).toMatchObject([{ severity: 'note', code: 'further-notional-load' }]);
     const load = r.lines.find((l) => l.key === 'C2/further/Ni');
     expect(load && 'value' in load && load.value).toBeCloseTo(0.8, 14);

@@ -56,6 +56,15 @@ export const c2Formulas = {
     operands: { Pu: 'none' },
     validity: 'where αPr/Pns > 0.5',
   }),
+  taubByNotionalLoad: formula({
+    id: 'C2.3c-taub',
+    clause: 'C2.3',
+    title: 'Stiffness reduction factor by a further notional load',
+    symbol: 'taub',
+    dimension: 'none',
+    expression: '1',
+    operands: {},
+  }),
   reducedRigidity: formula({
     id: 'C2.3-EI',
     clause: 'C2.3',
@@ -171,7 +180,11 @@ export function stiffnessByNotionalLoad(
       { title, clause: clause('C2.3') },
     );
   }
-  return r.formula(c2Formulas.taubFull, 'C2/taub', {});
+  return r.formula(
+    taken === 0 ? c2Formulas.taubFull : c2Formulas.taubByNotionalLoad,
+    'C2/taub',
+    {},
+  );
 }
 
 /** Largest ratio of second-order to first-order drift up to which a method's easements hold. */
