@@ -53,18 +53,17 @@ const modulus: Read = ({ symbol }, { constants }) => {
   return { published, row, column: symbol, tableSource: SPECIFICATION };
 };
 
-/** Constants that clauses give, read by the key of the line they print as. */
-function constantsOf(design: 'LRFD' | 'ASD'): ReadonlyMap<string, Lookup> {
-  const r = createRecorder('');
-  methodConstant(r, 'compression', design);
-  methodConstant(r, 'flexure', design);
-  methodConstant(r, 'loadLevel', design);
-  return new Map(r.lines.flatMap((l) => (l.kind === 'lookup' ? [[l.key, l]] : [])));
-}
+const CONSTANTS: readonly Parameters<typeof methodConstant>[1][] = [
+  ...(['compression', 'flexure', 'tensionYielding', 'tensionRupture'] as const),
+  ...(['shear', 'shearStockyWeb', 'loadLevel'] as const),
+];
 
-const constant: Read = ({ key, table }, { record }) => {
-  const found = constantsOf(record.design).get(key);
-  return found && found.table === table ? found : null;
+/** Constants that clauses give, by clause and symbol: a member may have one under several keys. */
+const constant: Read = ({ table, symbol }, { record }) => {
+  const r = createRecorder('');
+  for (const name of CONSTANTS) methodConstant(r, name, record.design, name);
+  const found = r.lines.filter((l): l is Lookup => l.kind === 'lookup');
+  return found.find((l) => l.table === table && l.symbol === symbol) ?? null;
 };
 
 const TABLES: Readonly<Record<string, Read>> = {

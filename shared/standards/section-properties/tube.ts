@@ -27,8 +27,22 @@ const lengths = (...names: readonly string[]): Dimensions =>
 export const tubeFormulas = {
   Ro: one('tube-Ro', 'Outside corner radius', 'Ro', 'length', '2*t', lengths('t')),
   Ri: one('tube-Ri', 'Inside corner radius', 'Ri', 'length', 'Ro-t', lengths('Ro', 't')),
-  wb: one('tube-wb', 'Straight part of the width', 'wb', 'length', 'B-2*Ro', lengths('B', 'Ro')),
-  wh: one('tube-wh', 'Straight part of the height', 'wh', 'length', 'Ht-2*Ro', lengths('Ht', 'Ro')),
+  bflat: one(
+    'tube-bflat',
+    'Straight part of the width',
+    'bflat',
+    'length',
+    'B-2*Ro',
+    lengths('B', 'Ro'),
+  ),
+  hflat: one(
+    'tube-hflat',
+    'Straight part of the height',
+    'hflat',
+    'length',
+    'Ht-2*Ro',
+    lengths('Ht', 'Ro'),
+  ),
   Ac: one(
     'tube-Ac',
     'Area of one corner',
@@ -53,8 +67,8 @@ export const tubeFormulas = {
     'pi*t*(Ro+Ri)*(Ro^2+Ri^2)/16',
     lengths('t', 'Ro', 'Ri'),
   ),
-  A: one('tube-A', 'Gross area', 'A', 'area', '2*t*(wb+wh)+4*Ac', {
-    ...lengths('t', 'wb', 'wh'),
+  A: one('tube-A', 'Gross area', 'A', 'area', '2*t*(bflat+hflat)+4*Ac', {
+    ...lengths('t', 'bflat', 'hflat'),
     Ac: 'area',
   }),
   I: one(
@@ -62,14 +76,21 @@ export const tubeFormulas = {
     'Second moment of area',
     'I',
     'inertia',
-    'wb*t*(Ht-t)^2/2+wb*t^3/6+t*wh^3/6+4*Ic+4*wh*Qc+wh^2*Ac',
-    { ...lengths('t', 'wb', 'wh', 'Ht'), Ac: 'area', Qc: 'modulus', Ic: 'inertia' },
+    'bflat*t*(Ht-t)^2/2+bflat*t^3/6+t*hflat^3/6+4*Ic+4*hflat*Qc+hflat^2*Ac',
+    { ...lengths('t', 'bflat', 'hflat', 'Ht'), Ac: 'area', Qc: 'modulus', Ic: 'inertia' },
   ),
-  Z: one('tube-Z', 'Plastic modulus', 'Z', 'modulus', 'wb*t*(Ht-t)+t*wh^2/2+4*Qc+2*wh*Ac', {
-    ...lengths('t', 'wb', 'wh', 'Ht'),
-    Ac: 'area',
-    Qc: 'modulus',
-  }),
+  Z: one(
+    'tube-Z',
+    'Plastic modulus',
+    'Z',
+    'modulus',
+    'bflat*t*(Ht-t)+t*hflat^2/2+4*Qc+2*hflat*Ac',
+    {
+      ...lengths('t', 'bflat', 'hflat', 'Ht'),
+      Ac: 'area',
+      Qc: 'modulus',
+    },
+  ),
   Rm: one('tube-Rm', 'Corner radius of the middle line', 'Rm', 'length', '(Ro+Ri)/2', {
     ...lengths('Ro', 'Ri'),
   }),
@@ -78,16 +99,16 @@ export const tubeFormulas = {
     'Area inside the middle line of the wall',
     'Am',
     'area',
-    'wb*wh+2*Rm*(wb+wh)+pi*Rm^2',
-    lengths('wb', 'wh', 'Rm'),
+    'bflat*hflat+2*Rm*(bflat+hflat)+pi*Rm^2',
+    lengths('bflat', 'hflat', 'Rm'),
   ),
   pm: one(
     'tube-pm',
     'Length of the middle line of the wall',
     'pm',
     'length',
-    '2*(wb+wh)+2*pi*Rm',
-    lengths('wb', 'wh', 'Rm'),
+    '2*(bflat+hflat)+2*pi*Rm',
+    lengths('bflat', 'hflat', 'Rm'),
   ),
   J: one('tube-J', 'Torsional constant', 'J', 'inertia', '4*Am^2*t/pm', {
     Am: 'area',
@@ -135,16 +156,16 @@ export function rectangularTube(
   const { t } = q;
   const Ro = given ?? r.formula(f.Ro, 'section/Ro', q);
   const Ri = r.formula(f.Ri, 'section/Ri', { Ro, t });
-  const wb = r.formula(f.wb, 'section/wb', { ...q, Ro });
-  const wh = r.formula(f.wh, 'section/wh', { ...q, Ro });
+  const bflat = r.formula(f.bflat, 'section/bflat', { ...q, Ro });
+  const hflat = r.formula(f.hflat, 'section/hflat', { ...q, Ro });
   const corner = { t, Ro, Ri };
   const Ac = r.formula(f.Ac, 'section/Ac', corner);
   const Qc = r.formula(f.Qc, 'section/Qc', corner);
   const Ic = r.formula(f.Ic, 'section/Ic', corner);
-  const A = r.formula(f.A, 'section/A', { t, wb, wh, Ac });
+  const A = r.formula(f.A, 'section/A', { t, bflat, hflat, Ac });
   const across = {
-    x: { ...{ t, Ac, Qc, Ic }, wb, wh, Ht: q.Ht },
-    y: { ...{ t, Ac, Qc, Ic }, wb: wh, wh: wb, Ht: q.B },
+    x: { ...{ t, Ac, Qc, Ic }, bflat, hflat, Ht: q.Ht },
+    y: { ...{ t, Ac, Qc, Ic }, bflat: hflat, hflat: bflat, Ht: q.B },
   } as const;
   const about = (axis: 'x' | 'y') => {
     const more = (name: string, title: string) => ({
@@ -159,12 +180,12 @@ export function rectangularTube(
   const x = about('x');
   const y = about('y');
   const Rm = r.formula(f.Rm, 'section/Rm', { Ro, Ri });
-  const Am = r.formula(f.Am, 'section/Am', { wb, wh, Rm });
-  const pm = r.formula(f.pm, 'section/pm', { wb, wh, Rm });
+  const Am = r.formula(f.Am, 'section/Am', { bflat, hflat, Rm });
+  const pm = r.formula(f.pm, 'section/pm', { bflat, hflat, Rm });
   const J = r.formula(f.J, 'section/J', { Am, t, pm });
   return {
     ...{ A, J, Ix: x.I, Sx: x.S, Zx: x.Z, rx: x.r, Iy: y.I, Sy: y.S, Zy: y.Z, ry: y.r },
-    flats: { b: wb, h: wh },
+    flats: { b: bflat, h: hflat },
   };
 }
 
