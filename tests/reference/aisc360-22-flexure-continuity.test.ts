@@ -7,7 +7,7 @@ import {
   majorSection,
 } from '#shared/members/major-flexure.ts';
 import { methodConstant } from '#shared/standards/aisc360-22/parameters.ts';
-import { type FlexureCase, majorOf, minorOf } from './flexure-of.ts';
+import { closureFaults, type FlexureCase, majorOf, minorOf } from './flexure-of.ts';
 import { quantity, sectionOf, steelOf, type Texts } from './given-texts.ts';
 
 /*
@@ -300,4 +300,30 @@ describe('segments of one member', () => {
     expect(Mc.value / (0.9 * 5050 * 4448.2216152605 * 25.4)).toBeCloseTo(1, 9);
     expect(Mc.ref).toBe('H1/inPlane/Mc');
   });
+});
+
+describe('what is printed reproduces from what is printed', () => {
+  const cases: readonly (readonly [string, Texts])[] = [
+    ['rolled', rolled],
+    ['rolled, slender flange', { ...rolled, lambdaf: '30' }],
+    ['built-up', { ...builtUp, lambdaf: '12' }],
+    ['channel', channel],
+    ['F4', { ...F4, lambdaf: '12' }],
+    ['F5', { ...F5, lambdaf: '19' }],
+    ['HSS', { ...hss, lambdab: '40' }],
+    ['box', { ...box, lambdab: '40' }],
+    ['box, slender webs', { ...box, lambdah: '150' }],
+    ['round', round],
+    ['round, slender', { ...round, lambdad: '190' }],
+  ];
+  for (const [name, section] of cases)
+    it(name, () => {
+      const runs = [
+        ...['0 in', '70 in', '200 in', '3000 in'].map((Lb) =>
+          majorOf({ Fy, section, Lb, Cb: '1.137' }, 'ASD'),
+        ),
+        minorOf({ Fy, section: { Sy: '10.7 in³', Zy: '16.6 in³', ...section }, Lb: '0 in' }),
+      ];
+      expect(runs.flatMap(closureFaults)).toEqual([]);
+    });
 });

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { type Computed, type FlexureCase, majorOf, minorOf } from './flexure-of.ts';
+import { type Computed, closureFaults, type FlexureCase, majorOf, minorOf } from './flexure-of.ts';
 
 /*
  * Chapter F by hand where no published example is at hand: built-up and singly symmetric I-shapes
@@ -533,4 +533,18 @@ describe('F6, channel and singly symmetric I-shape', () => {
       ['F6/Mn', 'kip in', 2757.6 - (1551.15 * (20 - 9.151612)) / (24.083189 - 9.151612)],
     ]);
   });
+});
+
+describe('what is printed of singly symmetric shapes reproduces from what is printed', () => {
+  for (const [name, c] of [
+    ['noncompact web', plates],
+    ['compact web', smallTension],
+  ] as const)
+    for (const compressed of ['top', 'bottom'] as const)
+      it(`${name}, ${compressed}`, () => {
+        const runs = ['0 in', '100 in', '900 in'].map((Lb) =>
+          at({ ...c, compressed }, Lb, '1.137'),
+        );
+        expect(runs.flatMap(closureFaults)).toEqual([]);
+      });
 });

@@ -1,3 +1,5 @@
+import { closeLines } from '#shared/calc/closure.ts';
+import { closureProblems } from '#shared/calc/closure-problems.ts';
 import type { Line } from '#shared/calc/line.ts';
 import { createRecorder, type Recorder } from '#shared/calc/recorder.ts';
 import {
@@ -10,6 +12,7 @@ import { minorStrength } from '#shared/members/minor-flexure.ts';
 import type { SectionQuantities } from '#shared/members/section-quantities.ts';
 import { modificationFactor } from '#shared/standards/aisc360-22/f1.ts';
 import { methodConstant } from '#shared/standards/aisc360-22/parameters.ts';
+import { UNIT_SETS } from '#shared/units/unit-set.ts';
 import { quantities, quantity, steelOf, type Texts } from './given-texts.ts';
 import { inUnit } from './in-unit.ts';
 
@@ -99,3 +102,12 @@ export function minorOf(c: FlexureCase, design: 'LRFD' | 'ASD' = 'LRFD'): Comput
   minorStrength(r, design, steel, sectionOf(r, c), methodConstant(r, 'flexure', design));
   return read(r, null);
 }
+
+/** What does not follow, as printed in either unit set, from what is printed. */
+export const closureFaults = ({ lines }: Computed): readonly string[] =>
+  Object.values(UNIT_SETS).flatMap((set) => {
+    const placed = (of: readonly Line[]) =>
+      of.map((line) => ({ address: line.key, combination: null, line }));
+    const closed = closeLines(placed(lines), set);
+    return closureProblems(placed(closed), set).map((p) => `${p.address}: ${p.reason}`);
+  });
