@@ -24,12 +24,19 @@ const constants: readonly (readonly [string, Readonly<Record<string, number>>, s
   ['Phi4(a)', { a: 1 }, '0.0403023058681397174'],
   ['Phi5(a)', { a: 1 }, '0.00813765147456317332'],
   ['Phi2(a)', { a: -1 }, '0.5430806348152437785'],
+  // (cosh 20 − 1)/400, (1/6 − (1 − sin(20)/20)/400)/400 to 22 digits by python3's mpmath.
+  ['Phi2(a)', { a: -400 }, '606456.4917622378500378'],
+  ['Phi5(a)', { a: 400 }, '0.0004107019620575190503087'],
   ['-a', { a: 3 }, '-3'],
 ];
 
 describe('the second evaluator', () => {
   it.each(constants)('%s', (expression, operands, value) => {
     expect(evaluatePrecisely(expression, operands)).toBe(Number(value));
+  });
+
+  it('has no value of a series without end', () => {
+    expect(evaluatePrecisely('Phi3(a/b)', { a: 0, b: 0 })).toBeNaN();
   });
 
   it.each(['E', 'A', 'J', 'K', 'L', 'h', 'b', 'T', 'V', 'phi', 'tau', 'e', 'i'])(

@@ -54,14 +54,29 @@ const math = create(
   { number: 'BigNumber', precision: 34, predictable: true },
 );
 
-/** Φₙ by its series alone: 34 digits leave room for the cancellation at any (kl)² of a member. */
+/** Where Φₙ takes its closed form; below, 34 digits leave room for the series' cancellation. */
+const SERIES_TO = 100;
+
+/** Φₙ(x) of formula texts: its series, or Φₙ₊₂ = (1/n! − Φₙ)/x from the circular or hyperbolic Φ₀, Φ₁. */
 const series =
   (n: number) =>
   (x: BigNumber): BigNumber => {
     let term = math.bignumber(1);
     for (let i = 2; i <= n; i += 1) term = term.dividedBy(i);
+    if (!x.abs().lessThanOrEqualTo(SERIES_TO)) {
+      const arc = x.abs().sqrt();
+      const start = n % 2 === 0 ? math.bignumber(1) : arc;
+      const [odd, even] = x.isNegative() ? [arc.sinh(), arc.cosh()] : [arc.sin(), arc.cos()];
+      let value = (n % 2 === 0 ? even : odd).dividedBy(start);
+      let inverse = math.bignumber(1);
+      for (let m = n % 2; m < n; m += 2) {
+        value = inverse.minus(value).dividedBy(x);
+        inverse = inverse.dividedBy((m + 1) * (m + 2));
+      }
+      return value;
+    }
     let sum = math.bignumber(0);
-    for (let j = n; !term.isZero() && !sum.plus(term).equals(sum); j += 2) {
+    for (let j = n; !sum.plus(term).equals(sum); j += 2) {
       sum = sum.plus(term);
       term = term
         .times(x)

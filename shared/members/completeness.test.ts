@@ -66,7 +66,7 @@ describe('a channel that is not compact: MC18×42.7, b/t = 6.32 > 0.38·√(29 0
   it('still checks the minor axis alone, and says NOT OK where that is exceeded', () => {
     expect(m.summary.verdict).toBe('NOT CHECKED');
     expect(told(m, 'flexure-minor/check')?.ratio).toBeGreaterThan(0);
-    // 1.6·150·Sy = 1.6·150·4.56 = 1094 kip in = 91 kip ft is more than Mny can be.
+    // 1.6·150·Sy = 1.6·150·4.64 = 1114 kip in = 92.8 kip ft is more than Mny can be.
     const worse = run(strong, { ...all, MyA: '500 kip ft' });
     expect(worse.summary).toMatchObject({
       verdict: 'NOT OK',

@@ -32,10 +32,16 @@ export function loadLines(
   return c.loads
     .filter((load) => load.axis === axis)
     .map((load): LoadLines => {
-      const at = `given/${load.id}`;
-      const name = `Load ${load.id.replace('load', '')}, ${KIND[load.kind]}${axis === 'x' ? `, ${HEIGHT[load.height]}` : ''}`;
+      const at = `given/${axis}/${load.id}`;
+      const name = `Load ${load.id.replace('load', '')}, ${KIND[load.kind]}`;
       const place = (key: string, symbol: string, given: GivenValue, words: string) =>
         r.given(`${at}/${key}`, symbol, 'length', given, { title: `${name}: ${words} end A` });
+      if (axis === 'x') {
+        const { source, confirmed } =
+          load.kind === 'uniform' ? load.w : load.kind === 'point' ? load.W : load.wFrom;
+        const title = `Load ${load.id.replace('load', '')} acts`;
+        r.statement(`${at}/height`, HEIGHT[load.height], source, confirmed, { title });
+      }
       if (load.kind === 'point')
         return {
           load,
@@ -88,7 +94,11 @@ export function loadsOfBay(
     const local = (z: Quantity): Quantity => {
       const za = placeQuantity(q.places, bay.from);
       return za
-        ? r.formula(placeFormulas.local, `given/${load.id}/${z.ref.split('/').at(-1)}`, { z, za })
+        ? r.formula(
+            placeFormulas.local,
+            `given/${load.axis}/${load.id}/${z.ref.split('/').at(-1)}`,
+            { z, za },
+          )
         : z;
     };
     if (W && from) {
@@ -109,7 +119,7 @@ export function loadsOfBay(
     const at = (place: 'a' | 'b', given: Quantity, z: number, own: number): Quantity => {
       if (same(z, own)) return given;
       const cut = placeQuantity(q.places, place === 'a' ? bay.from : bay.to);
-      return r.formula(placeFormulas.intensity, `given/${load.id}/w${place}`, {
+      return r.formula(placeFormulas.intensity, `given/${load.axis}/${load.id}/w${place}`, {
         ...{ wa: w[0], wb: w[1], za: from ?? q.start(), zb: to ?? q.L },
         z: cut ?? (place === 'a' ? q.start() : q.L),
       });

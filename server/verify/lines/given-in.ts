@@ -91,8 +91,8 @@ function ofCombination(
   if (name === 'sway') return c.sway && ofSway(c.sway, part, last);
   const support = c.supports.find((s) => s.restraint === name);
   if (support) return part === 'Mx' ? support.Mx : part === 'My' ? support.My : null;
-  const load = c.loads.find((l) => l.id === name);
-  return load ? ofLoad(load, part) : null;
+  const load = c.loads.find((l) => l.axis === name && l.id === part);
+  return load ? ofLoad(load, last) : null;
 }
 
 function ofLoad(load: ResolvedLoad, part: string): GivenValue | null {
