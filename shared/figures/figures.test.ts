@@ -5,6 +5,7 @@ import { memberScene } from './member-scene.ts';
 import { secondOrderSamples } from './moment-curve.ts';
 import { momentDiagram } from './moment-diagram.ts';
 import type { Point, Scene, Shape } from './scene.ts';
+import { sectionDrawing } from './section-drawing.ts';
 import { sectionOutline } from './section-outline.ts';
 import { textWidth } from './shapes.ts';
 
@@ -275,4 +276,79 @@ it('draws the section at one scale', () => {
   if (!a || !b || !c) throw new Error('no outline');
   expect((b[1] - a[1]) / tall).toBeCloseTo(18.67 / 314.96, 9);
   expect((a[0] - c[0]) / wide).toBeCloseTo((307.34 - 11.94) / 2 / 307.34, 9);
+});
+
+describe('the outline of', () => {
+  const sizes = (all: Readonly<Record<string, number>>, section = 'a section') => {
+    const drawing = sectionDrawing(section, (symbol) =>
+      symbol in all ? named(symbol, all[symbol] ?? 0, `${all[symbol]} mm`) : null,
+    );
+    if (!drawing) throw new Error('no drawing');
+    const scene = sectionOutline(drawing);
+    sound(scene);
+    return scene;
+  };
+  const xOf = (points: readonly Point[]) => span(points.map((p) => p[0]));
+  const yOf = (points: readonly Point[]) => span(points.map((p) => p[1]));
+
+  it('an I-shape with two flanges has each at its own width, the x axis at the centroid', () => {
+    const scene = sizes({
+      ...{ d: 500, tw: 10, ytop: 300 },
+      ...{ bftop: 200, tftop: 20, bfbot: 300, tfbot: 15 },
+    });
+    const [outline = []] = areas(scene, 'zinc1');
+    const perMm = yOf(outline) / 500;
+    expect(xOf(outline)).toBeCloseTo(300 * perMm, 9);
+    const top = Math.min(...outline.map((p) => p[1]));
+    expect(xOf(outline.filter((p) => p[1] === top))).toBeCloseTo(200 * perMm, 9);
+    const axis = scene.shapes.find(
+      (s) => s.kind === 'line' && s.points[0]?.[1] === s.points[1]?.[1],
+    );
+    const [from] = axis?.kind === 'line' ? axis.points : [];
+    expect((from?.[1] ?? 0) - top).toBeCloseTo(300 * perMm, 9);
+    for (const size of ['bftop 200 mm', 'tfbot 15 mm', 'tw 10 mm'])
+      expect(scene.description).toContain(size);
+  });
+  it('a channel has its web at the back and the y axis at the centroid', () => {
+    const scene = sizes({ d: 380, bf: 90, tf: 16, tw: 10, xbar: 20 });
+    const [outline = []] = areas(scene, 'zinc1');
+    const perMm = yOf(outline) / 380;
+    expect(xOf(outline)).toBeCloseTo(90 * perMm, 9);
+    const back = Math.min(...outline.map((p) => p[0]));
+    const axis = scene.shapes.find(
+      (s) => s.kind === 'line' && s.points[0]?.[0] === s.points[1]?.[0],
+    );
+    const [from] = axis?.kind === 'line' ? axis.points : [];
+    expect((from?.[0] ?? 0) - back).toBeCloseTo(20 * perMm, 9);
+  });
+  it('a box has a hole less by its plates', () => {
+    const scene = sizes({ B: 300, d: 500, tf: 25, tw: 12 });
+    const [outline = []] = areas(scene, 'zinc1');
+    const [hole = []] = areas(scene, 'paper');
+    const perMm = yOf(outline) / 500;
+    expect(xOf(outline) - xOf(hole)).toBeCloseTo(24 * perMm, 9);
+    expect(yOf(outline) - yOf(hole)).toBeCloseTo(50 * perMm, 9);
+    expect(outline).toHaveLength(4);
+  });
+  it('a tube has round corners of 2t where no radius is known', () => {
+    const scene = sizes({ B: 150, Ht: 250, t: 10 });
+    const [outline = []] = areas(scene, 'zinc1');
+    const perMm = yOf(outline) / 250;
+    const top = Math.min(...outline.map((p) => p[1]));
+    const straight = outline.filter((p) => Math.abs(p[1] - top) < 1e-9);
+    expect(xOf(straight)).toBeCloseTo((150 - 40) * perMm, 6);
+    expect(texts(scene).filter((t) => t.startsWith('t '))).toEqual(['t 10 mm']);
+  });
+  it('a round tube is two circles', () => {
+    const scene = sizes({ D: 300, t: 30 });
+    const radii = scene.shapes.flatMap((s) => (s.kind === 'circle' ? [s.radius] : []));
+    expect((radii[1] ?? 0) / (radii[0] ?? 1)).toBeCloseTo(0.8, 9);
+  });
+  it('a section with a long name keeps within its window', () => {
+    const long = 'Built-up I 500 mm × 12.5 mm, top 200 mm × 20 mm, bottom 300 mm × 15 mm';
+    expect(texts(sizes({ D: 300, t: 30 }, long))[0]).toMatch(/^Built-up I 500 mm .*…$/);
+  });
+  it('nothing where a size is missing', () => {
+    expect(sectionDrawing('W', (s) => (s === 'd' ? named(s, 1, '1') : null))).toBeNull();
+  });
 });

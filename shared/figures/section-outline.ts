@@ -1,6 +1,6 @@
 import type { NamedDrawn, PlateDrawn, SectionDrawing } from './drawing.ts';
 import type { Point, Scene, Shape } from './scene.ts';
-import { label, PENS, path } from './shapes.ts';
+import { cutTo, label, PENS, path, textWidth } from './shapes.ts';
 
 const WIDTH = 236;
 const BOX = 128;
@@ -17,7 +17,7 @@ export function sectionOutline(section: SectionDrawing): Scene {
   const below = (line: number) => TOP + BOX + 32 + 16 * line;
   const words = [text(wide), ...more.map((sizes) => sizes.map(text).join(' · '))];
   const shapes: Shape[] = [
-    label(section.section, [x, 13], { anchor: 'middle', weight: 600, within: 2 * x }),
+    name(section.section),
     ...bodyOf(section, perMm),
     ...axes(centroidOf(section, perMm), BOX / 2 + 10),
     ...measure([x + BOX / 2 + 22, y - d / 2], [x + BOX / 2 + 22, y + d / 2]),
@@ -32,6 +32,12 @@ export function sectionOutline(section: SectionDrawing): Scene {
   const description = `Outline of ${section.section} to scale: ${sizes}.${fillets ? ' Fillets are not drawn.' : ''}`;
   return { width: WIDTH, height: below(words.length - 1) + 6, shapes, description };
 }
+
+/** Over the outline where there is room, else from the left edge; what is longer still is cut. */
+const name = (section: string): Shape =>
+  textWidth(section) <= 2 * MIDDLE[0]
+    ? label(section, [MIDDLE[0], 13], { anchor: 'middle', weight: 600 })
+    : label(cutTo(section, WIDTH), [0, 13], { weight: 600, within: WIDTH });
 
 const text = (q: NamedDrawn): string => `${q.symbol} ${q.text}`;
 

@@ -1,3 +1,4 @@
-/** A designation as it is read: the table's `W12X79` is W12×79. */
-export const sectionText = (designation: string): string =>
-  designation.replace(/(?<=[\d.])X(?=[\d.])/g, '×');
+import { printedDesignation } from '../sections/designation.ts';
+
+/** A section's name as it is read: the table's `W12X79` is W12×79. */
+export const sectionText = printedDesignation;
