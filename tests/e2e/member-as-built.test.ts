@@ -87,10 +87,7 @@ describe('a member as it is built', () => {
       .first()
       .waitFor();
     await page.getByRole('button', { name: /^Source of Buckling L c y/ }).click();
-    await page
-      .getByLabel(/Note|Remark|said/i)
-      .first()
-      .fill('girt at 4 ft is removable');
+    await page.getByLabel(/^Note/).fill('girt at 4 ft is removable');
     await page.getByRole('button', { name: 'Done' }).click();
     await expect.poll(() => page.getByText(/has to say why/).count()).toBe(0);
     await saved(page);
@@ -223,7 +220,7 @@ describe('a member as it is built', () => {
       ...{ 'combinations[0].Vx': '24 kip', 'springs.xA': '9000 kip ft/rad' },
     };
     for (const [path, text] of Object.entries(kept)) {
-      await expect.poll(() => input(page, path).inputValue(), path).toBe(text);
+      await expect.poll(() => input(page, path).inputValue(), { message: path }).toBe(text);
     }
     await page.getByRole('button', { name: 'Forces', exact: true }).click();
     expect(await page.getByLabel('Shear, major of', { exact: false }).first().inputValue()).toBe(

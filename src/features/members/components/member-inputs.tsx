@@ -1,5 +1,5 @@
 import { fieldClass } from '#client/ui/field.tsx';
-import { notGiven } from '#shared/contracts/draft-quantity.ts';
+import { type DraftQuantity, notGiven } from '#shared/contracts/draft-quantity.ts';
 import { type LengthName, lengthNames } from '#shared/contracts/members.ts';
 import { ENDS } from '#shared/members/input.ts';
 import { withStated, withText } from '../edit-draft.ts';
@@ -82,16 +82,18 @@ function LengthRow({ name, units }: { name: LengthName; units: 'us' | 'si' }) {
       words={lengthWords[name]}
       quantity={draft[name]}
       placeholder={follows ? (derived(name) ?? (name === 'Lb' ? 'by segment' : 'follows')) : unit}
-      // A length that follows again has no source of its own any more.
       onChange={(quantity) =>
-        edit(
-          withStated(draft, name, follows && quantity.text.trim() === '' ? notGiven : quantity),
-          name,
-        )
+        edit(withStated(draft, name, follows ? afresh(draft[name], quantity) : quantity), name)
       }
     />
   );
 }
+
+/** A length that follows from the points has no source; one put in its place has a new one. */
+const afresh = (was: DraftQuantity, quantity: DraftQuantity): DraftQuantity =>
+  was.text.trim() === '' || quantity.text.trim() === ''
+    ? { ...notGiven, text: quantity.text }
+    : quantity;
 
 function CbRow() {
   const { draft, edit } = useMemberForm();
