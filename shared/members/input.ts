@@ -69,7 +69,12 @@ export const memberInputSchema = z.strictObject({
     .optional(),
   mark: labelSchema(40),
   /** A designation of the tables, or sizes. */
-  section: z.union([wordSchema, sectionSizesSchema]),
+  section: z.union([wordSchema, sectionSizesSchema], {
+    error: ({ input }) =>
+      typeof input === 'object'
+        ? undefined
+        : 'must be a designation such as "W12X79", or sizes with their shape',
+  }),
   material: z.union([textSchema(40), ownSteelSchema]),
   length: quantitySchema,
   ends: z.union(

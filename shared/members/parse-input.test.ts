@@ -72,8 +72,27 @@ describe('wrong inputs', () => {
         'unknown section',
         withMember({ section: 'W12X80' }),
         'members[0].section',
-        /"W12X80" is not in the table of W shapes .*; write it like W12X79/,
+        /"W12X80" is in none of the tables of W, .*; write it like W12X79/,
       ],
+      [
+        'sizes without one of them',
+        withMember({ section: { shape: 'i', d: '20 in', bf: '10 in', tf: '1 in' } }),
+        'members[0].section.tw',
+        /must be a text with its unit/,
+      ],
+      [
+        'sizes of no shape',
+        withMember({ section: { d: '20 in' } }),
+        'members[0].section.shape',
+        /must be "i", "mono-i", "box", "tube" or "round"/,
+      ],
+      [
+        'a tube that does not say which wall it gives',
+        withMember({ section: { shape: 'round', D: '300 mm', t: '8 mm' } }),
+        'members[0].section.wall',
+        /must be "nominal" .* or "design"/,
+      ],
+      ['a section as a number', withMember({ section: 5 }), 'members[0].section', /designation/],
       ['empty section', withMember({ section: ' ' }), 'members[0].section', /is empty/],
       [
         'unknown steel',

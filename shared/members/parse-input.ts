@@ -13,12 +13,23 @@ const pathText = (path: readonly PropertyKey[]): string =>
     '',
   );
 
+/** Of a field with several forms and no words of its own: what is wrong in the form it has chosen. */
+function furthest(issue: z.core.$ZodIssue): readonly z.core.$ZodIssue[] {
+  if (issue.code !== 'invalid_union' || issue.message !== 'Invalid input') return [issue];
+  const chosen = issue.errors
+    .map((branch) => branch.flatMap(furthest))
+    .find((branch) => branch.length > 0 && branch.every(({ path }) => path.length > 0));
+  return chosen?.map((i) => ({ ...i, path: [...issue.path, ...i.path] })) ?? [issue];
+}
+
 /** Reads INPUT.json: its shape, its quantities, and what the members need; all problems at once. */
 export function parseInput(json: unknown): ParsedInput {
   const shape = inputSchema.safeParse(json);
   if (!shape.success) {
     const { issues } = shape.error;
-    const missing = issues.map((i) => ({ path: pathText(i.path), message: i.message }));
+    const missing = issues
+      .flatMap(furthest)
+      .map((i) => ({ path: pathText(i.path), message: i.message }));
     return { ok: false, problems: [...missing, ...problemsBeside(json, issues)] };
   }
   const problems: Problem[] = [];

@@ -57,7 +57,7 @@ export const sectionSizesSchema = z.discriminatedUnion(
       wall,
     }),
   ],
-  'shape must be "i", "mono-i", "box", "tube" or "round"',
+  'must be "i", "mono-i", "box", "tube" or "round"',
 );
 export type SectionSizesInput = z.infer<typeof sectionSizesSchema>;
 

@@ -58,10 +58,10 @@ describe('bad inputs', () => {
     const { page } = await stage.openAs(engineer);
     await openMember(page, 'C-06');
     await input(page, 'section').fill('W99X1');
-    await page.getByText(/No W shape is called/).waitFor();
+    await page.getByText(/No shape of the tables is called/).waitFor();
     await page.keyboard.press('Escape');
     await page
-      .getByText(/is not in the table of W shapes.*write it like W12X79/)
+      .getByText(/is in none of the tables of W, .*write it like W12X79/)
       .first()
       .waitFor();
     await page.getByRole('button', { name: 'Undo' }).click();
@@ -85,7 +85,7 @@ describe('bad inputs', () => {
   });
 
   it.each([
-    ['P < 0', 'C-05', 'combinations[0].P', '-40 kip', 'NOT CHECKED', 'H1.2'],
+    ['P < 0', 'C-05', 'combinations[0].P', '-40 kip', 'NOT CHECKED', 'D2'],
     ['αPr at or above Pe1', 'C-10', 'combinations[0].P', '170 kip', 'FAILED', 'A-8-5'],
     ['an end free', 'C-05', 'ends', 'free', 'NOT CHECKED', ''],
     ['held within a plane that bends', 'C-05', 'Lcx', '11 ft', 'NOT CHECKED', 'App. 8'],
