@@ -31,4 +31,7 @@ describe('Φₙ', () => {
     for (const n of [0, 1, 2, 3, 4, 5])
       for (const x of [10, -10]) near(seriesFunction(n, x), seriesFunction(n, x * (1 + 2 ** -52)));
   });
+  it('has no value where its argument has none', () => {
+    expect(seriesFunction(3, Number.NaN)).toBeNaN();
+  });
 });

@@ -8,7 +8,7 @@ const CLOSED_FROM = 10;
  * frame theory (H. Rubin) and of celestial mechanics (K. Stumpff, 1947); from memory.
  */
 export function seriesFunction(n: number, x: number): number {
-  if (Math.abs(x) > CLOSED_FROM) return closed(n, x);
+  if (!(Math.abs(x) <= CLOSED_FROM)) return closed(n, x);
   let term = 1;
   for (let i = 2; i <= n; i += 1) term /= i;
   let sum = 0;

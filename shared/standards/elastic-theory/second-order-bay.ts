@@ -58,22 +58,23 @@ export const secondOrderBay: SecondOrderBay = (r, at, bay, axial) => {
   if (Pr.value > 0 && alpha.value * Pr.value >= Pe1.value) return 'failed';
   if (Pr.value > 0 && bay.loads.length === 0) return endMomentsOnly(r, at, bay, axial);
   const solution = axialParameter(r, at, bay, axial);
-  if (solution.order === 'tension' && !isWithin(r, at, solution.kL)) return 'outside scope';
+  if (!solution) return 'outside scope';
   const VA = startShear(r, at, bay, solution);
   return solvedBay(r, at, bay, axial, solution, VA);
 };
 
-/** kL of the bay's axial force. */
+/** kL of the bay's axial force; null, with the notice, where the tension is beyond the solution. */
 export function axialParameter(
   r: Recorder,
   at: string,
   { L1 }: Bay,
   { alpha, Pr, EIstar }: BayAxial,
-): AxialOrder {
+): AxialOrder | null {
   const known = { alpha, Pr, EIstar, L1 };
-  return Pr.value > 0
-    ? { order: 'compression', kL: r.formula(secondOrderFormulas.kL, `${at}/kL`, known) }
-    : { order: 'tension', kL: r.formula(bayFormulas.kLtension, `${at}/kL`, known) };
+  if (Pr.value > 0)
+    return { order: 'compression', kL: r.formula(secondOrderFormulas.kL, `${at}/kL`, known) };
+  const kL = r.formula(bayFormulas.kLtension, `${at}/kL`, known);
+  return isWithin(r, at, kL) ? { order: 'tension', kL } : null;
 }
 
 /** The bay from its shear at end A on. */
