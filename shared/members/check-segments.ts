@@ -12,9 +12,9 @@ import {
 import { increasedCb } from '../standards/aisc360-22/h1-tension.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import type { Axis } from './bay-moments.ts';
-import type { MemberStrengths } from './combination.ts';
 import { destabilisingLoad } from './load-height.ts';
 import { type Side, segmentStrength } from './major-strengths.ts';
+import type { MemberStrengths } from './member-strengths.ts';
 import { automaticCb } from './modification-factor.ts';
 import { optionalChecks } from './optional-checks.ts';
 import type { PlaneMoments } from './plane-moments.ts';

@@ -2,9 +2,9 @@ import type { Line } from '../calc/line.ts';
 import type { CombinationRecord, CoverageRow } from '../calc/record.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { printNumber } from '../units/format.ts';
-import type { CombinationRun } from './combination.ts';
 import { notReached, type Told } from './limit-state.ts';
 import { LIMIT_STATES } from './limit-states.ts';
+import type { CombinationRun } from './member-strengths.ts';
 
 type Cell = CoverageRow['cells'][number];
 

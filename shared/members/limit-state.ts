@@ -1,7 +1,7 @@
 import type { Line, LineOf } from '../calc/line.ts';
 import type { CombinationRecord, CoverageRow } from '../calc/record.ts';
 import type { Axis } from './bay-moments.ts';
-import type { CombinationRun } from './combination.ts';
+import type { CombinationRun } from './member-strengths.ts';
 
 type Cell = CoverageRow['cells'][number];
 

@@ -16,10 +16,10 @@ import {
 } from '../standards/aisc360-22/h2.ts';
 import { methodConstant } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
-import type { MemberStrengths } from './combination.ts';
 import { axisStrength } from './compression.ts';
 import { availableMajor, availableYielding, ltbRange } from './major-flexure.ts';
 import type { Side } from './major-strengths.ts';
+import type { MemberStrengths } from './member-strengths.ts';
 import type { Segment } from './segments.ts';
 
 /** What a segment brings to the provisions that the basis may choose. */

@@ -4,7 +4,7 @@ import type { Recorder } from '../calc/recorder.ts';
 import { g1Formulas } from '../standards/aisc360-22/g1.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { AXES, type Axis, WORD } from './bay-moments.ts';
-import type { MemberStrengths } from './combination.ts';
+import type { MemberStrengths } from './member-strengths.ts';
 import type { PlaneMoments } from './plane-moments.ts';
 import type { ResolvedCombination } from './resolved.ts';
 import { shearCheck } from './shear.ts';
