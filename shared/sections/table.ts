@@ -52,9 +52,6 @@ export const FAMILIES: readonly Family[] = [
   ...(['W', 'M', 'S', 'HP', 'C', 'MC', 'HSS', 'round HSS', 'pipe'] as const),
 ];
 
-export type PropertyName = PropertyOf<'i'>;
-export const PROPERTY_NAMES = Object.keys(COLUMNS.i) as readonly PropertyName[];
-
 interface TableData {
   readonly name: string;
   readonly kind: TabulatedKind;
@@ -89,8 +86,6 @@ export const TABLE_NAMES: readonly string[] = TABLES.map(({ name }) => name);
 const sourceOf = ({ name, data: { title, publisher, by } }: TableData): TableSource => ({
   ...{ name, title, publisher, by },
 });
-
-export const W_TABLE = { ...sourceOf(TABLES[0] as TableData), count: wShapes.rows.length } as const;
 
 interface Row {
   readonly designation: string;
