@@ -91,6 +91,12 @@ describe('each screen is accessible (axe, WCAG 2.2 AA)', () => {
       await page.locator('[role=option]').first().waitFor();
       await expectAccessible(page, 'sections', '[role=dialog]');
       await page.keyboard.press('Escape');
+      await page.getByRole('button', { name: 'held points' }).click();
+      await page.getByRole('button', { name: 'loads between the ends' }).click();
+      await page.getByText(/what it holds/).waitFor();
+      await expectAccessible(page, 'parts of a member', 'aside[aria-label=Inputs]');
+      await page.getByRole('button', { name: 'Remove held between the ends' }).click();
+      await page.getByRole('button', { name: 'Remove loads between the ends' }).click();
       await page.getByText(/The sheet shows the last valid inputs/).waitFor();
       await expectAccessible(page, 'refused input', 'aside[aria-label=Inputs]');
       await page.getByRole('button', { name: 'Undo' }).click();

@@ -89,13 +89,14 @@ describe('the whole path by keyboard alone', () => {
     await page.keyboard.press('Control+A');
     await page.keyboard.type('w12x7');
     await page.locator('[role=option]').first().waitFor();
-    expect((await page.locator('[role=option]').allInnerTexts()).sort()).toEqual([
-      'W12×72',
-      'W12×79',
+    const found = await page.locator('[role=option]').allInnerTexts();
+    expect(found.map((text) => text.replace(/\s+/g, ' ')).sort()).toEqual([
+      'W12×72 W, 72 lb/ft',
+      'W12×79 W, 79 lb/ft',
     ]);
     await page.keyboard.type('9');
-    const found = page.getByRole('dialog', { name: 'Sections found' });
-    await found.getByRole('img', { name: /Outline of W12×79/ }).waitFor();
+    const list = page.getByRole('dialog', { name: 'Sections found' });
+    await list.getByRole('img', { name: /Outline of W12×79/ }).waitFor();
     await page.keyboard.press('Enter');
     await page.getByRole('heading', { name: /C-05 · W12×79/ }).waitFor();
     await saved(page);

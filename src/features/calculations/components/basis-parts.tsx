@@ -128,6 +128,11 @@ export function AnalysisPart(props: PartProps) {
         label="Do the stories sway?"
         value={analysis.sway}
         options={swayWords}
+        problem={
+          analysis.sway === 'B2' && analysis.secondOrder !== 'amplified'
+            ? 'B2 belongs to first-order moments: choose amplified by B1'
+            : undefined
+        }
         hint={
           analysis.sway === 'none'
             ? 'The ends of the members do not move sideways relative to each other.'

@@ -1,6 +1,7 @@
 import { Button } from '#client/ui/button.tsx';
 import { ProblemText } from '#client/ui/field.tsx';
 import type { DraftRestraint } from '#shared/contracts/draft-parts.ts';
+import { lengthNames } from '#shared/contracts/members.ts';
 import {
   restraintsOf,
   withHold,
@@ -48,7 +49,9 @@ export function RestraintsPart({ units }: { units: 'us' | 'si' }) {
       </ol>
       {rows.length > 0 && (
         <p className="mt-1.5 text-small text-zinc-7">
-          Lengths in grey follow from these points. One typed in their place says why in its source.
+          {lengthNames.some((name) => draft[name].text.trim() === '')
+            ? 'Lengths in grey follow from these points. One typed in their place says why in its source.'
+            : 'The lengths typed above stand in place of those that follow from these points.'}
         </p>
       )}
       {editable && (
