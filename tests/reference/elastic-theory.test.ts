@@ -1,7 +1,7 @@
-import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { createRecorder } from '#shared/calc/recorder.ts';
 import { belowCriticalLoad, multiplierB1 } from '#shared/standards/aisc360-22/app8.ts';
+import { casesIn, near, number } from './elastic-theory-cases.ts';
 import { type PlaneCase, solvePlane } from './plane.ts';
 import { firstMember, linesOf, recordOf, valueAt } from './run-input.ts';
 
@@ -9,31 +9,6 @@ import { firstMember, linesOf, recordOf, valueAt } from './run-input.ts';
  * Against numbers computed for this project with 40-digit arithmetic as a power-series solution of
  * EI y'''' + P y'' = q (each file says how), through the functions of the books, to 1e-9 relative.
  */
-interface Reference {
-  readonly id: string;
-  readonly inputs: Readonly<Record<string, number>>;
-  readonly expected: Readonly<Record<string, number | string>>;
-}
-const read = (name: string): readonly Reference[] =>
-  (
-    JSON.parse(readFileSync(new URL(`./elastic-theory/${name}.json`, import.meta.url), 'utf8')) as {
-      cases: Reference[];
-    }
-  ).cases;
-
-const number = (value: number | string | undefined): number => {
-  if (typeof value !== 'number') throw new Error(`${value} is not a number`);
-  return value;
-};
-
-function near(value: number, reference: number | string | undefined, what: string): void {
-  const wanted = number(reference);
-  const scale = wanted === 0 ? 1 : Math.abs(wanted);
-  expect(Math.abs(value - wanted) / scale, `${what}: ${value}, reference ${wanted}`).toBeLessThan(
-    1e-9,
-  );
-}
-
 // A member to carry the cases that are given without dimensions.
 const EI = 2.5e13;
 const L = 5200;
@@ -71,7 +46,7 @@ const withoutAxialForce = (MA: number, MB: number) =>
   });
 
 describe('largest moment and equivalent moment factors', () => {
-  for (const { id, inputs, expected } of read('equivalent-moment'))
+  for (const { id, inputs, expected } of casesIn('equivalent-moment'))
     for (const { name, turn } of TURNS)
       it(`${id}, ${name}`, () => {
         const { psi, P_over_Pe: rho } = inputs as { psi: number; P_over_Pe: number };
@@ -107,7 +82,7 @@ describe('largest moment and equivalent moment factors', () => {
 });
 
 describe('end moments with dimensions', () => {
-  const cases = read('end-moments').filter((c) => number(c.inputs.P_N) > 0);
+  const cases = casesIn('end-moments').filter((c) => number(c.inputs.P_N) > 0);
   it('has the cases under compression', () => expect(cases).toHaveLength(6));
   for (const { id, inputs, expected } of cases)
     it(id, () => {
@@ -140,7 +115,7 @@ describe('end moments with dimensions', () => {
 });
 
 describe('thresholds', () => {
-  for (const { id, inputs, expected } of read('thresholds'))
+  for (const { id, inputs, expected } of casesIn('thresholds'))
     it(id, () => {
       const psi = number(inputs.psi);
       const rho = number(expected.P_over_Pe_threshold);
@@ -152,7 +127,7 @@ describe('thresholds', () => {
 });
 
 describe('Cm = 0.6 + 0.4 psi and B1 beside the exact amplification', () => {
-  for (const { id, inputs, expected } of read('approximations'))
+  for (const { id, inputs, expected } of casesIn('approximations'))
     for (const rho of [0.2, 0.4, 0.6, 0.8, 0.9])
       it(`${id} at P/Pe = ${rho}`, () => {
         const psi = number(inputs.psi);
@@ -170,7 +145,7 @@ describe('Cm = 0.6 + 0.4 psi and B1 beside the exact amplification', () => {
 });
 
 describe('at or above the critical load', () => {
-  for (const { id, inputs } of read('unstable'))
+  for (const { id, inputs } of casesIn('unstable'))
     it(`${id}: no second-order moment, a failed notice`, () => {
       const r = createRecorder('');
       const given = (name: string, dimension: 'none' | 'force', value: number) =>
