@@ -1,6 +1,7 @@
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
+import type { DraftRestraint } from '#shared/contracts/draft-parts.ts';
 import type { MemberDraft } from '#shared/contracts/members.ts';
-import { assumed, drawn, forceFile, fromFile, typed } from './draft-values.ts';
+import { assumed, drawn, forceFile, fromFile, none, typed } from './draft-values.ts';
 
 /** TQ-CAL-014, Crane bay and canopy: ASD, effective length, amplified moments, SI. */
 
@@ -25,6 +26,7 @@ const forces = forceFile('crane-forces.csv', [
   ['D + 0.75L + 0.75S', '1240 kN', '168 kN m', '120 kN m', '14 kN m', '9 kN m'],
   ['D + S', '138 kN', '22 kN m', '', '4 kN m', ''],
   ['0.6D + 0.6W', '-42 kN', '17 kN m', ''],
+  ['D + 0.6W', '640 kN', '24 kN m', '18 kN m'],
 ]);
 
 function column(mark: string, place: string, section: string, length: string): MemberDraft {
@@ -38,6 +40,31 @@ function column(mark: string, place: string, section: string, length: string): M
   };
 }
 
+/** A girt of the wall at a distance from the base; the flange braces are on the drawing. */
+const girt = (id: string, at: string, holds: DraftRestraint['holds']): DraftRestraint => ({
+  ...{ id, at, holds, confirmed: true },
+  source: { kind: 'drawing', number: 'S-305', revision: 'C', detail: 'grid 8/C, wall girts' },
+});
+
+/** Held by girts, of which the middle one has flange braces, with the wind on the wall. */
+const windColumn: MemberDraft = {
+  ...column('K-03', 'crane bay, grid 8/C', 'W14X90', '7.9 m'),
+  ...{ Lcx: none, Lcy: none, Lcz: none, Lb: none, Cb: typed('auto') },
+  restraints: [girt('r1', '2.6 m', ['top']), girt('r2', '5.2 m', ['top', 'bottom'])],
+  combinations: [
+    {
+      ...fromFile(forces, 'c1', 7),
+      loads: [
+        {
+          ...{ id: 'l1', kind: 'whole', bends: 'x', height: 'top', w: '6.5 kN/m' },
+          ...{ wFrom: '', wTo: '', W: '', at: '', from: '', to: '', confirmed: false },
+          source: { kind: 'assumption', basis: 'wind pressure before the wind study' },
+        },
+      ],
+    },
+  ],
+};
+
 export const craneMembers: readonly MemberDraft[] = [
   {
     ...column('K-01', 'crane bay, grid 8/A', 'W14X90', '7.9 m'),
@@ -48,6 +75,7 @@ export const craneMembers: readonly MemberDraft[] = [
     Lb: assumed('7.9 m', 'the walkway bracket is not taken as a brace'),
     combinations: [fromFile(forces, 'c1', 3), fromFile(forces, 'c2', 4)],
   },
+  windColumn,
   {
     ...column('P-01', 'canopy, grid 9/A', 'W8X31', '4.9 m'),
     endMomentSign: 'joint',
