@@ -92,7 +92,7 @@ function steps(m: MemberStrengths, c: ResolvedCombination, r: Recorder, done: Do
     start: () => (start ??= startOfPlaces(r, m)),
   };
   for (const axis of AXES)
-    done.planes[axis] = planeMoments(r, context, c, axis, state, () => {
+    done.planes[axis] = planeMoments(r, context, c, axis, { axial: state, P: Pr }, () => {
       const direction = c.sway?.[axis];
       const B2 = sway?.[axis];
       const Mlt = direction && B2 ? translationMoment(r, axis, direction) : null;

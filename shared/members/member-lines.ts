@@ -94,7 +94,7 @@ export function givenLines(
       held: 'held in both planes and against twist',
       free: 'one end free',
       sway: 'free to sway',
-      springs: 'held by rotational springs',
+      springs: 'held against movement and twist, turning against rotational springs',
     }[ends.value],
     ends.source,
     ends.confirmed,

@@ -9,6 +9,7 @@ import type { MemberQuantities } from './member-quantities.ts';
 import { loadLines, loadsOfBay } from './plane-actions.ts';
 import type { ResolvedCombination, ResolvedInput, ResolvedMember } from './resolved.ts';
 import type { SectionQuantities, SteelQuantities } from './section-quantities.ts';
+import { springsOf, sprungMoments } from './sprung-moments.ts';
 
 /** Required moments of one plane, bay by bay. */
 export interface PlaneMoments {
@@ -36,16 +37,20 @@ export interface PlaneContext {
   readonly q: MemberQuantities;
   readonly steel: SteelQuantities;
   readonly section: SectionQuantities;
+  readonly alpha: Quantity | null;
   readonly start: () => Quantity;
 }
 
-/** Required moments of one plane under one combination; `axial` is null without compression. */
+/**
+ * Required moments of one plane under one combination; `axial` is null without compression, `P` the
+ * axial force with its sign.
+ */
 export function planeMoments(
   r: Recorder,
   m: PlaneContext,
   c: ResolvedCombination,
   axis: Axis,
-  axial: AxialState | null,
+  { axial, P }: { readonly axial: AxialState | null; readonly P: Quantity },
   sway: BayMomentsSway,
 ): PlaneMoments {
   const given = c.moments[axis];
@@ -135,6 +140,22 @@ export function planeMoments(
 
   let rigidity: Quantity | null = null;
   const rigidityOf = (): Quantity => (rigidity ??= flexuralRigidity(r, m, axis, axial));
+  const springs = springsOf(member, axis, input.units);
+  if (springs) {
+    const [bay] = bays;
+    const turned = MA.value !== 0 || MBgiven.value !== 0;
+    if (!bay || !single || turned || loads.length === 0 || !m.alpha)
+      return outside(
+        'springs-with-end-moments',
+        `The ends turn against springs about the ${word} axis. Their moments follow from loads between the ends of a member that is not held between them: moments given at the ends, or over held points, cannot be taken beside them.`,
+        `End springs, ${word} axis`,
+      );
+    const found = sprungMoments(r, axis, {
+      ...{ bay, springs, alpha: m.alpha, Pr: P, EIstar: rigidityOf() },
+      loads: loadsOfBay(r, bay, loads, { ...m, L: q.L, places: q.places }),
+    });
+    return typeof found === 'string' ? plane(found) : plane('done', [found]);
+  }
   const ofPlace = (place: (typeof bays)[number]['from']): Quantity =>
     place === 'A' ? MA : place === 'B' ? MB : (supports.moments.get(place.id) as Quantity);
   const results = bays.map((bay) => {

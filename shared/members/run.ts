@@ -108,11 +108,12 @@ function memberStrengths(
     );
     return null;
   }
-  if (member.ends.value !== 'held') {
+  if (member.ends.value !== 'held' && !sprung(input, member)) {
     const words = {
       free: 'One end is free (a cantilever)',
       sway: 'The ends sway',
-      springs: 'The ends are held by springs',
+      springs:
+        'The ends turn against springs, which the exact solution knows where their stiffness is given',
     }[member.ends.value];
     r.notice(
       'C2/outside',
@@ -161,7 +162,11 @@ function strengthsOf(
   const { Lcx, Lcy, Lcz } = q;
 
   r.section('factors', `Factors, ${design}`);
-  const usesAlpha = compressed || input.analysis.sway === 'B2' || input.provisions.has('H1.2-Cb');
+  const usesAlpha =
+    compressed ||
+    input.analysis.sway === 'B2' ||
+    input.provisions.has('H1.2-Cb') ||
+    member.springs !== null;
   const alpha = usesAlpha ? methodConstant(r, 'loadLevel', design) : null;
   const phic = compressed ? methodConstant(r, 'compression', design) : null;
   const phib = bent('x') || bent('y') ? methodConstant(r, 'flexure', design) : null;
@@ -205,6 +210,13 @@ function strengthsOf(
     shear: { x: shear('x'), y: shear('y') },
   };
 }
+
+/** Ends that turn against springs whose stiffness is given: the exact solution knows them. */
+const sprung = (input: ResolvedInput, { ends, springs }: ResolvedMember): boolean =>
+  ends.value === 'springs' &&
+  springs !== null &&
+  input.analysis.secondOrder === 'exact' &&
+  input.analysis.sway === 'none';
 
 /** Second-order over first-order drift against the limit of the method. */
 function driftRatioLine(r: Recorder, input: ResolvedInput, given: GivenValue): void {

@@ -6,6 +6,7 @@ import type {
   ResolvedMember,
   ResolvedSway,
 } from '#shared/members/resolved.ts';
+import { springsOf } from '#shared/members/sprung-moments.ts';
 import type { SectionSizes } from '#shared/sections/sizes.ts';
 
 const LENGTHS = ['Lcx', 'Lcy', 'Lcz', 'Lb'] as const;
@@ -88,6 +89,11 @@ function ofCombination(
   if (name === 'start')
     return { ...member.length, value: 0, text: input.units === 'us' ? '0 ft' : '0 m' };
   if (name === 'Vx' || name === 'Vy') return c.shears[name === 'Vx' ? 'x' : 'y'];
+  if (name === 'springs') {
+    const axis = part.startsWith('x') ? 'x' : 'y';
+    const springs = springsOf(member, axis, input.units);
+    return springs?.[part.endsWith('A') ? 'A' : 'B'] ?? null;
+  }
   if (name === 'sway') return c.sway && ofSway(c.sway, part, last);
   const support = c.supports.find((s) => s.restraint === name);
   if (support) return part === 'Mx' ? support.Mx : part === 'My' ? support.My : null;
