@@ -120,7 +120,7 @@ describe('a member as it is built', () => {
       .poll(() => input(page, 'combinations[0].supports[0].Mx').inputValue())
       .toBe('30 kip ft');
     await input(page, 'restraints[0].at').fill('6 ft');
-    await page.getByLabel('Major, at 6 ft').waitFor();
+    await page.getByRole('textbox', { name: 'Major, at 6 ft' }).waitFor();
     await page.getByRole('button', { name: 'Delete the point at 6 ft' }).click();
     await expect.poll(() => page.getByText('Moments over the held points').count()).toBe(0);
     await page.getByRole('button', { name: 'Remove held between the ends' }).click();

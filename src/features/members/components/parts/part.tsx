@@ -17,7 +17,7 @@ export function Part(props: { title: string; onRemove?: () => void; children: Re
             type="button"
             aria-label={`Remove ${props.title.toLowerCase()}`}
             onClick={props.onRemove}
-            className="link font-condensed text-small text-zinc-7"
+            className="link py-0.5 font-condensed text-small text-zinc-7"
           >
             Remove
           </button>
@@ -39,7 +39,7 @@ export function PartHead(props: { text: string; action: string; onAction: () => 
           type="button"
           onClick={props.onAction}
           aria-label={`${props.action} ${props.text.toLowerCase()}`}
-          className="link font-condensed text-small text-zinc-7"
+          className="link py-0.5 font-condensed text-small text-zinc-7"
         >
           {props.action}
         </button>
