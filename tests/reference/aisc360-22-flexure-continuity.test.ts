@@ -190,6 +190,19 @@ describe('outside the scope of Chapter F', () => {
       expect(found.codes).toContain(code);
       expect(found.lines.some((l) => l.key === 'F1/x/Mc')).toBe(false);
     });
+  it('exchanged axes, about y', () => {
+    const found = minorOf({ Fy, section: { ...box, Iy: '9699 in⁴' }, Lb: '0 in' });
+    expect(found.codes).toEqual(['axes-exchanged']);
+    expect(found.has('F1/y/Mc')).toBe(false);
+  });
+  it('a square or round section does not buckle laterally at any length', () => {
+    for (const section of [{ ...hss, square: 'yes' }, round]) {
+      const found = majorOf({ Fy, section, Lb: '100000 in' });
+      expect(found.codes).toEqual(['no-lateral-torsional-buckling']);
+      expect(found.lines.some((l) => l.key.endsWith('/LTB/range'))).toBe(false);
+      expect(found.has('F1/x/Mc')).toBe(true);
+    }
+  });
   it('just within them', () => {
     for (const section of [
       { ...round, lambdad: '260.9' },

@@ -67,6 +67,7 @@ describe('F4, doubly symmetric, noncompact web and flanges', () => {
       const c = at(noncompactWeb, Lb, Cb);
       expectLines(c, [
         ['F4/LTB/trial', 'kip in', trial],
+        ['F4/LTB/Mn', 'kip in', Math.min(trial, 39842.263686)],
         ['F4/Mn', 'kip in', Mn],
         ['F1/x/Mc', 'kip in', 0.9 * Mn],
       ]);
@@ -369,6 +370,67 @@ describe('a web between compact and slender by the flange in compression', () =>
       ['F5/Lr', 'in', 227.800541],
       ['F5/Mn', 'kip in', 16314.959614],
     ]);
+  });
+});
+
+/*
+ * Imagined properties, for what plates of usual proportions don't reach.
+ * Mp = 22 500 below Myc = 25 000 with a noncompact web (100 above 1.052632·24.083189/0.549474² = 83.965):
+ *   F4-9b would rise from 0.9 towards 1; it is at most Mp/Myc = 0.9.
+ * Slender web, Sxt/Sxc = 0.6: FL = 35 for a slender web at any Sxt/Sxc; kc = 4/√125 = 0.357771,
+ *   λrf = 16.356526; F5-8: 50 − 15·(12 − 9.151612)/7.204914 = 44.069906; aw = 60·0.4/16 = 1.5,
+ *   Rpg = 0.9884311, CFY = 29652.932; TFY = 50·360 = 18 000 governs
+ */
+const imagined = (
+  section: Record<string, string>,
+  top: Record<'lambda' | 'S' | 'hc' | 'hp', string>,
+): FlexureCase => {
+  const flange = { b: '16 in', t: '1 in', Iyf: '50 in⁴' };
+  return {
+    Fy: '50 ksi',
+    section: {
+      ...{ kind: 'mono-i', made: 'built-up', tw: '0.4 in', h: '50 in', lambdaw: '125' },
+      ...{ Ix: '9000 in⁴', Iy: '100 in⁴', J: '5 in⁴', ho: '51 in', ...section },
+    },
+    flanges: {
+      top: { ...flange, ...top },
+      bottom: { ...flange, ...top, S: section.Sx ?? '' },
+    },
+    Lb: '0 ft',
+  };
+};
+
+describe('limits of F4 and F5 that usual plates do not reach', () => {
+  it('Rpc of a noncompact web is at most Mp/Myc', () => {
+    const top = { lambda: '8', S: '500 in³', hc: '40 in', hp: '38 in' };
+    expectLines(majorOf(imagined({ Sx: '380 in³', Zx: '450 in³' }, top)), [
+      ['F4/Rpc', '', 0.9],
+      ['F4/CFY/Mn', 'kip in', 22500],
+    ]);
+  });
+  it('F5: tension flange yielding, and FL of a slender web', () => {
+    const top = { lambda: '12', S: '600 in³', hc: '60 in', hp: '58 in' };
+    expectLines(majorOf(imagined({ Sx: '360 in³', Zx: '500 in³' }, top)), [
+      ['B4/x/FL', 'ksi', 35],
+      ['B4/x/flange/lambdar', '', 16.356526],
+      ['F5/Rpg', '', 0.9884311],
+      ['F5/CFY/Mn', 'kip in', 29652.93213],
+      ['F5/FLB/Fcr', 'ksi', 44.069906],
+      ['F5/TFY/Mn', 'kip in', 18000],
+      ['F5/Mn', 'kip in', 18000],
+    ]);
+  });
+  it('F13.2: the web over the flange, though aw stays below ten', () => {
+    // h·tw/(bfc·tfc) = 70·0.4/2.72 = 10.29, aw = 56·0.4/2.72 = 8.24.
+    const c = imagined(
+      { Sx: '380 in³', Zx: '450 in³', h: '70 in', lambdaw: '175' },
+      { lambda: '8', S: '400 in³', hc: '56 in', hp: '55 in' },
+    );
+    const top = { ...c.flanges?.top, t: '0.17 in' } as NonNullable<FlexureCase['flanges']>['top'];
+    const found = majorOf({ ...c, flanges: { top, bottom: top } });
+    expect(found.outcome('F13/web')).toBe('the web is too large for the flange');
+    expect(found.at('F5/aw')).toBeLessThan(10);
+    expect(found.section).toBeNull();
   });
 });
 
