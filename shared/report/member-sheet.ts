@@ -6,6 +6,7 @@ import type {
   Summary,
 } from '../calc/record.ts';
 import { sectionText } from '../figures/section-text.ts';
+import { limitStateTable } from './limit-state-table.ts';
 import { openMember } from './open-member.ts';
 import { presentLine } from './present-line.ts';
 import type { Presenter } from './presenter.ts';
@@ -32,6 +33,7 @@ export function memberSheet(
     sheetHead(member),
     verdictBlock(member, summary, combination),
     ...memberFigures(record, member, combination),
+    ...(combination ? [limitStateTable(member, combination)] : []),
     ...linesOf(presenter, null),
     ...(combination ? combinationBlocks(presenter, combination) : []),
     ...interactionFigure(record, member),
@@ -47,6 +49,7 @@ export function wholeMemberSheet(record: CalculationRecord, memberId: string): B
     verdictBlock(member, member.summary, governing),
     ...memberFigures(record, member, governing),
     ...interactionFigure(record, member),
+    ...(governing ? [limitStateTable(member, governing)] : []),
     ...linesOf(presenter, null),
     ...member.combinations.flatMap((c) => combinationBlocks(presenter, c)),
   ];

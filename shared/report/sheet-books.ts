@@ -1,26 +1,19 @@
 import type { CalculationRecord } from '../calc/record.ts';
-import { aisc360 } from '../standards/aisc360-22/book.ts';
 import type { Book } from '../standards/book.ts';
-import { elasticTheory } from '../standards/elastic-theory/book.ts';
-
-/** The books a sheet may cite; a symbol that one book has not is looked for in the others. */
-const BOOKS: readonly Book[] = [aisc360, elasticTheory];
+import { bookNamed, symbolNamed } from '../standards/library.ts';
 
 export type StandardNames = Pick<Book, 'name' | 'title'>;
 
 export function standardNames(id: string): StandardNames {
-  const book = BOOKS.find((b) => b.id === id);
+  const book = bookNamed(id);
   if (!book) throw new Error(`no book ${id}`);
   return book;
 }
 
 /** TeX of a symbol as the book writes it; throws on a symbol that no book has. */
 export function symbolTex(bookId: string, name: string): string {
-  const own = BOOKS.filter((b) => b.id === bookId);
-  for (const { symbols } of [...own, ...BOOKS]) {
-    const found = symbols[name];
-    if (found) return found.tex;
-  }
+  const found = symbolNamed(name, bookId);
+  if (found) return found.tex;
   throw new Error(`no symbol ${name} in ${bookId} nor in another book`);
 }
 
