@@ -139,6 +139,32 @@ describe('random bays', () => {
       }
     });
 
+  // Near Pe1 the crest of a small end moment lies more than a quarter wave from that end: g < 0.
+  it('have a crest behind a hogging end near the critical load', () => {
+    for (const turned of [1, -1]) {
+      const c = { EI: 1e13, L: 5000, P: (0.97 * Math.PI ** 2 * 1e13) / 5000 ** 2 };
+      const { r, given, second } = solve({
+        ...c,
+        MA: -40e6 * turned,
+        MB: 45e6 * turned,
+        loads: [{ w: 0.2 * turned, from: 4000 }],
+      });
+      const formulas = r.lines.flatMap((l) => (l.kind === 'formula' ? [l.formula] : []));
+      const [word, extreme] =
+        turned > 0
+          ? (['crest', second.largest.highest] as const)
+          : (['trough', second.largest.lowest] as const);
+      expect(formulas).toContain(`elastic-theory/h-${word}-against`);
+      expect(faultsOf(r)).toEqual([]);
+      const at = (z: number) => turned * second.moment(r, `m${z}`, given('zi', 'length', z)).value;
+      const place = extreme.place?.value ?? Number.NaN;
+      const [before, after] = [at(place - 1), at(place + 1)];
+      // A parabola through three places a millimetre apart has its top at the middle one.
+      const top = turned * extreme.M.value;
+      expect(Math.abs(before - after) / (2 * top - before - after)).toBeLessThan(1e-3);
+    }
+  });
+
   for (const share of SHARES)
     it(`feel a load in two parts as the whole at P/Pe1 = ${share}`, () => {
       const random = seededRandom(Math.round(1e6 * (share + 80)));
@@ -161,4 +187,70 @@ describe('random bays', () => {
         }
       }
     });
+
+  // Mirrored, end A's spring, loads and moment are end B's; moments keep their sign.
+  for (const share of [1e-6, 0.5, 1, 1.4, 2.6, 0, -3])
+    it(`between end springs are the same mirrored, and nowhere beyond the largest, at P/Pe1 = ${share}`, () => {
+      const random = seededRandom(Math.round(1e6 * (share + 100)));
+      let solved = 0;
+      for (let i = 0; i < 14; i += 1) {
+        const c = randomBay(random, share);
+        const loads = [randomLoad(random, c.L), ...(c.loads ?? [])];
+        const [a, b] = [random.size(8, 500), random.size(8, 500)];
+        const straight = sprung({ ...c, loads }, a, b);
+        const mirrored = sprung({ ...c, loads: loads.map((l) => mirror(l, c.L)) }, b, a);
+        if (!straight || !mirrored) continue;
+        solved += 1;
+        const where = JSON.stringify({ c, loads, a, b });
+        const [one, two] = [straight.bay.ends, mirrored.bay.ends];
+        const size = straight.result.largest.size.M.value;
+        expect(Math.abs(one.MA.value - two.MB.value), where).toBeLessThan(1e-8 * size);
+        expect(Math.abs(one.MB.value - two.MA.value), where).toBeLessThan(1e-8 * size);
+        expect(Math.abs(size - mirrored.result.largest.size.M.value)).toBeLessThan(1e-8 * size);
+        for (let n = 1; n < 100; n += 1) {
+          const M = straight.moment((n / 100) * c.L, n);
+          const other = mirrored.moment((1 - n / 100) * c.L, n);
+          expect(Math.abs(M - other), where).toBeLessThan(1e-7 * size);
+          expect(M, where).toBeLessThanOrEqual(
+            straight.result.largest.highest.M.value + 1e-9 * size,
+          );
+          expect(M, where).toBeGreaterThanOrEqual(
+            straight.result.largest.lowest.M.value - 1e-9 * size,
+          );
+        }
+        // The rotation that gave the end moment is that of the deflection line.
+        const middle = straight.given('zi', 'length', c.L / 2);
+        if (!straight.result.deflection) continue;
+        straight.result.deflection(straight.r, 'y', middle);
+        const [turned, drawn] = [
+          straight.valueAt('sprung/springs/thA'),
+          straight.valueAt('sprung/thA'),
+        ];
+        expect(Math.abs(turned / drawn - 1), where).toBeLessThan(1e-6);
+      }
+      expect(solved).toBeGreaterThan(5);
+    });
 });
+
+function sprung(c: BayNumbers, kapA: number, kapB: number) {
+  const made = bayOf(c);
+  const { r, given, bay, axial } = made;
+  const spring = (kap: number) => given('k', 'rotationalStiffness', (kap * c.EI) / c.L);
+  const { L1, loads } = bay;
+  const found = sprungBay(
+    r,
+    'sprung',
+    { axis: 'x', L1, loads, kA: spring(kapA), kB: spring(kapB) },
+    axial,
+  );
+  if (typeof found === 'string') return null;
+  const moment = (z: number, n: number): number =>
+    found.result.moment(r, `at/${n}`, given('zi', 'length', z)).value;
+  return { ...made, ...found, moment };
+}
+
+const mirror = (load: LoadNumbers, L: number): LoadNumbers => {
+  if ('W' in load) return { ...load, at: L - load.at };
+  const part = { from: L - (load.to ?? L), to: L - (load.from ?? 0) };
+  return 'w' in load ? { ...load, ...part } : { wa: load.wb, wb: load.wa, ...part };
+};
