@@ -79,6 +79,9 @@ export const CLAUSE_TITLES: Readonly<Record<string, Readonly<Record<string, stri
     '2': 'Loads and moments of a stretch without axial force',
     '2.1': 'Places of zero and of extreme shear',
     '2.2': 'Slope and deflection without axial force',
+    '6': 'Initial bow',
+    '9': 'Rotational end springs and their critical load',
+    '13': 'Shear deformation',
   },
   'section-properties': {
     Axes: 'Properties about an axis',
