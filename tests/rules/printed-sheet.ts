@@ -3,6 +3,7 @@ import { placedLines } from '#shared/calc/address.ts';
 import type { Line, ValuedLine } from '#shared/calc/line.ts';
 import { printedForms } from '#shared/calc/printed.ts';
 import type { MemberRecord } from '#shared/calc/record.ts';
+import { seriesFunction } from '#shared/expr/series-functions.ts';
 import { type Digits, printNumber } from '#shared/units/format.ts';
 import type { UnitSet } from '#shared/units/unit-set.ts';
 
@@ -11,6 +12,9 @@ import type { UnitSet } from '#shared/units/unit-set.ts';
  * none of the rules that fixed the digits. What doesn't follow from what is printed is a fault.
  */
 const math = create(all ?? {});
+math.import(
+  Object.fromEntries([2, 3, 4, 5].map((n) => [`Phi${n}`, (x: number) => seriesFunction(n, x)])),
+);
 const compiled = new Map<string, { evaluate(scope: Record<string, number>): unknown }>();
 
 interface Read {
