@@ -36,11 +36,10 @@ export const withHold = (draft: MemberDraft, { id, holds }: DraftRestraint, hold
 export const withoutRestraint = (draft: MemberDraft, id: string): MemberDraft => ({
   ...draft,
   restraints: restraintsOf(draft).filter((row) => row.id !== id),
-  combinations: draft.combinations.map((row) =>
-    row.supports
-      ? { ...row, supports: row.supports.filter(({ restraint }) => restraint !== id) }
-      : row,
-  ),
+  combinations: draft.combinations.map(({ supports, ...row }) => {
+    const left = supports?.filter(({ restraint }) => restraint !== id) ?? [];
+    return left.length > 0 ? { ...row, supports: left } : row;
+  }),
 });
 
 /** Takes all of them away: the lengths are then stated again. */
