@@ -9,8 +9,9 @@ import { requiredTension } from '../standards/aisc360-22/h1-tension.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { AXES, type AxialState, type Axis } from './bay-moments.ts';
 import { checkSegments } from './check-segments.ts';
+import { deflectionLines } from './deflection-lines.ts';
 import type { CombinationRun, MemberStrengths } from './member-strengths.ts';
-import { bends, type PlaneMoments, planeMoments } from './plane-moments.ts';
+import { bends, planeMoments } from './plane-moments.ts';
 import type { ResolvedCombination, ResolvedInput } from './resolved.ts';
 import { type Segment, segmentsOf } from './segments.ts';
 import { checkShear } from './shear-demand.ts';
@@ -114,6 +115,7 @@ function steps(m: MemberStrengths, c: ResolvedCombination, r: Recorder, done: Do
     ),
     ...checkShear(r, m, c, { x, y }),
   );
+  for (const plane of [x, y]) if (plane.state === 'done') deflectionLines(plane);
 }
 
 interface AxialUse {

@@ -82,6 +82,15 @@ export const placeFormulas = {
     expression: 'za+3*Lb/4',
     operands: { za: 'length', Lb: 'length' },
   }),
+  middle: formula({
+    id: 'E2-middle',
+    clause: 'E2',
+    title: 'Middle of the bay',
+    symbol: 'zlocal',
+    dimension: 'length',
+    expression: 'L1/2',
+    operands: { L1: 'length' },
+  }),
   intensity: formula({
     id: 'E2-intensity',
     clause: 'E2',
