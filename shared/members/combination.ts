@@ -11,7 +11,7 @@ import { AXES, type AxialState, type Axis } from './bay-moments.ts';
 import { checkSegments } from './check-segments.ts';
 import { deflectionLines } from './deflection-lines.ts';
 import type { CombinationRun, MemberStrengths } from './member-strengths.ts';
-import { bends, planeMoments } from './plane-moments.ts';
+import { bends, type PlaneMoments, planeMoments } from './plane-moments.ts';
 import type { ResolvedCombination, ResolvedInput } from './resolved.ts';
 import { type Segment, segmentsOf } from './segments.ts';
 import { checkShear } from './shear-demand.ts';
