@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
+import { bayCurve } from './bay-curve.ts';
 import type { InteractionPoint, MemberDrawing, NamedDrawn, PlaneDrawing } from './drawing.ts';
 import { interactionDiagram } from './interaction-diagram.ts';
 import { memberScene } from './member-scene.ts';
-import { secondOrderSamples } from './moment-curve.ts';
 import { momentDiagram } from './moment-diagram.ts';
 import type { Point, Scene, Shape } from './scene.ts';
 import { sectionDrawing } from './section-drawing.ts';
@@ -15,18 +15,27 @@ const named = (symbol: string, value: number, text: string): NamedDrawn => ({
   text,
 });
 
-const plane = (over: Partial<PlaneDrawing> = {}): PlaneDrawing => ({
-  plane: 'major',
-  endA: named('MxA', 118e6, '118 kip ft'),
-  endB: named('MxB', 104e6, '104 kip ft'),
-  kL: 1.2,
-  largest: {
-    ...named('Mmax', 134.4e6, '134.4 kip ft'),
-    place: { value: 2800, words: 'at 9.2 ft' },
-  },
-  required: null,
-  ...over,
-});
+const plane = ({
+  kL = 1.2,
+  ...over
+}: Partial<PlaneDrawing> & { kL?: number | null } = {}): PlaneDrawing => {
+  const { endA, endB } = {
+    endA: named('MxA', 118e6, '118 kip ft'),
+    endB: named('MxB', 104e6, '104 kip ft'),
+    ...over,
+  };
+  return {
+    ...{ plane: 'major', endA, endB, supports: [], loads: [], tension: false, swayed: false },
+    bays: [{ from: 0, to: 6000, MA: endA.value, MB: endB.value, kL }],
+    largest: {
+      ...named('Mmax', 134.4e6, '134.4 kip ft'),
+      crest: true,
+      place: { value: 2800, words: 'at 9.2 ft' },
+    },
+    ...{ extremes: [], required: [], shear: null },
+    ...over,
+  };
+};
 
 const member = (over: Partial<MemberDrawing> = {}): MemberDrawing => ({
   mark: 'C-07',
@@ -35,6 +44,8 @@ const member = (over: Partial<MemberDrawing> = {}): MemberDrawing => ({
   depth: 315,
   width: 307,
   lengths: [named('Lcx', 6000, '6 m'), named('Lcz', 3000, '3 m'), named('Lb', 1500, '1.5 m')],
+  chains: [],
+  held: [],
   axial: named('P', 1379e3, '310 kip'),
   planes: [plane()],
   ...over,
@@ -198,23 +209,29 @@ describe('moment diagram', () => {
 });
 
 describe('second-order curve', () => {
+  const curve = (kL: number) => {
+    const found = bayCurve({ from: 0, to: 6000, MA: 100, MB: -40, kL }, [], kL, false);
+    if (!found) throw new Error('no curve');
+    return found.moment;
+  };
+
   it('has the ends it was given and (MA + MB) / (2 cos kL/2) at mid-length', () => {
     // Timoshenko and Gere, Theory of Elastic Stability, chapter 1: the sum form at mid-length.
-    const samples = secondOrderSamples(100, -40, 2) ?? [];
-    expect(samples[0]?.moment).toBeCloseTo(100, 9);
-    expect(samples.at(-1)?.moment).toBeCloseTo(-40, 9);
-    expect(samples[48]?.moment).toBeCloseTo(60 / (2 * Math.cos(1)), 9);
+    const moment = curve(2);
+    expect(moment(0)).toBeCloseTo(100, 9);
+    expect(moment(6000)).toBeCloseTo(-40, 9);
+    expect(moment(3000)).toBeCloseTo(60 / (2 * Math.cos(1)), 9);
   });
 
   it('is the straight line without axial force', () => {
-    const samples = secondOrderSamples(100, -40, 0) ?? [];
-    expect(samples[24]).toEqual({ part: 0.25, moment: 65 });
+    expect(curve(0)(1500)).toBeCloseTo(65, 9);
   });
 });
 
 describe('interaction diagram', () => {
   const point = (axial: number, moment: number, ratio: number): InteractionPoint => ({
     combination: `1.2D + ${ratio}`,
+    segment: null,
     axial,
     moment,
     ratio,

@@ -1,15 +1,20 @@
+import { describeMember } from './describe-member.ts';
 import type { MemberDrawing, NamedDrawn, PlaneDrawing } from './drawing.ts';
-import { alongScale, LEFT, WIDTH } from './frame.ts';
+import { alongScale, WIDTH } from './frame.ts';
+import { lengthRows } from './length-rows.ts';
 import { memberView } from './member-view.ts';
+import { markKey } from './restraint-marks.ts';
 import type { Scene, Shape } from './scene.ts';
-import { label, PENS, path } from './shapes.ts';
+import { label } from './shapes.ts';
 
-const ROW = 15;
+const TOP = 20;
+const KEY_ROW = 17;
+const KEY_GAP = 4;
 
 /**
- * The member to scale: elevation (depth d) and, where the minor axis bends, plan (width bf), held
- * at both ends, with the axial force, the end moments, and its buckling and unbraced lengths as
- * scaled bars.
+ * The member to scale: elevation (depth d) and, where the minor axis bends, plan (width bf), with its
+ * supports and restraints, loads, axial force, end moments and moments over held points, and its
+ * buckling and unbraced lengths as scaled bars.
  */
 export function memberScene(drawing: MemberDrawing): Scene {
   const along = alongScale(drawing);
@@ -19,23 +24,29 @@ export function memberScene(drawing: MemberDrawing): Scene {
     label(`${drawing.section} · ${drawing.length.text}`, [centre, 13], {
       anchor: 'middle',
       weight: 600,
+      within: WIDTH,
     }),
   ];
-  let y = 20;
+  let y = TOP;
   for (const plane of views(drawing)) {
     const size = plane.plane === 'major' ? drawing.depth : drawing.width;
     const half = ((size ?? 0) * perMm) / 2;
-    const axis = y + Math.max(half + 16, 27);
     const withAxial = plane.plane === 'major';
-    shapes.push(...memberView({ drawing, plane, along, axis, half, withAxial }));
-    y = axis + Math.max(half + 20, 31);
+    const view = memberView({ drawing, plane, along, top: y, half, withAxial });
+    shapes.push(...view.shapes);
+    y = view.bottom;
   }
-  const bars = lengthBars(drawing, along, y);
+  if (drawing.held.length > 0) {
+    y += KEY_ROW;
+    shapes.push(...markKey(drawing.held, along(0), y));
+    y += KEY_GAP;
+  }
+  const rows = lengthRows(drawing, along, y);
   return {
     width: WIDTH,
-    height: Math.ceil(bars.end),
-    shapes: [...shapes, ...bars.shapes],
-    description: describe(drawing),
+    height: Math.ceil(rows.end),
+    shapes: [...shapes, ...rows.shapes],
+    description: describeMember(drawing),
   };
 }
 
@@ -45,9 +56,15 @@ const UNBENT: PlaneDrawing = {
   plane: 'major',
   endA: unbent('MxA'),
   endB: unbent('MxB'),
-  kL: null,
+  supports: [],
+  loads: [],
+  bays: [],
+  tension: false,
+  swayed: false,
   largest: null,
-  required: null,
+  extremes: [],
+  required: [],
+  shear: null,
 };
 
 /** The elevation always, the plan only where the minor axis bends. */
@@ -56,68 +73,6 @@ const views = (drawing: MemberDrawing): readonly PlaneDrawing[] => [
   ...drawing.planes.filter((p) => p.plane === 'minor' && isBent(p)),
 ];
 
-const isBent = ({ endA, endB }: PlaneDrawing): boolean => endA.value !== 0 || endB.value !== 0;
-
-/** Lengths that print alike share a bar; all bars are measured off from end A. */
-function lengthBars(drawing: MemberDrawing, along: (mm: number) => number, top: number) {
-  const groups = new Map<string, NamedDrawn[]>();
-  for (const length of [{ symbol: 'L', ...drawing.length }, ...drawing.lengths]) {
-    const key = String(length.value);
-    groups.set(key, [...(groups.get(key) ?? []), length]);
-  }
-  const shapes: Shape[] = [];
-  let y = top;
-  for (const group of groups.values()) {
-    const [first] = group;
-    if (!first) continue;
-    y += ROW;
-    const end = along(first.value);
-    const tick = (x: number): Shape =>
-      path(
-        [
-          [x, y - 8],
-          [x, y],
-        ],
-        PENS.rule,
-      );
-    shapes.push(
-      path(
-        [
-          [along(0), y - 4],
-          [end, y - 4],
-        ],
-        PENS.rule,
-      ),
-      tick(along(0)),
-      tick(end),
-      label(group.map((l) => l.symbol).join(', '), [LEFT - 10, y], {
-        anchor: 'end',
-        within: LEFT - 12,
-      }),
-      label(first.text, [end + 8, y], { within: WIDTH - end - 10 }),
-    );
-  }
-  return { shapes, end: y + 10 };
-}
-
-function describe(drawing: MemberDrawing): string {
-  const { axial } = drawing;
-  const force =
-    axial === null || axial.value === 0
-      ? 'no axial force'
-      : `axial ${axial.value > 0 ? 'compression' : 'tension'} ${axial.symbol} ${axial.text}`;
-  const moments = drawing.planes
-    .filter(isBent)
-    .flatMap((p) => [p.endA, p.endB])
-    .map((m) => `${m.symbol} ${m.text}`);
-  const lengths = drawing.lengths.map((l) => `${l.symbol} ${l.text}`);
-  return [
-    `Member ${drawing.mark} to scale: ${drawing.section}, ${drawing.length.text} long, held at both ends`,
-    force,
-    moments.length > 0 ? `end moments ${moments.join(', ')}` : null,
-    lengths.length > 0 ? `lengths ${lengths.join(', ')}` : null,
-  ]
-    .filter((part) => part !== null)
-    .join('; ')
-    .concat('.');
-}
+/** Whether moments or loads bend the member in a plane. */
+export const isBent = ({ endA, endB, supports, loads }: PlaneDrawing): boolean =>
+  [endA, endB, ...supports].some((m) => m.value !== 0) || loads.length > 0;

@@ -11,6 +11,8 @@ export const PENS = {
   axis: { ink: 'zinc3', width: 0.75, dash: [8, 2, 2, 2] },
   level: { ink: 'ink', width: 0.75, dash: [1, 2] },
   force: { ink: 'oxide', width: 1.5 },
+  load: { ink: 'oxide', width: 0.75 },
+  mark: { ink: 'ink', width: 1.5 },
   second: { ink: 'oxide', width: 1.75 },
   first: { ink: 'zinc7', width: 1, dash: [4, 3] },
 } as const satisfies Record<string, Stroke>;
@@ -44,6 +46,24 @@ export const label = (
 /** Generous estimate of a text's width: the figures know no fonts. */
 export const textWidth = (text: string, size = TEXT): number => [...text].length * size * 0.56;
 
+/** A line between two points. */
+export const segment = (from: Point, to: Point, stroke: Stroke): Shape => path([from, to], stroke);
+
+/** The same shape in another place. */
+export function moved(shape: Shape, across: number, down: number): Shape {
+  const at = ([x, y]: Point): Point => [x + across, y + down];
+  switch (shape.kind) {
+    case 'line':
+    case 'area':
+      return { ...shape, points: shape.points.map(at) };
+    case 'circle':
+    case 'arc':
+      return { ...shape, center: at(shape.center) };
+    case 'text':
+      return { ...shape, at: at(shape.at) };
+  }
+}
+
 const fittedSize = (text: string, within: number): number =>
   Math.max(6, Math.min(TEXT, (TEXT * within) / Math.max(textWidth(text), 1)));
 
@@ -68,10 +88,11 @@ export function arrowHead(tip: Point, angle: number, fill: Ink, size = 8): Shape
 }
 
 /** A straight arrow; the shaft stops inside the head. */
-export function arrow(from: Point, tip: Point, stroke: Stroke): Shape[] {
+export function arrow(from: Point, tip: Point, stroke: Stroke, size = 8): Shape[] {
   const angle = Math.atan2(tip[1] - from[1], tip[0] - from[0]);
-  const end: Point = [tip[0] - 5 * Math.cos(angle), tip[1] - 5 * Math.sin(angle)];
-  return [path([from, end], stroke), arrowHead(tip, angle, stroke.ink)];
+  const inside = (5 / 8) * size;
+  const end: Point = [tip[0] - inside * Math.cos(angle), tip[1] - inside * Math.sin(angle)];
+  return [path([from, end], stroke), arrowHead(tip, angle, stroke.ink, size)];
 }
 
 /** A curved arrow about `center` from angle `from` to `to`; clockwise where `to` is larger. */

@@ -1,4 +1,5 @@
-import type { Point, Scene, Shape } from './scene.ts';
+import type { Scene } from './scene.ts';
+import { moved } from './shapes.ts';
 
 const GAP = 16;
 
@@ -8,21 +9,7 @@ export function sideBySide(left: Scene, right: Scene): Scene {
   return {
     width: across + right.width,
     height: Math.max(left.height, right.height),
-    shapes: [...left.shapes, ...right.shapes.map((s) => moved(s, across))],
+    shapes: [...left.shapes, ...right.shapes.map((s) => moved(s, across, 0))],
     description: `${left.description} ${right.description}`,
   };
-}
-
-function moved(shape: Shape, across: number): Shape {
-  const at = ([x, y]: Point): Point => [x + across, y];
-  switch (shape.kind) {
-    case 'line':
-    case 'area':
-      return { ...shape, points: shape.points.map(at) };
-    case 'circle':
-    case 'arc':
-      return { ...shape, center: at(shape.center) };
-    case 'text':
-      return { ...shape, at: at(shape.at) };
-  }
 }

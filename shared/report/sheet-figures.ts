@@ -7,12 +7,13 @@ import { readMember } from '../figures/read-member.ts';
 import { readSection } from '../figures/read-section.ts';
 import type { Scene } from '../figures/scene.ts';
 import { sectionOutline } from '../figures/section-outline.ts';
+import { shearDiagram } from '../figures/shear-diagram.ts';
 import { sideBySide } from '../figures/side-by-side.ts';
 import type { Block } from './tree.ts';
 
 /**
- * The member and, under it at the same scale, the moments of both planes for one combination; the
- * last one carries the words for all of them.
+ * The member and, under it at the same scale, the moments and the shear of both planes for one
+ * combination; the last one carries the words for all of them.
  */
 export function memberFigures(
   record: CalculationRecord,
@@ -21,11 +22,17 @@ export function memberFigures(
 ): Block[] {
   const drawing = readMember(member, combination, record.units);
   if (!drawing) return [];
-  const moments = drawing.planes.flatMap((plane) => momentDiagram(drawing, plane) ?? []);
+  const moments = drawing.planes.map((plane) => momentDiagram(drawing, plane));
+  const shears = drawing.planes.map((plane) => shearDiagram(drawing, plane));
   const under = combination ? `, combination ${combination.name}` : '';
-  const sides = moments.length > 0 ? ', moments on the compressed side' : '';
-  const caption = `Member to scale${under}. Lengths from end A${sides}.`;
-  const scenes = [memberScene(drawing), ...moments];
+  const words = [
+    ...(drawing.chains.length > 0 ? [] : ['lengths from end A']),
+    ...(moments.some((scene) => scene !== null) ? ['moments on the compressed side'] : []),
+    ...(shears.some((scene) => scene !== null) ? ['shear as the slope of the moment'] : []),
+  ].join(', ');
+  const caption = `Member to scale${under}.${words && ` ${words[0]?.toUpperCase()}${words.slice(1)}.`}`;
+  const diagrams = moments.flatMap((moment, plane) => [moment, shears[plane] ?? null]);
+  const scenes = [memberScene(drawing), ...diagrams.filter((scene) => scene !== null)];
   return scenes.map((scene, index) => ({
     kind: 'figure',
     scene,
