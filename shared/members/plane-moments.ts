@@ -111,6 +111,13 @@ export function planeMoments(
       `The member bends about the ${word} axis and runs over ${supports.missing.join(', ')}, held in that plane. The moment there is not given, so the bays between are not computed.`,
       `Moments over held points, ${word} axis`,
     );
+  const twisting = loads.filter(({ load }) => axis === 'y' && load.height !== 'centre');
+  if (twisting.length > 0)
+    return outside(
+      'load-off-shear-centre',
+      `A load that bends the minor axis acts at a flange (${twisting.map(({ load }) => load.id.replace('load', 'load ')).join(', ')}): it twists the member. Torsion (H3) is outside the scope.`,
+      'Load off the shear centre',
+    );
   const { secondOrder, includesMemberEffect } = input.analysis;
   if (largest && secondOrder !== 'from-analysis')
     return outside(
