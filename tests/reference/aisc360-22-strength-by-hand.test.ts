@@ -320,6 +320,14 @@ describe('H1.3 on W12×79, 20 ft, LRFD', () => {
       ['H1/y', 'F1', null],
     ]);
   });
+  it('takes the yielding strength in the plane where buckling limits H1.1', () => {
+    // Cb = 1: in the plane as before; out of it 0.5757412 + (220/393.8196)² = 0.8878102;
+    // H1.1: 0.4518981 + 8/9·(220/393.8196 + 4/203.625) = 0.9659206.
+    const { r } = run({ Cb: '1', Mcx: '393.8196 kip ft' });
+    near(valueAt(r, 'H1.3/in-plane'), 0.7887721);
+    near(valueAt(r, 'H1.3/out-of-plane'), 0.8878102);
+    near(valueAt(r, 'H1/ratio'), 0.9659206);
+  });
   it('says NOT OK by compression alone where H1-3 has fallen again', () => {
     // p = 1992/663.8665 = 3.000603: p·(1.5 − 0.5·p) < 0.
     const { checks } = run({ Pr: '1992 kip' });
