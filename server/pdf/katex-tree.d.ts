@@ -52,7 +52,12 @@ declare module 'katex' {
 
   export const __renderToHTMLTree: (
     tex: string,
-    options: { displayMode: boolean; trust: boolean; strict: boolean; throwOnError: boolean },
+    options: {
+      displayMode: boolean;
+      trust: boolean;
+      strict: boolean | ((code: string) => 'error' | 'ignore');
+      throwOnError: boolean;
+    },
   ) => Span;
 
   export const __domTree: {

@@ -32,10 +32,6 @@ class Characters {
     if (found) this.at += found[0].length;
     return found;
   }
-  fits(pattern: RegExp): boolean {
-    pattern.lastIndex = this.at;
-    return pattern.test(this.text);
-  }
   need(pattern: RegExp): RegExpExecArray {
     const found = this.take(pattern);
     if (!found) throw new Error(`${pattern} expected at "${this.rest.slice(0, 30)}"`);
@@ -100,13 +96,21 @@ const MARKS: readonly (readonly [RegExp, (found: string, c: Characters) => Node[
   [/(?=\{)/y, (_, c) => nodesOf(group(c))],
 ];
 
+function firstMark(c: Characters): Node[] | null {
+  for (const [pattern, read] of MARKS) {
+    const found = c.take(pattern);
+    if (found) return read(found[0], c);
+  }
+  return null;
+}
+
 function nodesOf(text: string): Node[] {
   const c = new Characters(text);
   const nodes: Node[] = [];
-  while (c.rest !== '') {
-    const mark = MARKS.find(([pattern]) => c.fits(pattern));
+  while (c.at < text.length) {
+    const mark = firstMark(c);
     if (!mark) throw new Error(`not known: "${c.rest.slice(0, 30)}"`);
-    nodes.push(...mark[1](c.need(mark[0])[0], c));
+    nodes.push(...mark);
   }
   return nodes;
 }
