@@ -1,4 +1,6 @@
 import { describe, expect, it } from 'vitest';
+import { closeLines } from '#shared/calc/closure.ts';
+import { closureProblems } from '#shared/calc/closure-problems.ts';
 import type { Line } from '#shared/calc/line.ts';
 import { createRecorder, type Recorder } from '#shared/calc/recorder.ts';
 import { shearCheck, shearStrength } from '#shared/members/shear.ts';
@@ -7,6 +9,7 @@ import { interactionChecks } from '#shared/standards/aisc360-22/h1.ts';
 import { type SingleAxis, singleAxisChecks } from '#shared/standards/aisc360-22/h1-single-axis.ts';
 import { increasedCb, requiredTension } from '#shared/standards/aisc360-22/h1-tension.ts';
 import { stressInteractionChecks } from '#shared/standards/aisc360-22/h2.ts';
+import { UNIT_SETS } from '#shared/units/unit-set.ts';
 import { quantities, quantity, sectionOf, steelOf, type Texts } from './given-texts.ts';
 import { inUnit } from './in-unit.ts';
 
@@ -30,6 +33,17 @@ function valueAt(r: Recorder, key: string): number {
 const equationAt = (r: Recorder, key: string) => lineAt(r, key).clause?.equation;
 const noticesOf = (r: Recorder) =>
   r.lines.flatMap((l) => (l.kind === 'notice' ? [`${l.severity}: ${l.code}`] : []));
+
+/** What does not follow on the printed sheet of a combination, in either unit set. */
+function faultsOf(r: Recorder): string[] {
+  const placed = (lines: readonly Line[]) =>
+    lines.map((line) => ({ address: `c1:${line.key}`, combination: 'c1', line }));
+  return Object.values(UNIT_SETS).flatMap((set) =>
+    closureProblems(placed(closeLines(placed(r.lines), set)), set).map(
+      (p) => `${p.address}: ${p.reason}`,
+    ),
+  );
+}
 
 /** To 0.0005 % of a value worked to seven digits. */
 const near = (value: number, hand: number) =>
@@ -328,6 +342,10 @@ describe('H1.3 on W12×79, 20 ft, LRFD', () => {
     near(valueAt(r, 'H1.3/out-of-plane'), 0.8878102);
     near(valueAt(r, 'H1/ratio'), 0.9659206);
   });
+  it('prints what follows, at small utilisations too', () => {
+    expect(faultsOf(run({}).r)).toEqual([]);
+    expect(faultsOf(run({ Pr: '31.7 kip', Mrx: '11.3 kip ft', Mry: '0.37 kip ft' }).r)).toEqual([]);
+  });
   it('says NOT OK by compression alone where H1-3 has fallen again', () => {
     // p = 1992/663.8665 = 3.000603: p·(1.5 − 0.5·p) < 0.
     const { checks } = run({ Pr: '1992 kip' });
@@ -400,6 +418,20 @@ describe('H2 on a channel with signs', () => {
     near(valueAt(r, 'H2/top-toe/ratio'), 0.25);
     near(valueAt(r, 'H2/check'), 0.8333333);
     expect(lineAt(r, 'H2/ratio')).toMatchObject({ governs: ':H2/bottom-back/ratio' });
+  });
+  it('prints what follows, at small utilisations too', () => {
+    // 1.37/90 = 0.01522: less than 0.1 at the back of the web.
+    for (const P of ['30 kip', '-30 kip', '1.37 kip']) expect(faultsOf(run(P).r)).toEqual([]);
+    const r = createRecorder(':');
+    const q = quantities(r, {
+      ...{ P: '1.37 kip', Pc: '90 kip', A: '6.08 in²', M: '2.9 kip ft', S: '21.5 in³' },
+      Mc: '60 kip ft',
+    });
+    const point = { name: 'top', title: 'top', x: { Mr: q.M, S: q.S, Mc: q.Mc }, y: null };
+    stressInteractionChecks(r, { Pr: q.P, Pc: q.Pc, Ag: q.A }, [point]);
+    // 1.37/90 + 2.9/60 = 0.06355556.
+    near(valueAt(r, 'H2/check'), 0.06355556);
+    expect(faultsOf(r)).toEqual([]);
   });
   it('writes no check where nothing combines', () => {
     const r = createRecorder(':');

@@ -88,11 +88,7 @@ export function singleAxisChecks(r: Recorder, q: SingleAxis): LineOf<'check'>[] 
     }),
     ...separateChecks(r, { Pr, Pc }, x, y),
   ];
-  const larger = r.governing('H1.3/ratio', 'max', [inPlane.ratio, outOfPlane], {
-    title: 'Utilisation by H1.3',
-    symbol: 'ratio',
-    clause: clause('H1.3'),
-  });
+  const larger = inPlane.ratio.value < outOfPlane.value ? outOfPlane : inPlane.ratio;
   r.comparison(
     'H1.3/comparison',
     larger,

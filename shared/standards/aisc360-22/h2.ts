@@ -20,7 +20,7 @@ const MINOR = { frbz: 'stress', Fcbz: 'stress' } as const;
 const sum = (id: string, expression: string, operands: Readonly<Record<string, 'stress'>>) =>
   formula({
     ...{ id, clause: 'H2', equation: 'H2-1', title: 'Interaction of stresses', symbol: 'ratio' },
-    ...{ dimension: 'none', expression: `abs(${expression})`, operands, ratio: true },
+    ...{ dimension: 'none', expression: `abs(${expression})`, operands },
   });
 
 export const h2Formulas = {
