@@ -1,4 +1,12 @@
-import type { LengthChain, LoadDrawing, MemberDrawing, PlaneDrawing } from './drawing.ts';
+import { chainEnds, isSamePlace } from './chain-ends.ts';
+import type {
+  HeldPoint,
+  LengthChain,
+  LoadDrawing,
+  MemberDrawing,
+  PlaneDrawing,
+} from './drawing.ts';
+import { isBent } from './is-bent.ts';
 
 /** What the drawing of a member shows, in words. */
 export function describeMember(drawing: MemberDrawing): string {
@@ -11,14 +19,16 @@ export function describeMember(drawing: MemberDrawing): string {
     .filter((p) => p.endA.value !== 0 || p.endB.value !== 0)
     .flatMap((p) => [p.endA, p.endB])
     .map((m) => `${m.symbol} ${m.text}`);
+  const ends = chainEnds(chains.find(({ symbol }) => symbol === 'Lb')?.pieces ?? []);
   return [
     `Member ${drawing.mark} to scale: ${drawing.section}, ${drawing.length.text} long, held at both ends`,
     force,
     listed('end moments', moments),
     ...planes.flatMap(overSupports),
-    ...held.map(
-      ({ name, place, words }) => `restraint ${name} at ${place.text} from A holds ${words}`,
-    ),
+    ...planes
+      .filter((plane) => isBent(plane) && plane.bays.length === 0)
+      .map(({ plane }) => `moments about ${axisOf(plane)} between the ends not known`),
+    ...held.map((point) => describeHeld(point, ends, drawing.length.value)),
     ...planes.flatMap((plane) => plane.loads.map((load) => describeLoad(load, plane))),
     listed(
       'lengths',
@@ -37,13 +47,22 @@ const listed = (what: string, all: readonly string[]): string | null =>
 const overSupports = ({ plane, supports }: PlaneDrawing): string[] =>
   supports.map((s) => `moment about ${axisOf(plane)} ${s.place.words} ${s.text}`);
 
+function describeHeld(
+  { name, place, words }: HeldPoint,
+  segmentEnds: readonly number[],
+  length: number,
+): string {
+  const ends = segmentEnds.some((z) => isSamePlace(z, place.value, length));
+  return `restraint ${name} at ${place.text} from A holds ${words}${ends ? ', where an unbraced segment ends' : ''}`;
+}
+
 const axisOf = (plane: PlaneDrawing['plane']): 'x' | 'y' => (plane === 'major' ? 'x' : 'y');
 
 function describeLoad(load: LoadDrawing, { plane }: PlaneDrawing): string {
   const what =
     load.kind === 'point'
       ? `${load.force.text} at ${load.at.text} from A`
-      : `${load.start === load.end ? load.start.text : `${load.start.text} rising or falling to ${load.end.text}`} ${load.reach || 'over the whole length'}`;
+      : `${load.start === load.end ? load.start.text : `${load.start.text} at its start, ${load.end.text} at its end,`} ${load.reach || 'over the whole length'}`;
   const where = load.heightWords === '' ? '' : `, ${load.heightWords}`;
   return `${load.name}, bending about ${axisOf(plane)}: ${what}${where}`;
 }

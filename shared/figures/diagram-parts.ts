@@ -1,6 +1,7 @@
 import type { Sample } from './bay-curve.ts';
-import { chainEnds } from './chain-ends.ts';
+import { chainEnds, isSamePlace, SAME_PLACE } from './chain-ends.ts';
 import type { MemberDrawing, Plane } from './drawing.ts';
+import { valueAt } from './plane-curves.ts';
 import { isSupport } from './restraint-marks.ts';
 import type { Ink, Point, Shape, Stroke } from './scene.ts';
 import { label, PENS, segment } from './shapes.ts';
@@ -33,21 +34,28 @@ export function filled(curve: readonly Point[], base: number, fill: Ink): Shape 
 export const baseLine = ({ along, up, length }: DiagramFrame): Shape =>
   segment([along(0), up(0)], [along(length), up(0)], PENS.rule);
 
-/** Ends of segments as hairlines over the whole diagram; points held in the plane as stands. */
+/** How far an ordinate passes the line of zero. */
+const PAST = 5;
+
+/** Ends of segments as ordinates to the curve; points held in the plane as stands. */
 export function heldPlaces(
   drawing: MemberDrawing,
   plane: Plane,
-  { along, up }: DiagramFrame,
-  [top, bottom]: readonly [number, number],
+  samples: readonly Sample[],
+  { along, up, length }: DiagramFrame,
 ): Shape[] {
   const segments = drawing.chains.find(({ symbol }) => symbol === 'Lb')?.pieces ?? [];
-  const ends = chainEnds(segments).slice(1, -1);
+  const ends = plane === 'major' ? chainEnds(segments).slice(1, -1) : [];
   const supports = drawing.held.filter((held) => isSupport(held, plane));
   const base = up(0);
   return [
-    ...(plane === 'major' ? ends : []).map((z) =>
-      segment([along(z), top], [along(z), bottom], PENS.hair),
-    ),
+    ...ends.map((z) => {
+      const ys = [z - SAME_PLACE * length, z + SAME_PLACE * length]
+        .map((place) => up(valueAt(samples, place)))
+        .concat(samples.filter((s) => isSamePlace(s.z, z, length)).map((s) => up(s.value)));
+      const top = Math.min(base - PAST, ...ys);
+      return segment([along(z), top], [along(z), Math.max(base + PAST, ...ys)], PENS.hair);
+    }),
     ...supports.map((held): Shape => {
       const x = along(held.place.value);
       const points: Point[] = [

@@ -1,6 +1,7 @@
 import { describeMember } from './describe-member.ts';
 import type { MemberDrawing, NamedDrawn, PlaneDrawing } from './drawing.ts';
 import { alongScale, WIDTH } from './frame.ts';
+import { isBent } from './is-bent.ts';
 import { lengthRows } from './length-rows.ts';
 import { memberView } from './member-view.ts';
 import { markKey } from './restraint-marks.ts';
@@ -72,7 +73,3 @@ const views = (drawing: MemberDrawing): readonly PlaneDrawing[] => [
   drawing.planes.find((p) => p.plane === 'major') ?? UNBENT,
   ...drawing.planes.filter((p) => p.plane === 'minor' && isBent(p)),
 ];
-
-/** Whether moments or loads bend the member in a plane. */
-export const isBent = ({ endA, endB, supports, loads }: PlaneDrawing): boolean =>
-  [endA, endB, ...supports].some((m) => m.value !== 0) || loads.length > 0;

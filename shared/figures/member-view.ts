@@ -1,5 +1,6 @@
 import type { MemberDrawing, NamedDrawn, Plane, PlaneDrawing } from './drawing.ts';
 import { LEFT } from './frame.ts';
+import { isBent } from './is-bent.ts';
 import { loadMarks } from './load-marks.ts';
 import { type Label, placeLabels } from './place-labels.ts';
 import { holdMarks, isSeen, isSupport, supportMarks } from './restraint-marks.ts';
@@ -15,6 +16,9 @@ const VIEW_NAMES: Record<Plane, string> = {
   major: 'elevation, bending about x',
   minor: 'plan, bending about y',
 };
+
+/** Said where the sheet has no moments between the ends of a plane that is bent. */
+const UNKNOWN = '; moments between the ends not known';
 
 interface View {
   readonly drawing: MemberDrawing;
@@ -57,15 +61,21 @@ export function memberView(view: View): { readonly shapes: Shape[]; readonly bot
       ...endMoment(plane.endB, [to, axis], 'B'),
       ...plane.supports.flatMap((s) => supportMoment(s.value, [along(s.place.value), axis])),
       ...names.shapes,
-      label(VIEW_NAMES[plane.plane], [(from + to) / 2, name], {
-        anchor: 'middle',
-        ink: 'zinc7',
-        within: to - from - 2 * SUPPORT,
-      }),
+      label(
+        `${VIEW_NAMES[plane.plane]}${isUnknown(plane) ? UNKNOWN : ''}`,
+        [(from + to) / 2, name],
+        {
+          anchor: 'middle',
+          ink: 'zinc7',
+          within: to - from - 2 * SUPPORT,
+        },
+      ),
     ],
     bottom: bare ? axis + Math.max(half + 20, 31) : name + 5,
   };
 }
+
+const isUnknown = (plane: PlaneDrawing): boolean => isBent(plane) && plane.bays.length === 0;
 
 const endNames = (from: number, to: number, y: number): Shape[] => [
   label('A', [from, y], { anchor: 'middle', weight: 600 }),

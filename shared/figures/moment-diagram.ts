@@ -10,8 +10,8 @@ import {
 } from './diagram-parts.ts';
 import type { MemberDrawing, MomentMark, PlaneDrawing } from './drawing.ts';
 import { alongScale, LEFT, WIDTH } from './frame.ts';
-import { isBent } from './member-scene.ts';
-import { type Box, boxOf, type Label, placeLabels } from './place-labels.ts';
+import { isBent } from './is-bent.ts';
+import { type Box, boxOf, curveBoxes, type Label, placeLabels } from './place-labels.ts';
 import { firstOrderMoments, secondOrderMoments } from './plane-curves.ts';
 import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path, segment, textWidth } from './shapes.ts';
@@ -51,7 +51,7 @@ export function momentDiagram(drawing: MemberDrawing, plane: PlaneDrawing): Scen
   const height = bottom + (low < 0 ? UNDER : 8);
   const shapes: Shape[] = [
     ...(used ? [filled(curvePoints(used, frame), frame.up(0), 'oxide2')] : []),
-    ...heldPlaces(drawing, plane.plane, frame, [TOP - 8, height - 4]),
+    ...heldPlaces(drawing, plane.plane, used ?? first, frame),
     baseLine(frame),
     ...(second || !plane.tension ? [path(curvePoints(first, frame), PENS.first)] : []),
     ...(used ? [path(curvePoints(used, frame), PENS.second)] : []),
@@ -99,12 +99,16 @@ function labels(
   );
   const placed = placeLabels(
     others.map((m) => beside(m, m.text, 400, frame)),
-    [...[...ends, ...named].map(boxOf), ...curve.map(dotOf)],
+    [...[...ends, ...named].map(boxOf), ...curveBoxes(curve), ...levelBoxes(plane, frame)],
   );
   return [...ends, ...named, ...placed];
 }
 
-const dotOf = ([x, y]: Point): Box => ({ left: x - 1, right: x + 1, top: y - 1, bottom: y + 1 });
+const levelBoxes = ({ required }: PlaneDrawing, { along, up }: DiagramFrame): Box[] =>
+  required.map(({ from, to, value }) => ({
+    ...{ left: along(from), right: along(to) },
+    ...{ top: up(value) - 1, bottom: up(value) + 1 },
+  }));
 
 /** Places of a text beyond the curve at a moment, else a little to either side. */
 function beside(

@@ -1,4 +1,4 @@
-import type { Shape } from './scene.ts';
+import type { Point, Shape } from './scene.ts';
 import { textWidth } from './shapes.ts';
 
 export type Label = Extract<Shape, { kind: 'text' }>;
@@ -20,10 +20,24 @@ export function boxOf({ at: [x, y], text, size, anchor }: Label): Box {
   return { left: left - 2, right: left + width + 2, top: y - 0.8 * size, bottom: y + 0.25 * size };
 }
 
+/** Length of the pieces that a curve is cut in to be kept clear of. */
+const PIECE = 4;
+
+/** A curve to keep clear of. */
+export const curveBoxes = (points: readonly Point[]): Box[] =>
+  points.slice(1).flatMap(([x1, y1], i) => {
+    const [x0, y0] = points[i] as Point;
+    const count = Math.max(1, Math.ceil(Math.hypot(x1 - x0, y1 - y0) / PIECE));
+    return Array.from({ length: count + 1 }, (_, n): Box => {
+      const [x, y] = [x0 + ((x1 - x0) * n) / count, y0 + ((y1 - y0) * n) / count];
+      return { left: x - 1, right: x + 1, top: y - 1, bottom: y + 1 };
+    });
+  });
+
 const overlap = (a: Box, b: Box): boolean =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
 
-export const isFree = (box: Box, taken: readonly Box[]): boolean =>
+const isFree = (box: Box, taken: readonly Box[]): boolean =>
   !taken.some((other) => overlap(box, other));
 
 /** Labels in the order of their weight, each at the first of its places that is free; else none. */

@@ -53,7 +53,8 @@ export function signedLargest(samples: readonly Sample[], from: number, to: numb
   return all.reduce((most, value) => (Math.abs(value) > Math.abs(most) ? value : most), 0);
 }
 
-function valueAt(samples: readonly Sample[], z: number): number {
+/** The value at a place, straight between samples. */
+export function valueAt(samples: readonly Sample[], z: number): number {
   const after = samples.findIndex((sample) => sample.z >= z);
   const [a, b] = [samples[after - 1], samples[after]];
   if (!b) return samples.at(-1)?.value ?? 0;

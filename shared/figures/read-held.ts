@@ -1,5 +1,6 @@
 import type { ValuedLine } from '../calc/line.ts';
 import type { MemberRecord } from '../calc/record.ts';
+import { isSamePlace } from './chain-ends.ts';
 import type { HeldPoint, Hold, LengthChain, NamedDrawn, Place } from './drawing.ts';
 import { drawn } from './read-line.ts';
 import { operandRef, type SheetLines } from './sheet-lines.ts';
@@ -25,12 +26,9 @@ export function readHeld(member: MemberRecord, lines: SheetLines): HeldPoint[] {
   });
 }
 
-/** Share of the length within which two places are one. */
-const SAME = 1e-6;
-
 /** How a place is called that is an end or a held point; null for any other. */
 export function nameOf(z: number, length: number, held: readonly HeldPoint[]): string | null {
-  const same = (other: number) => Math.abs(z - other) <= SAME * length;
+  const same = (other: number) => isSamePlace(z, other, length);
   if (same(0)) return 'A';
   if (same(length)) return 'B';
   return held.find(({ place }) => same(place.value))?.name ?? null;

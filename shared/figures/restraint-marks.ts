@@ -84,7 +84,7 @@ const KEY: readonly {
     ],
   },
   {
-    words: 'held laterally, at that face',
+    words: 'held laterally where marked',
     holds: ['top', 'bottom', 'centre'],
     mark: crossMark,
   },

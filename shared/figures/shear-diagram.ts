@@ -10,9 +10,9 @@ import {
 } from './diagram-parts.ts';
 import type { MemberDrawing, PlaneDrawing, ShearDrawing } from './drawing.ts';
 import { alongScale, WIDTH } from './frame.ts';
-import { type Label, placeLabels } from './place-labels.ts';
+import { curveBoxes, type Label, placeLabels } from './place-labels.ts';
 import { shearAlong } from './plane-curves.ts';
-import type { Scene, Shape } from './scene.ts';
+import type { Point, Scene, Shape } from './scene.ts';
 import { label, PENS, path, segment } from './shapes.ts';
 
 const TOP = 34;
@@ -42,14 +42,14 @@ export function shearDiagram(drawing: MemberDrawing, plane: PlaneDrawing): Scene
   const height = TOP + TALL + (low < 0 ? MARGIN : 6);
   const shapes: Shape[] = [
     filled(curve, frame.up(0), 'zinc1'),
-    ...heldPlaces(drawing, plane.plane, frame, [TOP - 8, height - 4]),
+    ...heldPlaces(drawing, plane.plane, samples, frame),
     baseLine(frame),
     path(
       [[frame.along(0), frame.up(0)], ...curve, [frame.along(length), frame.up(0)]],
       PENS.outline,
     ),
     ...(shear.given ? givenLevel(shear, frame) : []),
-    ...labels(shear, frame),
+    ...labels(shear, curve, frame),
     label(plane.plane === 'major' ? 'Shear, bending about x' : 'Shear, bending about y', [0, 13], {
       weight: 600,
     }),
@@ -68,8 +68,12 @@ function givenLevel({ used }: ShearDrawing, { along, up, length }: DiagramFrame)
   ];
 }
 
-/** Ends of bays; the largest stands first, so it always has its place. */
-function labels({ marks, used }: ShearDrawing, frame: DiagramFrame): Shape[] {
+/** Ends of bays and forces; the largest stands first, so it always has its place. */
+function labels(
+  { marks, used }: ShearDrawing,
+  curve: readonly Point[],
+  frame: DiagramFrame,
+): Shape[] {
   const { along, up, length } = frame;
   const size = (value: number): number => Math.abs(value);
   const bySize = [...marks].sort((a, b) => size(b.value) - size(a.value));
@@ -82,11 +86,11 @@ function labels({ marks, used }: ShearDrawing, frame: DiagramFrame): Shape[] {
     const outward = value < 0 ? y + 12 : y - 4;
     return [
       label(text, [along(at), outward], { anchor: 'middle', weight }) as Label,
-      label(text, [along(at) + 6, outward], { weight }) as Label,
-      label(text, [along(at) - 6, outward], { anchor: 'end', weight }) as Label,
+      label(text, [along(at) + 2, outward], { weight }) as Label,
+      label(text, [along(at) - 2, outward], { anchor: 'end', weight }) as Label,
     ];
   });
-  return placeLabels(wanted);
+  return placeLabels(wanted, curveBoxes(curve));
 }
 
 function describe(plane: PlaneDrawing, shear: ShearDrawing, samples: readonly Sample[]): string {
