@@ -279,7 +279,7 @@ describe('the drawn member', () => {
     ).drawings[0] as MemberDrawing;
     // The second segment is twice as long and holds the middle of the member.
     const chain = heavy.chains.find(({ symbol }) => symbol === 'Lb');
-    expect(chain?.pieces.map((p) => p.value / 304.8)).toEqual([8, 16]);
+    expect(chain?.pieces.map((p) => Math.round(p.value / 3.048) / 100)).toEqual([8, 16]);
     expect(chain?.governs).toBe(1);
     const drawn = memberScene(heavy);
     const marked = drawn.shapes.find(
@@ -287,7 +287,9 @@ describe('the drawn member', () => {
     );
     if (marked?.kind !== 'line') throw new Error('no mark');
     const scale = alongScale(heavy);
-    expect(marked.points.map((p) => p[0])).toEqual([scale(8 * 304.8), scale(24 * 304.8)]);
+    const [from, to] = marked.points;
+    expect(from?.[0]).toBeCloseTo(scale(8 * 304.8), 6);
+    expect(to?.[0]).toBeCloseTo(scale(24 * 304.8), 6);
     expect(textsOf(drawn)).toContain('segment 2 governs');
   });
 });

@@ -5,6 +5,7 @@ import { DocumentContext } from '#client/document/document-context.ts';
 import { Paper, PaperHead, PartHead } from '#client/ui/paper.tsx';
 import { Primitives } from './primitives.tsx';
 import { sampleBlocks } from './sample-blocks.ts';
+import { sampleFigures } from './sample-figures.ts';
 import { sampleLines } from './sample-lines.ts';
 
 /** Everything the interface is made of, on one page. */
@@ -34,7 +35,7 @@ export function Component() {
       </Paper>
       <DocumentContext value={context}>
         <Paper className="sheet-interactive @container/sheet mt-8 max-w-[880px] pb-10">
-          <Blocks blocks={[...sampleBlocks, ...sampleLines]} />
+          <Blocks blocks={[...sampleBlocks, ...sampleFigures, ...sampleLines]} />
         </Paper>
       </DocumentContext>
     </Shell>
