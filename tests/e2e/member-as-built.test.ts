@@ -159,6 +159,8 @@ describe('a member as it is built', () => {
     await input(page, 'section.t').fill('0.5 in');
     await page.getByText(/what the wall is/).waitFor();
     expect(await input(page, 'section.wall').getAttribute('aria-invalid')).toBe('true');
+    await input(page, 'section.wall').selectOption('design');
+    await page.getByRole('heading', { name: /C-09 · Tube 10 in × 8 in/ }).waitFor();
     await input(page, 'section').selectOption('from the tables');
     await expect.poll(() => input(page, 'section').inputValue()).toBe('W10×33');
     await saved(page);
