@@ -277,7 +277,7 @@ function largestAlong(
   const wholeTo = to >= z1 || samePlace(to, z1, q.L.value);
   if (wholeFrom && wholeTo) return diagram.largest.size.M;
   const local = (place: Place, name: string): Quantity =>
-    localPlace(segment.r, m, `${key}/${name}`, bay, placeQuantity(q.places, place) as Quantity);
+    localPlace(segment.r, m, `${key}/${name}/z`, bay, placeQuantity(q.places, place) as Quantity);
   return diagram.largestWithin(
     segment.r,
     key,
