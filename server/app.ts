@@ -9,6 +9,7 @@ import { calculationHandlers } from './features/calculations/routes.ts';
 import { deskHandlers } from './features/desk/routes.ts';
 import { healthHandlers } from './features/health/routes.ts';
 import { libraryHandlers } from './features/library/routes.ts';
+import { severalMemberHandlers } from './features/members/change-several.ts';
 import { memberHandlers } from './features/members/routes.ts';
 import { projectHandlers } from './features/projects/routes.ts';
 import { reportHandlers } from './features/reports/routes.ts';
@@ -27,6 +28,7 @@ const handlers = {
   ...projectHandlers,
   ...calculationHandlers,
   ...memberHandlers,
+  ...severalMemberHandlers,
   ...reportHandlers,
   ...libraryHandlers,
 } satisfies { [Name in RouteName]: Handler<(typeof routeTable)[Name]> };

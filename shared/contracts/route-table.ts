@@ -7,6 +7,7 @@ import { library } from './library.ts';
 import { members } from './members.ts';
 import { projects } from './projects.ts';
 import { reports } from './reports.ts';
+import { severalMembers } from './several-members.ts';
 
 /** Every route of the API by its name. What is not here is not served. */
 export const routeTable = {
@@ -16,6 +17,7 @@ export const routeTable = {
   ...projects,
   ...calculations,
   ...members,
+  ...severalMembers,
   ...reports,
   ...library,
 } as const satisfies Record<string, Contract>;

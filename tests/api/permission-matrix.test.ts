@@ -53,6 +53,7 @@ const expected: Record<string, readonly number[]> = {
   deleteMember: doOne,
   restoreMember: doOne,
   reorderMembers: doOne,
+  changeMembers: doOne,
 };
 
 /** Reports first, while the calculation has one member only. */

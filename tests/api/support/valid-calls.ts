@@ -116,4 +116,9 @@ export const validCalls: Record<RouteName, Prepare> = {
     const memberIds = body.memberRows.map(({ id }: { id: string }) => id).reverse();
     return { params, body: { memberIds } };
   },
+  changeMembers: async (target) => {
+    const { calculationId, memberId } = await newMember(target);
+    const patch = { set: { material: 'A36' }, drop: [], combinations: [] };
+    return { params: { calculationId }, body: { changes: [{ memberId, version: 1, patch }] } };
+  },
 };
