@@ -84,6 +84,9 @@ function oneSide(pieces: readonly (PointPiece | BandPiece)[], side: Side, frame:
   const bands = tiers.flatMap((tier, i) =>
     tier.flatMap((band) => bandShapes(band, i, base + i * TIER, side, frame)),
   );
+  const texts = tiers.flatMap((tier, i) =>
+    tier.flatMap((band) => bandTexts(band, base + i * TIER, side, frame)),
+  );
   const variant = ([0, 1] as const).find(
     (v) => Math.max(0, ...lanesOf(points, v, frame)) < MOST_LANES[v],
   );
@@ -94,7 +97,7 @@ function oneSide(pieces: readonly (PointPiece | BandPiece)[], side: Side, frame:
     forceShapes(point, point.texts[text], first + (lanes[i] ?? 0) * LANE, side, frame),
   );
   const room = points.length > 0 ? first + (Math.max(...lanes) + 1) * LANE + 2 : over + 2;
-  return { shapes: [...bands, ...forces], room, numbered: variant === undefined };
+  return { shapes: [...bands, ...forces, ...texts], room, numbered: variant === undefined };
 }
 
 /** y of a distance from the axis. */
@@ -206,15 +209,14 @@ const reachOf = (text: PlacedText, own: readonly [number, number]): [number, num
 };
 
 function bandShapes(
-  { band, labels }: PlacedBand,
+  { band }: PlacedBand,
   tier: number,
   base: number,
   side: Side,
   { along, half, perLoad }: Frame,
 ): Shape[] {
   const [from, to] = [along(band.from), along(band.to)];
-  const size = (load: number) => (load === 0 ? 0 : Math.max(load * perLoad, LEAST));
-  const [start, end] = [size(band.start), size(band.end)];
+  const [start, end] = [drawnSize(band.start, perLoad), drawnSize(band.end, perLoad)];
   const edge = (x: number) => base + start + ((end - start) * (x - from)) / (to - from);
   const foot = tier > 0 ? base : band.height === 'centre' ? 0 : half;
   const count = Math.max(1, Math.round((to - from) / 17));
@@ -235,14 +237,28 @@ function bandShapes(
     ...arrows,
     path(outline.slice(1, 3), PENS.force),
     ...(tier > 0 ? [segment([from, out(side, base)], [to, out(side, base)], PENS.load)] : []),
-    ...labels.flatMap((text) => {
-      const middle = base + (text.at === 'start' ? start : end) / 2;
-      const y =
-        side === 'above' ? -Math.max(middle - 4, CLEAR_ABOVE) : Math.max(middle + 4, CLEAR_BELOW);
-      return knockedOut(bandLabel(text, [from, to], y));
-    }),
   ];
 }
+
+/** A band's texts, which hide what runs behind them; they are drawn last. */
+function bandTexts(
+  { band, labels }: PlacedBand,
+  base: number,
+  side: Side,
+  { along, perLoad }: Frame,
+): Shape[] {
+  const ends = [along(band.from), along(band.to)] as const;
+  return labels.flatMap((text) => {
+    const size = drawnSize(text.at === 'start' ? band.start : band.end, perLoad);
+    const middle = base + size / 2;
+    const y =
+      side === 'above' ? -Math.max(middle - 4, CLEAR_ABOVE) : Math.max(middle + 4, CLEAR_BELOW);
+    return knockedOut(bandLabel(text, ends, y));
+  });
+}
+
+const drawnSize = (load: number, perLoad: number): number =>
+  load === 0 ? 0 : Math.max(load * perLoad, LEAST);
 
 /** A label that hides what runs behind it. */
 function knockedOut(text: Label): Shape[] {

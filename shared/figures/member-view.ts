@@ -17,8 +17,10 @@ const VIEW_NAMES: Record<Plane, string> = {
   minor: 'plan, bending about y',
 };
 
+/** Said where forces stand too close for their values. */
+const NUMBERED = 'forces by the number of their load';
 /** Said where the sheet has no moments between the ends of a plane that is bent. */
-const UNKNOWN = '; moments between the ends not known';
+const UNKNOWN = 'moments between the ends not known';
 
 interface View {
   readonly drawing: MemberDrawing;
@@ -62,7 +64,11 @@ export function memberView(view: View): { readonly shapes: Shape[]; readonly bot
       ...plane.supports.flatMap((s) => supportMoment(s.value, [along(s.place.value), axis])),
       ...names.shapes,
       label(
-        `${VIEW_NAMES[plane.plane]}${isUnknown(plane) ? UNKNOWN : ''}`,
+        [
+          VIEW_NAMES[plane.plane],
+          ...(loads.numbered ? [NUMBERED] : []),
+          ...(isUnknown(plane) ? [UNKNOWN] : []),
+        ].join('; '),
         [(from + to) / 2, name],
         {
           anchor: 'middle',
