@@ -95,8 +95,14 @@ describe('what a formula text may not hold', () => {
     expect(sum.settle({ ...third, d: 0.2 + 1e-12 })).toBe(
       sum.evaluate({ ...third, d: 0.2 + 1e-12 }),
     );
-    // No sum at the top, or no value: nothing settles.
+    // A multiple of such a sum too.
+    const nearly = { a: 1, b: 0.3, c: 0.1 + 0.2 };
+    expect(parseExpression('a*(b-c)').evaluate(nearly)).not.toBe(0);
+    for (const multiple of ['a*(b-c)', '(b-c)/a', '(b-c)*a', '-(b-c)'])
+      expect(Math.abs(parseExpression(multiple).settle(nearly))).toBe(0);
+    // No sum, a sum under another function, or no value: nothing settles.
     expect(parseExpression('a/b').settle({ a: 1, b: 0 })).toBe(Infinity);
-    expect(parseExpression('a*(b-c)').settle({ a: 1, b: 0.3, c: 0.1 + 0.2 })).not.toBe(0);
+    expect(parseExpression('a+sqrt((b-c)^2)').settle(nearly)).toBe(1);
+    expect(parseExpression('sin(b-c)').settle(nearly)).not.toBe(0);
   });
 });

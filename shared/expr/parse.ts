@@ -111,7 +111,7 @@ export interface ParsedExpression {
   readonly symbols: readonly string[];
   /** Value at these operands; not a finite number where the formula has none. */
   evaluate(operands: Readonly<Record<string, number>>): number;
-  /** As `evaluate`, but a sum whose terms cancel, all but their last bits, is zero. */
+  /** As `evaluate`, but a sum whose terms cancel, all but their last bits, and a multiple of it, is zero. */
   settle(operands: Readonly<Record<string, number>>): number;
 }
 
@@ -127,7 +127,9 @@ export function parseExpression(text: string): ParsedExpression {
   const node = math.parse(text);
   const tree = Object.freeze(fromNode(node, text, literals(text)));
   const code = node.compile();
-  const terms = termsOf(node).map((term) => term.compile());
+  const sum = sumIn(node);
+  const whole = sum?.compile();
+  const terms = sum ? termsOf(sum).map((term) => term.compile()) : [];
   const evaluate: ParsedExpression['evaluate'] = (operands) =>
     Number(code.evaluate({ ...operands, pi: Math.PI }));
   const parsed: ParsedExpression = Object.freeze({
@@ -137,15 +139,27 @@ export function parseExpression(text: string): ParsedExpression {
     evaluate,
     settle: (operands: Readonly<Record<string, number>>) => {
       const value = evaluate(operands);
-      if (terms.length < 2 || !Number.isFinite(value)) return value;
-      const sizes = terms.map((term) =>
-        Math.abs(Number(term.evaluate({ ...operands, pi: Math.PI }))),
-      );
-      return Math.abs(value) <= LAST_BITS * Math.max(...sizes) ? 0 : value;
+      if (!whole || !Number.isFinite(value)) return value;
+      const scope = { ...operands, pi: Math.PI };
+      const sizes = terms.map((term) => Math.abs(Number(term.evaluate({ ...scope }))));
+      const left = Math.abs(Number(whole.evaluate({ ...scope })));
+      return left <= LAST_BITS * Math.max(...sizes) ? 0 : value;
     },
   });
   cache.set(text, parsed);
   return parsed;
+}
+
+/** The sum that an expression is, or that it is a multiple of; null where it is neither. */
+function sumIn(node: MathNode): MathNode | null {
+  if (node.type === 'ParenthesisNode') return sumIn((node as unknown as ParenthesisLike).content);
+  if (node.type !== 'OperatorNode') return null;
+  const { fn, args } = node as unknown as OperatorLike;
+  const [left, right] = args;
+  if (fn === 'add' || fn === 'subtract') return node;
+  if (!left) return null;
+  if (fn === 'divide' || fn === 'unaryMinus') return sumIn(left);
+  return fn === 'multiply' && right ? (sumIn(left) ?? sumIn(right)) : null;
 }
 
 /** The terms of a sum, without their signs; an expression that is no sum is its one term. */

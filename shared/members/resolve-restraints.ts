@@ -10,6 +10,9 @@ const SAME_PLACE = 1e-9;
 export const samePlace = (a: number, b: number, length: number): boolean =>
   Math.abs(a - b) <= SAME_PLACE * length;
 
+/** Restraints stand at least this share of the length apart: nothing is built closer. */
+const CLOSEST = 1e-5;
+
 /** Restraints in the order of their places; null where the member gives none at all. */
 export function resolveRestraints(
   m: MemberInput,
@@ -18,14 +21,11 @@ export function resolveRestraints(
   quantity: ReadQuantity,
 ): readonly ResolvedRestraint[] | null {
   if (m.restraints === undefined) return null;
+  const closest = CLOSEST * length.value;
   const read = m.restraints.flatMap((given, i) => {
     const at = quantity(`restraints[${i}].at`, given.at, 'length');
     if (!at) return [];
-    if (
-      !(at.value > 0) ||
-      at.value >= length.value ||
-      samePlace(at.value, length.value, length.value)
-    ) {
+    if (!(at.value > closest) || at.value > length.value - closest) {
       problem(
         `restraints[${i}].at`,
         `is ${at.text} from end A; it must lie between the ends, which are held`,
@@ -45,7 +45,7 @@ export function resolveRestraints(
   read.sort((a, b) => a.at.value - b.at.value);
   return read.map(({ index, ...restraint }, i) => {
     const before = read[i - 1];
-    if (before && samePlace(before.at.value, restraint.at.value, length.value))
+    if (before && restraint.at.value - before.at.value < closest)
       problem(
         `restraints[${index}].at`,
         `is ${restraint.at.text}, where another restraint stands: say all that is held there in one`,

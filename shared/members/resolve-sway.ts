@@ -48,7 +48,7 @@ function readDirection(
   if (PeStory) return { MA, MB, Pstory, PeStory, stiffness: null };
   const H = positive('H', 'force');
   const height = positive('height', 'length');
-  const drift = positive('drift', 'length');
+  const drift = positive('drift', 'deflection');
   for (const field of ['H', 'height', 'drift'] as const)
     if (given[field] === undefined)
       problem(

@@ -5,6 +5,7 @@ import type { GivenValue } from '../calc/quantity.ts';
 import type { CalculationRecord, MemberRecord } from '../calc/record.ts';
 import { createRecorder, NotComputable, type Recorder } from '../calc/recorder.ts';
 import { secondOrderRatio } from '../standards/aisc360-22/c2.ts';
+import { tensionSlenderness } from '../standards/aisc360-22/d2.ts';
 import { methodConstant } from '../standards/aisc360-22/parameters.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import { UNIT_SETS } from '../units/unit-set.ts';
@@ -186,6 +187,7 @@ function strengthsOf(
       : null;
   const net = pulled ? netSectionLines(r, member) : null;
   const tension = pulled ? tensionStrength(r, design, steel, section, net) : null;
+  if (tension) tensionSlenderness(r, q.L, [section.rx, section.ry]);
   const Lb = q.Lb ?? (member.restraints ? q.L : null);
   const plain = bent('x') && Lb && phib ? majorStrengths(r, steel, section, Lb, phib) : null;
   const major = plain && member.restraints === null ? withStatedLength(r, plain, Lb) : plain;

@@ -71,7 +71,9 @@ const unitsOf = (dimension: DimensionName): string =>
  * dimension is none. Any unit of the dimension is accepted. The reason of a refusal is a sentence
  * that can stand beside the field.
  */
-export function parseQuantity(input: string, dimension: DimensionName): Parsed {
+export function parseQuantity(input: string, wanted: DimensionName): Parsed {
+  // A deflection is typed as a length.
+  const dimension = wanted === 'deflection' ? 'length' : wanted;
   const text = input.trim().replace(/\u2212/g, '-');
   if (text === '') return refuse('is empty');
   const match = NUMBER.exec(text);
