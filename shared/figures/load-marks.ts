@@ -14,6 +14,8 @@ const LANE = 13;
 const SHAFT = 14;
 /** Rows of labels up to which forces carry the fullest text, and the next one. */
 const MOST_LANES = [3, 6] as const;
+/** Of one digit of a force's number. */
+const NUMBER_WIDTH = 4.75;
 /** Labels keep clear of those of the member's ends, which stand nearer to its axis. */
 const NEAREST_LABEL = 22;
 const CLEAR_ABOVE = 20;
@@ -94,7 +96,7 @@ function oneSide(pieces: readonly (PointPiece | BandPiece)[], side: Side, frame:
   const lanes = lanesOf(points, text, frame);
   const first = Math.max(over - (tiers.length > 0 ? 4 : 0) + SHAFT, NEAREST_LABEL);
   const forces = points.flatMap((point, i) =>
-    forceShapes(point, point.texts[text], first + (lanes[i] ?? 0) * LANE, side, frame),
+    forceShapes(point, point.texts[text], text === 2, first + (lanes[i] ?? 0) * LANE, side, frame),
   );
   const room = points.length > 0 ? first + (Math.max(...lanes) + 1) * LANE + 2 : over + 2;
   return { shapes: [...bands, ...forces, ...texts], room, numbered: variant === undefined };
@@ -105,9 +107,14 @@ const out = (side: Side, distance: number): number => (side === 'above' ? -dista
 
 const roomFor = (x: number): number => Math.min(WIDTH - x, 150);
 
-/** A force's label begins over its own shaft, so that no shaft to the left crosses it. */
-const forceLabel = (text: string, x: number, y: number): Label =>
-  label(text, [x - 3, y], { within: roomFor(x - 3) }) as Label;
+/**
+ * A force's label begins over its own shaft, so that no shaft to the left crosses it; a mere number
+ * stands small in its middle, so that neighbours fit beside it.
+ */
+const forceLabel = (text: string, x: number, y: number, isNumber: boolean): Label =>
+  (isNumber
+    ? label(text, [x, y], { anchor: 'middle', within: text.length * NUMBER_WIDTH })
+    : label(text, [x - 3, y], { within: roomFor(x - 3) })) as Label;
 
 /** The row of every force's label: over those of the forces to its right that it would cover. */
 function lanesOf(points: readonly PointPiece[], text: 0 | 1 | 2, { along }: Frame): number[] {
@@ -116,7 +123,7 @@ function lanesOf(points: readonly PointPiece[], text: 0 | 1 | 2, { along }: Fram
   const placed: { readonly left: number; readonly right: number; readonly lane: number }[] = [];
   for (const i of order) {
     const point = points[i] as PointPiece;
-    const { left, right } = boxOf(forceLabel(point.texts[text], along(point.z), 0));
+    const { left, right } = boxOf(forceLabel(point.texts[text], along(point.z), 0, text === 2));
     const under = placed.filter((p) => left < p.right && p.left < right);
     const lane = under.length === 0 ? 0 : 1 + Math.max(...under.map((p) => p.lane));
     lanes[i] = lane;
@@ -130,6 +137,7 @@ const z = (points: readonly PointPiece[], i: number): number => points[i]?.z ?? 
 function forceShapes(
   { z, height, inward }: PointPiece,
   text: string,
+  isNumber: boolean,
   tail: number,
   side: Side,
   { along, half }: Frame,
@@ -140,7 +148,7 @@ function forceShapes(
   const [from, tip] = inward ? [far, near] : [near, far];
   return [
     ...arrow(from, tip, PENS.force, 7),
-    forceLabel(text, x, out(side, tail) + (side === 'above' ? -3 : 11)),
+    forceLabel(text, x, out(side, tail) + (side === 'above' ? -3 : 11), isNumber),
   ];
 }
 

@@ -213,14 +213,16 @@ describe('member sheet', () => {
     ]);
   });
 
-  it('draws the member, both moment diagrams, the interaction and the section', () => {
+  it('draws the member, moments and shear, the interaction and the section', () => {
     const figures = of(sheet, 'figure').map((f) => f.scene.description);
-    expect(figures).toHaveLength(4);
+    // Equal minor-axis moments have no shear.
+    expect(figures).toHaveLength(5);
     expect(figures[0]).toContain('axial compression P 310 kip');
     expect(figures[1]).toContain('Largest second-order moment 134.44 kip ft at 9.269 ft from A');
-    expect(figures[2]).toContain('minor axis, single curvature');
-    expect(figures[3]).toContain('3 combinations');
-    expect(figures[3]).toContain('d 12.4 in');
+    expect(figures[2]).toContain('First-order shear in bending about the major axis');
+    expect(figures[3]).toContain('minor axis, single curvature');
+    expect(figures[4]).toContain('3 combinations');
+    expect(figures[4]).toContain('d 12.4 in');
   });
 
   it('labels the section in the unit of the sheet', () => {
