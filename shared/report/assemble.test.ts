@@ -52,7 +52,7 @@ const INPUT = {
     }),
     held('C-08', 'W12X79', { combinations: [{ name: '0.9D + W', P: '-20 kip', MxA: '9 kip ft' }] }),
     held('C-09', 'W8X24', { combinations: [{ name: '1.4D', P: '900 kip', MxA: '9 kip ft' }] }),
-    held('C-10', 'HSS8X8X1/2', { combinations: [{ name: '1.4D', P: '90 kip' }] }),
+    held('C-10', 'WT8X50', { combinations: [{ name: '1.4D', P: '90 kip' }] }),
     held('C-11', 'W12X79', {
       length: '6.7 m',
       endMomentSign: 'joint',
@@ -142,7 +142,8 @@ describe('report', () => {
       const told = words(table as Block);
       for (const row of member.completeness) expect(told).toContain(row.title);
     }
-    expect(words(of(tree.blocks, 'table').at(-1) as Block)).toContain('temporary works');
+    const outside = of(tree.blocks, 'table').map((table) => words(table));
+    expect(outside.filter((told) => told.includes('temporary works'))).toHaveLength(1);
   });
 
   it('keeps combinations with different reasons apart', () => {

@@ -17,7 +17,7 @@ export const CAUTIONS: readonly string[] = [
 /** The same in short, for the title sheet. */
 export const CAUTIONS_OF_COVER: readonly string[] = [
   'It does not replace the locally adopted building code and its amendments. A licensed engineer takes responsibility for it.',
-  'Not covered: connections, base plates, strength and stiffness of bracing, shear, torsion, deflection, concentrated forces, holes, fire, fatigue, seismic detailing, erection stability, temporary works.',
+  'Not covered: connections, base plates, strength and stiffness of bracing, torsion, deflection, concentrated forces, holes, fire, fatigue, seismic detailing, erection stability, temporary works.',
 ];
 
 /** The same in one line, for the foot of every page. */
@@ -32,11 +32,10 @@ interface Outside {
 
 /** Outside every sheet. The clauses are of ANSI/AISC 360-22 where no other standard is named. */
 export const OUTSIDE_EVERY_SHEET: readonly Outside[] = [
-  { what: 'Shear', where: 'Chapter G' },
   { what: 'Torsion, loads off the shear centre', where: 'H3' },
-  { what: 'Deflection and drift', where: 'Chapter L' },
+  { what: 'Limits of deflection and drift', where: 'Chapter L' },
   { what: 'Concentrated forces on webs and flanges', where: 'J10' },
-  { what: 'Holes and reduced sections', where: 'D3, F13.1' },
+  { what: 'Holes and reduced sections in bending', where: 'F13.1' },
   { what: 'Strength and stiffness of the bracing taken as holding', where: 'App. 6' },
   { what: 'Connections, eccentric ones among them, and base plates', where: 'Chapter J' },
   { what: 'Fire', where: 'App. 4' },
