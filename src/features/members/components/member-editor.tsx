@@ -7,6 +7,7 @@ import type { MemberRecord } from '#shared/calc/record.ts';
 import type { BasisDraft } from '#shared/contracts/calculations.ts';
 import type { LengthName, MemberDraft } from '#shared/contracts/members.ts';
 import { derivedLength } from '../derived-length.ts';
+import { type FinderCriteria, firstCriteria } from '../finder-criteria.ts';
 import { firstCombination } from '../first-draft.ts';
 import { memberRules } from '../member-rules.ts';
 import { useLivePreview } from '../use-preview.ts';
@@ -14,6 +15,7 @@ import { useSheet } from '../use-sheet.ts';
 import { focusLine, lineElement, useSheetKeys } from '../use-sheet-keys.ts';
 import { useSheetPlace } from '../use-sheet-place.ts';
 import { BlankSheet } from './blank-sheet.tsx';
+import { FinderPaper } from './finder-paper.tsx';
 import { ForcesPaper } from './forces-paper.tsx';
 import { InputsMargin } from './inputs-margin.tsx';
 import { MemberFormContext } from './member-form-context.ts';
@@ -40,6 +42,7 @@ export function MemberEditor(props: {
   const { memberId, draft, basis, editable, position } = props;
   const { value, edit } = draft;
   const [view, setView] = useState<CentreView>('sheet');
+  const [criteria, setCriteria] = useState<FinderCriteria | null>(null);
   const announce = useAnnounce();
   const place = useSheetPlace();
   const preview = useLivePreview(basis, memberId, value);
@@ -118,7 +121,7 @@ export function MemberEditor(props: {
   return (
     <MemberFormContext value={form}>
       <div
-        className={view === 'forces' ? 'member-layout is-forces' : 'member-layout'}
+        className={view === 'sheet' ? 'member-layout' : 'member-layout is-forces'}
         data-print-plain
       >
         <InputsMargin
@@ -152,6 +155,16 @@ export function MemberEditor(props: {
                 place.showCombination(id);
                 setView('sheet');
               }}
+            />
+          ) : view === 'finder' ? (
+            <FinderPaper
+              memberId={memberId}
+              basis={basis}
+              record={recordOfMember}
+              problems={problems}
+              criteria={criteria ?? firstCriteria(value)}
+              onCriteria={setCriteria}
+              onShowSheet={() => setView('sheet')}
             />
           ) : sheet.blocks.length === 0 ? (
             <BlankSheet mark={value.mark} titleFields={props.titleFields} />

@@ -5,11 +5,12 @@ import { classNames } from '#client/ui/class-names.ts';
 import { Hint } from '#client/ui/hint.tsx';
 import type { MemberDraft } from '#shared/contracts/members.ts';
 
-export type CentreView = 'sheet' | 'forces';
+export type CentreView = 'sheet' | 'forces' | 'finder';
 
 const views: readonly { readonly value: CentreView; readonly text: string }[] = [
   { value: 'sheet', text: 'Sheet' },
   { value: 'forces', text: 'Forces' },
+  { value: 'finder', text: 'Find a section' },
 ];
 
 /** Over the sheet: which paper lies there, the members beside this one, undo and redo. */
