@@ -27,6 +27,7 @@ import { f6Formulas } from './f6.ts';
 import { f7Formulas } from './f7-formulas.ts';
 import { f8Formulas } from './f8.ts';
 import { f13Formulas } from './f13.ts';
+import { g1Formulas } from './g1.ts';
 import { g2Formulas } from './g2.ts';
 import { g2BucklingFormulas } from './g2-buckling.ts';
 import { g4Formulas } from './g4.ts';
@@ -77,6 +78,7 @@ export const aisc360 = defineBook(
     storyStiffnessFormulas,
     d2Formulas,
     d3Formulas,
+    g1Formulas,
     g2Formulas,
     g2BucklingFormulas,
     g4Formulas,
