@@ -41,10 +41,10 @@ export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] 
     if (!node) throw new Error(`${from.address} refers to ${ref}, which is not there`);
     return node;
   };
-  for (const node of nodes) showOwnForms(node, set);
+  for (const node of nodes) showOwnForms(node, (ref) => nodeAt(ref, node), set);
   for (const node of nodes)
     for (const { ref, form } of usesOf(node.line, (r) => nodeAt(r, node).line, set))
-      nodeAt(ref, node).shown[form] ??= firstDigits(nodeAt(ref, node).line);
+      nodeAt(ref, node).shown[form] ??= firstDigits(nodeAt(ref, node), (r) => nodeAt(r, node));
   // Digits that one line gives an operand may unsettle another line that had closed on its shorter
   // form: passes repeat until none adds a digit. Digits only grow, so they end.
   for (let before = -1; before !== digitsShown(nodes); ) {
@@ -61,12 +61,16 @@ const digitsShown = (nodes: readonly Node[]): number =>
     0,
   );
 
-const firstDigits = (line: Line): Digits =>
-  line.kind === 'formula' && line.print.working !== null && 'dec' in line.print.working
+/** A utilisation, and the one of some that governs, prints decimals. */
+const firstDigits = ({ line }: Node, at: (ref: string) => Node): Digits => {
+  if (line.kind === 'governing') return firstDigits(at(line.governs), at);
+  return line.kind === 'formula' && line.print.working !== null && 'dec' in line.print.working
     ? RATIO
     : START;
+};
 
-function showOwnForms({ line, shown }: Node, set: UnitSet): void {
+function showOwnForms(node: Node, at: (ref: string) => Node, set: UnitSet): void {
+  const { line, shown } = node;
   if (line.kind === 'check') shown.working = RATIO;
   if (line.kind === 'comparison') shown.working = PERCENT;
   if (!isValued(line)) return;
@@ -80,8 +84,9 @@ function showOwnForms({ line, shown }: Node, set: UnitSet): void {
   }
   const asked: Form =
     line.kind === 'formula' ? line.prints : line.kind === 'root' ? 'working' : 'display';
-  shown[formOf(line, asked, set)] = firstDigits(line);
-  if (set.display[line.dimension]) shown.display ??= firstDigits(line);
+  const digits = firstDigits(node, at);
+  shown[formOf(line, asked, set)] = digits;
+  if (set.display[line.dimension]) shown.display ??= digits;
 }
 
 function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
