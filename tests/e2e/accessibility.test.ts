@@ -18,7 +18,7 @@ async function expectAccessible(page: Page, what: string, part?: string) {
   expect(found).toEqual([]);
 }
 
-const patience = 120_000;
+const patience = 600_000;
 
 describe('each screen is accessible (axe, WCAG 2.2 AA)', () => {
   it('sign-in', async () => {
