@@ -1,3 +1,7 @@
+import c2At150Kip from './aisc360-22/c2-benchmark-1-150kip.json' with { type: 'json' };
+import c2At300Kip from './aisc360-22/c2-benchmark-1-300kip.json' with { type: 'json' };
+import c2At450Kip from './aisc360-22/c2-benchmark-1-450kip.json' with { type: 'json' };
+import d1 from './aisc360-22/d-1.json' with { type: 'json' };
 import e1a from './aisc360-22/e-1a.json' with { type: 'json' };
 import e1bAt19Feet from './aisc360-22/e-1b-19ft.json' with { type: 'json' };
 import e1bTrue from './aisc360-22/e-1b-true.json' with { type: 'json' };
@@ -5,14 +9,35 @@ import e1d from './aisc360-22/e-1d.json' with { type: 'json' };
 import e1eAt5Feet from './aisc360-22/e-1e-5ft.json' with { type: 'json' };
 import e1eAt10Feet from './aisc360-22/e-1e-10ft.json' with { type: 'json' };
 import e1eAt15Feet from './aisc360-22/e-1e-15ft.json' with { type: 'json' };
+import e2 from './aisc360-22/e-2.json' with { type: 'json' };
+import e3 from './aisc360-22/e-3.json' with { type: 'json' };
 import e4a from './aisc360-22/e-4a.json' with { type: 'json' };
+import e4aChart from './aisc360-22/e-4a-chart.json' with { type: 'json' };
+import e4aChartLower from './aisc360-22/e-4a-chart-ab.json' with { type: 'json' };
+import e4bChart from './aisc360-22/e-4b-chart.json' with { type: 'json' };
+import e9 from './aisc360-22/e-9.json' with { type: 'json' };
+import e10 from './aisc360-22/e-10.json' with { type: 'json' };
+import e11 from './aisc360-22/e-11.json' with { type: 'json' };
 import equations from './aisc360-22/equations.json' with { type: 'json' };
 import f11b from './aisc360-22/f-1-1b.json' with { type: 'json' };
 import f12b from './aisc360-22/f-1-2b.json' with { type: 'json' };
+import f21b from './aisc360-22/f-2-1b.json' with { type: 'json' };
+import f22b from './aisc360-22/f-2-2b.json' with { type: 'json' };
 import f3b from './aisc360-22/f-3b.json' with { type: 'json' };
 import f5 from './aisc360-22/f-5.json' with { type: 'json' };
+import f6 from './aisc360-22/f-6.json' with { type: 'json' };
+import f7b from './aisc360-22/f-7b.json' with { type: 'json' };
+import f8b from './aisc360-22/f-8b.json' with { type: 'json' };
+import f9b from './aisc360-22/f-9b.json' with { type: 'json' };
+import g1b from './aisc360-22/g-1b.json' with { type: 'json' };
+import g2b from './aisc360-22/g-2b.json' with { type: 'json' };
+import g4 from './aisc360-22/g-4.json' with { type: 'json' };
+import g6 from './aisc360-22/g-6.json' with { type: 'json' };
+import g7 from './aisc360-22/g-7.json' with { type: 'json' };
+import g8a from './aisc360-22/g-8a.json' with { type: 'json' };
 import h1a from './aisc360-22/h-1a.json' with { type: 'json' };
 import h1b from './aisc360-22/h-1b.json' with { type: 'json' };
+import h2 from './aisc360-22/h-2.json' with { type: 'json' };
 import h4 from './aisc360-22/h-4.json' with { type: 'json' };
 import iiiBraced from './aisc360-22/iii-braced.json' with { type: 'json' };
 import iiiSelmAsd from './aisc360-22/iii-selm-asd.json' with { type: 'json' };
@@ -98,8 +123,30 @@ export interface PublishedLimits {
 
 /** Examples of whole members. */
 export const PUBLISHED_CASES = [
-  ...[e1a, e1bAt19Feet, e1bTrue, e1d, e1eAt5Feet, e1eAt10Feet, e1eAt15Feet, e4a],
-  ...[f11b, f12b, f3b, f5, h1a, h1b, h4, iiiBraced, iiiSelmLrfd, iiiSelmAsd],
+  ...[c2At150Kip, c2At300Kip, c2At450Kip],
+  ...[d1],
+  ...[
+    e1a,
+    e1bAt19Feet,
+    e1bTrue,
+    e1d,
+    e1eAt5Feet,
+    e1eAt10Feet,
+    e1eAt15Feet,
+    e2,
+    e3,
+    e4a,
+    e4aChart,
+    e4aChartLower,
+    e4bChart,
+    e9,
+    e10,
+    e11,
+  ],
+  ...[f11b, f12b, f21b, f22b, f3b, f5, f6, f7b, f8b, f9b],
+  ...[g1b, g2b, g4, g6, g7, g8a],
+  ...[h1a, h1b, h2, h4],
+  ...[iiiBraced, iiiSelmAsd, iiiSelmLrfd],
 ] as readonly PublishedCase[];
 
 /** Single equations: of examples that the program doesn't run as members, and of the theory. */

@@ -28,7 +28,7 @@ it('has every published case of the folder', () => {
   const files = readdirSync(folder).filter((file) => !other.includes(file));
   expect(PUBLISHED_CASES).toHaveLength(files.length);
   expect(new Set(PUBLISHED_CASES).size).toBe(files.length);
-  expect(files.length).toBeGreaterThanOrEqual(18);
+  expect(files.length).toBeGreaterThanOrEqual(43);
 });
 
 for (const data of PUBLISHED_CASES)
