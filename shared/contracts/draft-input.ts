@@ -94,12 +94,10 @@ const combinationInputOf = (row: DraftCombination, restraints: readonly DraftRes
   ...(row.sway ? { sway: swayInputOf(row.sway) } : {}),
 });
 
-const LONGEST_SECTION = 40;
-
-/** Names are compared without spaces; sizes whose name is then still too long are not claimed. */
+/** Names are compared without spaces. */
 function analysedWithOf({ analysedWith = '' }: DraftCombination) {
   const name = analysedWith.replace(/\s+/g, '');
-  return name === '' || name.length > LONGEST_SECTION ? {} : { analysedWith: name };
+  return name === '' ? {} : { analysedWith: name };
 }
 
 const steelInputOf = ({ name, Fy, Fu, source, confirmed }: DraftSteel) => ({

@@ -39,7 +39,7 @@ export const combinationInputSchema = z.strictObject({
   /** Load level of the forces; it must be the calculation's. */
   design: z.enum(['LRFD', 'ASD'], 'must be "LRFD" or "ASD"').optional(),
   /** Section that the analysis behind these forces had; another one leaves them unconfirmed. */
-  analysedWith: textSchema(40).optional(),
+  analysedWith: textSchema(160).optional(),
   P: quantitySchema,
   MxA: quantitySchema.optional(),
   MxB: quantitySchema.optional(),
