@@ -52,7 +52,8 @@ export function checkSegments(
 ): LineOf<'check'>[] {
   const found = segments.map((segment) => checkSegment(m, c, axial, planes, segment));
   if (segments.length > 1) governingSegment(r, segments);
-  if (!axial.axial && !axial.unknown && segments.every((s) => !s.r.lines.some(isCheck)))
+  const sheared = [c.shears.x, c.shears.y].some((shear) => (shear?.value ?? 0) !== 0);
+  if (!axial.axial && !axial.unknown && !sheared && segments.every((s) => !s.r.lines.some(isCheck)))
     if (planes.x.state === 'none' && planes.y.state === 'none')
       r.notice(
         'H1/nothing',

@@ -157,9 +157,11 @@ export function planeMoments(
         `The ends turn against springs about the ${word} axis. Their moments follow from loads between the ends of a member that is not held between them: moments given at the ends, or over held points, cannot be taken beside them.`,
         `End springs, ${word} axis`,
       );
+    const acting = loadsOfBay(r, bay, loads, { ...m, L: q.L, places: q.places });
+    // Loads over the ends bend nothing.
+    if (acting.length === 0) return plane('none');
     const found = sprungMoments(r, axis, {
-      ...{ bay, springs, alpha: m.alpha, Pr: P, EIstar: rigidityOf() },
-      loads: loadsOfBay(r, bay, loads, { ...m, L: q.L, places: q.places }),
+      ...{ bay, springs, alpha: m.alpha, Pr: P, EIstar: rigidityOf(), loads: acting },
     });
     return typeof found === 'string' ? plane(found) : plane('done', [found]);
   }
