@@ -102,7 +102,8 @@ const placeholders = {
   si: { force: 'kN', moment: 'kN m' },
 } as const;
 
-function SenseRow() {
+/** What equal signs of the end moments mean. */
+export function SenseRow() {
   const { draft, edit, editable, problemAt } = useMemberForm();
   const problem = problemAt('endMomentSign');
   return (

@@ -51,7 +51,7 @@ export function FinderPaper(props: {
         draft: { ...withOtherSection(draft, { text: '', ...chosen }), place: '' },
       };
   const finder = useFinder(order);
-  const { search } = finder;
+  const { result: search } = finder;
   const present =
     findShape(sectionTextOf(draft))?.designation ?? normalDesignation(sectionTextOf(draft));
   const isRun = record !== null && problems.length === 0 && record.section === present;
@@ -82,8 +82,8 @@ export function FinderPaper(props: {
       <p className="mb-3 text-zinc-7">
         Those of a kind with which every check is satisfied under{' '}
         {draft.combinations.length === 1
-          ? 'the combination'
-          : `all ${count(draft.combinations.length, 'combination')}`}
+          ? 'its combination'
+          : `each of its ${count(draft.combinations.length, 'combination')}`}
         , by weight. Each was run as a whole, as the sheet is.
       </p>
       <FinderForm

@@ -16,7 +16,7 @@ export function FinderProgress(props: {
   onLeave: () => void;
 }) {
   const { finder, material } = props;
-  const { state, search } = finder;
+  const { state, result: search } = finder;
   const { many } = familyWords[props.family];
   const button = useRef<HTMLButtonElement>(null);
   const hadFocus = useRef(false);
@@ -25,7 +25,7 @@ export function FinderProgress(props: {
   useEffect(() => {
     if (state === 'done' && hadFocus.current) onLeave();
   }, [state, onLeave]);
-  const busy = state === 'waiting' || state === 'searching';
+  const busy = state === 'waiting' || state === 'working';
   const share = search ? (100 * search.tried) / search.of : 0;
   return (
     <div className="mt-4 mb-1">
@@ -59,7 +59,7 @@ export function FinderProgress(props: {
 const triedText = ({ tried, of, found }: SectionSearch, many: string): string =>
   `${tried} of ${of} ${many} tried, ${found.length} satisfy every check`;
 
-function ended({ state, search }: Finder, many: string): string {
+function ended({ state, result: search }: Finder, many: string): string {
   if (!search) return state === 'stopped' ? 'Stopped.' : `No ${many} are within these limits.`;
   if (state === 'stopped') return `Stopped: ${triedText(search, many)}.`;
   const { tried, of, found } = search;
@@ -71,23 +71,18 @@ function ended({ state, search }: Finder, many: string): string {
 /** What keeps sections from counting, and what holds with those that do. */
 function Obstacles({ search, material }: { search: SectionSearch; material: string }) {
   const { nearest, found, unchecked } = search;
-  const notes = [
-    ...(nearest ? [nearestText(nearest)] : []),
-    ...(unchecked > 0 ? [uncheckedText(search)] : []),
-    ...(found.some(({ otherSteel }) => otherSteel)
-      ? [
-          `${material} is not made as such sections. What is found holds for the lowest yield stress of the grade; choose a steel that is, and the search begins again.`,
-        ]
-      : []),
-  ];
-  if (notes.length === 0) return null;
   return (
-    <div className="mt-2.5 grid max-w-[92ch] gap-2">
-      {notes.map((text) => (
-        <Note key={text} tone="asks">
-          {text}
+    <div className="mt-2.5 grid max-w-[92ch] gap-2 empty:hidden">
+      {nearest && <Note tone="asks">{nearestText(nearest)}</Note>}
+      {unchecked > 0 && (
+        <Note tone={found.length === 0 ? 'asks' : 'plain'}>{uncheckedText(search)}</Note>
+      )}
+      {found.some(({ otherSteel }) => otherSteel) && (
+        <Note tone="asks">
+          {material} is not made as such sections. What is found holds for the lowest yield stress
+          of the grade; choose a steel that is, and the search begins again.
         </Note>
-      ))}
+      )}
     </div>
   );
 }
@@ -98,9 +93,9 @@ function nearestText({ designation, summary }: RunSection): string {
   return `The nearest is ${printedDesignation(designation)}: ${verdict}${under ? ` under ${under}` : ''}.`;
 }
 
-/** Sections without a verdict never count as satisfying: how many, and the reason met last. */
+/** Sections that end without a ratio never count as satisfying: how many, and the reason met last. */
 function uncheckedText({ unchecked, tried, obstacle }: SectionSearch): string {
   const which =
-    unchecked === tried ? 'None of those tried was' : `${unchecked} of ${tried} were not`;
-  return `${which} checked to the end; without a verdict a section does not count${obstacle ? `: ${obstacle}` : ''}.`;
+    unchecked === tried ? 'No section tried has' : `${unchecked} of the ${tried} tried do not have`;
+  return `${which} a ratio${obstacle ? `, the last because of: ${obstacle}` : ''}. Without one a section does not count.`;
 }

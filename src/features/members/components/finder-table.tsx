@@ -34,7 +34,7 @@ export function FinderTable(props: {
           caption="Sections that satisfy every check, by weight"
           head={
             <>
-              <HeadCell>Section</HeadCell>
+              <HeadCell className="pl-2">Section</HeadCell>
               <HeadCell className="text-right">lb/ft</HeadCell>
               {present && (
                 <HeadCell className="text-right">

@@ -115,7 +115,7 @@ const endWords: Readonly<Record<(typeof ENDS)[number], string>> = {
   springs: 'in springs',
 };
 
-function EndsRow() {
+export function EndsRow() {
   const { draft, edit, editable, problemAt } = useMemberForm();
   const { ends } = draft;
   const problem = problemAt('ends');

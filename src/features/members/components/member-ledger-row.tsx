@@ -2,23 +2,32 @@ import { Link } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
 import { sectionName } from '#client/document/section-name.ts';
 import { count } from '#client/lib/count.ts';
+import { classNames } from '#client/ui/class-names.ts';
 import { Cell, Row, RowHead } from '#client/ui/ledger.tsx';
 import { RatioBar } from '#client/ui/ratio-bar.tsx';
 import { Tag } from '#client/ui/tag.tsx';
 import { VerdictText } from '#client/ui/verdict.tsx';
 import type { MemberRow } from '#shared/contracts/members.ts';
+import type { Selection } from '../bulk-selection.ts';
+import { SelectBox } from './bulk-select.tsx';
 import { MemberRowActions } from './member-row-actions.tsx';
 
 export function MemberLedgerRow(props: {
   calculationId: string;
   row: MemberRow;
   onMove?: (by: -1 | 1) => void;
+  selection?: Selection;
 }) {
-  const { calculationId, row, onMove } = props;
+  const { calculationId, row, onMove, selection } = props;
   const { summary } = row;
   const { governing } = summary;
   return (
-    <Row>
+    <Row className={classNames(selection?.has(row.id) && 'bg-zinc-1')}>
+      {selection && (
+        <Cell className="select-none">
+          <SelectBox selection={selection} id={row.id} mark={row.mark} />
+        </Cell>
+      )}
       <RowHead className="whitespace-nowrap">
         <Link to={paths.member(calculationId, row.id)} className="link">
           {row.mark || 'without a mark'}

@@ -1,11 +1,14 @@
-import { type ReactNode, useState } from 'react';
+import { type ReactNode, useRef, useState } from 'react';
 import { reasonOf } from '#client/lib/problem.ts';
 import { useAnnounce } from '#client/ui/announcements.tsx';
 import { HeadCell, Ledger } from '#client/ui/ledger.tsx';
 import { PartHead } from '#client/ui/paper.tsx';
 import type { Calculation } from '#shared/contracts/calculations.ts';
 import type { MemberRow } from '#shared/contracts/members.ts';
+import { useSelection } from '../bulk-selection.ts';
 import { useReorderMembers } from '../mutations.ts';
+import { BulkChangePanel } from './bulk-change-panel.tsx';
+import { SelectAllBox, SelectionBar } from './bulk-select.tsx';
 import { MemberLedgerRow } from './member-ledger-row.tsx';
 
 const matches = (row: MemberRow, wanted: string): boolean =>
@@ -28,6 +31,13 @@ export function MemberLedger(props: { calculation: Calculation; actions: ReactNo
   const rows = calculation.memberRows;
   const editable = calculation.can.edit;
   const shown = rows.filter((row) => matches(row, wanted.trim()));
+  const shownIds = shown.map(({ id }) => id);
+  const selection = useSelection(
+    rows.map(({ id }) => id),
+    shownIds,
+  );
+  const [changing, setChanging] = useState(false);
+  const bar = useRef<HTMLDivElement>(null);
   const move = (row: MemberRow, by: -1 | 1) => {
     const from = rows.indexOf(row);
     const to = from + by;
@@ -39,8 +49,22 @@ export function MemberLedger(props: { calculation: Calculation; actions: ReactNo
       onError: (error) => announce(reasonOf(error)),
     });
   };
+  if (changing && selection.chosen.length > 0) {
+    return (
+      <BulkChangePanel
+        calculation={calculation}
+        memberIds={selection.chosen}
+        onLeaveOut={(id) => selection.put([id], false)}
+        onClose={() => {
+          setChanging(false);
+          requestAnimationFrame(() => bar.current?.querySelector('button')?.focus());
+        }}
+      />
+    );
+  }
   return (
-    <>
+    // biome-ignore lint/a11y/noStaticElementInteractions: the keys of the boxes in it
+    <div onKeyDown={selection.onKeyDown}>
       <PartHead
         title="Members"
         actions={
@@ -65,10 +89,20 @@ export function MemberLedger(props: { calculation: Calculation; actions: ReactNo
           </>
         }
       />
+      {editable && (
+        <div ref={bar}>
+          <SelectionBar selection={selection} shown={shownIds} onChange={() => setChanging(true)} />
+        </div>
+      )}
       <Ledger
         caption="Members"
         head={
           <>
+            {editable && (
+              <HeadCell className="w-[1%]">
+                <SelectAllBox selection={selection} shown={shownIds} />
+              </HeadCell>
+            )}
             <HeadCell>Member</HeadCell>
             <HeadCell>Section</HeadCell>
             <HeadCell>Where</HeadCell>
@@ -89,7 +123,7 @@ export function MemberLedger(props: { calculation: Calculation; actions: ReactNo
             key={row.id}
             calculationId={calculation.id}
             row={row}
-            {...(editable ? { onMove: (by: -1 | 1) => move(row, by) } : {})}
+            {...(editable ? { onMove: (by: -1 | 1) => move(row, by), selection } : {})}
           />
         ))}
       </Ledger>
@@ -101,6 +135,6 @@ export function MemberLedger(props: { calculation: Calculation; actions: ReactNo
           </button>
         </p>
       )}
-    </>
+    </div>
   );
 }
