@@ -96,7 +96,7 @@ function lineProblems(
         const sides = conditionSides(condition, sheet);
         if (sides)
           want(
-            standsAsReal(sides[0].real, sides[1].real, sides[0].printed, sides[1].printed),
+            standsAsReal(condition, ...sides),
             `prints ${sides[0].printed} against ${sides[1].printed}`,
           );
       }

@@ -1,7 +1,14 @@
 import { parseExpression } from '../expr/parse.ts';
 import { fromBase } from '../units/unit.ts';
 import type { UnitSet } from '../units/unit-set.ts';
-import { isValued, type Line, type LineOf, type Side, type ValuedLine } from './line.ts';
+import {
+  type Condition,
+  isValued,
+  type Line,
+  type LineOf,
+  type Side,
+  type ValuedLine,
+} from './line.ts';
 import { type Form, formOf, formUnit, type PrintedForm } from './printed.ts';
 
 /*
@@ -91,18 +98,28 @@ export function residualAt(
   });
 }
 
-/** Whether the printed numbers of a comparison stand as the real ones do. */
-export const standsAsReal = (
-  left: number,
-  right: number,
-  printedLeft: number,
-  printedRight: number,
-): boolean => Math.sign(left - right) === Math.sign(printedLeft - printedRight);
-
 export interface SideValue {
   readonly real: number;
   readonly printed: number;
   readonly use: Use | null;
+}
+
+/** Share of a value below which two of them print alike at all the digits there are. */
+const ALIKE = 1e-14;
+
+/**
+ * Whether the printed numbers of a comparison stand as the real ones do: on the same sides; alike
+ * where no digits tell the real ones apart, and the relation holds of them as it does of the real.
+ */
+export function standsAsReal(
+  { relation, holds }: Pick<Condition, 'relation' | 'holds'>,
+  left: SideValue,
+  right: SideValue,
+): boolean {
+  const real = left.real - right.real;
+  if (Math.sign(real) === Math.sign(left.printed - right.printed)) return true;
+  const alike = Math.abs(real) <= ALIKE * Math.abs(left.real) && left.printed === right.printed;
+  return alike && ['<=', '>=', '='].includes(relation) === holds;
 }
 
 /** Both sides of a numeric condition, in one unit; null for a condition on words. */

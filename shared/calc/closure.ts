@@ -109,9 +109,14 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
     const uses = usesOf(line, (ref) => at(ref).line, set);
     const ranked = uses
       .map((use) => ({ use, moves: effect(use.ref) }))
-      .filter(({ use, moves }) => moves > 0 && isRounded(use, sheet, set))
-      .sort((a, b) => b.moves - a.moves);
-    return ranked.some(({ use }) => raise(at(use.ref), use.form));
+      .filter(({ use }) => isRounded(use, sheet, set));
+    // Operands that print as zero give no value at all: each of them prints more.
+    if (ranked.some(({ moves }) => !Number.isFinite(moves)))
+      return ranked.map(({ use }) => raise(at(use.ref), use.form)).includes(true);
+    return ranked
+      .filter(({ moves }) => moves > 0)
+      .sort((a, b) => b.moves - a.moves)
+      .some(({ use }) => raise(at(use.ref), use.form));
   };
 
   switch (line.kind) {
@@ -141,7 +146,7 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
           const sides = conditionSides(condition, sheet);
           if (!sides) break;
           const [l, r] = sides;
-          if (standsAsReal(l.real, r.real, l.printed, r.printed)) break;
+          if (standsAsReal(condition, l, r)) break;
           const worst = [l, r]
             .filter((s) => s.use !== null && isRounded(s.use, sheet, set))
             .sort((a, b) => Math.abs(b.printed - b.real) - Math.abs(a.printed - a.real));
@@ -233,7 +238,11 @@ function closeGoverning(
         (sheet.printed(line.governs, form).number.value - sheet.printed(other, form).number.value) >
       0
     ) {
-      const lifted = [line.governs, other].filter(rounded).map((ref) => raise(at(ref), form));
+      // The one with fewer digits first: 12.967 stands below 12.97, which is the same length.
+      const shown = [line.governs, other].filter(rounded).map((ref) => at(ref));
+      const digitsOf = (n: Node) => count(n.shown[form] ?? START);
+      const fewest = Math.min(...shown.map(digitsOf));
+      const lifted = shown.filter((n) => digitsOf(n) === fewest).map((n) => raise(n, form));
       if (!lifted.some(Boolean)) break;
     }
   }
