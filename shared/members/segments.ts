@@ -108,10 +108,7 @@ function within(
   place: Exclude<Place, 'A' | 'B'> | { readonly z: Quantity },
 ): { readonly bay: BayMoments; readonly z: number } {
   const z = 'z' in place ? place.z.value : place.at.value;
-  const found = x.bays.find(
-    ({ bay }) =>
-      z <= distance(bay.to, m.member) || samePlace(z, distance(bay.to, m.member), m.q.L.value),
-  );
+  const found = x.bays.find(({ bay }) => z <= distance(bay.to, m.member));
   const bay = found ?? (x.bays.at(-1) as BayMoments);
   return { bay, z };
 }
