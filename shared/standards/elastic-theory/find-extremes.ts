@@ -218,7 +218,7 @@ function turnOf({ r, at, L1, solution, s }: Found): { xi: Quantity; V: Quantity 
   const { wi, wj } = load;
   const known = { ...(kL ? { Mi, Vi, kL, L1 } : {}), wi, wj, li };
   const values = Object.fromEntries(Object.entries(known).map(([name, q]) => [name, q.value]));
-  const slope = (xi: number) => turningShear[order].expression.evaluate({ ...values, xi });
+  const slope = (xi: number) => turningShear[order].expression.settle({ ...values, xi });
   if (slope(0) * slope(li.value) >= 0) return null;
   const xi = r.root(
     turningShear[order],
