@@ -11,7 +11,7 @@ export const samePlace = (a: number, b: number, length: number): boolean =>
   Math.abs(a - b) <= SAME_PLACE * length;
 
 /** Restraints stand at least this share of the length apart: nothing is built closer. */
-const CLOSEST = 1e-5;
+const CLOSEST = 1e-4;
 
 /** Restraints in the order of their places; null where the member gives none at all. */
 export function resolveRestraints(
