@@ -60,6 +60,8 @@ export interface Tag {
     | 'H1'
     | 'H2'
     | 'H3'
+    | 'H4'
+    | 'H5'
     | 'P'
     | 'L'
     | 'LI'

@@ -211,6 +211,9 @@ describe('pages', () => {
         reference: 'E3',
         title: 'Head of a section',
         address: 'h',
+        level: 1,
+        folded: false,
+        outcome: null,
       };
       const pages = await pagesOf([
         ...many(before),

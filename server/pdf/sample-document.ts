@@ -115,7 +115,15 @@ const sheet: Block[] = [
     combination: '1.2D + 1.6L',
   },
   { kind: 'figure', scene, caption: 'Member and second-order moment, combination 1.2D + 1.6L.' },
-  { kind: 'lineSection', reference: '', title: 'Given values', address: 'given' },
+  {
+    kind: 'lineSection',
+    reference: '',
+    title: 'Given values',
+    address: 'given',
+    level: 1,
+    folded: false,
+    outcome: null,
+  },
   line({
     address: 'given/L',
     number: '1.1',
@@ -161,6 +169,9 @@ const sheet: Block[] = [
     reference: 'App. 8, theory',
     title: 'Second-order moment, major axis',
     address: 'second',
+    level: 1,
+    folded: false,
+    outcome: null,
   },
   line({
     address: 'c1:theory/EI',
@@ -263,7 +274,15 @@ const sheet: Block[] = [
       },
     ],
   }),
-  { kind: 'lineSection', reference: 'H1', title: 'Flexure and compression', address: 'h1' },
+  {
+    kind: 'lineSection',
+    reference: 'H1',
+    title: 'Flexure and compression',
+    address: 'h1',
+    level: 1,
+    folded: false,
+    outcome: null,
+  },
   line({
     address: 'c1:H1/interaction',
     number: '14.30',

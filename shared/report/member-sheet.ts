@@ -6,13 +6,13 @@ import type {
   Summary,
 } from '../calc/record.ts';
 import { sectionText } from '../figures/section-text.ts';
-import { limitStateTable } from './limit-state-table.ts';
+import { limitStateTables } from './limit-state-table.ts';
 import { openMember } from './open-member.ts';
-import { presentLine } from './present-line.ts';
 import type { Presenter } from './presenter.ts';
 import { shortReference } from './reference-text.ts';
 import { whyNone } from './results-block.ts';
 import { interactionFigure, memberFigures } from './sheet-figures.ts';
+import { governingWay, sectionedLines } from './sheet-sections.ts';
 import type { Block, BlockOf } from './tree.ts';
 import { verdictTerms } from './verdict-terms.ts';
 
@@ -29,13 +29,14 @@ export function memberSheet(
   const { member, presenter } = openMember(record, memberId);
   const combination = chosen(member, combinationId);
   const summary = combination?.summary ?? member.summary;
+  const way = governingWay(presenter, summary.governing?.address ?? null);
   return [
     sheetHead(member),
     verdictBlock(member, summary, combination),
     ...memberFigures(record, member, combination),
-    ...(combination ? [limitStateTable(member, combination)] : []),
-    ...linesOf(presenter, null),
-    ...(combination ? combinationBlocks(presenter, combination) : []),
+    ...(combination ? limitStateTables(member, combination) : []),
+    ...memberBlocks(presenter, way),
+    ...(combination ? combinationBlocks(presenter, combination, way) : []),
     ...interactionFigure(record, member),
   ];
 }
@@ -44,14 +45,15 @@ export function memberSheet(
 export function wholeMemberSheet(record: CalculationRecord, memberId: string): Block[] {
   const { member, presenter } = openMember(record, memberId);
   const governing = chosen(member, null);
+  const way = governingWay(presenter, member.summary.governing?.address ?? null);
   return [
     sheetHead(member),
     verdictBlock(member, member.summary, governing),
     ...memberFigures(record, member, governing),
     ...interactionFigure(record, member),
-    ...(governing ? [limitStateTable(member, governing)] : []),
-    ...linesOf(presenter, null),
-    ...member.combinations.flatMap((c) => combinationBlocks(presenter, c)),
+    ...(governing ? limitStateTables(member, governing) : []),
+    ...memberBlocks(presenter, way),
+    ...member.combinations.flatMap((c) => combinationBlocks(presenter, c, way)),
   ];
 }
 
@@ -100,13 +102,17 @@ function governsWords(
   return line?.kind === 'notice' ? `${named}. ${line.text}` : named;
 }
 
-const linesOf = (presenter: Presenter, combination: string | null): Block[] =>
-  presenter.placed
-    .filter((p) => p.combination === combination)
-    .map((p) => presentLine(presenter, p));
+const memberBlocks = (presenter: Presenter, way: ReadonlySet<string>): Block[] => [
+  { kind: 'heading', level: 3, text: 'The member, for every combination', id: presenter.member.id },
+  ...sectionedLines(presenter, null, way),
+];
 
 /** A combination's heading carries its verdict, so that no sheet is read past it. */
-function combinationBlocks(presenter: Presenter, combination: CombinationRecord): Block[] {
+function combinationBlocks(
+  presenter: Presenter,
+  combination: CombinationRecord,
+  way: ReadonlySet<string>,
+): Block[] {
   const { verdict, ratioText } = combination.summary;
   return [
     {
@@ -115,6 +121,6 @@ function combinationBlocks(presenter: Presenter, combination: CombinationRecord)
       text: `Combination ${combination.name}: ${verdict}${ratioText === null ? '' : ` ${ratioText}`}`,
       id: `${presenter.member.id}/${combination.id}`,
     },
-    ...linesOf(presenter, combination.id),
+    ...sectionedLines(presenter, combination.id, way),
   ];
 }

@@ -23,6 +23,9 @@ export function presentLine(p: Presenter, placed: PlacedLine): LineBlock | Secti
       reference: referenceText(line.clause),
       title: line.title,
       address,
+      level: 1,
+      folded: false,
+      outcome: null,
     };
   }
   const present = PRESENT[line.kind] as (p: Presenter, placed: PlacedLine, line: Line) => Parts;

@@ -130,6 +130,12 @@ export type Block =
       readonly reference: string;
       readonly title: string;
       readonly address: string;
+      /** 2 and 3 are parts of the section before: a bay, a segment, a flange. */
+      readonly level: 1 | 2 | 3;
+      /** Whether a screen shows it folded until a reader opens it. */
+      readonly folded: boolean;
+      /** What it comes to, in one line, for where it is folded. */
+      readonly outcome: { readonly content: readonly Inline[]; readonly over: boolean } | null;
     }
   | LineBlock
   | { readonly kind: 'cautions'; readonly items: readonly string[] }

@@ -1,9 +1,11 @@
-import { type FunctionComponent, memo } from 'react';
+import { type FunctionComponent, memo, useMemo } from 'react';
 import { same } from '#client/lib/same.ts';
 import type { Block, BlockKind, BlockOf } from '#shared/report/tree.ts';
 import { FigureBlock } from './figure-block.tsx';
 import { LineBlock } from './line-block.tsx';
-import { LineSectionBlock, SheetHeadBlock, VerdictBlock } from './sheet-blocks.tsx';
+import { nestSections, type SheetNode } from './section-tree.ts';
+import { SheetHeadBlock, VerdictBlock } from './sheet-blocks.tsx';
+import { SheetSectionView } from './sheet-section.tsx';
 import {
   CautionsBlock,
   CoverBlock,
@@ -14,7 +16,9 @@ import {
   TableBlock,
 } from './text-blocks.tsx';
 
-type Renderers = { [K in BlockKind]: FunctionComponent<{ block: BlockOf<K> }> };
+/** The head of a section is drawn with what it holds. */
+type DrawnKind = Exclude<BlockKind, 'lineSection'>;
+type Renderers = { [K in DrawnKind]: FunctionComponent<{ block: BlockOf<K> }> };
 
 /** One component per kind of block; leaving one out does not compile. */
 const renderers = {
@@ -26,24 +30,33 @@ const renderers = {
   sheetHead: SheetHeadBlock,
   verdict: VerdictBlock,
   figure: FigureBlock,
-  lineSection: LineSectionBlock,
   line: LineBlock,
   cautions: CautionsBlock,
   pageBreak: PageBreakBlock,
-} satisfies Renderers & Record<BlockKind, unknown>;
+} satisfies Renderers & Record<DrawnKind, unknown>;
 
-const OneBlock = memo(function OneBlock({ block }: { block: Block }) {
+const OneBlock = memo(function OneBlock({ block }: { block: BlockOf<DrawnKind> }) {
   const Renderer = renderers[block.kind] as FunctionComponent<{ block: Block }>;
   return <Renderer block={block} />;
 }, same);
 
 /** A document tree on the screen. */
 export function Blocks({ blocks }: { blocks: readonly Block[] }) {
-  return blocks.map((block, index) => <OneBlock key={keyOf(block, index)} block={block} />);
+  const nodes = useMemo(() => nestSections(blocks), [blocks]);
+  return <Nodes nodes={nodes} />;
 }
 
-const keyOf = (block: Block, index: number): string => {
-  if (block.kind === 'line') return `${block.member}/${block.address}`;
-  if (block.kind === 'lineSection') return `section/${block.address}/${index}`;
-  return `${block.kind}/${index}`;
-};
+function Nodes({ nodes }: { nodes: readonly SheetNode[] }) {
+  return nodes.map((node, index) =>
+    node.kind === 'section' ? (
+      <SheetSectionView key={`section/${node.head.address}`} head={node.head}>
+        <Nodes nodes={node.body} />
+      </SheetSectionView>
+    ) : (
+      <OneBlock key={keyOf(node, index)} block={node} />
+    ),
+  );
+}
+
+const keyOf = (block: Block, index: number): string =>
+  block.kind === 'line' ? `${block.member}/${block.address}` : `${block.kind}/${index}`;

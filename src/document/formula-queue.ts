@@ -2,7 +2,8 @@ import { formulaHtml, isSet } from './set-formula.ts';
 
 /*
  * Setting a whole sheet takes longer than a keystroke may. A formula is set at once when it is new,
- * known, or in view; the others wait until the browser is idle or they come into view.
+ * known, or in view; the others wait until the browser is idle or they come into view. In a folded
+ * section a new one waits too.
  */
 
 const inView = new WeakSet<Element>();
@@ -31,7 +32,8 @@ export function watchFormula(element: Element): () => void {
 
 export function showFormula(element: Element, tex: string): void {
   waiting.set(element, tex);
-  if (!element.hasChildNodes() || isSet(tex) || inView.has(element)) flush(element);
+  const isNew = !element.hasChildNodes() && element.closest('[data-folded]') === null;
+  if (isNew || isSet(tex) || inView.has(element)) flush(element);
   else if (idle === null) idle = whenIdle(flushSome);
 }
 
@@ -41,6 +43,11 @@ function flush(element: Element) {
   waiting.delete(element);
   element.innerHTML = formulaHtml(tex);
 }
+
+// Paper shows what is folded on the screen.
+window.addEventListener('beforeprint', () => {
+  for (const element of [...waiting.keys()]) flush(element);
+});
 
 function flushSome(timeLeft: () => number) {
   idle = null;

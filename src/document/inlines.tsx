@@ -3,14 +3,19 @@ import { useDocument } from './document-context.ts';
 import { Formula } from './formula.tsx';
 
 /** Runs of text, maths and values that lead to their lines. */
-export function Inlines({ runs }: { runs: readonly Inline[] }) {
+export function Inlines(props: {
+  runs: readonly Inline[];
+  /** Whether Tab comes to their values, on a sheet too. */
+  inTabOrder?: boolean;
+}) {
+  const { runs, inTabOrder = false } = props;
   return runs.map((run, index) => (
     // biome-ignore lint/suspicious/noArrayIndexKey: runs of one text have no other identity
-    <Run key={index} run={run} />
+    <Run key={index} run={run} inTabOrder={inTabOrder} />
   ));
 }
 
-function Run({ run }: { run: Inline }) {
+function Run({ run, inTabOrder }: { run: Inline; inTabOrder: boolean }) {
   switch (run.kind) {
     case 'text':
       if (run.strong) return <strong>{run.text}</strong>;
@@ -23,26 +28,27 @@ function Run({ run }: { run: Inline }) {
         </>
       );
     case 'value':
-      return <ValueRun text={run.text} address={run.address} member={run.member} />;
+      return <ValueRun run={run} inTabOrder={inTabOrder} />;
   }
 }
 
-function ValueRun(props: { text: string; address: string; member: string | undefined }) {
+function ValueRun(props: { run: Extract<Inline, { kind: 'value' }>; inTabOrder: boolean }) {
+  const { text, address, member } = props.run;
   const { follow, onCurrent } = useDocument();
-  if (!follow) return <span className="figures font-semibold">{props.text}</span>;
+  if (!follow) return <span className="figures font-semibold">{text}</span>;
   return (
     <button
       type="button"
-      // On a sheet the keyboard goes from line to line and from there to the sources.
-      tabIndex={onCurrent ? -1 : 0}
-      data-ref={props.address}
+      // Within lines the keyboard goes from line to line and from there to the sources.
+      tabIndex={onCurrent && !props.inTabOrder ? -1 : 0}
+      data-ref={address}
       className="figures cursor-pointer font-semibold"
       onClick={(event) => {
         event.stopPropagation();
-        follow(props.address, props.member);
+        follow(address, member);
       }}
     >
-      {props.text}
+      {text}
     </button>
   );
 }

@@ -22,15 +22,6 @@ export function SheetHeadBlock({ block }: { block: BlockOf<'sheetHead'> }) {
   );
 }
 
-export function LineSectionBlock({ block }: { block: BlockOf<'lineSection'> }) {
-  return (
-    <div className="sheet-section" id={`section-${block.address}`}>
-      <span className="section-reference">{block.reference}</span>
-      <h2>{block.title}</h2>
-    </div>
-  );
-}
-
 /** Word and ratio, the terms against the limit, and what governs. */
 export function VerdictBlock({ block }: { block: BlockOf<'verdict'> }) {
   const { follow } = useDocument();

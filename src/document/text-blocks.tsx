@@ -3,7 +3,8 @@ import type { BlockOf, TableCell } from '#shared/report/tree.ts';
 import { Inlines } from './inlines.tsx';
 
 export function HeadingBlock({ block }: { block: BlockOf<'heading'> }) {
-  const Tag = block.level === 1 ? 'h2' : 'h3';
+  // The third level begins a part of a sheet, whose own heading is the first.
+  const Tag = block.level === 2 ? 'h3' : 'h2';
   return (
     <Tag
       className={`document-heading level-${block.level}`}
@@ -67,7 +68,7 @@ export function TableBlock({ block }: { block: BlockOf<'table'> }) {
               {row.map((cell, column) => (
                 // biome-ignore lint/suspicious/noArrayIndexKey: columns in their order
                 <td key={column} className={cellClass(cell)}>
-                  <Inlines runs={cell.content} />
+                  <Inlines runs={cell.content} inTabOrder />
                 </td>
               ))}
             </tr>

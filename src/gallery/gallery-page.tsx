@@ -19,6 +19,7 @@ export function Component() {
       follow: setChosen,
       current,
       onCurrent: setCurrent,
+      folds: null,
       titleFields: [
         { label: 'Calculation', value: 'TQ-CAL-012' },
         { label: 'Sheet', value: '3 of 6' },

@@ -27,7 +27,15 @@ const words = (text: string) => [{ kind: 'text', text } as const];
 
 /** One line of every kind and tone, made up. */
 export const sampleLines: readonly Block[] = [
-  { kind: 'lineSection', reference: 'E3', title: 'One line of every kind', address: 'sample' },
+  {
+    kind: 'lineSection',
+    reference: 'E3',
+    title: 'One line of every kind',
+    address: 'sample',
+    level: 1,
+    folded: false,
+    outcome: null,
+  },
   line({
     lineKind: 'given',
     address: 'sample/given',

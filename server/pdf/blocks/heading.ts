@@ -16,17 +16,18 @@ const levels = {
   },
 } as const satisfies Record<1 | 2 | 3, { style: TextStyle; before: number; after: number }>;
 
-/** A heading of the third level begins a part of a sheet: a rule stands over it. */
+/**
+ * A heading of the third level begins a part of a sheet, whose title is the first: a rule stands
+ * over it.
+ */
 export function measureHeading(block: BlockOf<'heading'>, context: BlockContext): Row[] {
   const { width, sect } = context;
   const { style, before, after } = levels[block.level];
-  const tag: Tag = { type: `H${block.level}`, parent: sect };
   const ruled = block.level === 3;
+  const level = ruled ? 2 : block.level;
+  const tag: Tag = { type: `H${level}`, parent: sect };
   const words = setWords(strong(block.text), style, { x: 0, y: ruled ? 8 : 0, width }, context);
-  const items = [
-    { kind: 'bookmark', level: block.level, title: block.text } as const,
-    ...words.items,
-  ];
+  const items = [{ kind: 'bookmark', level, title: block.text } as const, ...words.items];
   const rule = { tag: null, items: [stroke([0, 0], [width, 0], weights.strong, 'ink')] };
   const height = words.height + after + (ruled ? 8 : 0);
   return [row(height, [{ tag, items }, ...(ruled ? [rule] : [])], { before, keep: true })];

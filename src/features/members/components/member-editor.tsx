@@ -12,7 +12,8 @@ import { firstCombination } from '../first-draft.ts';
 import { memberRules } from '../member-rules.ts';
 import { useLivePreview } from '../use-preview.ts';
 import { useSheet } from '../use-sheet.ts';
-import { focusLine, lineElement, useSheetKeys } from '../use-sheet-keys.ts';
+import { useSheetFolds } from '../use-sheet-folds.ts';
+import { focusLine, focusSection, lineElement, useSheetKeys } from '../use-sheet-keys.ts';
 import { useSheetPlace } from '../use-sheet-place.ts';
 import { BlankSheet } from './blank-sheet.tsx';
 import { FinderPaper } from './finder-paper.tsx';
@@ -50,6 +51,7 @@ export function MemberEditor(props: {
   const opening = useOpening(recordOfMember);
   const wanted = place.combination ?? opening ?? value.combinations[0]?.id;
   const sheet = useSheet(preview.record, memberId, position, wanted, place.line);
+  const folds = useSheetFolds(memberId, sheet.blocks);
   const sheetElement = useRef<HTMLElement>(null);
   const traceElement = useRef<HTMLElement>(null);
 
@@ -63,20 +65,24 @@ export function MemberEditor(props: {
     },
     [chooseLine],
   );
-  // A line followed to, or linked to, is scrolled to once its sheet is drawn.
-  // biome-ignore lint/correctness/useExhaustiveDependencies: runs with every new sheet and line
+  // A line followed to, or linked to, is scrolled to once its sheet is drawn and its section open.
   useEffect(() => {
     const address = pending.current;
-    if (address && address === place.line && focusLine(sheetElement.current, address, 'center')) {
-      pending.current = null;
-    }
-  }, [place.line, sheet.blocks, view]);
+    if (view !== 'sheet' || !address || address !== place.line) return;
+    if (focusLine(sheetElement.current, address, 'center')) pending.current = null;
+    else folds.reveal(address);
+  }, [place.line, folds, view]);
 
-  // A line chosen where it stands comes out from under what may cover it.
+  // A line chosen where it stands, or gone back to, comes out from under what may cover it.
+  const shown = useRef<string | null>(null);
   useEffect(() => {
-    if (place.line)
-      lineElement(sheetElement.current, place.line)?.scrollIntoView({ block: 'nearest' });
-  }, [place.line]);
+    const address = place.line;
+    if (address === shown.current) return;
+    shown.current = address;
+    if (!address) return;
+    folds.reveal(address);
+    lineElement(sheetElement.current, address)?.scrollIntoView({ block: 'nearest' });
+  }, [place.line, folds]);
 
   const copyLine = useCallback(
     (address: string) => {
@@ -96,6 +102,7 @@ export function MemberEditor(props: {
     choose: chooseLine,
     close: place.closeLine,
     copyLine,
+    folds,
   });
   useFormKeys(draft);
   const go = (path: string) => {
@@ -183,6 +190,7 @@ export function MemberEditor(props: {
                 chosen={place.line}
                 lit={sheet.lit}
                 titleFields={props.titleFields}
+                folds={folds}
                 onChoose={chooseLine}
                 onFollow={follow}
                 onKeyDown={sheetKeys}
@@ -206,8 +214,8 @@ export function MemberEditor(props: {
                 <SheetContents
                   blocks={sheet.blocks}
                   onGo={(address) => {
-                    setView('sheet');
-                    requestAnimationFrame(() => focusLine(sheetElement.current, address, 'center'));
+                    folds.reveal(address);
+                    requestAnimationFrame(() => focusSection(sheetElement.current, address));
                   }}
                 />
               }

@@ -120,6 +120,8 @@ const keys: readonly (readonly [readonly string[], string])[] = [
   [['s'], 'sources'],
   [['u'], 'used by'],
   [['c'], 'copy'],
+  [['f'], 'fold'],
+  [['⇧', 'F'], 'fold all'],
   [['Esc'], 'close'],
 ];
 
