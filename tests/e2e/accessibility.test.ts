@@ -45,6 +45,11 @@ describe('each screen is accessible (axe, WCAG 2.2 AA)', () => {
       await page.getByRole('link', { name: 'TQ-CAL-012' }).click();
       await page.getByRole('table', { name: 'Members' }).waitFor();
       await expectAccessible(page, 'calculation');
+      await page.getByRole('checkbox', { name: 'Choose C-05' }).check();
+      await page.getByRole('button', { name: 'Change it' }).click();
+      await page.getByLabel('What changes').selectOption('Sources and state of values');
+      await expectAccessible(page, 'several members, changed');
+      await page.getByRole('button', { name: 'Back to the list' }).click();
       await page.getByRole('link', { name: 'Basis', exact: true }).click();
       await page.getByLabel('Building code').waitFor();
       await expectAccessible(page, 'basis');
@@ -114,6 +119,20 @@ describe('each screen is accessible (axe, WCAG 2.2 AA)', () => {
       await page.getByLabel(/Paste the table here/).fill('Name\tP (kip)\nA\t1,0\n');
       await page.getByText('want correcting afterwards').waitFor();
       await expectAccessible(page, 'paste', 'dialog');
+    },
+    patience,
+  );
+
+  it(
+    'the section finder',
+    async () => {
+      const { page } = await stage.openAs(engineer);
+      await openMember(page, 'C-05');
+      await page.getByRole('button', { name: 'Find a section' }).click();
+      await page.getByText(/tried, the lightest first/).waitFor({ timeout: 60_000 });
+      await page.getByRole('button', { name: /^Take/ }).first().click();
+      await page.getByText(/C-05 is .* now/).waitFor();
+      await expectAccessible(page, 'section finder');
     },
     patience,
   );

@@ -72,7 +72,7 @@ describe('the section finder', () => {
     await searched(page);
     const depths = (await table(page).getByRole('row').allInnerTexts())
       .slice(1)
-      .map((text) => Number(text.split('\t')[3]));
+      .map((text) => Number.parseFloat(text.split('\t')[3] ?? ''));
     expect(Math.max(...depths)).toBeLessThanOrEqual(10.5);
     const present = table(page).getByRole('row').filter({ hasText: 'present' });
     expect(await present.textContent()).toContain('W10×49');

@@ -85,6 +85,10 @@ describe('a change of several members', () => {
       expect(isStated(change(kind)), kind).toBe(false);
     }
     expect(isStated(to('steel', { material: '' }))).toBe(false);
+    const source = { kind: 'drawing' as const, number: '', revision: 'C' };
+    expect(isStated(to('Lb', { Lb: { text: '9 ft', source, confirmed: true } }))).toBe(false);
+    const state = { of: new Set(['Lb'] as const), source, confirmed: true };
+    expect(isStated(change('state', { state }))).toBe(false);
   });
 
   it('copies points unconfirmed, and lets moments over other points go', () => {

@@ -4,6 +4,7 @@ import { normalDesignation } from '#shared/sections/table.ts';
 import { withOrder, withoutRestraints } from './edit-restraints.ts';
 import { memberRules } from './member-rules.ts';
 import { withOtherSection } from './other-section.ts';
+import { sourceLack } from './source-words.ts';
 
 /** What can be changed in several members at once, in the order of the list. */
 export const changeKinds = [
@@ -32,7 +33,7 @@ export interface SeveralChange {
   readonly state: StateChange;
 }
 
-/** Whether it is said yet what the change is. */
+/** Whether it is said yet what the change is, its source included. */
 export function isStated({ kind, pattern, pointsOf, state }: SeveralChange): boolean {
   switch (kind) {
     case 'steel':
@@ -42,9 +43,9 @@ export function isStated({ kind, pattern, pointsOf, state }: SeveralChange): boo
     case 'points':
       return pointsOf !== null;
     case 'state':
-      return state.of.size > 0;
+      return state.of.size > 0 && sourceLack(state.source ?? undefined) === null;
     default:
-      return pattern[kind].text.trim() !== '';
+      return pattern[kind].text.trim() !== '' && sourceLack(pattern[kind].source) === null;
   }
 }
 

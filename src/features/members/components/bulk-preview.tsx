@@ -1,3 +1,4 @@
+import { sectionName } from '#client/document/section-name.ts';
 import { count } from '#client/lib/count.ts';
 import { Button } from '#client/ui/button.tsx';
 import { Cell, HeadCell, Ledger, Row, RowHead } from '#client/ui/ledger.tsx';
@@ -42,9 +43,14 @@ export function BulkPreview(props: {
               ) : (
                 changes.map(({ label, before, after }) => (
                   <p key={label}>
-                    {label}: <del className="text-zinc-7">{before || 'not given'}</del>{' '}
+                    {label}:{' '}
+                    <del className="text-zinc-7 no-underline">
+                      {sectionName(before) || 'not given'}
+                    </del>{' '}
                     <span aria-hidden="true">→ </span>
-                    <ins className="no-underline">{after || 'not given'}</ins>
+                    <ins className="font-medium no-underline">
+                      {sectionName(after) || 'not given'}
+                    </ins>
                   </p>
                 ))
               )}

@@ -55,7 +55,7 @@ export function BulkState(props: { state: StateChange; onChange: (state: StateCh
         </label>
       ) : (
         <SourceForm
-          what="these values"
+          what="each of them"
           stated={{ source: state.source, confirmed: state.confirmed }}
           editable
           onChange={({ source, confirmed }) => onChange({ ...state, source, confirmed })}

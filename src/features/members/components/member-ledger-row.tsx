@@ -24,7 +24,7 @@ export function MemberLedgerRow(props: {
   return (
     <Row className={classNames(selection?.has(row.id) && 'bg-zinc-1')}>
       {selection && (
-        <Cell className="select-none">
+        <Cell className="align-middle select-none">
           <SelectBox selection={selection} id={row.id} mark={row.mark} />
         </Cell>
       )}
