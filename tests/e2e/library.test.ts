@@ -44,9 +44,9 @@ describe('looking up a clause', () => {
       expect(await row.locator('[data-computed]').textContent()).toContain('38.887');
       expect(await row.textContent()).toMatch(/−0\.03 %[\s\S]*agrees/);
       expect(await row.textContent()).toContain('E3-2');
-      // E.2 goes on with 1.31 for Fy/Fe and prints 28.9 for 28.951.
-      const rounded = valueRow(page, 'E.2', 'nominal stress');
-      expect(await rounded.textContent()).toContain('the exponent as printed, 1.31');
+      // E.11 goes on with 21.4 ksi for Fn and prints 246 for 246.63.
+      const rounded = valueRow(page, 'E.11', 'the stress as printed, 21.4 ksi');
+      expect(await rounded.textContent()).toContain('246 kip');
       // What follows from the clause stands folded: E.1A, 893 kip.
       await page.getByText(/values that follow from this clause/).click();
       const strength = valueRow(page, 'E.1A', 'available compressive strength').first();
