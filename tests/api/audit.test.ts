@@ -30,6 +30,7 @@ const written: Partial<Record<RouteName, [action: string, snapshots: string]>> =
   updateCalculation: ['calculation.updated', 'before after'],
   createMember: ['member.created', 'after'],
   updateMember: ['member.updated', 'before after'],
+  changeMembers: ['member.updated', 'before after'],
   duplicateMember: ['member.duplicated', 'after'],
   deleteMember: ['member.deleted', 'before'],
   restoreMember: ['member.restored', 'after'],
