@@ -168,8 +168,8 @@ describe('calc', { timeout: 120_000 }, () => {
     const { code, stdout, stderr } = await runCommand('calc', ['-'], input);
     expect({ code, stdout }).toEqual({ code: 2, stdout: '' });
     expect(stderr.trim().split('\n')).toEqual([
-      expect.stringMatching(/^members\[0\]\.combinations\[0\]\.P: needs a unit/),
       expect.stringMatching(/^members\[0\]\.length: /),
+      expect.stringMatching(/^members\[0\]\.combinations\[0\]\.P: needs a unit/),
     ]);
   });
 
