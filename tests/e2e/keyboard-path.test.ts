@@ -55,8 +55,8 @@ describe('the whole path by keyboard alone', () => {
     await page.keyboard.press('Escape');
 
     await tabTo(page, /Line 2\.1,/);
-    for (let step = 0; step < 45; step += 1) await page.keyboard.press('ArrowDown');
-    expect(await focused(page)).toMatch(/Line 2\.46,/);
+    // Down over heads of sections; what a folded one holds is passed over.
+    await tabTo(page, /Line 2\.46,/, 'ArrowDown');
     await page.keyboard.press('Enter');
     await page.getByRole('heading', { name: 'Trace of line 2.46' }).waitFor();
     await page.keyboard.press('s');
