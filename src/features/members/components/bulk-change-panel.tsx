@@ -216,9 +216,14 @@ function useApply(calculationId: string, { kind }: SeveralChange, onDone: () => 
   const conflict = isProblem(error, 'conflict') ? (error.details?.problems ?? []) : null;
   return {
     ...{ apply, isPending: mutation.isPending, conflict },
-    failure: error && !conflict ? reasonOf(error) : null,
+    failure: error && !conflict ? failureText(error) : null,
   };
 }
+
+const failureText = (error: Error): string =>
+  isProblem(error, 'too-large')
+    ? 'These are more values than one change can hold: leave some members out.'
+    : reasonOf(error);
 
 const conflictText = (error: Error): string =>
   isProblem(error, 'conflict')
