@@ -3,6 +3,7 @@ import { clauseText } from '../report/reference-text.ts';
 import type { Book } from '../standards/book.ts';
 import { bookNamed } from '../standards/library.ts';
 import { CLAUSE_TITLES } from './clause-titles.ts';
+import { manifestOf } from './manifests.ts';
 
 /** A clause of a book with the formulas that the book has of it. */
 export interface LibraryClause {
@@ -28,10 +29,15 @@ export function clausesOf(book: Book): LibraryClause[] {
     .map(([clause, formulas]) => ({
       ...{ book, clause, formulas },
       reference: clauseText({ book: book.id, clause, equation: null }),
-      title: CLAUSE_TITLES[book.id]?.[clause] ?? formulas[0]?.title ?? clause,
+      title: titleOf(book, clause) ?? formulas[0]?.title ?? clause,
     }))
     .sort((a, b) => compareClauses(a.clause, b.clause));
 }
+
+/** As the book's manifest calls it; a book without one has a list of titles. */
+export const titleOf = (book: Book, clause: string): string | undefined =>
+  manifestOf(book.id).find((entry) => entry.clause === clause)?.title ??
+  CLAUSE_TITLES[book.id]?.[clause];
 
 /** The clause of that name, or undefined where the book has no formula of it. */
 export function clauseNamed(bookId: string, clause: string): LibraryClause | undefined {

@@ -62,7 +62,9 @@ export function largestBetween(
       sizeOf('from', 'Size of the moment at the start of the part', moment(r, `${key}/from`, from)),
       sizeOf('to', 'Size of the moment at the end of the part', moment(r, `${key}/to`, to)),
       ...nodes.flatMap(({ place, M }, i) =>
-        between(place) ? [sizeOf(`node${i + 1}`, 'Size of the moment between them', M)] : [],
+        between(place)
+          ? [sizeOf(`node${i + 1}`, 'Size of the moment at a point within the part', M)]
+          : [],
       ),
       ...extremes.flatMap(({ place, M }, i) =>
         isBetween(r, `${key}/extreme${i + 1}`, place, from, to)
