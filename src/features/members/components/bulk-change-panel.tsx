@@ -186,23 +186,24 @@ function refusals(
 function useApply(calculationId: string, { kind }: SeveralChange, onDone: () => void) {
   const mutation = useChangeMembers(calculationId);
   const announce = useAnnounce();
-  const send = mutation.mutate;
+  // A promise tells its end even where this panel is gone by then.
+  const send = mutation.mutateAsync;
   const takeBack = (moved: readonly PlannedChange[], versions: ReadonlyMap<string, number>) => {
     const changes = moved.map(({ member: { id, draft }, after }) => ({
       ...{ memberId: id, version: versions.get(id) ?? 0 },
       patch: patchBetween(after, draft),
     }));
-    send(changes, {
-      onSuccess: () => announce(`${count(moved.length, 'member')} as before.`),
-      onError: (error) => announce(`Not taken back. ${conflictText(error)}`),
-    });
+    send(changes).then(
+      () => announce(`${count(moved.length, 'member')} as before.`),
+      (error: Error) => announce(`Not taken back. ${conflictText(error)}`),
+    );
   };
   const apply = (moved: readonly PlannedChange[]) => {
     const changes = moved.map(({ member: { id, version }, patch }) => ({
       ...{ memberId: id, version, patch },
     }));
-    send(changes, {
-      onSuccess: ({ changed }) => {
+    send(changes).then(
+      ({ changed }) => {
         const versions = new Map(changed.map(({ memberId, version }) => [memberId, version]));
         announce({
           text: `${changeWords[kind]} changed in ${count(moved.length, 'member')}.`,
@@ -210,7 +211,9 @@ function useApply(calculationId: string, { kind }: SeveralChange, onDone: () => 
         });
         onDone();
       },
-    });
+      // What refused it is shown in the panel.
+      () => undefined,
+    );
   };
   const { error } = mutation;
   const conflict = isProblem(error, 'conflict') ? (error.details?.problems ?? []) : null;
