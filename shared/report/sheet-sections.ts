@@ -3,7 +3,7 @@ import { refsOf } from '../calc/graph.ts';
 import { isValued, type Line, type LineOf, VERDICTS } from '../calc/line.ts';
 import { readForms } from '../figures/read-line.ts';
 import { presentLine } from './present-line.ts';
-import { capital } from './present-sentence.ts';
+import { capital, small } from './present-sentence.ts';
 import { type Presenter, printedBy, strong, text } from './presenter.ts';
 import { symbolText } from './symbol-text.ts';
 import type { Block, BlockOf, Inline } from './tree.ts';
@@ -56,6 +56,7 @@ export function sectionedLines(
       .filter(({ line }) => line.kind !== 'section');
     return {
       ...block,
+      title: titleOf(block.title, section),
       level: Math.min(section.level, 3) as SectionBlock['level'],
       folded: startsFolded(section, held, way),
       outcome: outcomeOf(p, splitKey(placed.line.key).rest, held, inWay),
@@ -81,6 +82,14 @@ function sectionsOf(lines: readonly PlacedLine[]): Section[] {
     ...section,
     to: found.slice(index + 1).find((next) => next.level <= section.level)?.from ?? lines.length,
   }));
+}
+
+/** A bay's or segment's own section says which, also where it does not stand under its head. */
+function titleOf(title: string, { part, level }: Section): string {
+  const named = /^(s|bay)(\d+)$/.exec(part);
+  if (level > 1 || !named) return title;
+  const name = `${named[1] === 's' ? 'Segment' : 'Bay'} ${named[2]}`;
+  return title.startsWith(name) ? title : `${name}: ${small(title)}`;
 }
 
 const KNOWN = new Set<Line['kind']>(['lookup', 'given', 'statement']);
