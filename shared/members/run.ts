@@ -68,11 +68,14 @@ export function runMember(input: ResolvedInput, member: ResolvedMember): MemberR
     ),
   ];
   const closed = closeLines(placed, UNIT_SETS[input.units]);
-  const linesOf = (combination: string | null): Line[] =>
-    closed.filter((_, i) => placed[i]?.combination === combination);
-  const lines = linesOf(null);
+  const byCombination = new Map<string | null, Line[]>([[null, []]]);
+  for (const { id } of member.combinations) byCombination.set(id, []);
+  closed.forEach((line, i) => {
+    byCombination.get(placed[i]?.combination ?? null)?.push(line);
+  });
+  const lines = byCombination.get(null) ?? [];
   const combinations = member.combinations.map((c) => {
-    const own = linesOf(c.id);
+    const own = byCombination.get(c.id) ?? [];
     return { id: c.id, name: c.name, lines: own, summary: combinationSummary(c, lines, own) };
   });
   const unconfirmed = closed.filter(
