@@ -17,7 +17,7 @@ export const MUTANT_KINDS = [
   'relation reversed',
   'limit in a condition ±1 %',
   'least for greatest',
-  'φ, Ω or α ±1 %',
+  'constant of a clause ±1 %',
 ] as const;
 export type MutantKind = (typeof MUTANT_KINDS)[number];
 
@@ -117,7 +117,9 @@ export class Switchboard {
   }
 
   constant(name: string, value: number): number {
-    const factor = [1.01, 0.99].find((f) => this.offer('φ, Ω or α ±1 %', name, `times ${f}`, true));
+    const factor = [1.01, 0.99].find((f) =>
+      this.offer('constant of a clause ±1 %', name, `times ${f}`, true),
+    );
     return value * (factor ?? 1);
   }
 }
