@@ -152,3 +152,25 @@ describe('sprung bays under varying loads', () => {
       if (c.id === 'SPRUNG 1.4') near(valueAt('sprung/middle'), 3000, 'the middle');
     });
 });
+
+// kL = √(T/EI)·L = √(100/100)·10 = 10. The limit is the book's own, no source.
+it('the solution in tension holds up to kL = 10', () => {
+  const of = (P: number) => {
+    const { r, bay, axial } = bayOf({ EI: 100, L: 10, P, loads: [{ w: 1 }] });
+    return typeof secondOrderBay(r, 'theory/x', bay, axial);
+  };
+  expect([of(-100), of(-100.1)]).toEqual(['object', 'string']);
+});
+
+// A bay with end springs has no equilibrium at its critical load itself.
+it('a sprung bay fails at its critical load', () => {
+  const at = (P: number) => {
+    const { r, bay, axial, given } = bayOf({ EI: 2.5e13, L: 6000, P, loads: [{ w: 12 }] });
+    const k = given('k', 'rotationalStiffness', 8e9);
+    return sprungBay(r, 'sprung', { axis: 'x', L1: bay.L1, loads: bay.loads, kA: k, kB: k }, axial);
+  };
+  const below = at(5e6);
+  if (typeof below === 'string') throw new Error(below);
+  expect(at(below.Pcr.value)).toBe('failed');
+  expect(typeof at(below.Pcr.value * (1 - 1e-9))).toBe('object');
+});
