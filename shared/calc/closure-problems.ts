@@ -1,14 +1,16 @@
-import { printNumber } from '../units/format.ts';
+import { type Digits, printNumber } from '../units/format.ts';
 import type { UnitSet } from '../units/unit-set.ts';
 import { addressOf, type PlacedLine } from './address.ts';
-import { MOST_DIGITS } from './closure.ts';
+import { MOST_DIGITS, START_DIGITS } from './closure.ts';
 import {
   agrees,
   conditionSides,
+  isBeyondOperands,
   reproduced,
   residualAt,
   type Sheet,
   standsAsReal,
+  type Use,
   usesOf,
 } from './closure-rules.ts';
 import { isValued, type Line, type ValuedLine } from './line.ts';
@@ -18,6 +20,9 @@ export interface ClosureProblem {
   readonly address: string;
   readonly reason: string;
 }
+
+const isShort = (digits: Digits | null): boolean =>
+  digits !== null && 'sig' in digits && digits.sig < START_DIGITS;
 
 /** Proves that every printed line reproduces from its printed operands; empty when all do. */
 export function closureProblems(placed: readonly PlacedLine[], set: UnitSet): ClosureProblem[] {
@@ -52,6 +57,13 @@ function lineProblems(
     printed: (ref, form) => printed(valued(ref), form),
     own: (form) => printed(line as ValuedLine, form),
   };
+  const printsAll = ({ ref, form }: Use): boolean => {
+    const operand = valued(ref);
+    const digits = operand.print[form];
+    if (digits && 'sig' in digits && digits.sig === MOST_DIGITS) return true;
+    const { step } = sheet.printed(ref, form).number;
+    return operand.kind === 'formula' && isBeyondOperands(operand, sheet, step / 10, () => true);
+  };
   const problems: string[] = [];
   const want = (holds: boolean, reason: string) => {
     if (!holds) problems.push(reason);
@@ -65,8 +77,8 @@ function lineProblems(
     for (const digits of [line.print.working, line.print.display])
       if (digits)
         want(
-          ('sig' in digits ? digits.sig : digits.dec) < MOST_DIGITS,
-          'prints as many digits as there are',
+          ('sig' in digits ? digits.sig : digits.dec) <= MOST_DIGITS,
+          'prints more digits than there are',
         );
   if (isValued(line) && line.print.working && line.print.display && set.display[line.dimension]) {
     const first = line.kind === 'formula' ? formOf(line, line.prints, set) : 'working';
@@ -83,6 +95,11 @@ function lineProblems(
       const own = sheet.own(formOf(line, line.prints, set)).number;
       const value = reproduced(line, sheet);
       want(agrees(value, own), `prints ${own.text}, its printed operands give ${value}`);
+      if (isShort(line.print[formOf(line, line.prints, set)]))
+        want(
+          isBeyondOperands(line, sheet, own.step / 10, printsAll),
+          `prints ${own.text}, its printed operands carry more digits`,
+        );
       break;
     }
     case 'root':
@@ -95,16 +112,18 @@ function lineProblems(
       for (const condition of line.tried) {
         const sides = conditionSides(condition, sheet);
         if (sides)
-          want(
-            standsAsReal(condition, ...sides),
-            `prints ${sides[0].printed} against ${sides[1].printed}`,
-          );
+          want(standsAsReal(...sides), `prints ${sides[0].printed} against ${sides[1].printed}`);
       }
       break;
     case 'governing': {
       const form = formOf(valued(line.governs), 'display', set);
       const best = sheet.printed(line.governs, form).number;
       want(agrees(best.value, sheet.own(form).number), 'does not print the candidate that governs');
+      if (isShort(line.print[form]))
+        want(
+          isShort(valued(line.governs).print[form]),
+          'prints fewer digits than the candidate that governs',
+        );
       const sign = line.sense === 'min' ? 1 : -1;
       for (const other of line.candidates)
         want(

@@ -1,14 +1,8 @@
 import { parseExpression } from '../expr/parse.ts';
+import { areEqual } from '../units/equal.ts';
 import { fromBase } from '../units/unit.ts';
 import type { UnitSet } from '../units/unit-set.ts';
-import {
-  type Condition,
-  isValued,
-  type Line,
-  type LineOf,
-  type Side,
-  type ValuedLine,
-} from './line.ts';
+import { isValued, type Line, type LineOf, type Side, type ValuedLine } from './line.ts';
 import { type Form, formOf, formUnit, type PrintedForm } from './printed.ts';
 
 /*
@@ -84,6 +78,34 @@ export function reproduced(
   return (value(line.used) / value(line.other) - 1) * 100;
 }
 
+/** Whether a line prints another number than it has. */
+export function isRounded({ ref, form }: Use, sheet: Sheet): boolean {
+  const line = sheet.valued(ref);
+  const exact = fromBase(line.value, formUnit(line, form, sheet.set));
+  return Math.abs(sheet.printed(ref, form).number.value - exact) > 1e-14 * Math.abs(exact);
+}
+
+/**
+ * Whether a digit of that size is beyond what the line's operands carry: where terms cancel, the
+ * rounding of operands that print all their digits moves the result by half a unit of it or more.
+ */
+export function isBeyondOperands(
+  line: LineOf<'formula'>,
+  sheet: Sheet,
+  step: number,
+  printsAll: (use: Use) => boolean,
+): boolean {
+  const plain = reproduced(line, sheet);
+  const refs = new Set(Object.values(line.operands).map(({ ref }) => ref));
+  const moved = [...refs]
+    .filter((ref) => {
+      const use = { ref, form: formUsed(line, sheet.valued(ref), sheet.set) };
+      return !isRounded(use, sheet) || printsAll(use);
+    })
+    .map((ref) => Math.abs(reproduced(line, sheet, ref) - plain));
+  return moved.reduce((a, b) => a + b, 0) >= step / 2;
+}
+
 /** Value of a root's equation at its printed root moved by `steps` of its last digit. */
 export function residualAt(
   line: LineOf<'root'>,
@@ -104,23 +126,10 @@ export interface SideValue {
   readonly use: Use | null;
 }
 
-/** Share of a value below which two of them print alike at all the digits there are. */
-const ALIKE = 1e-14;
-
-/**
- * Whether the printed numbers of a comparison stand as the real ones do: on the same sides; alike
- * where no digits tell the real ones apart, and the relation holds of them as it does of the real.
- */
-export function standsAsReal(
-  { relation, holds }: Pick<Condition, 'relation' | 'holds'>,
-  left: SideValue,
-  right: SideValue,
-): boolean {
-  const real = left.real - right.real;
-  if (Math.sign(real) === Math.sign(left.printed - right.printed)) return true;
-  const alike = Math.abs(real) <= ALIKE * Math.abs(left.real) && left.printed === right.printed;
-  return alike && ['<=', '>=', '='].includes(relation) === holds;
-}
+/** Whether the printed numbers of a comparison stand as the real ones do: on the same sides, or equal. */
+export const standsAsReal = (left: SideValue, right: SideValue): boolean =>
+  Math.sign(left.printed - right.printed) ===
+  (areEqual(left.real, right.real) ? 0 : Math.sign(left.real - right.real));
 
 /** Both sides of a numeric condition, in one unit; null for a condition on words. */
 export function conditionSides(

@@ -83,6 +83,15 @@ describe('a comparison prints the truth', () => {
     const [l, r] = compare(1.00001, 1.00002);
     expect(Number(l)).toBeLessThan(Number(r));
   });
+  it('equal where they differ by rounding only, with the relation that equals have', () => {
+    const [l, r] = compare(12.34565, 12.34565 * (1 + 1e-15));
+    expect(l).toBe(r);
+  });
+  it('with no more digits than there are where 12 tell them apart', () => {
+    const [l, r] = compare(1.23456789012, 1.23456789013);
+    expect(Number(l)).toBeLessThan(Number(r));
+    expect(l?.length).toBeLessThanOrEqual(15);
+  });
   it('with four where they do', () => expect(compare(1.5, 2)).toEqual(['1.500', '2.000']));
   it('equal values print equal', () => {
     const [l, r] = compare(4 / 3, 4 / 3);
@@ -110,6 +119,64 @@ describe('a ratio never hides its side of 1', () => {
     expect(hidesSide(1.0006, { dec: 3 })).toBe(false);
     expect(hidesSide(0.9996, { dec: 3 })).toBe(true);
     expect(hidesSide(1, { dec: 3 })).toBe(false);
+  });
+});
+
+/*
+ * By hand: a = 1/3 and b = 1/3 + 1e-11 at 14 digits are 0.33333333333333 and 0.33333333334333; their
+ * difference, 1.000e-11, is known to 1e-14 from these: 0.001 of it, one unit of its fourth digit.
+ * With 1.537e-12 between them they are 0.33333333333487 and 0.33333333333333, which give 1.54e-12:
+ * three digits are all that they carry. Seven times that is 1.078e-11, not the 1.076e-11 that it is.
+ */
+describe('a difference prints no more digits than its operands carry', () => {
+  const difference = (apart: number) => {
+    const r = createRecorder('');
+    const one = given(r, 'one', '1');
+    const a = r.formula(formula('a', `${1 / 3}*one`, 'one'), 'a', { one });
+    const b = r.formula(formula('b', `${1 / 3 + apart}*one`, 'one'), 'b', { one });
+    const d = r.formula(formula('d', 'b-a', 'a', 'b'), 'd', { a, b });
+    // What uses it has no more either.
+    r.formula(formula('m', '7*d', 'd'), 'm', { d });
+    r.governing('g', 'max', [d], { title: 'G', symbol: 'd' });
+    const closed = closeLines(place(r.lines), set);
+    expect(closureProblems(place(closed), set)).toEqual([]);
+    return closed;
+  };
+  const significant = (line: Line | undefined): number =>
+    (digits(line) as { sig: number } | null)?.sig ?? 0;
+  it('four where they do', () => {
+    const closed = difference(3.3e-8);
+    expect([3, 4, 5].map((i) => significant(closed[i]))).toEqual([4, 4, 4]);
+  });
+  it('fewer where terms cancel, and they print all there are', () => {
+    const closed = difference(1.537e-12);
+    expect([1, 2, 3, 4, 5].map((i) => printed(closed[i]))).toEqual([
+      '0.33333333333333',
+      '0.33333333333487',
+      '1.54×10⁻¹²',
+      '1.08×10⁻¹¹',
+      '1.54×10⁻¹²',
+    ]);
+  });
+  it('none where it is their rounding', () => {
+    expect(printed(difference(1e-14)[3])).toBe('0');
+  });
+  it('the proof asks that fewer than four are all there are', () => {
+    const short = difference(3.3e-8).map((l, i) =>
+      i === 3 && 'print' in l ? { ...l, print: { ...l.print, working: { sig: 2 } } } : l,
+    ) as Line[];
+    expect(closureProblems(place(short), set)).toContainEqual({
+      address: 'd',
+      reason: expect.stringContaining('carry more digits') as string,
+    });
+  });
+  it('and does not excuse a result that is wrong', () => {
+    const wrong = place(difference(1.537e-12)).map((p) =>
+      p.address === 'm' && 'value' in p.line
+        ? { ...p, line: { ...p.line, value: p.line.value * 1.5 } as Line }
+        : p,
+    );
+    expect(closureProblems(place(closeLines(wrong, set)), set)[0]?.address).toBe('m');
   });
 });
 

@@ -1,10 +1,12 @@
+import { areEqual } from '../units/equal.ts';
 import { type Digits, printNumber } from '../units/format.ts';
-import { fromBase } from '../units/unit.ts';
 import type { UnitSet } from '../units/unit-set.ts';
 import { addressOf, type PlacedLine } from './address.ts';
 import {
   agrees,
   conditionSides,
+  isBeyondOperands,
+  isRounded,
   reproduced,
   residualAt,
   type Sheet,
@@ -15,26 +17,35 @@ import {
 import { isValued, type Line, type Print, type ValuedLine } from './line.ts';
 import { type Form, formOf, formUnit, numberTyped, printForm, textGiven } from './printed.ts';
 
-const START: Digits = { sig: 4 };
+export const START_DIGITS = 4;
+const START: Digits = { sig: START_DIGITS };
 const RATIO: Digits = { dec: 3 };
 const PERCENT: Digits = { dec: 1 };
-/** Reaching this is a defect that a test reports. */
-export const MOST_DIGITS = 15;
+/** A number has 15 digits, of which the last is the rounding of its computation. */
+export const MOST_DIGITS = 14;
 
 const more = (d: Digits): Digits => ('sig' in d ? { sig: d.sig + 1 } : { dec: d.dec + 1 });
 const count = (d: Digits): number => ('sig' in d ? d.sig : d.dec);
 
 interface Node extends PlacedLine {
   shown: { working: Digits | null; display: Digits | null };
+  /** The most digits it may print: fewer where its operands carry no more. */
+  most: { working: number; display: number };
 }
 
 /**
  * Fixes the printed digits of a member's lines, from the last line to the first: a line never gains
  * digits for its own closure; while it doesn't close, the operand whose rounding moves it most
- * prints one more. `placed` is in reading order; a line refers only to lines before it.
+ * prints one more. Where terms cancel so far that no digits of theirs suffice, the line itself
+ * prints only those that they carry. `placed` is in reading order; a line refers only to lines
+ * before it.
  */
 export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] {
-  const nodes: Node[] = placed.map((p) => ({ ...p, shown: { working: null, display: null } }));
+  const nodes: Node[] = placed.map((p) => ({
+    ...p,
+    shown: { working: null, display: null },
+    most: { working: MOST_DIGITS, display: MOST_DIGITS },
+  }));
   const byAddress = new Map(nodes.map((n) => [n.address, n]));
   const nodeAt = (ref: string, from: Node): Node => {
     const node = byAddress.get(addressOf(ref, from.combination));
@@ -46,20 +57,19 @@ export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] 
     for (const { ref, form } of usesOf(node.line, (r) => nodeAt(r, node).line, set))
       nodeAt(ref, node).shown[form] ??= firstDigits(nodeAt(ref, node), (r) => nodeAt(r, node));
   // Digits that one line gives an operand may unsettle another line that had closed on its shorter
-  // form: passes repeat until none adds a digit. Digits only grow, so they end.
-  for (let before = -1; before !== digitsShown(nodes); ) {
+  // form: passes repeat until none changes a digit. Digits only grow, and what was taken back for
+  // want of more never comes again, so they end.
+  for (let before = ''; before !== digitsShown(nodes); ) {
     before = digitsShown(nodes);
     for (const node of nodes.toReversed()) closeNode(node, (ref) => nodeAt(ref, node), set);
   }
   return nodes.map((n) => ('print' in n.line ? { ...n.line, print: n.shown as Print } : n.line));
 }
 
-const digitsShown = (nodes: readonly Node[]): number =>
-  nodes.reduce(
-    (sum, { shown: { working, display } }) =>
-      sum + (working ? count(working) : 0) + (display ? count(display) : 0),
-    0,
-  );
+const digitsShown = (nodes: readonly Node[]): string =>
+  nodes
+    .map(({ shown: { working, display } }) => [working, display].map((d) => (d ? count(d) : '')))
+    .join();
 
 /** A utilisation, and the one of some that governs, prints decimals. */
 const firstDigits = ({ line }: Node, at: (ref: string) => Node): Digits => {
@@ -101,15 +111,33 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
   };
   const raise = (n: Node, form: Form): boolean => {
     const digits = n.shown[form] ?? START;
-    if (count(digits) >= MOST_DIGITS) return false;
+    if (count(digits) >= n.most[form]) return false;
     n.shown[form] = more(digits);
     return true;
+  };
+  const lower = (form: Form): boolean => {
+    const digits = node.shown[form];
+    if (!digits || !('sig' in digits) || digits.sig === 1) return false;
+    node.most[form] = digits.sig - 1;
+    node.shown[form] = { sig: node.most[form] };
+    return true;
+  };
+  /** Of the rounded ones, those with the fewest digits print one more: 12.967 and 12.97 are one length. */
+  const raiseShortest = (uses: readonly Use[]): boolean => {
+    const rounded = uses
+      .filter((use) => isRounded(use, sheet))
+      .map(({ ref, form }) => ({ n: at(ref), form, digits: count(at(ref).shown[form] ?? START) }));
+    const fewest = Math.min(...rounded.map(({ digits }) => digits));
+    return rounded
+      .filter(({ digits }) => digits === fewest)
+      .map(({ n, form }) => raise(n, form))
+      .includes(true);
   };
   const raiseMostMoving = (effect: (ref: string) => number): boolean => {
     const uses = usesOf(line, (ref) => at(ref).line, set);
     const ranked = uses
       .map((use) => ({ use, moves: effect(use.ref) }))
-      .filter(({ use }) => isRounded(use, sheet, set));
+      .filter(({ use }) => isRounded(use, sheet));
     // Operands that print as zero give no value at all: each of them prints more.
     if (ranked.some(({ moves }) => !Number.isFinite(moves)))
       return ranked.map(({ use }) => raise(at(use.ref), use.form)).includes(true);
@@ -123,12 +151,15 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
     case 'formula':
     case 'governing':
     case 'root': {
-      closeForms(node, sheet, raise, set);
+      closeForms(node, sheet, raise, lower, set);
       if (line.kind === 'formula') {
         const form = formOf(line, line.prints, set);
         const plain = () => reproduced(line, sheet);
-        while (!agrees(plain(), sheet.own(form).number))
-          if (!raiseMostMoving((ref) => Math.abs(reproduced(line, sheet, ref) - plain()))) return;
+        while (!agrees(plain(), sheet.own(form).number)) {
+          if (raiseMostMoving((ref) => Math.abs(reproduced(line, sheet, ref) - plain()))) continue;
+          if (!isBeyondOperands(line, sheet, sheet.own(form).number.step, () => true)) return;
+          if (!lower(form)) return;
+        }
       } else if (line.kind === 'root') {
         while (residualAt(line, sheet, -1) * residualAt(line, sheet, 1) > 0)
           if (
@@ -137,7 +168,7 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
             )
           )
             return;
-      } else closeGoverning(line, node, sheet, at, raise, set);
+      } else closeGoverning(line, node, sheet, { at, raise, lower, raiseShortest }, set);
       return;
     }
     case 'choice':
@@ -146,9 +177,13 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
           const sides = conditionSides(condition, sheet);
           if (!sides) break;
           const [l, r] = sides;
-          if (standsAsReal(condition, l, r)) break;
+          if (standsAsReal(l, r)) break;
+          if (areEqual(l.real, r.real)) {
+            if (!raiseShortest([l, r].flatMap(({ use }) => use ?? []))) break;
+            continue;
+          }
           const worst = [l, r]
-            .filter((s) => s.use !== null && isRounded(s.use, sheet, set))
+            .filter((s) => s.use !== null && isRounded(s.use, sheet))
             .sort((a, b) => Math.abs(b.printed - b.real) - Math.abs(a.printed - a.real));
           if (!worst.some((s) => s.use && raise(at(s.use.ref), s.use.form))) break;
         }
@@ -193,18 +228,12 @@ export const hidesSide = (ratio: number, digits: Digits): boolean => {
   return Math.sign(printNumber(ratio, digits).value - 1) !== Math.sign(ratio - 1);
 };
 
-const isRounded = (use: Use, sheet: Sheet, set: UnitSet): boolean => {
-  const line = sheet.valued(use.ref);
-  const exact = fromBase(line.value, formUnit(line, use.form, set));
-  const printed = sheet.printed(use.ref, use.form).number.value;
-  return Math.abs(printed - exact) > 1e-14 * Math.abs(exact);
-};
-
 /** The second printed form of a value follows from the first one as printed. */
 function closeForms(
   node: Node,
   sheet: Sheet,
   raise: (n: Node, form: Form) => boolean,
+  lower: (form: Form) => boolean,
   set: UnitSet,
 ): void {
   const line = node.line as ValuedLine;
@@ -213,7 +242,7 @@ function closeForms(
   const second: Form = first === 'working' ? 'display' : 'working';
   const factor = formUnit(line, first, set).factor / formUnit(line, second, set).factor;
   while (!agrees(sheet.own(first).number.value * factor, sheet.own(second).number))
-    if (!raise(node, first)) return;
+    if (!raise(node, first) && !lower(second)) return;
 }
 
 /** The printed extreme is the printed value of the candidate that governs, and no other passes it. */
@@ -221,29 +250,29 @@ function closeGoverning(
   line: Extract<Line, { kind: 'governing' }>,
   node: Node,
   sheet: Sheet,
-  at: (ref: string) => Node,
-  raise: (n: Node, form: Form) => boolean,
+  does: {
+    at(ref: string): Node;
+    raise(n: Node, form: Form): boolean;
+    lower(form: Form): boolean;
+    raiseShortest(uses: readonly Use[]): boolean;
+  },
   set: UnitSet,
 ): void {
   const form = formOf(sheet.valued(line.governs), 'display', set);
-  const digits = node.shown[form];
-  const winner = at(line.governs);
-  const rounded = (ref: string) => isRounded({ ref, form }, sheet, set);
-  while (digits && rounded(line.governs) && count(winner.shown[form] ?? START) < count(digits))
-    if (!raise(winner, form)) break;
+  const winner = does.at(line.governs);
+  const shorter = () => {
+    const own = node.shown[form];
+    return own !== null && count(winner.shown[form] ?? START) < count(own);
+  };
+  while (shorter() && isRounded({ ref: line.governs, form }, sheet))
+    if (!does.raise(winner, form) && !does.lower(form)) break;
   const sign = line.sense === 'min' ? 1 : -1;
   for (const other of line.candidates) {
     while (
       sign *
         (sheet.printed(line.governs, form).number.value - sheet.printed(other, form).number.value) >
       0
-    ) {
-      // The one with fewer digits first: 12.967 stands below 12.97, which is the same length.
-      const shown = [line.governs, other].filter(rounded).map((ref) => at(ref));
-      const digitsOf = (n: Node) => count(n.shown[form] ?? START);
-      const fewest = Math.min(...shown.map(digitsOf));
-      const lifted = shown.filter((n) => digitsOf(n) === fewest).map((n) => raise(n, form));
-      if (!lifted.some(Boolean)) break;
-    }
+    )
+      if (!does.raiseShortest([line.governs, other].map((ref) => ({ ref, form })))) break;
   }
 }

@@ -1,3 +1,4 @@
+import { areEqual } from '../units/equal.ts';
 import type { Condition, Side } from './line.ts';
 import type { Quantity } from './quantity.ts';
 
@@ -15,11 +16,18 @@ const side = (s: Tried['left']): Side =>
 const number = (s: Tried['left']): number =>
   typeof s === 'number' ? s : typeof s === 'string' ? Number.NaN : s.value;
 
-/** Whether it holds, compared in plain JavaScript, without a tolerance. */
+/** Whether it holds; values that differ by rounding only are equal (`areEqual`). */
 export function holds({ left, relation, right }: Tried): boolean {
   if (relation === 'is') return left === right;
   const [l, r] = [number(left), number(right)];
-  return { '<': l < r, '<=': l <= r, '>': l > r, '>=': l >= r, '=': l === r }[relation];
+  const same = areEqual(l, r);
+  return {
+    '<': l < r && !same,
+    '<=': l < r || same,
+    '>': l > r && !same,
+    '>=': l > r || same,
+    '=': same,
+  }[relation];
 }
 
 /** The condition as a line holds it. */

@@ -1,8 +1,13 @@
 /** Version of what a run computes; it moves with every change of a published or golden result. */
-export const ENGINE_VERSION = '0.2.0';
+export const ENGINE_VERSION = '0.2.1';
 
 /** What changed in results, newest first. */
 export const RESULT_CHANGES: readonly { readonly version: string; readonly change: string }[] = [
+  {
+    version: '0.2.1',
+    change:
+      'Given numbers count with 12 digits; values that differ by less than 5×10⁻¹³ of the larger one are equal in comparisons and checks. Only results that hang on the last bits of a number change.',
+  },
   {
     version: '0.2.0',
     change:

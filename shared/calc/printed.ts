@@ -1,5 +1,5 @@
 import { type Digits, type PrintedNumber, printNumber, printTyped } from '../units/format.ts';
-import { parseQuantity } from '../units/parse.ts';
+import { GIVEN_DIGITS, parseQuantity } from '../units/parse.ts';
 import { fromBase, type Unit } from '../units/unit.ts';
 import type { UnitSet } from '../units/unit-set.ts';
 import type { ValuedLine } from './line.ts';
@@ -42,16 +42,16 @@ export function numberTyped(line: ValuedLine, unit: Unit): string | null {
   )?.[0];
   if (number === undefined) return null;
   // Feet and inches together are not one number.
-  return Math.abs(Number(number) - fromBase(line.value, unit)) <=
-    1e-12 * Math.abs(Number(number)) + 1e-300
+  const read = Number(Number(number).toPrecision(GIVEN_DIGITS));
+  return Math.abs(read - fromBase(line.value, unit)) <= 1e-12 * Math.abs(read) + 1e-300
     ? withinDigits(number)
     : null;
 }
 
-/** Digits beyond the 15 that a value carries (a spreadsheet's float) do not print. */
+/** Digits beyond those that are read (a spreadsheet's float) do not print. */
 const withinDigits = (number: string): string =>
-  number.replace(/e.*/i, '').replace(/\D/g, '').replace(/^0+/, '').length > 15
-    ? String(Number(Number(number).toPrecision(15)))
+  number.replace(/e.*/i, '').replace(/\D/g, '').replace(/^0+/, '').length > GIVEN_DIGITS
+    ? String(Number(Number(number).toPrecision(GIVEN_DIGITS)))
     : number;
 
 /** Prints one form at the given digits; typed and table values print as they stand. */

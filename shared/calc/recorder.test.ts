@@ -84,6 +84,12 @@ describe('a formula line', () => {
     expect(
       r.formula(quotient, 'q1', { a: given(r, 'a', 0.1 + 0.2), b: given(r, 'b', 1) }).value,
     ).toBe(0.3);
+    // Equal values have the ratio 1.
+    for (const [i, ratio] of [1 + 1e-13, -1 + 1e-13].entries())
+      expect(
+        r.formula(quotient, `e${i}`, { a: given(r, `n${i}`, ratio), b: given(r, `m${i}`, 1) })
+          .value,
+      ).toBe(Math.sign(ratio));
     const near = 0.3 * (1 + 1e-13);
     expect(r.formula(quotient, 'q2', { a: given(r, 'c', near), b: given(r, 'd', 1) }).value).toBe(
       near,
@@ -131,10 +137,37 @@ describe('a choice', () => {
     });
     expect(decide(2)).toMatchObject({ taken: -1, line: { outcome: 'high' } });
   });
-  it('compares without a tolerance', () => {
-    expect(decide(0.5 + 1e-15).taken).toBe(1);
-    expect(decide(0.5 + Number.EPSILON / 2).taken).toBe(1);
-    expect(decide(0.5 - Number.EPSILON / 4).taken).toBe(0);
+  it('takes what differs by rounding only as equal, and nothing else', () => {
+    expect(decide(0.5 + Number.EPSILON).taken).toBe(0);
+    expect(decide(0.5 + 1e-13).taken).toBe(0);
+    expect(decide(0.500000000001).taken).toBe(1);
+    expect(decide(2 - Number.EPSILON).taken).toBe(-1);
+    expect(decide(1.99999999999).taken).toBe(1);
+  });
+  it('has every relation of equals and of others', () => {
+    const holds = (left: number, relation: '<' | '<=' | '>' | '>=' | '=', right: number) =>
+      createRecorder('').choice(
+        'c',
+        [{ left: given(createRecorder(''), 'l', left), relation, right, outcome: 'so' }],
+        'not so',
+        { title: 'C' },
+      ) === 0;
+    const relations = ['<', '<=', '>', '>=', '='] as const;
+    const third = 1 / 3;
+    for (const near of [third, third * (1 + 1e-15), third * (1 - 1e-15)])
+      expect(relations.map((relation) => holds(near, relation, third))).toEqual([
+        ...[false, true, false, true, true],
+      ]);
+    expect(relations.map((relation) => holds(0.3, relation, third))).toEqual([
+      ...[true, true, false, false, false],
+    ]);
+    expect(relations.map((relation) => holds(0.4, relation, third))).toEqual([
+      ...[false, false, true, true, false],
+    ]);
+    // Nothing but zero is equal to it.
+    expect(relations.map((relation) => holds(1e-300, relation, 0))).toEqual([
+      ...[false, false, true, true, false],
+    ]);
   });
 });
 

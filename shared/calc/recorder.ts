@@ -258,7 +258,10 @@ function writerOf(prefix: '' | ':', part: string, lines: Line[], keys: Set<strin
       );
     },
 
-    /** Demand against capacity, or a utilisation against 1. OK means the unrounded ratio is at most 1. */
+    /**
+     * Demand against capacity, or a utilisation against 1. OK means the unrounded ratio is at most 1;
+     * it is 1 where they are equal.
+     */
     check(key: string, demand: Quantity, capacity: Quantity | 1, more: Titled): LineOf<'check'> {
       const ratio = withoutNoise(demand.value / (capacity === 1 ? 1 : capacity.value), 'none');
       if (!Number.isFinite(ratio)) {

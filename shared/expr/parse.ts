@@ -22,6 +22,7 @@ import {
   unaryMinusDependencies,
   unaryPlusDependencies,
 } from 'mathjs/number';
+import { isRounding } from '../units/equal.ts';
 import { seriesFunction } from './series-functions.ts';
 
 // Number-only, and only the functions that the books use: no constants and no units, so that E, A,
@@ -115,9 +116,6 @@ export interface ParsedExpression {
   settle(operands: Readonly<Record<string, number>>): number;
 }
 
-/** What is left of cancelled terms is their rounding below this share of the largest one. */
-const LAST_BITS = 5e-13;
-
 const cache = new Map<string, ParsedExpression>();
 
 /** Parses a formula's text once; throws on a syntax or a function the books don't use. */
@@ -143,7 +141,7 @@ export function parseExpression(text: string): ParsedExpression {
       const scope = { ...operands, pi: Math.PI };
       const sizes = terms.map((term) => Math.abs(Number(term.evaluate({ ...scope }))));
       const left = Math.abs(Number(whole.evaluate({ ...scope })));
-      return left <= LAST_BITS * Math.max(...sizes) ? 0 : value;
+      return isRounding(left, Math.max(...sizes)) ? 0 : value;
     },
   });
   cache.set(text, parsed);

@@ -38,8 +38,9 @@ export function readPrinted(text: string): Read {
   return { value: Number(plain), step: 10 ** (Number(power) - decimals) };
 }
 
+/** One unit of the last digit, the printed number's rounding, and the reader's own last bits. */
 const follows = (value: number, printed: Read): boolean =>
-  Math.abs(value - printed.value) <= printed.step * 1.5 * (1 + 1e-9);
+  Math.abs(value - printed.value) <= printed.step * 1.5 + 8 * Number.EPSILON * Math.abs(value);
 
 /** Whole numbers of five digits and more end in zeros that stand for rounding. */
 const stepOf = (line: ValuedLine, form: 'working' | 'display', read: Read): Read => {
@@ -48,6 +49,10 @@ const stepOf = (line: ValuedLine, form: 'working' | 'display', read: Read): Read
   const first = Math.floor(Math.log10(Math.abs(read.value)) + 1e-12);
   return { ...read, step: Math.max(read.step, 10 ** (first - digits.sig + 1)) };
 };
+
+/** One unit of the last digit of a number with 14, or with fewer than four, which has no more. */
+const lastDigit = (value: number, step: number): number =>
+  step > Math.abs(value) / 1000 ? step : Math.abs(value) / 10 ** 13;
 
 /** Utilisations and differences have decimals; from a million on, digits that count. */
 const readRatio = (value: number, digits: Digits | null, otherwise: number) => {
@@ -92,20 +97,41 @@ type Reader = (ref: string, form: 'working' | 'display') => Read;
 function lineFaults(line: Line, read: Reader, set: UnitSet): string[] {
   switch (line.kind) {
     case 'formula': {
-      const scope: Record<string, number> = { pi: Math.PI };
-      for (const [symbol, { ref }] of Object.entries(line.operands))
-        scope[symbol] = read(ref, line.prints).value;
+      const operands = Object.entries(line.operands).map(
+        ([symbol, { ref }]) => [symbol, read(ref, line.prints)] as const,
+      );
       const code = compiled.get(line.expression) ?? math.compile(line.expression);
       compiled.set(line.expression, code);
-      const value = Number(code.evaluate(scope));
+      const valueWith = (moved: string | null, by: 1 | -1 = 1): number =>
+        Number(
+          code.evaluate({
+            pi: Math.PI,
+            ...Object.fromEntries(
+              operands.map(([symbol, { value, step }]) => [
+                symbol,
+                symbol === moved ? value + (by * lastDigit(value, step)) / 2 : value,
+              ]),
+            ),
+          }),
+        );
+      const value = valueWith(null);
       const forms = printedForms(line, set);
       const form = line.prints === 'display' && set.display[line.dimension] ? 'display' : 'working';
       const own = forms[form];
       if (!own) return ['does not print its result'];
       const printed = stepOf(line, form, readPrinted(own.number.text));
-      return follows(value, printed)
+      if (!follows(value, printed))
+        return [`prints ${own.number.text}, its operands give ${value}`];
+      // Fewer digits than four only where those of the operands leave no more.
+      const digits = line.print[form];
+      if (!digits || !('sig' in digits) || digits.sig >= 4) return [];
+      const left = operands.reduce((sum, [s]) => {
+        const there = [valueWith(s, 1), valueWith(s, -1)].filter(Number.isFinite);
+        return sum + Math.max(...there.map((v) => Math.abs(v - value)));
+      }, 0);
+      return left >= printed.step / 20
         ? []
-        : [`prints ${own.number.text}, its operands give ${value}`];
+        : [`prints ${own.number.text}, its operands carry more digits`];
     }
     case 'choice':
       return line.tried.flatMap((c) => {

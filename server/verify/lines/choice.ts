@@ -1,14 +1,18 @@
 import type { Condition, LineOf, Side } from '#shared/calc/line.ts';
 import { type LineContext, missing } from './line-context.ts';
+import { sameNumber } from './same-number.ts';
 
 type Value = number | string;
 
+const same = (l: Value, r: Value): boolean =>
+  typeof l === 'number' && typeof r === 'number' ? sameNumber(l, r) : l === r;
+
 const RELATIONS: Readonly<Record<Condition['relation'], (l: Value, r: Value) => boolean>> = {
-  '<': (l, r) => l < r,
-  '<=': (l, r) => l <= r,
-  '>': (l, r) => l > r,
-  '>=': (l, r) => l >= r,
-  '=': (l, r) => l === r,
+  '<': (l, r) => l < r && !same(l, r),
+  '<=': (l, r) => l < r || same(l, r),
+  '>': (l, r) => l > r && !same(l, r),
+  '>=': (l, r) => l > r || same(l, r),
+  '=': same,
   is: (l, r) => l === r,
 };
 
