@@ -359,6 +359,9 @@ describe('H1.3 on W12×79, 20 ft, LRFD', () => {
     near(valueAt(r, 'H1.3/in-plane'), 0.7713108);
     expect(checks).toHaveLength(4);
   });
+  it('applies up to a minor-axis moment of 5 %: 10.13/203.625 = 0.049748', () => {
+    expect(run({ Mry: '10.13 kip ft' }).checks).not.toBeNull();
+  });
   for (const [what, over, more] of [
     ['a minor-axis moment of 5 % or more', { Mry: '10.18125 kip ft' }, {}],
     ['a noncompact flange', { lambdaf: '9.2' }, {}],
