@@ -15,7 +15,15 @@ import {
   usesOf,
 } from './closure-rules.ts';
 import { isValued, type Line, type Print, type ValuedLine } from './line.ts';
-import { type Form, formOf, formUnit, numberTyped, printForm, textGiven } from './printed.ts';
+import {
+  type Form,
+  formOf,
+  formUnit,
+  numberTyped,
+  type PrintedForm,
+  printForm,
+  textGiven,
+} from './printed.ts';
 
 export const START_DIGITS = 4;
 const START: Digits = { sig: START_DIGITS };
@@ -31,6 +39,13 @@ interface Node extends PlacedLine {
   shown: { working: Digits | null; display: Digits | null };
   /** The most digits it may print: fewer where its operands carry no more. */
   most: { working: number; display: number };
+  /** The forms as last printed, each with the digits it was printed at. */
+  readonly printed: { [F in Form]?: { readonly digits: Digits; readonly form: PrintedForm } };
+  /** The lines whose digits it depends on: itself and its operands. */
+  readonly depends: Node[];
+  /** Steps of the whole closure at which its digits last changed, and at which it was last closed. */
+  changed: number;
+  closed: number;
 }
 
 /**
@@ -41,10 +56,16 @@ interface Node extends PlacedLine {
  * before it.
  */
 export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] {
-  const nodes: Node[] = placed.map((p) => ({
-    ...p,
+  const nodes: Node[] = placed.map(({ address, combination, line }) => ({
+    address,
+    combination,
+    line,
     shown: { working: null, display: null },
     most: { working: MOST_DIGITS, display: MOST_DIGITS },
+    printed: {},
+    depends: [],
+    changed: 0,
+    closed: -1,
   }));
   const byAddress = new Map(nodes.map((n) => [n.address, n]));
   const nodeAt = (ref: string, from: Node): Node => {
@@ -53,23 +74,28 @@ export function closeLines(placed: readonly PlacedLine[], set: UnitSet): Line[] 
     return node;
   };
   for (const node of nodes) showOwnForms(node, (ref) => nodeAt(ref, node), set);
-  for (const node of nodes)
-    for (const { ref, form } of usesOf(node.line, (r) => nodeAt(r, node).line, set))
+  for (const node of nodes) {
+    const uses = usesOf(node.line, (r) => nodeAt(r, node).line, set);
+    node.depends.push(node, ...uses.map(({ ref }) => nodeAt(ref, node)));
+    for (const { ref, form } of uses)
       nodeAt(ref, node).shown[form] ??= firstDigits(nodeAt(ref, node), (r) => nodeAt(r, node));
+  }
   // Digits that one line gives an operand may unsettle another line that had closed on its shorter
-  // form: passes repeat until none changes a digit. Digits only grow, and what was taken back for
-  // want of more never comes again, so they end.
-  for (let before = ''; before !== digitsShown(nodes); ) {
-    before = digitsShown(nodes);
-    for (const node of nodes.toReversed()) closeNode(node, (ref) => nodeAt(ref, node), set);
+  // form: passes over the lines so touched repeat until there is none. Digits only grow, and what was
+  // taken back for want of more never comes again, so they end.
+  const backwards = nodes.toReversed();
+  let step = 0;
+  for (let before = -1; before !== step; ) {
+    before = step;
+    for (const node of backwards) {
+      if (!node.depends.some(({ changed }) => changed >= node.closed)) continue;
+      step += 1;
+      closeNode(node, (ref) => nodeAt(ref, node), set, step);
+      node.closed = step;
+    }
   }
   return nodes.map((n) => ('print' in n.line ? { ...n.line, print: n.shown as Print } : n.line));
 }
-
-const digitsShown = (nodes: readonly Node[]): string =>
-  nodes
-    .map(({ shown: { working, display } }) => [working, display].map((d) => (d ? count(d) : '')))
-    .join();
 
 /** A utilisation, and the one of some that governs, prints decimals. */
 const firstDigits = ({ line }: Node, at: (ref: string) => Node): Digits => {
@@ -99,20 +125,29 @@ function showOwnForms(node: Node, at: (ref: string) => Node, set: UnitSet): void
   if (set.display[line.dimension]) shown.display ??= digits;
 }
 
-function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
+/** A form at the digits that it shows now, printed anew only where these changed. */
+function printNow(node: Node, form: Form, set: UnitSet): PrintedForm {
+  const digits = node.shown[form] ?? START;
+  const last = node.printed[form];
+  if (last?.digits === digits) return last.form;
+  const now = printForm(node.line as ValuedLine, form, digits, set);
+  node.printed[form] = { digits, form: now };
+  return now;
+}
+
+function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet, step: number): void {
   const { line } = node;
-  const print = (n: Node, form: Form) =>
-    printForm(n.line as ValuedLine, form, n.shown[form] ?? START, set);
   const sheet: Sheet = {
     set,
     valued: (ref) => at(ref).line as ValuedLine,
-    printed: (ref, form) => print(at(ref), form),
-    own: (form) => print(node, form),
+    printed: (ref, form) => printNow(at(ref), form, set),
+    own: (form) => printNow(node, form, set),
   };
   const raise = (n: Node, form: Form): boolean => {
     const digits = n.shown[form] ?? START;
     if (count(digits) >= n.most[form]) return false;
     n.shown[form] = more(digits);
+    n.changed = step;
     return true;
   };
   const lower = (form: Form): boolean => {
@@ -120,6 +155,7 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet): void {
     if (!digits || !('sig' in digits) || digits.sig === 1) return false;
     node.most[form] = digits.sig - 1;
     node.shown[form] = { sig: node.most[form] };
+    node.changed = step;
     return true;
   };
   /** Of the rounded ones, those with the fewest digits print one more: 12.967 and 12.97 are one length. */
