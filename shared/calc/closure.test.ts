@@ -62,6 +62,26 @@ describe('digits are added to operands until the line closes', () => {
   it('typed values print as they stand', () => expect(printed(closed[0])).toBe('1.00004'));
 });
 
+describe('a given number', () => {
+  const forms = (text: string) => {
+    const r = createRecorder('');
+    given(r, 'a', text);
+    const [line] = closeLines(place(r.lines), set);
+    if (!line || !('value' in line)) throw new Error(text);
+    const { working, typed } = printedForms(line, set);
+    return [working?.number.text, typed];
+  };
+  it('prints as typed with up to 12 digits', () => {
+    expect(forms('1.23456789012')).toEqual(['1.23456789012', null]);
+    expect(forms('-0.000123456789012')).toEqual(['−0.000123456789012', null]);
+  });
+  it('was computed if it has more, and prints as other values do, its text beside it', () => {
+    expect(forms('1.234567890123')).toEqual(['1.235', '1.234567890123']);
+    // 0.1 + 0.2 of a spreadsheet.
+    expect(forms('0.30000000000000004')).toEqual(['0.3', '0.30000000000000004']);
+  });
+});
+
 describe('a comparison prints the truth', () => {
   const compare = (left: number, right: number) => {
     const r = createRecorder('');

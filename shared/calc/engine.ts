@@ -6,7 +6,7 @@ export const RESULT_CHANGES: readonly { readonly version: string; readonly chang
   {
     version: '0.2.1',
     change:
-      'Given numbers count with 12 digits; values that differ by less than 5×10⁻¹³ of the larger one are equal in comparisons and checks. Only results that hang on the last bits of a number change.',
+      'Values that differ by less than 5×10⁻¹³ of the larger one are equal in comparisons and checks. Only results that hang on the last bits of a number change.',
   },
   {
     version: '0.2.0',

@@ -1,5 +1,5 @@
 import { type Digits, type PrintedNumber, printNumber, printTyped } from '../units/format.ts';
-import { GIVEN_DIGITS, parseQuantity } from '../units/parse.ts';
+import { parseQuantity } from '../units/parse.ts';
 import { fromBase, type Unit } from '../units/unit.ts';
 import type { UnitSet } from '../units/unit-set.ts';
 import type { ValuedLine } from './line.ts';
@@ -31,6 +31,9 @@ export const formOf = (line: ValuedLine, asked: Form, set: UnitSet): Form =>
 export const textGiven = (line: ValuedLine): string | null =>
   line.kind === 'given' ? line.typed : line.kind === 'lookup' ? line.published : null;
 
+/** A number of more digits was computed: it prints as other values do, with its text beside it. */
+const MOST_TYPED = 12;
+
 /** The number in a typed text when the text is that number in that unit, else null. */
 export function numberTyped(line: ValuedLine, unit: Unit): string | null {
   const text = textGiven(line);
@@ -40,19 +43,16 @@ export function numberTyped(line: ValuedLine, unit: Unit): string | null {
   const number = /^[+-]?(?:\d+\.?\d*|\.\d+)(?:e[+-]?\d+)?/i.exec(
     text.trim().replace(/\u2212/g, '-'),
   )?.[0];
-  if (number === undefined) return null;
+  if (number === undefined || digitsIn(number) > MOST_TYPED) return null;
   // Feet and inches together are not one number.
-  const read = Number(Number(number).toPrecision(GIVEN_DIGITS));
-  return Math.abs(read - fromBase(line.value, unit)) <= 1e-12 * Math.abs(read) + 1e-300
-    ? withinDigits(number)
+  return Math.abs(Number(number) - fromBase(line.value, unit)) <=
+    1e-12 * Math.abs(Number(number)) + 1e-300
+    ? number
     : null;
 }
 
-/** Digits beyond those that are read (a spreadsheet's float) do not print. */
-const withinDigits = (number: string): string =>
-  number.replace(/e.*/i, '').replace(/\D/g, '').replace(/^0+/, '').length > GIVEN_DIGITS
-    ? String(Number(Number(number).toPrecision(GIVEN_DIGITS)))
-    : number;
+const digitsIn = (number: string): number =>
+  number.replace(/e.*/i, '').replace(/\D/g, '').replace(/^0+/, '').length;
 
 /** Prints one form at the given digits; typed and table values print as they stand. */
 export function printForm(line: ValuedLine, form: Form, digits: Digits, set: UnitSet): PrintedForm {

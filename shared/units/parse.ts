@@ -9,12 +9,6 @@ export interface ParsedQuantity {
   readonly unit: Unit;
 }
 
-/**
- * Digits with which a given number prints, all that a value carries. As read it is not rounded: a
- * length converted to another unit by a computer, 3.3333333333333335 ft, has to be the same to 1e-12.
- */
-export const GIVEN_DIGITS = 15;
-
 export type Parsed =
   | { readonly ok: true; readonly quantity: ParsedQuantity }
   | { readonly ok: false; readonly reason: string };

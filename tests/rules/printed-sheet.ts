@@ -50,10 +50,6 @@ const stepOf = (line: ValuedLine, form: 'working' | 'display', read: Read): Read
   return { ...read, step: Math.max(read.step, 10 ** (first - digits.sig + 1)) };
 };
 
-/** One unit of the last digit of a number with 14, or with fewer than four, which has no more. */
-const lastDigit = (value: number, step: number): number =>
-  step > Math.abs(value) / 1000 ? step : Math.abs(value) / 10 ** 13;
-
 /** Utilisations and differences have decimals; from a million on, digits that count. */
 const readRatio = (value: number, digits: Digits | null, otherwise: number) => {
   const used = digits ?? { dec: otherwise };
@@ -109,7 +105,7 @@ function lineFaults(line: Line, read: Reader, set: UnitSet): string[] {
             ...Object.fromEntries(
               operands.map(([symbol, { value, step }]) => [
                 symbol,
-                symbol === moved ? value + (by * lastDigit(value, step)) / 2 : value,
+                symbol === moved ? value + (by * step) / 2 : value,
               ]),
             ),
           }),
@@ -122,7 +118,7 @@ function lineFaults(line: Line, read: Reader, set: UnitSet): string[] {
       const printed = stepOf(line, form, readPrinted(own.number.text));
       if (!follows(value, printed))
         return [`prints ${own.number.text}, its operands give ${value}`];
-      // Fewer digits than four only where those of the operands leave no more.
+      // Fewer digits than four only where the printed operands say no more.
       const digits = line.print[form];
       if (!digits || !('sig' in digits) || digits.sig >= 4) return [];
       const left = operands.reduce((sum, [s]) => {
