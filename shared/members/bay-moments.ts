@@ -210,7 +210,10 @@ const LOWER_BY = 0.05;
 /** An exact moment above the analysis's largest by this share is cautioned. */
 const ABOVE_BY = 0.02;
 
-/** Both moments side by side; true where the code's, used here, is cautioned to be lower. */
+/**
+ * Both moments side by side; true where the code's, used here, is cautioned to be lower. Nothing to
+ * compare where loads cancel each other and the other moment is zero.
+ */
 function compare(
   r: Recorder,
   axis: Axis,
@@ -218,6 +221,7 @@ function compare(
   used: Quantity,
   other: Quantity,
 ): boolean {
+  if (other.value === 0) return false;
   const difference = r.comparison(
     `theory/${axis}/comparison`,
     used,
@@ -242,7 +246,9 @@ function compare(
   return lower;
 }
 
+/** Both moments side by side, where the exact one is not zero (loads that cancel each other). */
 function besideAnalysis(r: Recorder, axis: Axis, given: Quantity, exact: Quantity): void {
+  if (exact.value === 0) return;
   const difference = r.comparison(
     `theory/${axis}/comparison`,
     given,
