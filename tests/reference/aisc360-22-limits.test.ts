@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { Line } from '#shared/calc/line.ts';
 import { createRecorder, type Recorder } from '#shared/calc/recorder.ts';
+import { axesInOrder } from '#shared/members/axes-in-order.ts';
 import { tensionStrength } from '#shared/members/tension.ts';
 import { firstOrderBeamLimit } from '#shared/standards/aisc360-22/app7.ts';
 import { isStable } from '#shared/standards/aisc360-22/app8.ts';
@@ -8,7 +9,7 @@ import { multiplierB2 } from '#shared/standards/aisc360-22/app8-b2.ts';
 import { classBy, monoWebClass } from '#shared/standards/aisc360-22/b4-flexure.ts';
 import { stiffnessByNotionalLoad } from '#shared/standards/aisc360-22/c2.ts';
 import { tensionSlenderness } from '#shared/standards/aisc360-22/d2.ts';
-import { nominalStress } from '#shared/standards/aisc360-22/e3.ts';
+import { nominalStress, slendernessNote } from '#shared/standards/aisc360-22/e3.ts';
 import { effectiveArea, type SlenderElement } from '#shared/standards/aisc360-22/e7.ts';
 import { F2_LTB } from '#shared/standards/aisc360-22/f2.ts';
 import {
@@ -416,4 +417,25 @@ it('a shear lag factor a little above 1 is refused', () => {
     return codes(r).includes('net-section-above-gross');
   };
   expect([failed(1), failed(1.005)]).toEqual([false, true]);
+});
+
+// E2, User Note: Lc/r preferably should not exceed 200.
+it('a member in compression is cautioned above Lc/r = 200', () => {
+  const cautioned = (slenderness: number) => {
+    const r = createRecorder('');
+    slendernessNote(r, [given(r, 'x', 50), given(r, 'y', slenderness)]);
+    return codes(r).includes('slenderness-above-200');
+  };
+  expect([cautioned(199), cautioned(200), cautioned(201)]).toEqual([false, false, true]);
+});
+
+// Chapter F: y is not the major axis of a section that is as stiff about it as about x.
+it('axes of the same stiffness are in order', () => {
+  const inOrder = (Iy: number) => {
+    const r = createRecorder('');
+    const inertia = (name: string, value: number) => given(r, name, value, 'inertia');
+    const section = { kind: 'i', Ix: inertia('Ix', 1e8), Iy: inertia('Iy', Iy) };
+    return axesInOrder(r, 'x', section as never);
+  };
+  expect([inOrder(0.99e8), inOrder(1e8), inOrder(1.01e8)]).toEqual([true, true, false]);
 });

@@ -197,9 +197,12 @@ describe('G6 minor axis', () => {
 describe('the shear check', () => {
   it('divides the magnitude by the strength, and takes no negative one', () => {
     const r = createRecorder(':');
-    const { V, N, Vc } = quantities(r, { V: '30 kip', N: '-30 kip', Vc: '40 kip' });
+    const { V, N, Z, Vc } = quantities(r, {
+      ...{ V: '30 kip', N: '-30 kip', Z: '0 kip', Vc: '40 kip' },
+    });
     expect(shearCheck(r, 'x', V, Vc)).toMatchObject({ key: 'G/x/check', ratio: 0.75 });
     expect(() => shearCheck(r, 'y', N, Vc)).toThrow(/negative/);
+    expect(shearCheck(r, 'y', Z, Vc)).toMatchObject({ ratio: 0, verdict: 'OK' });
   });
 });
 

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { linesOf } from '../run-input.ts';
 import { expectValue, outcomeAt, runOne } from './one-member.ts';
 
 /*
@@ -66,6 +67,7 @@ it('a shear force from the analysis', () => {
   expectValue(m, 'c1:G/x/Vr', 'kip', 40);
   expectValue(m, 'c1:G/x/check', '', 40 / 191.7);
   expect(outcomeAt(m, 'c1:given/sense')).toContain('there is no axial force');
+  expect([...linesOf(m).keys()].filter((key) => key.startsWith('D2'))).toEqual([]);
   expect(outcomeAt(m, 'c1:theory/x/curvature')).toBe('one end without moment');
 });
 
@@ -104,5 +106,43 @@ describe('the compressed flange of a singly symmetric I-shape under load alone',
         forces: { P: '0 kip', loads: [{ kind: 'uniform', bends: 'x', w, height: 'centre' }] },
       });
       expect(outcomeAt(m, 'c1:F4/side/1')).toBe(`moments compress the ${flange} flange only`);
+    });
+});
+
+// One moment all along has no shear: nothing of G is checked.
+it('a uniform moment has no shear', () => {
+  const m = runOne({
+    member: { ...W18, restraints: [] },
+    forces: { P: '0 kip', MxA: '100 kip ft', MxB: '100 kip ft' },
+  });
+  expectValue(m, 'c1:G/x/Vmax', 'kip', 0);
+  expect(linesOf(m).has('c1:G/x/check')).toBe(false);
+});
+
+/*
+ * A-8-6: a story with 5000 of its 4000 kip is unstable, and nothing after it is computed. Which of Chapters
+ * D and E would have been asked is told by the sign of the axial force.
+ */
+describe('an unstable story', () => {
+  const [none, open] = ['not applicable', 'not reached'];
+  for (const [P, compression, tension] of [
+    ['100 kip', open, none],
+    ['-100 kip', none, open],
+    ['0 kip', none, none],
+  ] as const)
+    it(`with ${P}`, () => {
+      const m = runOne({
+        analysis: { sway: 'B2' },
+        member: { ...W18, restraints: [] },
+        forces: {
+          ...{ P, MxA: '40 kip ft', MxB: '-50 kip ft' },
+          sway: {
+            x: { MA: '10 kip ft', MB: '10 kip ft', Pstory: '5000 kip', PeStory: '4000 kip' },
+          },
+        },
+      });
+      const state = (id: string) => m.completeness.find((row) => row.id === id)?.cells[0]?.state;
+      expect(m.summary.verdict).toBe('FAILED');
+      expect([state('compression/check'), state('tension/check')]).toEqual([compression, tension]);
     });
 });
