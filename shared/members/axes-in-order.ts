@@ -2,13 +2,16 @@ import type { Recorder } from '../calc/recorder.ts';
 import { clause } from '../standards/aisc360-22/writer.ts';
 import type { SectionQuantities } from './section-quantities.ts';
 
+/** Whether both axes of a section are the same; Ix and Iy may then differ in their last digit. */
+export const axesAlike = (s: SectionQuantities): boolean =>
+  s.kind === 'round' || ((s.kind === 'rect-hss' || s.kind === 'box') && s.square);
+
 /**
  * Whether x is the major axis, as F2 to F7 take it. Where Iy exceeds Ix a line says so with an
  * outside-scope notice, and the answer is false.
  */
 export function axesInOrder(r: Recorder, axis: 'x' | 'y', s: SectionQuantities): boolean {
-  const alike = s.kind === 'round' || ((s.kind === 'rect-hss' || s.kind === 'box') && s.square);
-  if (alike || s.Iy.value <= s.Ix.value) return true;
+  if (axesAlike(s) || s.Iy.value <= s.Ix.value) return true;
   r.choice(
     `F1/${axis}/axes`,
     [{ left: s.Iy, relation: '>', right: s.Ix, outcome: 'x is the minor axis of this section' }],

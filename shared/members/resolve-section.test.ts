@@ -95,6 +95,14 @@ describe('a section by sizes', () => {
       ['tw', source, true],
     ]);
   });
+  it('takes a square section, which has no minor axis, of any size', () => {
+    // Turned by a right angle it is the same section, though Ix and Iy are computed on ways of their own.
+    for (let mm = 300; mm < 310; mm += 0.37) {
+      const [B, t] = [`${mm} mm`, `${mm / 15.1} mm`];
+      expect(read({ shape: 'box', B, d: B, tf: t, tw: t }).problems).toEqual([]);
+      expect(read({ shape: 'tube', B, Ht: B, t, wall: 'design' }).problems).toEqual([]);
+    }
+  });
   it.each<[string, SectionSizesInput, string]>([
     ['thick flanges', { ...i, tf: '10 in' }, 'section.tf is 10 in; two of it must be less than d'],
     ['a thick web', { ...i, tw: '10 in' }, 'section.tw is 10 in; it must be less than bf'],

@@ -6,6 +6,7 @@ import { sectionName } from '../sections/section.ts';
 import { sizeProblems } from '../sections/size-bounds.ts';
 import type { SectionSizes, SectionSizesInput } from '../sections/sizes.ts';
 import { findShape } from '../sections/table.ts';
+import { axesAlike } from './axes-in-order.ts';
 import { type Given, type ReadQuantity, stateOf, TYPED } from './given-values.ts';
 import type { Stated } from './resolved.ts';
 import { sizedSectionLines } from './sized-section-lines.ts';
@@ -82,7 +83,7 @@ function readSizes(
 /** Ix ≥ Iy by the section's own formulas; the wall of a tube, which the steel decides, matters not. */
 function majorFirst(sizes: SectionSizes): boolean {
   const steel = { kind: 'own', name: '', Fy: ANY, Fu: null } as const;
-  const { Ix, Iy } = sizedSectionLines(createRecorder(''), sizes, steel);
-  return Ix.value >= Iy.value;
+  const section = sizedSectionLines(createRecorder(''), sizes, steel);
+  return axesAlike(section) || section.Ix.value >= section.Iy.value;
 }
 const ANY: GivenValue = { value: 1, text: '', source: TYPED, confirmed: false };
