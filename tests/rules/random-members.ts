@@ -1,131 +1,193 @@
-import { findShape, W_DESIGNATIONS } from '#shared/sections/table.ts';
 import type { Random } from './random.ts';
+import {
+  type RandomRestraint,
+  randomLoads,
+  randomRestraints,
+  randomSupports,
+  randomSway,
+} from './random-loading.ts';
+import {
+  areaText,
+  baseValue,
+  computedMomentText,
+  forceText,
+  lengthText,
+  momentText,
+  stiffnessText,
+} from './random-quantities.ts';
+import { type RandomSection, randomSection } from './random-sections.ts';
 
-const MM_PER_FT = 304.8;
-const N_PER_KIP = 4448.2216152605;
-const NMM_PER_KIPFT = N_PER_KIP * MM_PER_FT;
-/** Wide thin flanges: slender in compression from about 85 ksi, in flexure from about 280 ksi. */
-const WIDE = ['W14X90', 'W12X65', 'W6X15', 'W8X31'];
-const GRADES = ['A992', 'A572 Gr. 50', 'A36', 'A913 Gr. 65', 'A913 Gr. 70'];
+const PROVISIONS = ['H1.3', 'H2', 'H1.2-Cb', 'C2.3-taub'] as const;
 
-/** A number as somebody types it: two to nine significant digits, sometimes as computed by a spreadsheet. */
-const typed = (random: Random, value: number): string => {
-  const text = String(Number(value.toPrecision(random.pick([2, 3, 3, 4, 6, 9]))));
-  return random.chance(0.05) ? String(value) : text;
-};
-
-const length = (random: Random, mm: number): string => {
-  const ft = mm / MM_PER_FT;
-  const whole = Math.floor(ft);
-  return random.pick([
-    () => `${typed(random, ft)} ft`,
-    () => `${typed(random, ft * 12)} in`,
-    () => `${typed(random, mm / 1000)} m`,
-    () => `${typed(random, mm)} mm`,
-    () => `${whole} ft ${typed(random, Math.max(0.25, (ft - whole) * 12))} in`,
-  ])();
-};
-const force = (random: Random, N: number): string =>
-  random.chance(0.5) ? `${typed(random, N / N_PER_KIP)} kip` : `${typed(random, N / 1000)} kN`;
-const moment = (random: Random, Nmm: number): string =>
-  random.chance(0.5)
-    ? `${typed(random, Nmm / NMM_PER_KIPFT)} kip ft`
-    : `${typed(random, Nmm / 1e6)} kN m`;
-
-/** End moments of one plane: none, one end, equal, reverse, any. */
-const endMoments = (random: Random, size: number): readonly [number, number] =>
-  random.pick<() => readonly [number, number]>([
+/** End moments of one plane: none, one end, equal, reverse, any; or equal and reverse but for little. */
+function endMoments(random: Random, size: number): readonly string[] {
+  if (random.chance(0.12)) {
+    const little = size * 10 ** -random.whole(6, 15);
+    const MB = random.pick([size + little, little - size, size - little, Math.max(little, 1e-6)]);
+    return [size, MB].map((M) => computedMomentText(random, M));
+  }
+  const moments = random.pick<() => readonly [number, number]>([
     () => [0, 0],
     () => [size, 0],
     () => [0, -size],
     () => [size, size],
     () => [size, -size],
-    () => [size, size * (1 - 1e-9)],
     () => [size, size * random.between(-1, 1)],
     () => [size * random.between(-1, 1), size],
     () => [size, size * 1e-6],
   ])();
+  return moments.map((M) => momentText(random, M));
+}
+
+interface Basis {
+  readonly design: 'LRFD' | 'ASD';
+  readonly method: 'direct' | 'effective-length' | 'first-order';
+  readonly secondOrder: 'from-analysis' | 'amplified' | 'exact';
+  readonly sways: boolean;
+}
+
+function randomBasis(random: Random): Basis {
+  const secondOrder = random.pick(['from-analysis', 'amplified', 'exact'] as const);
+  return {
+    design: random.pick(['LRFD', 'ASD'] as const),
+    method: random.pick(['direct', 'effective-length', 'first-order'] as const),
+    secondOrder,
+    sways: secondOrder === 'amplified' && random.chance(0.25),
+  };
+}
+
+interface Parts {
+  readonly basis: Basis;
+  readonly section: RandomSection;
+  readonly L: number;
+  readonly restraints: readonly RandomRestraint[] | null;
+  readonly springs: boolean;
+}
+
+/** Axial force: none, hardly any, any, close to a critical load, tension. */
+function randomAxial(random: Random, { basis, section: s, L, springs }: Parts): number {
+  const alpha = basis.design === 'ASD' ? 1.6 : 1;
+  const critical = (I: number) =>
+    (Math.PI ** 2 * (basis.method === 'direct' ? 0.8 : 1) * 200000 * I) / L ** 2 / alpha;
+  const squash = (s.Fy * s.A) / alpha;
+  const pulled = random.chance(0.2) ? -1 : 1;
+  if (springs && random.chance(0.4)) return -random.between(0.05, 3) * critical(s.Ix);
+  return random.pick([
+    () => 0,
+    () => pulled * random.size(1e-6, 1) * squash,
+    () => pulled * random.between(0, 0.9) * squash,
+    () => pulled * random.between(0, 0.3) * Math.min(squash, critical(s.Iy)),
+    () => pulled * random.between(0, 0.3) * Math.min(squash, critical(s.Iy)),
+    () => random.between(0.85, 1.02) * Math.min(critical(s.Ix), squash),
+    () => random.between(0.85, 1.02) * Math.min(critical(s.Iy), squash),
+    () => pulled * random.size(1e-9, 1e-3) * critical(s.Iy),
+  ])();
+}
+
+function randomCombination(random: Random, name: string, parts: Parts) {
+  const { basis, section: s, L, restraints, springs } = parts;
+  const alpha = basis.design === 'ASD' ? 1.6 : 1;
+  const share = random.pick([0.1, 0.3, 0.6, random.size(1e-4, 2)]);
+  const size = (axis: 'x' | 'y') => (s.Fy * (axis === 'x' ? s.Zx : s.Zy) * share) / alpha;
+  const signed = (axis: 'x' | 'y') =>
+    size(axis) * random.pick([0, 1, -1, 1e-11, random.between(-1, 1)]);
+  const [MxA, MxB] = springs ? ['0 kN m', '0 kip ft'] : endMoments(random, size('x'));
+  const [MyA, MyB] = springs
+    ? ['0 kip ft', '0 kN m']
+    : endMoments(random, size('y') * random.pick([0, 1]));
+  const given = basis.secondOrder === 'from-analysis' && random.chance(0.4);
+  const loads = random.chance(springs ? 0.9 : 0.5)
+    ? randomLoads(random, L, restraints ?? [], size)
+    : [];
+  const supports = restraints ? randomSupports(random, restraints, signed) : [];
+  return {
+    name,
+    P: forceText(random, randomAxial(random, parts)),
+    ...{ MxA, MxB, MyA, MyB },
+    ...(given && { MxMax: momentText(random, size('x')) }),
+    ...(given && { MyMax: momentText(random, size('y')) }),
+    ...(loads.length > 0 && { loads }),
+    ...(supports.length > 0 && { supports }),
+    ...(random.chance(0.15) && { Vx: forceText(random, (8 * size('x')) / L) }),
+    ...(random.chance(0.1) && { Vy: forceText(random, (8 * size('y')) / L) }),
+    ...(basis.sways &&
+      random.chance(0.8) && { sway: randomSway(random, (s.Fy * s.A) / alpha, signed) }),
+  };
+}
+
+/** Buckling lengths as typed: those of the member, or any. */
+function typedLengths(random: Random, text: string, L: number) {
+  const share = () => random.pick([1, 1, 0.5, 1 / 3, 1.2, random.between(0.2, 2)]);
+  const held = random.chance(0.75);
+  return {
+    Lcx: held ? text : lengthText(random, L * share()),
+    Lcy: held ? text : lengthText(random, L * share()),
+    Lcz: random.chance(0.4) ? text : lengthText(random, L * share()),
+    Lb: random.pick([() => '0 ft', () => text, () => lengthText(random, L * share())])(),
+  };
+}
+
+function randomDetails(random: Random, s: RandomSection, chartable: boolean) {
+  const joint = () => ({
+    sidesway: random.pick(['inhibited', 'uninhibited']),
+    GA: random.pick([0, 1, 10, Number(random.size(0.05, 60).toPrecision(3))]),
+    GB: random.pick([1, 10, Number(random.size(0.05, 60).toPrecision(3))]),
+  });
+  const An = areaText(random, s.A * random.between(0.5, 1));
+  return {
+    ...(chartable && random.chance(0.5) && { charts: { x: joint() } }),
+    ...(random.chance(0.5) && {
+      netSection: random.chance(0.5) ? { Ae: An } : { An, U: random.pick([0.7, 0.85, 1]) },
+    }),
+    ...(random.chance(0.15) && { stiffeners: lengthText(random, random.between(200, 2000)) }),
+  };
+}
 
 /**
- * INPUT.json of one random member: every shape and steel, all methods, either unit set; no axial
- * force, hardly any, any, and close to the critical loads.
+ * INPUT.json of one random member: a section of any table or by sizes, any steel, all methods,
+ * either unit set; lengths typed or from restraints; end moments, loads, moments over supports,
+ * sway, end springs; no axial force, hardly any, any, tension, and close to the critical loads.
  */
 export function randomInput(random: Random): unknown {
-  const wide = random.chance(0.12);
-  const designation = random.pick(wide ? WIDE : W_DESIGNATIONS);
-  const shape = findShape(designation);
-  if (!shape) throw new Error(designation);
-  const design = random.pick(['LRFD', 'ASD'] as const);
-  const alpha = design === 'ASD' ? 1.6 : 1;
-  const method = random.pick(['direct', 'effective-length', 'first-order'] as const);
-  const secondOrder = random.pick(['from-analysis', 'amplified', 'exact'] as const);
-  const own = wide || random.chance(0.35);
-  const FyKsi = wide ? random.pick([95, 100, 100, 120, 400]) : own ? random.between(20, 100) : 50;
-  const L = random.between(wide ? 0.5 : 1.5, 16) * 1000;
-  const share = () => random.pick([1, 1, 0.5, 1 / 3, 1.2, random.between(0.2, 2)]);
-  const { A, Ix, Iy, Zx, Zy } = shape.properties;
-  const critical = (I: number) =>
-    (Math.PI ** 2 * (method === 'direct' ? 0.8 : 1) * 200000 * I) / L ** 2 / alpha;
-  const squash = (FyKsi * 6.894757 * A.value) / alpha;
-  const axial = (): number =>
-    random.pick([
-      () => 0,
-      () => random.size(1e-6, 1) * squash,
-      () => random.between(0, 0.9) * squash,
-      () => random.between(0, 0.4) * squash,
-      () => random.between(0.85, 1.02) * Math.min(critical(Ix.value), squash),
-      () => random.between(0.85, 1.02) * Math.min(critical(Iy.value), squash),
-      () => random.size(1e-9, 1e-3) * critical(Iy.value),
-      () => (random.chance(0.2) ? -0.1 * squash : 0.2 * squash),
-    ])();
-  const combination = (name: string) => {
-    const size = (Z: number) =>
-      FyKsi * 6.894757 * Z * random.pick([0.1, 0.3, 0.6, random.size(1e-4, 2)]);
-    const [MxA, MxB] = endMoments(random, size(Zx.value) / alpha);
-    const [MyA, MyB] = endMoments(random, size(Zy.value) / alpha);
-    const given = secondOrder === 'from-analysis' && random.chance(0.6);
-    return {
-      name,
-      P: force(random, axial()),
-      MxA: moment(random, MxA),
-      MxB: moment(random, MxB),
-      MyA: moment(random, MyA),
-      MyB: moment(random, MyB),
-      ...(given && { MxMax: moment(random, size(Zx.value)) }),
-      ...(given && { MyMax: moment(random, size(Zy.value)) }),
-    };
-  };
-  const text = length(random, L);
-  const held = random.chance(0.75);
+  const drawn = randomBasis(random);
+  const section = randomSection(random);
+  const radius = Math.sqrt(section.Iy / section.A);
+  const text = lengthText(random, random.pick([20, 60, 100, 150, 250]) * radius);
+  const L = baseValue(text, 'length');
+  const springs =
+    drawn.secondOrder === 'exact' && random.chance(0.2)
+      ? {
+          xA: '0 kip ft/rad',
+          xB: stiffnessText(random, (random.size(0.1, 100) * 2e5 * section.Ix) / L),
+        }
+      : null;
+  const basis = springs ? { ...drawn, sways: false } : drawn;
+  const restraints = springs || random.chance(0.5) ? null : randomRestraints(random, L);
+  const charts = random.chance(0.15);
+  const parts = { basis, section, L, restraints, springs: springs !== null };
   return {
     format: 1,
     standard: 'aisc360-22',
-    design,
+    design: basis.design,
     units: random.pick(['us', 'si']),
+    ...(random.chance(0.2) && { constants: random.pick(['us', 'si']) }),
     analysis: {
-      method,
-      secondOrder,
+      method: basis.method,
+      secondOrder: basis.secondOrder,
       includesMemberEffect: random.chance(0.5),
-      sway: 'none',
+      sway: basis.sways ? 'B2' : 'none',
+      ...(random.chance(0.2) && { driftRatio: random.pick([1.05, 1.3, 1.5, 1.7]) }),
+      ...(random.chance(0.5) && { provisions: PROVISIONS.filter(() => random.chance(0.5)) }),
     },
     members: [
       {
-        mark: designation,
-        section: designation,
-        material: own
-          ? {
-              name: 'own steel',
-              Fy: `${typed(random, FyKsi)} ksi`,
-              source: { kind: 'assumption', basis: 'random' },
-            }
-          : random.pick(GRADES),
+        mark: 'M1',
+        section: random.chance(0.01) ? 'WT7X34' : section.section,
+        material: section.material,
         length: text,
-        ends: 'held',
-        // Held at the ends only, in both planes, or with any buckling lengths.
-        Lcx: held ? text : length(random, L * share()),
-        Lcy: held ? text : length(random, L * share()),
-        Lcz: random.chance(0.4) ? text : length(random, L * share()),
-        Lb: random.pick([() => '0 ft', () => text, () => length(random, L * share())])(),
+        ends: springs ? 'springs' : random.chance(0.02) ? random.pick(['free', 'sway']) : 'held',
+        ...(springs && { springs }),
+        ...(restraints ? { restraints } : typedLengths(random, text, L)),
         ...(random.chance(0.7) && {
           Cb: random.pick<() => string | number>([
             () => 'auto',
@@ -133,9 +195,10 @@ export function randomInput(random: Random): unknown {
             () => Number(random.between(1, 2.3).toFixed(2)),
           ])(),
         }),
+        ...randomDetails(random, section, restraints !== null && charts),
         endMomentSign: random.pick(['bending', 'joint']),
         combinations: Array.from({ length: random.whole(1, 3) }, (_, i) =>
-          combination(`C${i + 1}`),
+          randomCombination(random, `C${i + 1}`, parts),
         ),
       },
     ],
