@@ -84,6 +84,14 @@ describe('a mutant of a condition', () => {
   });
 });
 
+it('a mutant of a comparison in plain code is found where its outcome matters', async () => {
+  const at = await unitOf(() => expect(board.compare('place: a > b', 5, '>', 5)).toBe(false));
+  const above = await unitOf(() => expect(board.compare('place: a > b', 6, '>', 5)).toBe(true));
+  const [limit, reversed] = [called('place: a > b is >='), called('place: a > b is <')];
+  expect([await killed(at, limit), await killed(at, reversed)]).toEqual([true, false]);
+  expect([await killed(above, limit), await killed(above, reversed)]).toEqual([false, true]);
+});
+
 describe('a run', () => {
   it('leaves out tests without expected values from outside', () => {
     const files = testFiles('');
@@ -91,7 +99,7 @@ describe('a run', () => {
     expect(files).not.toContain('shared/members/parse-input.test.ts');
   });
   // Whether the books that the tests compute with are the changed ones.
-  it('finds the constants of A-7-3 by its working by hand', () => {
+  it('finds the constants of A-7-3 by its working by hand', { timeout: 180_000 }, () => {
     const folder = mkdtempSync(join(tmpdir(), 'mutation-'));
     const out = join(folder, 'result.json');
     try {

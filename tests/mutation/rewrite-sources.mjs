@@ -28,6 +28,10 @@ const REPLACED = {
       /governing\(key,\s*sense,\s*candidates,\s*more\)\s*\{/,
       `governing(site,key,sense,candidates,more){sense=${BOARD}.sense(site,sense,candidates.map((c)=>c.value));`,
     ],
+    [
+      /verdict:\s*ratio\s*<=\s*1\s*\?/,
+      `verdict:${BOARD}.compare('shared/calc/recorder.ts: ratio <= 1',ratio,'<=',1)?`,
+    ],
   ],
   'shared/standards/aisc360-22/parameters.ts': [
     ['Number(published)', `${BOARD}.constant(name + '/' + design,Number(published))`],
@@ -67,6 +71,28 @@ function withPlaces(path, written, compiled) {
   return source;
 }
 
+/**
+ * Two quantities, or a quantity and a number, compared in plain code: what a clause needs to write at
+ * all. Products are left out, and what reads an input.
+ */
+const COMPARED =
+  /(?<![\w$.)\]])(?<![*+/-]\s?)((?:[\w$]+\.)+value)\s*([<>]=?)\s*((?:[\w$]+\.)*[\w$]+)(?![\w$.([]|\s*[*+/-])/g;
+const INPUT = /^shared\/members\/(?:resolve|parse|given|find|section-candidates)/;
+
+function withComparisons(path, written, compiled) {
+  if (INPUT.test(path)) return compiled;
+  let count = 0;
+  const source = compiled.replace(COMPARED, (_, left, relation, right) => {
+    count += 1;
+    const site = JSON.stringify(`${path}: ${left} ${relation} ${right}`);
+    return `${BOARD}.compare(${site},${left},${JSON.stringify(relation)},${right})`;
+  });
+  const expected = [...written.matchAll(COMPARED)].length;
+  if (count !== expected)
+    throw new Error(`${path}: ${expected} comparisons are ${count} when compiled`);
+  return source;
+}
+
 export async function resolve(specifier, context, next) {
   return specifier === 'vitest' ? { url: STAND_IN, shortCircuit: true } : next(specifier, context);
 }
@@ -81,7 +107,9 @@ export async function load(url, context, next) {
     if (changed === source) throw new Error(`nothing to replace in ${path}: ${from}`);
     source = changed;
   }
-  if (!path.startsWith('shared/calc/'))
-    source = withPlaces(path, readFileSync(fileURLToPath(url), 'utf8'), source);
+  if (!path.startsWith('shared/calc/')) {
+    const written = readFileSync(fileURLToPath(url), 'utf8');
+    source = withComparisons(path, written, withPlaces(path, written, source));
+  }
   return { ...loaded, source };
 }

@@ -22,6 +22,7 @@ export const MUTANT_KINDS = [
 export type MutantKind = (typeof MUTANT_KINDS)[number];
 
 type Relation = Tried['relation'];
+type CompareRelation = '<' | '<=' | '>' | '>=';
 interface Placed extends Tried {
   readonly site: string;
 }
@@ -106,6 +107,24 @@ export class Switchboard {
           ...tried,
           left: left * factor,
         });
+    }
+    return result;
+  }
+
+  /** A comparison in plain code. */
+  compare(site: string, left: number, relation: CompareRelation, right: number): boolean {
+    const of = (r: Relation) =>
+      ({ '<': left < right, '<=': left <= right, '>': left > right, '>=': left >= right })[
+        r as CompareRelation
+      ];
+    const outcome = of(relation);
+    let result = outcome;
+    for (const [kind, others] of [
+      ['relation at its limit', AT_LIMIT],
+      ['relation reversed', REVERSED],
+    ] as const) {
+      const other = others[relation] as Relation;
+      if (this.offer(kind, site, `is ${other}`, of(other) !== outcome)) result = of(other);
     }
     return result;
   }

@@ -62,6 +62,7 @@ export async function runBaseline(board: Switchboard, word: string): Promise<Bas
       if (known) units.push(known);
     }
   }
+  board.touched = new Set();
   for (const { unit, tests } of units) {
     const failed = await firstFailure(unit, new Set(tests.keys()));
     if (failed !== null)

@@ -185,6 +185,14 @@ it('the flange in tension yields where the small flange is in compression', () =
   near(c.at('F4/TFY/Mn', 'kip in'), 32003.88844791091);
   near(c.at('F4/Mn', 'kip in'), 32003.88844791091);
   expect(c.lines.find((l) => l.key === 'F4/Rpt')?.clause?.equation).toBe('F4-17');
+  // With the centroid at the inner face of the flange, or in the flange, no part of the web is compressed.
+  const { flanges } = plates;
+  if (!flanges) throw new Error('no flanges');
+  for (const hc of ['0 in', '-1 in']) {
+    const beyond = majorOf({ ...plates, flanges: { ...flanges, top: { ...flanges.top, hc } } });
+    expect(beyond.codes).toContain('web-not-compressed');
+    expect(beyond.outcome('B4/x/web/elastic')).toBe('the web is in tension only');
+  }
 });
 
 /*
