@@ -9,8 +9,10 @@ export interface Result extends Mutant {
 }
 
 /** Why a mutant computes the same, or null. */
-const equivalence = ({ id }: Mutant): string | null =>
-  EQUIVALENT.find(({ mutants }) => mutants.test(id))?.reason ?? null;
+const equivalence = ({ id, kind }: Mutant): string | null =>
+  EQUIVALENT.find(
+    ({ mutants, kinds = ['relation at its limit'] }) => kinds.includes(kind) && mutants.test(id),
+  )?.reason ?? null;
 
 const percent = (part: number, whole: number): string =>
   whole === 0 ? '' : `${((100 * part) / whole).toFixed(1)} %`;

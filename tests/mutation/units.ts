@@ -14,6 +14,7 @@ const STRUCTURAL = [
   'tests/reference/elastic-theory-closure.test.ts',
   'tests/reference/aisc360-22-flexure-continuity.test.ts',
   'shared/standards/aisc360-22/manifest.test.ts',
+  'shared/members/cancelled-loads.test.ts',
   'shared/members/completeness.test.ts',
   'shared/members/find-sections.test.ts',
   'shared/members/hashes.test.ts',
