@@ -1,7 +1,10 @@
+import fc from 'fast-check';
 import { describe, expect, test, vi } from 'vitest';
+import { members, number, scaleOf } from './arbitraries.ts';
 import { assertProperty, type Fault } from './assert-property.ts';
-import { crossingsBetween } from './crossings.ts';
+import { crossingsBetween, stepBetween } from './crossings.ts';
 import { compareSides, SMOOTH } from './jumps-of.ts';
+import type { Load, Member } from './member.ts';
 import { PATHS, type Path } from './paths.ts';
 import { JUMPS } from './standard-jumps.ts';
 
@@ -50,6 +53,46 @@ describe("no jump but the standard's own", () => {
         faultsAlong,
       );
     });
+});
+
+describe('no jump where a load passes', () => {
+  const drawn = fc.record({
+    m: members({ kinds: ['rolled', 'hss', 'i', 'mono-i'], minor: false }).map(
+      (m): Member => ({ ...m, Cb: 'auto' }),
+    ),
+    ...{ at: fc.nat(8), share: number(0.05, 0.3), kind: fc.constantFrom('point', 'uniform') },
+  });
+  /** The ends of segments and bays, and the quarter points between them. */
+  const placesOf = ({ L, restraints = [] }: Member): readonly number[] => {
+    const ends = [0, ...restraints.map(({ at }) => at), L];
+    return ends.slice(1).flatMap((to, i) => {
+      const from = ends[i] as number;
+      return [0.25, 0.5, 0.75, 1].map((share) => from + share * (to - from));
+    });
+  };
+  /** Beyond what counts as one place (1e-9 of the length). */
+  const REACH = 1e-8;
+  test('quarter points, restraints and ends', { timeout: 600_000 }, () => {
+    assertProperty(drawn, { seed: 24, runs: 150, unbiased: true }, ({ m, at, share, kind }) => {
+      const places = placesOf(m);
+      const place = places[at % places.length] as number;
+      const w = (16 * share * scaleOf(m.section, m.Fy).Mx) / m.L ** 2;
+      const load = (z: number): Load =>
+        kind === 'point'
+          ? { kind, bends: 'x', height: 'centre', W: w * m.L, at: z }
+          : { kind: 'uniform', bends: 'x', height: 'centre', w, from: 0, to: z };
+      const of = (z: number): Member => ({ ...m, loads: [...m.loads, load(z)] });
+      const [low, high] = [place - REACH * m.L, Math.min(m.L, place + REACH * m.L)];
+      return [of(place), of(high)].flatMap((other) => {
+        const step = stepBetween(of(low), other);
+        const input = { before: step.before.input, after: step.after.input };
+        // Over a held point a point load is carried there and shears no bay.
+        return compareSides(step)
+          .faults.filter((text) => kind !== 'point' || !text.startsWith('G/'))
+          .map((text) => ({ text, input }));
+      });
+    });
+  });
 });
 
 /** Every limit of the clauses and of the theory that a number can cross, by plain key. */

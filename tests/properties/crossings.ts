@@ -48,6 +48,16 @@ interface Point {
   readonly signature: string;
 }
 
+function pointOf(member: Member, t: number): Point {
+  const r = run(member);
+  const decisions = decisionsOf(r);
+  return { t, r, decisions, signature: JSON.stringify([...decisions]) };
+}
+
+/** The step from one member to another close by, whether it crosses a limit or not. */
+export const stepBetween = (a: Member, b: Member): Crossing =>
+  crossingOf(pointOf(a, 0), pointOf(b, 1));
+
 /** Steps are this share of the path wide. */
 const STEP = 1e-11;
 
@@ -56,11 +66,7 @@ const STEP = 1e-11;
  * first, up to `most` times.
  */
 export function crossingsBetween(a: Member, b: Member, most: number): readonly Crossing[] {
-  const at = (t: number): Point => {
-    const r = run(between(a, b, t));
-    const decisions = decisionsOf(r);
-    return { t, r, decisions, signature: JSON.stringify([...decisions]) };
-  };
+  const at = (t: number): Point => pointOf(between(a, b, t), t);
   const end = at(1);
   const found: Crossing[] = [];
   let from = at(0);
