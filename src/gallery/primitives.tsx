@@ -1,6 +1,7 @@
 import { type ReactNode, useState } from 'react';
 import { useAnnounce } from '#client/ui/announcements.tsx';
 import { Button } from '#client/ui/button.tsx';
+import { Choice } from '#client/ui/choice.tsx';
 import { Dialog } from '#client/ui/dialog.tsx';
 import { Hint } from '#client/ui/hint.tsx';
 import { Keycap } from '#client/ui/keycap.tsx';
@@ -52,6 +53,10 @@ export function Primitives() {
           ]}
         />
         <TextArea label="Long text" optional rows={2} />
+        <Choice type="checkbox" defaultChecked>
+          Confirmed
+        </Choice>
+        <Choice type="radio">from a drawing</Choice>
       </Shown>
       <Shown name="Sources">
         {(['T', 'F', 'D', 'A'] as const).map((letter) => (

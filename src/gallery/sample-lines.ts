@@ -27,6 +27,7 @@ const words = (text: string) => [{ kind: 'text', text } as const];
 
 /** One line of every kind and tone, made up. */
 export const sampleLines: readonly Block[] = [
+  { kind: 'heading', level: 3, text: 'Lines' },
   {
     kind: 'lineSection',
     reference: 'E3',

@@ -1,3 +1,4 @@
+import { Choice } from '#client/ui/choice.tsx';
 import { type StateChange, type StatedGroup, statedNames } from '../bulk-change.ts';
 import { statedWords } from '../bulk-words.ts';
 import { emptySource } from '../source-words.ts';
@@ -17,42 +18,36 @@ export function BulkState(props: { state: StateChange; onChange: (state: StateCh
         <legend className="mb-1 font-semibold">Of these values, where given</legend>
         <div className="grid grid-cols-2 gap-x-3">
           {statedNames.map((name) => (
-            <label
+            <Choice
               key={name}
-              className={`flex items-center gap-2 py-0.5 ${name === 'forces' ? 'col-span-2' : ''}`}
+              type="checkbox"
+              checked={state.of.has(name)}
+              onChange={() => toggle(name)}
+              className={name === 'forces' ? 'col-span-2' : ''}
             >
-              <input
-                type="checkbox"
-                checked={state.of.has(name)}
-                onChange={() => toggle(name)}
-                className="accent-oxide"
-              />
               {statedWords[name]}
-            </label>
+            </Choice>
           ))}
         </div>
       </fieldset>
-      <label className="flex items-center gap-2">
-        <input
-          type="checkbox"
-          checked={state.source === null}
-          onChange={(event) =>
-            onChange({ ...state, source: event.target.checked ? null : emptySource('drawing') })
-          }
-          className="accent-oxide"
-        />
+      <Choice
+        type="checkbox"
+        checked={state.source === null}
+        onChange={(event) =>
+          onChange({ ...state, source: event.target.checked ? null : emptySource('drawing') })
+        }
+      >
         Each keeps its own source
-      </label>
+      </Choice>
       {state.source === null ? (
-        <label className="flex items-center gap-2 border-t border-zinc-2 pt-3 font-medium">
-          <input
-            type="checkbox"
-            checked={state.confirmed}
-            onChange={(event) => onChange({ ...state, confirmed: event.target.checked })}
-            className="accent-oxide"
-          />
+        <Choice
+          type="checkbox"
+          checked={state.confirmed}
+          onChange={(event) => onChange({ ...state, confirmed: event.target.checked })}
+          className="border-t border-zinc-2 pt-3 font-medium"
+        >
           Confirmed
-        </label>
+        </Choice>
       ) : (
         <SourceForm
           what="each of them"

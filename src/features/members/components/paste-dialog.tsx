@@ -1,6 +1,7 @@
 import { useMemo, useState } from 'react';
 import { count } from '#client/lib/count.ts';
 import { Button } from '#client/ui/button.tsx';
+import { Choice } from '#client/ui/choice.tsx';
 import { Dialog } from '#client/ui/dialog.tsx';
 import { TextArea, TextField } from '#client/ui/text-field.tsx';
 import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
@@ -77,15 +78,14 @@ export function PasteDialog(props: {
               value={file}
               onChange={(event) => setFile(event.target.value)}
             />
-            <label className="flex items-center gap-2 pb-6">
-              <input
-                type="checkbox"
-                checked={replaces}
-                onChange={(event) => setReplaces(event.target.checked)}
-                className="accent-oxide"
-              />
+            <Choice
+              type="checkbox"
+              checked={replaces}
+              onChange={(event) => setReplaces(event.target.checked)}
+              className="pb-6"
+            >
               Put it in place of the {count(present.length, 'present row')}
-            </label>
+            </Choice>
           </div>
           {!table.hasHeader && (
             <p className="mt-3 font-medium text-oxide">

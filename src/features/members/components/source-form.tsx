@@ -1,5 +1,6 @@
 import { useId } from 'react';
 import { Button } from '#client/ui/button.tsx';
+import { Choice } from '#client/ui/choice.tsx';
 import { ProblemText } from '#client/ui/field.tsx';
 import { SourceRing } from '#client/ui/source-ring.tsx';
 import type { DraftSource } from '#shared/contracts/draft-quantity.ts';
@@ -27,19 +28,18 @@ export function SourceForm(props: {
   return (
     <fieldset disabled={!props.editable} className="grid gap-3">
       <legend className="mb-2 font-semibold">Where {props.what} comes from</legend>
-      <div className="grid gap-0.5">
+      <div className="grid">
         {sourceKinds.map(({ value, text }) => (
-          <label key={value} className="flex items-center gap-2 py-0.5">
-            <input
-              type="radio"
-              name={id}
-              checked={source.kind === value}
-              onChange={() => onChange({ source: emptySource(value), confirmed: false })}
-              className="accent-oxide"
-            />
+          <Choice
+            key={value}
+            type="radio"
+            name={id}
+            checked={source.kind === value}
+            onChange={() => onChange({ source: emptySource(value), confirmed: false })}
+          >
             <SourceRing letter={draftSourceLetter(emptySource(value))} confirmed />
             {text}
-          </label>
+          </Choice>
         ))}
       </div>
       <SourceDetails
@@ -47,15 +47,14 @@ export function SourceForm(props: {
         onChange={(next) => onChange({ source: next, confirmed: stated.confirmed })}
       />
       {lack && <ProblemText>{lack}</ProblemText>}
-      <label className="flex items-center gap-2 border-t border-zinc-2 pt-3 font-medium">
-        <input
-          type="checkbox"
-          checked={stated.confirmed}
-          onChange={(event) => onChange({ source, confirmed: event.target.checked })}
-          className="accent-oxide"
-        />
+      <Choice
+        type="checkbox"
+        checked={stated.confirmed}
+        onChange={(event) => onChange({ source, confirmed: event.target.checked })}
+        className="border-t border-zinc-2 pt-3 font-medium"
+      >
         Confirmed
-      </label>
+      </Choice>
       {props.onDone && (
         <Button size="small" onClick={props.onDone} className="justify-self-start">
           Done
