@@ -1,14 +1,8 @@
 import type { Page } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
-import { engineer, openStage, reviewer } from './stage.ts';
+import { engineer, openCalculation, openStage, reviewer } from './stage.ts';
 
 const stage = openStage();
-
-const openCalculation = async (page: Page) => {
-  await page.goto('/');
-  await page.getByRole('link', { name: 'TQ-CAL-012' }).first().click();
-  await page.getByRole('table', { name: 'Members' }).waitFor();
-};
 
 const marks = (page: Page) =>
   page.getByRole('table', { name: 'Members' }).getByRole('rowheader').allInnerTexts();

@@ -1,17 +1,11 @@
 import type { Page } from 'playwright-core';
 import { describe, expect, it } from 'vitest';
-import { engineer, input, openStage, reviewer } from './stage.ts';
+import { engineer, input, openCalculation, openStage, reviewer } from './stage.ts';
 
 const stage = openStage();
 
 /** Runs of members take their time on a busy machine. */
 const slow = { timeout: 20_000 };
-
-const openCalculation = async (page: Page) => {
-  await page.goto('/');
-  await page.getByRole('link', { name: 'TQ-CAL-012' }).first().click();
-  await page.getByRole('table', { name: 'Members' }).waitFor();
-};
 
 const box = (page: Page, mark: string) => page.getByRole('checkbox', { name: `Choose ${mark}` });
 const row = (page: Page, mark: string) =>

@@ -31,7 +31,9 @@ describe('signing in', () => {
   });
 
   it('leads an engineer of the demo to the desk, and out again', async () => {
-    const { page } = await stage.openAs(engineer);
+    const { page } = await stage.open();
+    await page.goto('/');
+    await page.getByRole('button', { name: `Sign in as ${engineer}` }).click();
     await page.getByRole('heading', { name: 'Waits for you' }).waitFor();
     expect(await page.getByRole('link', { name: 'TQ-CAL-012' }).count()).toBeGreaterThan(0);
     await page.getByRole('button', { name: 'Sign out' }).click();

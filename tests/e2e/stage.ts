@@ -8,17 +8,21 @@ export interface Opened {
   readonly context: BrowserContext;
 }
 
+type SignedIn = Awaited<ReturnType<BrowserContext['storageState']>>;
+
+interface OpenOptions {
+  readonly width?: number;
+  readonly expected?: (text: string) => boolean;
+}
+
 export interface Stage {
   readonly origin: string;
   /** The application's database, as its owner. */
   readonly databaseUrl: string;
   /** A page of a person of its own; what goes wrong in it fails the test unless it is expected. */
-  open(options?: { width?: number; expected?: (text: string) => boolean }): Promise<Opened>;
-  /** The same, signed in as one of the demo's people. */
-  openAs(
-    name: string,
-    options?: { width?: number; expected?: (text: string) => boolean },
-  ): Promise<Opened>;
+  open(options?: OpenOptions): Promise<Opened>;
+  /** The same on the desk of one of the demo's people, who signs in once in a file. */
+  openAs(name: string, options?: OpenOptions): Promise<Opened>;
 }
 
 /** The built application with its demo, and a browser, for the tests of one file. */
@@ -27,6 +31,7 @@ export function openStage(): Stage {
   let browser: Browser;
   const contexts: BrowserContext[] = [];
   const problems: PageProblem[][] = [];
+  const signedIn = new Map<string, SignedIn>();
 
   beforeAll(async () => {
     [application, browser] = await Promise.all([serveApplication(), openBrowser()]);
@@ -41,48 +46,65 @@ export function openStage(): Stage {
     expect(found).toEqual([]);
   });
 
-  const stage: Stage = {
+  async function openPage({ width = 1280, expected }: OpenOptions = {}, storageState?: SignedIn) {
+    const context = await browser.newContext({
+      baseURL: application.origin,
+      viewport: { width, height: 860 },
+      permissions: ['clipboard-read', 'clipboard-write'],
+      ...(storageState ? { storageState } : {}),
+    });
+    contexts.push(context);
+    const page = await context.newPage();
+    page.setDefaultTimeout(15_000);
+    problems.push(await watchPage(page, expected));
+    return { page, context };
+  }
+
+  return {
     get origin() {
       return application.origin;
     },
     get databaseUrl() {
       return application.ownerUrl;
     },
-    async open({ width = 1280, expected } = {}) {
-      const context = await browser.newContext({
-        baseURL: application.origin,
-        viewport: { width, height: 860 },
-        permissions: ['clipboard-read', 'clipboard-write'],
-      });
-      contexts.push(context);
-      const page = await context.newPage();
-      page.setDefaultTimeout(15_000);
-      problems.push(await watchPage(page, expected));
-      return { page, context };
-    },
+    open: (options) => openPage(options),
     async openAs(name, options) {
-      const opened = await stage.open(options);
-      await opened.page.goto('/');
-      await opened.page.getByRole('button', { name: `Sign in as ${name}` }).click();
-      await opened.page.getByRole('heading', { name: `The desk of ${name}` }).waitFor();
+      const known = signedIn.get(name);
+      const opened = await openPage(options, known);
+      const { page, context } = opened;
+      await page.goto('/');
+      if (!known) await page.getByRole('button', { name: `Sign in as ${name}` }).click();
+      await page.getByRole('heading', { name: `The desk of ${name}` }).waitFor();
+      if (!known) signedIn.set(name, await context.storageState());
       return opened;
     },
   };
-  return stage;
 }
 
 export const engineer = 'Ines Marlow';
 export const reviewer = 'Tomas Okoye';
 
+/** Opens a calculation from the desk; resolves when its list of members stands. */
+export async function openCalculation(page: Page, calculation = 'TQ-CAL-012') {
+  if (new URL(page.url()).pathname !== '/') await page.goto('/');
+  await page.getByRole('link', { name: calculation }).first().click();
+  await page.getByRole('table', { name: 'Members' }).waitFor();
+}
+
 /** Opens a member of the demo's hall columns by its mark; resolves when its sheet stands. */
 export async function openMember(page: Page, mark: string, calculation = 'TQ-CAL-012') {
-  await page.goto('/');
-  await page.getByRole('link', { name: calculation }).first().click();
+  await openCalculation(page, calculation);
   await page.getByRole('rowheader', { name: mark, exact: true }).getByRole('link').click();
   await page.locator('[data-line]').first().waitFor();
 }
 
-export const saved = (page: Page) => page.getByText(/^saved \d\d:\d\d$/).waitFor();
+/** Looked for in the top bar only: a search of a whole sheet for a text takes long. */
+export const saved = (page: Page) =>
+  page
+    .locator('header')
+    .first()
+    .getByText(/^saved \d\d:\d\d$/)
+    .waitFor();
 
 /** The control of an input in the margin, by the path that problems carry. */
 export const input = (page: Page, path: string) =>

@@ -2,7 +2,7 @@ import { type ChildProcess, spawn } from 'node:child_process';
 import { mkdtemp, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { cloneDatabase } from './database.ts';
+import { cloneDatabase, cloneOf, keepForClones, type TestDatabase } from './database.ts';
 
 export interface Application {
   /** Such as http://127.0.0.1:40123. */
@@ -35,9 +35,29 @@ function servedOrigin(web: ChildProcess): Promise<string> {
   });
 }
 
-/** The built application, served by a process of its own on a free port and a fresh database. */
-export async function serveApplication({ demo = true } = {}): Promise<Application> {
-  const database = await cloneDatabase();
+/**
+ * The built application with its demo, served by a process of its own on a free port and a fresh
+ * database: a clone of one that the first call of a run lets the application fill.
+ */
+export async function serveApplication(): Promise<Application> {
+  let database = await cloneOf('demo');
+  if (!database) {
+    const filled = await cloneDatabase();
+    await (await serve(filled)).end();
+    await keepForClones(filled, 'demo');
+    database = (await cloneOf('demo'))!;
+  }
+  const { ownerUrl, drop } = database;
+  const { origin, end } = await serve(database);
+  const stop = async () => {
+    await end();
+    await drop();
+  };
+  return { origin, ownerUrl, stop };
+}
+
+/** The web process on a database; `end` leaves the database. */
+async function serve(database: TestDatabase): Promise<{ origin: string; end(): Promise<void> }> {
   const folder = await mkdtemp(join(tmpdir(), 'stanchion-application-'));
   const env = {
     ...process.env,
@@ -45,22 +65,21 @@ export async function serveApplication({ demo = true } = {}): Promise<Applicatio
     ...{ DATABASE_URL: database.webUrl, DATABASE_OWNER_URL: database.ownerUrl },
     ...{ SESSION_SECRET: 'only for tests, only for tests, only for tests', STANCHION_DATA: folder },
   };
-  const args = ['--import', 'tsx', 'server/index.ts', ...(demo ? ['--demo'] : [])];
+  const args = ['--import', 'tsx', 'server/index.ts', '--demo'];
   const web = spawn(process.execPath, args, { env, stdio: ['ignore', 'pipe', 'pipe'] });
   const ended = new Promise((resolve) => web.once('close', resolve));
   const killWeb = () => web.kill('SIGKILL');
   process.once('exit', killWeb);
-  const stop = async () => {
+  const end = async () => {
     web.kill('SIGTERM');
     await ended;
     process.removeListener('exit', killWeb);
-    await database.drop();
     await rm(folder, { recursive: true, force: true });
   };
   try {
-    return { origin: await servedOrigin(web), ownerUrl: database.ownerUrl, stop };
+    return { origin: await servedOrigin(web), end };
   } catch (error) {
-    await stop();
+    await end();
     throw error;
   }
 }

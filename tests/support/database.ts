@@ -12,17 +12,39 @@ export interface TestDatabase {
 }
 
 /** A migrated, empty database for one test file. Throws when the run has no database server. */
-export async function cloneDatabase(): Promise<TestDatabase> {
+export const cloneDatabase = (): Promise<TestDatabase> => clone(templateName());
+
+/** The same of a database that was kept under a name; null where none was in this run. */
+export async function cloneOf(kept: string): Promise<TestDatabase | null> {
+  const name = keptName(kept);
+  const found = await runSql(serverUrl(), `SELECT FROM pg_database WHERE datname = '${name}'`);
+  return found.length > 0 ? clone(name) : null;
+}
+
+/** Keeps a database, to which nobody may be connected any more, for `cloneOf` to the run's end. */
+export async function keepForClones({ ownerUrl }: TestDatabase, kept: string): Promise<void> {
+  const own = new URL(ownerUrl).pathname.slice(1);
+  await runSql(serverUrl(), `ALTER DATABASE ${own} RENAME TO ${keptName(kept)}`);
+}
+
+const serverUrl = (): string => process.env.TEST_DATABASE_URL!;
+
+function templateName(): string {
   const template = inject('template');
   if ('reason' in template) throw new Error(template.reason);
-  const serverUrl = process.env.TEST_DATABASE_URL!;
-  const name = `${template.name}_${randomBytes(4).toString('hex')}`;
-  await runSql(serverUrl, `CREATE DATABASE ${name} TEMPLATE ${template.name}`);
+  return template.name;
+}
+
+const keptName = (kept: string): string => `${templateName()}_${kept}`;
+
+async function clone(source: string): Promise<TestDatabase> {
+  const name = `${templateName()}_${randomBytes(4).toString('hex')}`;
+  await runSql(serverUrl(), `CREATE DATABASE ${name} TEMPLATE ${source}`);
   return {
-    ownerUrl: databaseUrl(serverUrl, name),
-    webUrl: databaseUrl(process.env.TEST_WEB_DATABASE_URL ?? serverUrl, name),
+    ownerUrl: databaseUrl(serverUrl(), name),
+    webUrl: databaseUrl(process.env.TEST_WEB_DATABASE_URL ?? serverUrl(), name),
     drop: async () => {
-      await runSql(serverUrl, `DROP DATABASE IF EXISTS ${name} WITH (FORCE)`);
+      await runSql(serverUrl(), `DROP DATABASE IF EXISTS ${name} WITH (FORCE)`);
     },
   };
 }
