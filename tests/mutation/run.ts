@@ -7,7 +7,7 @@ import type { Mutant } from './switchboard.ts';
 import type { Outcome } from './worker.ts';
 
 /*
- * npm run mutate -- [WORD] [--workers N] [--tests WORD] [--out FILE]: changes the books one step at a
+ * npm run mutate -- [WORD] [--workers N] [--tests PATTERN] [--out FILE]: changes the books one step at a
  * time and runs the tests that compare with publications and with working by hand. README.md beside
  * this file says what is changed and how.
  */

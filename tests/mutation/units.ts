@@ -29,7 +29,7 @@ export const testFiles = (word: string): string[] =>
     ),
   )
     .filter((path) => path.endsWith('.test.ts') && !STRUCTURAL.includes(path))
-    .filter((path) => path.includes(word))
+    .filter((path) => new RegExp(word).test(path))
     .sort();
 
 /** A unit with what it touches: in its body, and test by test. */
@@ -46,7 +46,7 @@ export interface Baseline {
   readonly failing: readonly string[];
 }
 
-/** Reads the test files whose path holds a word and runs them once without a mutant. */
+/** Reads the test files whose path fits a pattern and runs them once without a mutant. */
 export async function runBaseline(board: Switchboard, word: string): Promise<Baseline> {
   const { reading } = await import('./stand-in.ts');
   const units: KnownUnit[] = [];
