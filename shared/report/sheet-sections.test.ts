@@ -83,6 +83,22 @@ describe('the sections of a sheet', () => {
     expect(governs && words(governs)).toBe(`Flexure and compression ${ratio}`);
   });
 
+  it('say a value of a table in the units of the sheet', () => {
+    const si = parseInput({ ...INPUT, units: 'si' });
+    if (!si.ok) throw new Error(JSON.stringify(si.problems));
+    const section = memberSheet(runCalculation(si.input), id).find(
+      (block) => block.kind === 'lineSection' && block.address === 'section',
+    );
+    // AISC Shapes Database v16.0: W14X48, A = 14.1 in²; 14.1 × 25.4² = 9096.8 mm².
+    expect(words(section as BlockOf<'lineSection'>)).toMatch(/^Ag = 909[67][\d.]* mm²/);
+  });
+
+  it('do not say their title again before a ratio', () => {
+    const shear = at('c1:G/x');
+    expect(words(shear)).not.toContain(shear.title);
+    expect(words(shear)).toMatch(/^0\.\d+$/);
+  });
+
   it('leave no line out and none twice', () => {
     const lines = (blocks: readonly Block[]) =>
       blocks.filter((b) => b.kind === 'line' || b.kind === 'lineSection').length;

@@ -59,7 +59,7 @@ export function sectionedLines(
       title: titleOf(block.title, section),
       level: Math.min(section.level, 3) as SectionBlock['level'],
       folded: startsFolded(section, held, way),
-      outcome: outcomeOf(p, splitKey(placed.line.key).rest, held, inWay),
+      outcome: outcomeOf(p, placed.line, held, inWay),
     };
   });
 }
@@ -114,10 +114,11 @@ const isKnown = ({ line }: PlacedLine): boolean => KNOWN.has(line.kind);
 /** What a section comes to in one line: what fails or is not checked, its worst check, its value. */
 function outcomeOf(
   p: Presenter,
-  rest: string,
+  { key, title }: Line,
   held: readonly PlacedLine[],
   inWay: (placed: PlacedLine) => boolean,
 ): SectionBlock['outcome'] {
+  const { rest } = splitKey(key);
   const content = (...runs: Inline[]) => ({ content: runs, over: false });
   const hindrance = ['failed', 'outside scope']
     .map((severity) => held.find(({ line }) => noticeOf(line)?.severity === severity))
@@ -132,7 +133,7 @@ function outcomeOf(
     const ratio = printedBy(line.ratio, line.print.working);
     return {
       content: [
-        text(`${line.title} `),
+        ...(line.title === title ? [] : [text(`${line.title} `)]),
         ...(line.verdict === 'OK' ? [] : [strong(`${line.verdict} `)]),
         { kind: 'value', text: ratio, address },
       ],
@@ -176,7 +177,8 @@ const rankOf = ({ verdict, ratio }: LineOf<'check'>): number =>
 function linkedValue(p: Presenter, { line, address }: PlacedLine): Inline[] {
   if (!isValued(line)) return [];
   const tex = p.symbolTex(line, line.symbol);
-  const [own] = readForms(line, p.set);
+  // A table's value in the units of the sheet; others as they are read.
+  const own = readForms(line, p.set).at(line.kind === 'lookup' ? -1 : 0);
   return [
     { kind: 'math', tex, text: symbolText(tex) },
     text(' = '),

@@ -1,9 +1,10 @@
-import { memo } from 'react';
+import { memo, useEffect, useRef } from 'react';
 import { same } from '#client/lib/same.ts';
 import { classNames } from '#client/ui/class-names.ts';
 import { SourceRing } from '#client/ui/source-ring.tsx';
 import type { LineBlock as Line } from '#shared/report/tree.ts';
 import { useDocument } from './document-context.ts';
+import { fitWorking } from './fit-working.ts';
 import { Formula } from './formula.tsx';
 import { Inlines } from './inlines.tsx';
 
@@ -80,16 +81,22 @@ function LongLine({ block }: { block: Line }) {
   return (
     <>
       <p className="line-title">{block.title}</p>
-      {block.working.length > 0 && (
-        <div className="line-working">
-          {block.working.map((tex, index) => (
-            // biome-ignore lint/suspicious/noArrayIndexKey: the steps of a line in their order
-            <Formula key={index} tex={tex} className="line-step" />
-          ))}
-        </div>
-      )}
+      {block.working.length > 0 && <Working steps={block.working} />}
       <LineWords block={block} />
     </>
+  );
+}
+
+function Working({ steps }: { steps: Line['working'] }) {
+  const element = useRef<HTMLDivElement>(null);
+  useEffect(() => (element.current ? fitWorking(element.current) : undefined), []);
+  return (
+    <div ref={element} className="line-working">
+      {steps.map((tex, index) => (
+        // biome-ignore lint/suspicious/noArrayIndexKey: the steps of a line in their order
+        <Formula key={index} tex={tex} className="line-step" />
+      ))}
+    </div>
   );
 }
 
@@ -144,7 +151,7 @@ function LineWords({ block }: { block: Line }) {
       {tone && <strong className="line-tone">{tone}. </strong>}
       <Inlines runs={sentence} />
       {given && (
-        <span className="line-source">
+        <span className={classNames('line-source', sentence.length > 0 && 'is-after-words')}>
           <SourceRing letter={given.letter} confirmed={given.confirmed} />
           <span>
             {given.source}

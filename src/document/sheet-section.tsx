@@ -41,6 +41,7 @@ function SectionHead(props: { head: BlockOf<'lineSection'>; folded: boolean }) {
         {folds ? (
           <button
             type="button"
+            className="section-fold"
             data-section={address}
             aria-expanded={!folded}
             aria-controls={bodyId(head)}

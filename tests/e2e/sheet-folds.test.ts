@@ -10,6 +10,18 @@ const openColumn = (page: Page) => openMember(page, 'K-03', 'TQ-CAL-014');
 const head = (page: Page, address: string) => page.locator(`[data-section="${address}"]`);
 const expanded = (page: Page, address: string) =>
   expect.poll(() => head(page, address).getAttribute('aria-expanded'));
+/** Lines whose working lies over their result. */
+const coveredResults = (page: Page) =>
+  page.locator('[data-line]').evaluateAll((lines) =>
+    lines.flatMap((each) => {
+      const result = each.querySelector('.line-result')?.getBoundingClientRect();
+      const covers = [...each.querySelectorAll('.line-working .katex-base')].some((part) => {
+        const { right, top, bottom } = part.getBoundingClientRect();
+        return result && right > result.left && bottom > result.top && top < result.bottom;
+      });
+      return covers ? [(each as HTMLElement).dataset.line] : [];
+    }),
+  );
 const focusedPlace = (page: Page) =>
   page.evaluate(() => {
     const { line: of, section } = (document.activeElement as HTMLElement).dataset;
@@ -50,6 +62,8 @@ describe('sections of a sheet', () => {
     expect(await focusedPlace(page)).toBe('E3/strength');
     await page.keyboard.press('Shift+F');
     await expect.poll(() => page.locator('[data-section][aria-expanded=false]').count()).toBe(0);
+    // F2-6 with its numbers is wider than the column beside its result.
+    await expect.poll(() => coveredResults(page)).toEqual([]);
   });
 
   it('open for a line that is followed or linked to', async () => {

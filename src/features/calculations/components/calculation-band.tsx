@@ -4,6 +4,7 @@ import { paths } from '#client/app/paths.ts';
 import { count } from '#client/lib/count.ts';
 import type { Calculation } from '#shared/contracts/calculations.ts';
 import type { MemberRow } from '#shared/contracts/members.ts';
+import { CAUTIONS_OF_COVER } from '#shared/report/cautions.ts';
 
 /** Three things to know before the list: what is over, what is open, what is never covered. */
 export function CalculationBand({ calculation }: { calculation: Calculation }) {
@@ -38,10 +39,7 @@ export function CalculationBand({ calculation }: { calculation: Calculation }) {
         ))}
         {andMore(open.length)}
       </Third>
-      <Third title="Never covered here">
-        Connections, base plates, bracing strength and stiffness, shear, torsion, deflection,
-        fatigue, fire, seismic detailing, erection stability, temporary works.
-      </Third>
+      <Third title="Outside every sheet">{CAUTIONS_OF_COVER.at(-1)}</Third>
     </div>
   );
 }

@@ -81,7 +81,17 @@ function ClauseRow({ book, entry }: { book: Book; entry: ContentsEntry }) {
 function equationsOf({ formulas }: LibraryClause): string {
   const numbers = [...new Set(formulas.flatMap(({ equation }) => equation ?? []))];
   const others = formulas.filter(({ equation }) => equation === null).length;
-  if (others === 0) return numbers.join(', ');
+  if (others === 0) return numbersText(numbers);
   const without = `${numbers.length > 0 ? 'and ' : ''}${count(others, 'formula')} without a number`;
-  return [numbers.join(', '), without].filter(Boolean).join(' ');
+  return [numbersText(numbers), without].filter(Boolean).join(' ');
+}
+
+/** `E3-1, E3-2`; of a table its rows under its name: `Table B4.1a, 1, 2, 5; Table B4.1b, 10`. */
+function numbersText(numbers: readonly string[]): string {
+  const rows = new Map<string, string[]>();
+  for (const number of numbers) {
+    const [, table = '', row = number] = /^(Table .+), (\S+)$/.exec(number) ?? [];
+    rows.set(table, [...(rows.get(table) ?? []), row]);
+  }
+  return [...rows].map(([table, found]) => [table, ...found].filter(Boolean).join(', ')).join('; ');
 }
