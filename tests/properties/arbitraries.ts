@@ -12,6 +12,7 @@ const six = (value: number): number => Number(value.toPrecision(6));
 
 export type Kind =
   | 'stout'
+  | 'slender'
   | 'rolled'
   | 'channel'
   | 'hss'
@@ -35,6 +36,13 @@ export const SECTIONS: Readonly<Record<Kind, fc.Arbitrary<Section>>> = {
   pipe: tabulated('round HSS', 'pipe'),
   i: fc
     .record({ d: number(300, 900), b: number(0.35, 0.9), w: number(20, 170), f: number(4, 22) })
+    .map(({ d, b, w, f }) => {
+      const bf = six(b * d);
+      return { shape: 'i', d, bf, tf: six(bf / 2 / f), tw: six(d / w) };
+    }),
+  /** A plate girder with a slender web. */
+  slender: fc
+    .record({ d: number(500, 1200), b: number(0.25, 0.5), w: number(125, 190), f: number(5, 14) })
     .map(({ d, b, w, f }) => {
       const bf = six(b * d);
       return { shape: 'i', d, bf, tf: six(bf / 2 / f), tw: six(d / w) };

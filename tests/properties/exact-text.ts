@@ -75,13 +75,18 @@ const SI: typeof US = {
   lineLoad: [['kN/m', one]],
 };
 
-/** Writes values of N and mm in the units of a set, exactly: they take its units in turn. */
+/**
+ * Writes values of N and mm in the units of a set, exactly: they take its units in turn, and equal
+ * sizes the same one, so that what is equal is typed equal.
+ */
 export function exactly(set: 'us' | 'si'): Write {
-  let turn = 0;
+  const taken = new Map<string, Unit>();
   return (value, dimension) => {
     const units = (set === 'us' ? US : SI)[dimension];
-    const unit = units?.[turn++ % units.length];
+    const key = `${dimension} ${Math.abs(value)}`;
+    const unit = taken.get(key) ?? units?.[taken.size % units.length];
     if (!unit) throw new Error(`no unit of ${dimension}`);
+    taken.set(key, unit);
     return `${decimalText(by(fraction(String(value)), unit[1]))} ${unit[0]}`;
   };
 }

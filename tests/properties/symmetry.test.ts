@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test, vi } from 'vitest';
 import { designationsOf, findShape } from '#shared/sections/table.ts';
-import { type Kind, members, number, SECTIONS } from './arbitraries.ts';
+import { type Kind, loaded, members, number, plain, SECTIONS, scaleOf } from './arbitraries.ts';
 import { assertProperty, type Fault } from './assert-property.ts';
 import { plainKey } from './crossings.ts';
 import type { Load, Member, Section } from './member.ts';
@@ -91,7 +91,7 @@ describe('square and round sections', () => {
   });
 });
 
-const DOUBLY: readonly Kind[] = ['rolled', 'hss', 'pipe', 'i', 'box', 'tube', 'round'];
+const DOUBLY: readonly Kind[] = ['rolled', 'hss', 'pipe', 'i', 'slender', 'box', 'tube', 'round'];
 
 test('doubly symmetric sections bear moments of either sign alike', { timeout: 600_000 }, () => {
   assertProperty(members({ kinds: DOUBLY }), { seed: 52, runs: 150 }, (m) =>
@@ -114,10 +114,29 @@ test('a member end for end is the same member', { timeout: 600_000 }, () => {
   assertProperty(members(), { seed: 54, runs: 200 }, (m) => differences(m, mirrored(m), 1e-9));
 });
 
+test('a beam end for end has the same Cb', { timeout: 600_000 }, () => {
+  const drawn = fc.record({
+    section: fc
+      .constantFrom(...(['rolled', 'channel', 'i', 'slender'] as const))
+      .chain((kind) => SECTIONS[kind]),
+    ...{ slenderness: number(90, 250), A: number(-1, 1), B: number(-1, 1), p: number(0, 0.02) },
+    secondOrder: fc.constantFrom('amplified' as const, 'exact' as const),
+  });
+  assertProperty(
+    drawn,
+    { seed: 58, runs: 80 },
+    ({ section, slenderness, A, B, p, secondOrder }) => {
+      const L = slenderness * scaleOf(section, 345).r;
+      const m = loaded(plain(section, { L, secondOrder, Cb: 'auto' }), { p, mx: [A, B] });
+      return differences(m, mirrored(m), 1e-10);
+    },
+  );
+});
+
 describe('loads', () => {
-  const loaded = members().filter(({ loads }) => loads.length > 0);
+  const under = members().filter(({ loads }) => loads.length > 0);
   test('a uniform load in two pieces is one load', { timeout: 600_000 }, () => {
-    const drawn = fc.record({ m: loaded, at: number(0.05, 0.95) });
+    const drawn = fc.record({ m: under, at: number(0.05, 0.95) });
     assertProperty(drawn, { seed: 55, runs: 120 }, ({ m, at }) => {
       const pieces = m.loads.flatMap((load): readonly Load[] => {
         if (load.kind !== 'uniform') return [load];
@@ -132,7 +151,7 @@ describe('loads', () => {
     });
   });
   test('a load that varies from one value to the same is uniform', { timeout: 600_000 }, () => {
-    assertProperty(loaded, { seed: 56, runs: 80 }, (m) => {
+    assertProperty(under, { seed: 56, runs: 80 }, (m) => {
       const varying = m.loads.map((load): Load => {
         if (load.kind !== 'uniform') return load;
         const { w, kind: _, ...rest } = load;
@@ -143,7 +162,7 @@ describe('loads', () => {
   });
   test('a point load is a short load of the same size', { timeout: 600_000 }, () => {
     const SHORT = 1e-6;
-    assertProperty(loaded, { seed: 57, runs: 120 }, (m) => {
+    assertProperty(under, { seed: 57, runs: 120 }, (m) => {
       const reach = SHORT * m.L;
       const places = [0, m.L, ...(m.restraints ?? []).map(({ at }) => at)];
       const spread = m.loads.map((load): Load => {
