@@ -20,8 +20,10 @@ import { storyMultiplier, translationMoment } from './sway.ts';
 /** A run that has no lines, where nothing of the member is checked. */
 export const noRun = (c: ResolvedCombination): CombinationRun => ({
   ...{ lines: [], checks: [], planes: { x: null, y: null }, segments: [null] },
-  ...{ compressed: c.P.value > 0, tension: c.P.value < 0 },
+  ...{ bends: bendsOf(c), compressed: c.P.value > 0, tension: c.P.value < 0 },
 });
+
+const bendsOf = (c: ResolvedCombination) => ({ x: bends(c, 'x'), y: bends(c, 'y') });
 
 interface Done {
   checks: LineOf<'check'>[];
@@ -43,7 +45,7 @@ export function runCombination(m: MemberStrengths, c: ResolvedCombination): Comb
   } catch (error) {
     if (!(error instanceof NotComputable)) throw error;
   }
-  return { lines: r.lines, ...done };
+  return { lines: r.lines, bends: bendsOf(c), ...done };
 }
 
 function steps(m: MemberStrengths, c: ResolvedCombination, r: Recorder, done: Done): void {

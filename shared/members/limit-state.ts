@@ -78,8 +78,10 @@ export const LESS = 'another limit state gives less';
 export const noMoment = (axis: Axis): string =>
   `no moment about the ${axis === 'x' ? 'major' : 'minor'} axis`;
 
-export const bent = (c: Context, axis: Axis): boolean =>
-  (c.run.planes[axis]?.state ?? 'none') !== 'none';
+export const bent = (c: Context, axis: Axis): boolean => {
+  const plane = c.run.planes[axis];
+  return plane ? plane.state !== 'none' : c.run.bends[axis];
+};
 
 /** Why a check of this combination isn't there although its forces are. */
 export function unreached(c: Context, axes: readonly Axis[]): Told {

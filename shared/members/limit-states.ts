@@ -21,8 +21,9 @@ function secondOrder(axis: Axis): LimitState {
     title: `Second-order moment, ${WORD[axis]} axis`,
     clause: ['App. 8.1.2'],
     tell: (c) => {
-      const state = c.run.planes[axis]?.state ?? 'none';
-      if (state === 'none') return na(noMoment(axis));
+      if (!bent(c, axis)) return na(noMoment(axis));
+      const state = c.run.planes[axis]?.state;
+      if (!state) return unreached(c, [axis]);
       if (state === 'failed') return { ...unreached(c, [axis]), state: 'governs' };
       if (state === 'outside scope') return unreached(c, [axis]);
       if (!c.run.compressed) return na('no compression: first-order moments');
@@ -98,6 +99,7 @@ const shear = (axis: Axis): LimitState => ({
     const found = check(c, `G/${axis}/check`);
     if (found) return checked(c, found);
     if (!bent(c, axis)) return na(noMoment(axis));
+    if (!c.run.planes[axis]) return unreached(c, [axis]);
     return find(c, `G/${axis}`)
       ? na('the moment does not change along the member')
       : outside('the shear force cannot be told from what is given');

@@ -29,7 +29,10 @@ export interface MemberStrengths {
 export interface CombinationRun {
   readonly lines: readonly Line[];
   readonly checks: readonly LineOf<'check'>[];
+  /** null where a step before it stopped the combination. */
   readonly planes: Readonly<Record<Axis, PlaneMoments | null>>;
+  /** Whether its moments and loads bend the member. */
+  readonly bends: Readonly<Record<Axis, boolean>>;
   /** Ids of its segments; one without id is the member. */
   readonly segments: readonly (string | null)[];
   /** Compressed, so that Chapter E and the second-order clauses apply. */

@@ -144,5 +144,13 @@ describe('an unstable story', () => {
       const state = (id: string) => m.completeness.find((row) => row.id === id)?.cells[0]?.state;
       expect(m.summary.verdict).toBe('FAILED');
       expect([state('compression/check'), state('tension/check')]).toEqual([compression, tension]);
+      // There are moments about the major axis, and none about the minor one.
+      for (const id of ['second-order', 'shear']) {
+        expect(state(`${id}/x`)).toBe(open);
+        expect(state(`${id}/y`)).toBe(none);
+      }
+      expect(state('flexure-major/check')).toBe(open);
+      expect(state('flexure-minor/check')).toBe(none);
+      expect(state('interaction')).toBe(P === '0 kip' ? none : open);
     });
 });
