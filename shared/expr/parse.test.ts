@@ -95,10 +95,10 @@ describe('what a formula text may not hold', () => {
     expect(sum.settle({ ...third, d: 0.2 + 1e-12 })).toBe(
       sum.evaluate({ ...third, d: 0.2 + 1e-12 }),
     );
-    // A multiple of such a sum too.
+    // A multiple of such a sum and its size too.
     const nearly = { a: 1, b: 0.3, c: 0.1 + 0.2 };
     expect(parseExpression('a*(b-c)').evaluate(nearly)).not.toBe(0);
-    for (const multiple of ['a*(b-c)', '(b-c)/a', '(b-c)*a', '-(b-c)'])
+    for (const multiple of ['a*(b-c)', '(b-c)/a', '(b-c)*a', '-(b-c)', 'abs(b-c)/a'])
       expect(Math.abs(parseExpression(multiple).settle(nearly))).toBe(0);
     // No sum, a sum under another function, or no value: nothing settles.
     expect(parseExpression('a/b').settle({ a: 1, b: 0 })).toBe(Infinity);

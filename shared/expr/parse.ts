@@ -112,7 +112,7 @@ export interface ParsedExpression {
   readonly symbols: readonly string[];
   /** Value at these operands; not a finite number where the formula has none. */
   evaluate(operands: Readonly<Record<string, number>>): number;
-  /** As `evaluate`, but a sum whose terms cancel, all but their last bits, and a multiple of it, is zero. */
+  /** As `evaluate`, but a sum whose terms cancel, all but their last bits, is zero, as are its multiples and its size. */
   settle(operands: Readonly<Record<string, number>>): number;
 }
 
@@ -148,9 +148,13 @@ export function parseExpression(text: string): ParsedExpression {
   return parsed;
 }
 
-/** The sum that an expression is, or that it is a multiple of; null where it is neither. */
+/** The sum that an expression is, or whose multiple or size it is; null where it is none of these. */
 function sumIn(node: MathNode): MathNode | null {
   if (node.type === 'ParenthesisNode') return sumIn((node as unknown as ParenthesisLike).content);
+  if (node.type === 'FunctionNode') {
+    const { fn, args } = node as unknown as FunctionLike;
+    return fn.name === 'abs' && args[0] ? sumIn(args[0]) : null;
+  }
   if (node.type !== 'OperatorNode') return null;
   const { fn, args } = node as unknown as OperatorLike;
   const [left, right] = args;

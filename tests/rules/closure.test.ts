@@ -102,3 +102,61 @@ describe('closure of extreme members', () => {
         expect(faults).toEqual([]);
       });
 });
+
+// The same number by two ways, to its last bits, and what is left where two numbers nearly cancel.
+describe('closure of values that nearly agree', () => {
+  const member = (secondOrder: string, units: string, own: object, combination: object) => ({
+    ...{ format: 1, standard: 'aisc360-22', design: 'LRFD', units },
+    analysis: { method: 'direct', secondOrder, includesMemberEffect: false, sway: 'none' },
+    members: [
+      {
+        ...{ mark: 'near', section: 'W14X82', material: 'A992', length: '24 ft', ends: 'held' },
+        ...{ Cb: 'auto', endMomentSign: 'bending', ...own },
+        combinations: [{ name: 'any', P: '100 kip', ...combination }],
+      },
+    ],
+  });
+  const ways = ['exact', 'amplified', 'from-analysis'].flatMap((secondOrder) =>
+    ['us', 'si'].map((units) => [secondOrder, units] as const),
+  );
+
+  it.each(ways)('a restraint at mid-length, %s, %s', (secondOrder, units) => {
+    const faults = [
+      ...['12 ft', '3657.6 mm', '3.6576 m', '3657.6000000000004 mm', '3657.5999999999995 mm'],
+      ...['12.0000000000001 ft', '12.00000000001 ft', '12.000000001 ft', '12.0000001 ft'],
+    ].flatMap((at) =>
+      recordFaults(
+        recordOf(
+          member(
+            ...[
+              secondOrder,
+              units,
+              { restraints: [{ at, holds: ['in-plane', 'centre', 'twist'] }] },
+            ],
+            {
+              ...{ MxA: '50 kip ft', MxB: '20 kip ft', MyA: '3 kip ft' },
+              supports: [{ at, Mx: '30 kip ft', My: '2 kip ft' }],
+              loads: [{ kind: 'uniform', bends: 'x', height: 'centre', w: '1 kip/ft' }],
+            },
+          ),
+        ),
+      ).map((fault) => `${at}: ${fault}`),
+    );
+    expect(faults).toEqual([]);
+  });
+
+  it.each(ways)('end moments, equal, reverse or next to none, %s, %s', (secondOrder, units) => {
+    const lengths = { Lcx: '24 ft', Lcy: '24 ft', Lcz: '24 ft', Lb: '24 ft' };
+    const faults = [6, 9, 10, 11, 12, 13, 14, 15].flatMap((power) =>
+      [50 * (1 + 10 ** -power), -50 * (1 + 10 ** -power), 50 * 10 ** -power].flatMap((MB) =>
+        // The other unit makes the last bits differ.
+        [`${MB} kip ft`, `${MB * 1.3558179483314} kN m`].flatMap((MxB) =>
+          recordFaults(
+            recordOf(member(secondOrder, units, lengths, { MxA: '50 kip ft', MxB, MyA: MxB })),
+          ).map((fault) => `${MxB}: ${fault}`),
+        ),
+      ),
+    );
+    expect(faults).toEqual([]);
+  });
+});
