@@ -233,6 +233,28 @@ const crests: Paths = fc
     }));
   });
 
+/** Stocky members close to yielding: the stiffness of the direct analysis falls. */
+const squashed: Paths = fc
+  .record({
+    ...{
+      section: of('rolled', 'hss', 'pipe', 'i'),
+      slenderness: number(12, 35),
+      psi: number(-1, 1),
+    },
+    ...{ secondOrder: fc.constantFrom('exact' as const, 'amplified' as const), design },
+  })
+  .map(({ section, slenderness, psi, ...basis }) => {
+    const alpha = basis.design === 'ASD' ? 1.6 : 1;
+    return path((share) => ({
+      ...plain(section, { ...basis, ...held(slenderness, scaleOf(section, 345).r) }),
+      ...forces(section, 345, {
+        p: along(0.4, 0.6, share) / alpha,
+        mx: [0.1, 0.1 * psi],
+        my: [0.05, 0.05],
+      }),
+    }));
+  });
+
 /** A load moves from one place to another, over restraints and the points between. */
 const places: Paths = fc
   .record({
@@ -375,5 +397,17 @@ const ties: Paths = fc
 
 export const PATHS = {
   ...{ columns, torsion, beams, plates, unequal, boxes, tubes, steels, stiffened, axial, moments },
-  ...{ crests, flanges, places, restraints, varying, stories, singleAxis, analysed, sprung, ties },
+  ...{
+    crests,
+    flanges,
+    squashed,
+    places,
+    restraints,
+    varying,
+    stories,
+    singleAxis,
+    analysed,
+    sprung,
+    ties,
+  },
 } satisfies Readonly<Record<string, Paths>>;
