@@ -77,7 +77,7 @@ describe('the whole path by keyboard alone', () => {
     expect(
       await page.evaluate(() => document.activeElement?.getAttribute('data-line')),
     ).toBeTruthy();
-  }, 90_000);
+  });
 
   it('chooses a section by typing part of its designation', async () => {
     const { page } = await stage.openAs('Ines Marlow');

@@ -104,7 +104,7 @@ describe('a member as it is built', () => {
     await page.getByRole('button', { name: 'Undo' }).click();
     await expectAll();
     await saved(page);
-  }, 240_000);
+  });
 
   it('asks for the moments over a point that holds a plane it bends in', async () => {
     const { page } = await stage.openAs(engineer);
@@ -125,7 +125,7 @@ describe('a member as it is built', () => {
     await expect.poll(() => page.getByText('Moments over the held points').count()).toBe(0);
     await page.getByRole('button', { name: 'Remove held between the ends' }).click();
     await saved(page);
-  }, 180_000);
+  });
 
   it('takes a section by its sizes, with its outline, and calls it by them', async () => {
     const { page } = await stage.openAs(engineer);
@@ -164,7 +164,7 @@ describe('a member as it is built', () => {
     await input(page, 'section').selectOption('from the tables');
     await expect.poll(() => input(page, 'section').inputValue()).toBe('W10×33');
     await saved(page);
-  }, 180_000);
+  });
 
   it('gives the sway of the story where the basis takes it by B2, and keeps it', async () => {
     const { page } = await stage.openAs(engineer);
@@ -204,7 +204,7 @@ describe('a member as it is built', () => {
     await page.getByLabel('Do the stories sway?').selectOption('none');
     await page.getByLabel('Second-order moments').selectOption('exact');
     await saved(page);
-  }, 180_000);
+  });
 
   it('has joints, net section, stiffeners, springs and shears under plain headings', async () => {
     const { page } = await stage.openAs(engineer);
@@ -240,5 +240,5 @@ describe('a member as it is built', () => {
     await expect.poll(() => input(page, 'netSection.U').count()).toBe(0);
     await page.getByRole('button', { name: 'Undo' }).click();
     await expect.poll(() => input(page, 'netSection.U').inputValue()).toBe('0.9');
-  }, 180_000);
+  });
 });

@@ -59,7 +59,7 @@ describe('the section finder', () => {
     await page.keyboard.press('Control+z');
     await page.getByRole('heading', { name: 'C-05 · W10×49' }).waitFor();
     await saved(page);
-  }, 120_000);
+  });
 
   it('keeps to limits, shows the present section in its place, and can be stopped', async () => {
     const { page } = await stage.openAs(engineer);
@@ -82,7 +82,7 @@ describe('the section finder', () => {
     await page.getByText(/^Stopped/).waitFor();
     await finder(page).getByRole('button', { name: 'Search again' }).click();
     await searched(page);
-  }, 120_000);
+  });
 
   it('says why where nothing is found, and that a steel is not made so', async () => {
     const { page } = await stage.openAs(engineer);
@@ -99,7 +99,7 @@ describe('the section finder', () => {
     await page.getByText(/A992 is not made as such sections/).waitFor({ timeout: 60_000 });
     await finder(page).getByLabel('Width, at least').fill('90 in');
     await page.getByText('No square HSS are within these limits.').waitFor();
-  }, 120_000);
+  });
 
   it('is only read by a reviewer', async () => {
     const { page } = await stage.openAs(reviewer);
@@ -107,5 +107,5 @@ describe('the section finder', () => {
     await page.getByRole('button', { name: 'Find a section' }).click();
     await searched(page);
     expect(await table(page).getByRole('button').count()).toBe(0);
-  }, 120_000);
+  });
 });

@@ -1,5 +1,5 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core';
-import { afterAll, afterEach, beforeAll, expect } from 'vitest';
+import { afterAll, afterEach, beforeAll, expect, vi } from 'vitest';
 import { type Application, serveApplication } from '#tests/support/application.ts';
 import { openBrowser, type PageProblem, watchPage } from '#tests/support/browser.ts';
 
@@ -25,6 +25,9 @@ export interface Stage {
   openAs(name: string, options?: OpenOptions): Promise<Opened>;
 }
 
+/** How long a page may take to show what is waited for, also on a busy machine. */
+const patience = 30_000;
+
 /** The built application with its demo, and a browser, for the tests of one file. */
 export function openStage(): Stage {
   let application: Application;
@@ -33,6 +36,11 @@ export function openStage(): Stage {
   const problems: PageProblem[][] = [];
   const signedIn = new Map<string, SignedIn>();
 
+  // Each wait ends by itself; how many of them fit in a time is the machine's matter.
+  vi.setConfig({
+    testTimeout: 600_000,
+    expect: { poll: { timeout: patience, interval: 100 } },
+  });
   beforeAll(async () => {
     [application, browser] = await Promise.all([serveApplication(), openBrowser()]);
   });
@@ -55,7 +63,7 @@ export function openStage(): Stage {
     });
     contexts.push(context);
     const page = await context.newPage();
-    page.setDefaultTimeout(15_000);
+    page.setDefaultTimeout(patience);
     problems.push(await watchPage(page, expected));
     return { page, context };
   }
