@@ -14,7 +14,7 @@ import {
   usesOf,
 } from './closure-rules.ts';
 import { isValued, type Line, type ValuedLine } from './line.ts';
-import { formOf, formUnit, printForm } from './printed.ts';
+import { type Form, formOf, formUnit, printForm } from './printed.ts';
 
 export interface ClosureProblem {
   readonly address: string;
@@ -57,12 +57,23 @@ function lineProblems(
     printed: (ref, form) => printed(valued(ref), form),
     own: (form) => printed(line as ValuedLine, form),
   };
+  /** One unit of the digit after the last printed one. */
+  const nextStep = (l: ValuedLine, form: Form): number => {
+    const digits = l.print[form];
+    const next = digits && 'sig' in digits ? { sig: digits.sig + 1 } : null;
+    return next ? printForm(l, form, next, set).number.step : 0;
+  };
   const printsAll = ({ ref, form }: Use): boolean => {
     const operand = valued(ref);
-    const digits = operand.print[form];
+    if (operand.kind === 'governing') return printsAll({ ref: operand.governs, form });
+    // Its other form follows from the one that its formula gives.
+    const first = operand.kind === 'formula' ? formOf(operand, operand.prints, set) : form;
+    const digits = operand.print[first];
     if (digits && 'sig' in digits && digits.sig === MOST_DIGITS) return true;
-    const { step } = sheet.printed(ref, form).number;
-    return operand.kind === 'formula' && isBeyondOperands(operand, sheet, step / 10, () => true);
+    return (
+      operand.kind === 'formula' &&
+      isBeyondOperands(operand, sheet, nextStep(operand, first), () => true)
+    );
   };
   const problems: string[] = [];
   const want = (holds: boolean, reason: string) => {
@@ -97,7 +108,7 @@ function lineProblems(
       want(agrees(value, own), `prints ${own.text}, its printed operands give ${value}`);
       if (isShort(line.print[formOf(line, line.prints, set)]))
         want(
-          isBeyondOperands(line, sheet, own.step / 10, printsAll),
+          isBeyondOperands(line, sheet, nextStep(line, formOf(line, line.prints, set)), printsAll),
           `prints ${own.text}, its printed operands carry more digits`,
         );
       break;

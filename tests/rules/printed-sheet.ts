@@ -125,7 +125,9 @@ function lineFaults(line: Line, read: Reader, set: UnitSet): string[] {
         const there = [valueWith(s, 1), valueWith(s, -1)].filter(Number.isFinite);
         return sum + Math.max(...there.map((v) => Math.abs(v - value)));
       }, 0);
-      return left >= printed.step / 20
+      // 1 may stand for 0.96, whose next digit is a hundred times smaller.
+      const next = /^−?1(\.0+)?(×|$)/.test(own.number.text) ? 100 : 10;
+      return left >= printed.step / next / 2
         ? []
         : [`prints ${own.number.text}, its operands carry more digits`];
     }

@@ -89,8 +89,11 @@ function randomCombination(random: Random, name: string, parts: Parts) {
   const alpha = basis.design === 'ASD' ? 1.6 : 1;
   const share = random.pick([0.1, 0.3, 0.6, random.size(1e-4, 2)]);
   const size = (axis: 'x' | 'y') => (s.Fy * (axis === 'x' ? s.Zx : s.Zy) * share) / alpha;
-  const signed = (axis: 'x' | 'y') =>
-    size(axis) * random.pick([0, 1, -1, 1e-11, random.between(-1, 1)]);
+  const signed = (axis: 'x' | 'y') => {
+    const M = size(axis) * random.pick([0, 1, -1, 1e-11, random.between(-1, 1)]);
+    // Moments below what any member has are refused as typing mistakes.
+    return Math.abs(M) < 1e-6 ? 0 : M;
+  };
   const [MxA, MxB] = springs ? ['0 kN m', '0 kip ft'] : endMoments(random, size('x'));
   const [MyA, MyB] = springs
     ? ['0 kip ft', '0 kN m']

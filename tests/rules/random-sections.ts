@@ -116,7 +116,9 @@ function bySizes(random: Random): Chosen {
       const B = random.chance(0.3) ? Ht : size(Ht.value * random.between(0.4, 0.95));
       const t = size(B.value / random.size(8, 90));
       const wall = random.pick(['nominal', 'design']);
-      const Ro = random.chance(0.3) && { Ro: `${t.value * random.between(1, 3)} mm` };
+      const Ro = random.chance(0.3) && {
+        Ro: `${Math.min(t.value * random.between(1, 3), 0.45 * B.value)} mm`,
+      };
       return {
         section: { shape, B: B.text, Ht: Ht.text, t: t.text, wall, ...Ro },
         grades: TUBES,
