@@ -300,6 +300,31 @@ const restraints: Paths = fc
     });
   });
 
+/** A restraint that ends segments moves past the crest of the moments under a uniform load. */
+const passed: Paths = fc
+  .record({
+    ...{
+      section: of('rolled', 'i'),
+      share: number(0.1, 0.4),
+      p: number(0.02, 0.2),
+      A: number(-0.2, 0.2),
+    },
+    ...{ secondOrder: fc.constantFrom('exact' as const, 'amplified' as const), design },
+  })
+  .map(({ section, share, p, A, ...basis }) => {
+    const { rx, Mx } = scaleOf(section, 345);
+    return path((t) => {
+      const { lengths: _, ...m } = plain(section, { ...basis, Cb: 'auto', L: 90 * rx });
+      const w = (8 * share * Mx) / m.L ** 2;
+      return {
+        ...{ ...m, ...forces(section, 345, { p, mx: [A, 0.05] }) },
+        restraints: [{ at: along(0.3, 0.7, t) * m.L, holds: ['top', 'bottom'] }],
+        supports: [{ at: along(0.3, 0.7, t) * m.L, My: 0 }],
+        loads: [{ kind: 'uniform', bends: 'x', height: 'centre', w }],
+      };
+    });
+  });
+
 /** A load that varies along the member turns its sign. */
 const varying: Paths = fc
   .record({
@@ -401,6 +426,7 @@ export const PATHS = {
     crests,
     flanges,
     squashed,
+    passed,
     places,
     restraints,
     varying,
