@@ -91,7 +91,8 @@ describe('Example H.1B typed into the browser', () => {
     }
     await input(page, 'endMomentSign').selectOption('bending');
     await page.locator('.sheet-verdict[data-verdict="OK"]').waitFor();
-    expect(await page.locator('.verdict-ratio').textContent()).toBe('0.929');
+    // The sheet stood before the last of these inputs was typed.
+    await expect.poll(() => page.locator('.verdict-ratio').textContent()).toBe('0.929');
     await saved(page);
 
     await page.getByRole('link', { name: 'Report', exact: true }).click();
