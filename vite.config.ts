@@ -19,8 +19,14 @@ export default defineConfig({
         test: {
           name: 'unit',
           include: ['{shared,server,src,tests}/**/*.test.{ts,tsx}'],
-          exclude: ['tests/{api,e2e}/**'],
+          exclude: ['tests/{api,e2e,properties,mutation}/**'],
+          // These tests change nothing outside themselves; the books are read once per process.
+          isolate: false,
         },
+      },
+      {
+        extends: true,
+        test: { name: 'properties', include: ['tests/{properties,mutation}/**/*.test.ts'] },
       },
       { extends: true, test: { name: 'api', include: ['tests/api/**/*.test.ts'] } },
       {
