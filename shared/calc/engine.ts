@@ -6,7 +6,7 @@ export const RESULT_CHANGES: readonly { readonly version: string; readonly chang
   {
     version: '0.2.1',
     change:
-      'Values that differ by less than 5×10⁻¹³ of the larger one are equal in comparisons and checks. Only results that hang on the last bits of a number change.',
+      'Values that differ by less than 5×10⁻¹³ of the larger one are equal in comparisons and checks: only results that hang on the last bits of a number change. A member with end springs and without compression takes the reduced stiffness of the direct analysis.',
   },
   {
     version: '0.2.0',

@@ -146,7 +146,8 @@ export function planeMoments(
     );
 
   let rigidity: Quantity | null = null;
-  const rigidityOf = (): Quantity => (rigidity ??= flexuralRigidity(r, m, axis, axial));
+  const rigidityOf = (): Quantity =>
+    (rigidity ??= flexuralRigidity(r, m, axis, axial?.taub ?? null));
   const springs = springsOf(member, axis, input.units);
   if (springs) {
     const [bay] = bays;
@@ -161,7 +162,9 @@ export function planeMoments(
     // Loads over the ends bend nothing.
     if (acting.length === 0) return plane('none');
     const found = sprungMoments(r, axis, {
-      ...{ bay, springs, alpha: m.alpha, Pr: P, EIstar: rigidityOf(), loads: acting },
+      ...{ bay, springs, alpha: m.alpha, Pr: P, loads: acting },
+      // The springs take their share by the stiffness of the analysis, compressed or not.
+      EIstar: axial || input.analysis.method !== 'direct' ? rigidityOf() : unstressed(r, m, axis),
     });
     return typeof found === 'string' ? plane(found) : plane('done', [found]);
   }
@@ -202,15 +205,19 @@ function flexuralRigidity(
   r: Recorder,
   { steel, section }: PlaneContext,
   axis: Axis,
-  axial: AxialState | null,
+  taub: AxialState['taub'],
 ): Quantity {
   const { E } = steel;
   const I = axis === 'x' ? section.Ix : section.Iy;
   const named = { symbol: `EIstar${axis}` };
-  return axial?.taub && axial.taub !== 'failed'
-    ? r.formula(c2Formulas.reducedRigidity, `C2/${axis}/EI`, { taub: axial.taub, E, I }, named)
+  return taub && taub !== 'failed'
+    ? r.formula(c2Formulas.reducedRigidity, `C2/${axis}/EI`, { taub, E, I }, named)
     : r.formula(c2Formulas.nominalRigidity, `C2/${axis}/EI`, { E, I }, named);
 }
+
+/** C2.3(a), (b): 0.8EI of the direct analysis with τb = 1, for a member without compression. */
+const unstressed = (r: Recorder, m: PlaneContext, axis: Axis): Quantity =>
+  flexuralRigidity(r, m, axis, r.formula(c2Formulas.taubFull, `C2/${axis}/taub`, {}));
 
 /** Given moments over the points that divide the plane into bays; `missing` names those without. */
 function supportMoments(

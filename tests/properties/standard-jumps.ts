@@ -183,11 +183,4 @@ export const RULES: readonly Jump[] = [
     name: 'a net section larger than the gross one has no rupture strength, and fails',
     ...{ at: ['D3/net'], parts: ['axial'], of: 'capacity', size: () => 1 },
   },
-  {
-    // Direct analysis: 0.8 τb EI with compression, EI without. That shifts the moments between the
-    // springs and the span, by 1/0.8 at most.
-    name: 'a member with end springs is less stiff as soon as it is compressed',
-    ...{ at: ['given/sense'], parts: ['x'], of: 'demand' },
-    size: (c) => (c.before.member.springs ? 0.2 : 0),
-  },
 ];
