@@ -34,8 +34,7 @@ export default defineConfig({
         test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
-          // One browser at a time, after everything else.
-          maxWorkers: 1,
+          // After everything else: a browser and its server keep a processor busy.
           sequence: { groupOrder: 1 },
         },
       },

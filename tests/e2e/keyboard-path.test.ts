@@ -65,7 +65,8 @@ describe('the whole path by keyboard alone', () => {
       .toContain('rung');
     await page.keyboard.press('ArrowDown');
     await page.keyboard.press('Enter');
-    await expect.poll(() => page.locator('.sheet-line.is-chosen').count()).toBe(1);
+    await page.getByRole('heading', { name: 'Trace of line 2.46' }).waitFor({ state: 'detached' });
+    await expect.poll(() => page.locator('.sheet-line.is-chosen:focus').count()).toBe(1);
     await page.keyboard.press('u');
     await expect
       .poll(() => page.evaluate(() => document.activeElement?.closest('[data-used-by]') !== null))

@@ -21,11 +21,22 @@ export async function cloneOf(kept: string): Promise<TestDatabase | null> {
   return found.length > 0 ? clone(name) : null;
 }
 
-/** Keeps a database, to which nobody may be connected any more, for `cloneOf` to the run's end. */
-export async function keepForClones({ ownerUrl }: TestDatabase, kept: string): Promise<void> {
+/**
+ * Keeps a database, to which nobody may be connected any more, for `cloneOf` to the run's end. Where
+ * another file kept one under the name meanwhile, that one stays and this one is removed.
+ */
+export async function keepForClones({ ownerUrl, drop }: TestDatabase, kept: string): Promise<void> {
   const own = new URL(ownerUrl).pathname.slice(1);
-  await runSql(serverUrl(), `ALTER DATABASE ${own} RENAME TO ${keptName(kept)}`);
+  try {
+    await runSql(serverUrl(), `ALTER DATABASE ${own} RENAME TO ${keptName(kept)}`);
+  } catch (error) {
+    if ((error as { code?: string }).code !== DUPLICATE_DATABASE) throw error;
+    await drop();
+  }
 }
+
+/** SQLSTATE of a database name that is taken (PostgreSQL, appendix A). */
+const DUPLICATE_DATABASE = '42P04';
 
 const serverUrl = (): string => process.env.TEST_DATABASE_URL!;
 
