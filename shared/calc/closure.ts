@@ -169,10 +169,11 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet, step: nu
       .map(({ n, form }) => raise(n, form))
       .includes(true);
   };
-  const raiseMostMoving = (effect: (ref: string) => number): boolean => {
-    const uses = usesOf(line, (ref) => at(ref).line, set);
-    const ranked = uses
-      .map((use) => ({ use, moves: effect(use.ref) }))
+  /** One more digit for the operand whose rounding moves the value most; `exact` enters unrounded. */
+  const raiseMostMoving = (value: (exact: string | null) => number): boolean => {
+    const plain = value(null);
+    const ranked = usesOf(line, (ref) => at(ref).line, set)
+      .map((use) => ({ use, moves: Math.abs(value(use.ref) - plain) }))
       .filter(({ use }) => isRounded(use, sheet));
     // Operands that print as zero give no value at all: each of them prints more.
     if (ranked.some(({ moves }) => !Number.isFinite(moves)))
@@ -190,20 +191,14 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet, step: nu
       closeForms(node, sheet, raise, lower, set);
       if (line.kind === 'formula') {
         const form = formOf(line, line.prints, set);
-        const plain = () => reproduced(line, sheet);
-        while (!agrees(plain(), sheet.own(form).number)) {
-          if (raiseMostMoving((ref) => Math.abs(reproduced(line, sheet, ref) - plain()))) continue;
+        while (!agrees(reproduced(line, sheet), sheet.own(form).number)) {
+          if (raiseMostMoving((exact) => reproduced(line, sheet, exact))) continue;
           if (!isBeyondOperands(line, sheet, sheet.own(form).number.step, () => true)) return;
           if (!lower(form)) return;
         }
       } else if (line.kind === 'root') {
         while (residualAt(line, sheet, -1) * residualAt(line, sheet, 1) > 0)
-          if (
-            !raiseMostMoving((ref) =>
-              Math.abs(residualAt(line, sheet, 0, ref) - residualAt(line, sheet, 0)),
-            )
-          )
-            return;
+          if (!raiseMostMoving((exact) => residualAt(line, sheet, 0, exact))) return;
       } else closeGoverning(line, node, sheet, { at, raise, lower, raiseShortest }, set);
       return;
     }
@@ -230,28 +225,18 @@ function closeNode(node: Node, at: (ref: string) => Node, set: UnitSet, step: nu
         node.shown.working = more(node.shown.working ?? RATIO);
       const own = () => printNumber(line.ratio, node.shown.working ?? RATIO);
       while (!agrees(reproduced(line, sheet), own()))
-        if (
-          !raiseMostMoving((ref) =>
-            Math.abs(reproduced(line, sheet, ref) - reproduced(line, sheet)),
-          )
-        )
-          return;
+        if (!raiseMostMoving((exact) => reproduced(line, sheet, exact))) return;
       // Printed demand and capacity stand on the side of the limit that the verdict says.
       for (;;) {
         const printed = reproduced(line, sheet);
         if (printed <= 1 === line.ratio <= 1) return;
-        if (!raiseMostMoving((ref) => Math.abs(reproduced(line, sheet, ref) - printed))) return;
+        if (!raiseMostMoving((exact) => reproduced(line, sheet, exact))) return;
       }
     }
     case 'comparison': {
       const own = () => printNumber(line.difference * 100, node.shown.working ?? PERCENT);
       while (!agrees(reproduced(line, sheet), own()))
-        if (
-          !raiseMostMoving((ref) =>
-            Math.abs(reproduced(line, sheet, ref) - reproduced(line, sheet)),
-          )
-        )
-          return;
+        if (!raiseMostMoving((exact) => reproduced(line, sheet, exact))) return;
       return;
     }
     default:

@@ -225,6 +225,12 @@ describe('a comparison', () => {
       r.comparison('c', given(r, 'a', 95), given(r, 'b', 100), '{difference}', { title: 'C' }),
     ).toBeCloseTo(-0.05, 14);
   });
+  it('with nothing has no share, and no line', () => {
+    const r = createRecorder('');
+    const [used, nothing] = [given(r, 'a', 95), given(r, 'b', 0)];
+    expect(r.comparison('c', used, nothing, '{difference}', { title: 'C' })).toBe(null);
+    expect(r.lines.map(({ kind }) => kind)).toEqual(['given', 'given']);
+  });
 });
 
 /*

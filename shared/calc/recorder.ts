@@ -287,8 +287,18 @@ function writerOf(prefix: '' | ':', part: string, lines: Line[], keys: Set<strin
       });
     },
 
-    /** The same quantity by another route; `other` must not be zero. */
-    comparison(key: string, used: Quantity, other: Quantity, words: string, more: Titled): number {
+    /**
+     * The same quantity by another route: by what share of the other it differs. Where the other is
+     * zero there is no such share: null, and no line.
+     */
+    comparison(
+      key: string,
+      used: Quantity,
+      other: Quantity,
+      words: string,
+      more: Titled,
+    ): number | null {
+      if (other.value === 0) return null;
       const difference = used.value / other.value - 1;
       add({
         kind: 'comparison',

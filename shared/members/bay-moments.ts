@@ -210,10 +210,7 @@ const LOWER_BY = 0.05;
 /** An exact moment above the analysis's largest by this share is cautioned. */
 const ABOVE_BY = 0.02;
 
-/**
- * Both moments side by side; true where the code's, used here, is cautioned to be lower. Nothing to
- * compare where loads cancel each other and the other moment is zero.
- */
+/** Both moments side by side; true where the code's, used here, is cautioned to be lower. */
 function compare(
   r: Recorder,
   axis: Axis,
@@ -221,7 +218,6 @@ function compare(
   used: Quantity,
   other: Quantity,
 ): boolean {
-  if (other.value === 0) return false;
   const difference = r.comparison(
     `theory/${axis}/comparison`,
     used,
@@ -231,7 +227,7 @@ function compare(
       : "The exact elastic moment, used here, is {difference} the standard's amplified one.",
     { title: `Amplified and exact moment, ${WORD[axis]} axis`, clause: theory('1.2') },
   );
-  const lower = used === code && difference < -LOWER_BY;
+  const lower = used === code && difference !== null && difference < -LOWER_BY;
   if (lower)
     r.notice(
       `theory/${axis}/lower`,
@@ -246,9 +242,7 @@ function compare(
   return lower;
 }
 
-/** Both moments side by side, where the exact one is not zero (loads that cancel each other). */
 function besideAnalysis(r: Recorder, axis: Axis, given: Quantity, exact: Quantity): void {
-  if (exact.value === 0) return;
   const difference = r.comparison(
     `theory/${axis}/comparison`,
     given,
@@ -256,7 +250,7 @@ function besideAnalysis(r: Recorder, axis: Axis, given: Quantity, exact: Quantit
     'The largest given moment is {difference} the exact elastic one between the given end moments.',
     { title: `Given and exact moment, ${WORD[axis]} axis`, clause: theory('1.2') },
   );
-  if (1 / (1 + difference) - 1 > ABOVE_BY)
+  if (difference !== null && 1 / (1 + difference) - 1 > ABOVE_BY)
     r.notice(
       `theory/${axis}/above`,
       'caution',

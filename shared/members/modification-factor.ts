@@ -85,7 +85,7 @@ export function compareFactors(r: Recorder, Cb: Quantity, second: Quantity): voi
       clause: clause('F1', 'F1-1'),
     },
   );
-  if (1 / (1 + difference) - 1 < -LOWER_BY)
+  if (difference !== null && 1 / (1 + difference) - 1 < -LOWER_BY)
     r.notice(
       'F1/lower',
       'caution',

@@ -89,14 +89,13 @@ export function singleAxisChecks(r: Recorder, q: SingleAxis): LineOf<'check'>[] 
     ...separateChecks(r, { Pr, Pc }, x, y),
   ];
   const larger = inPlane.ratio.value < outOfPlane.value ? outOfPlane : inPlane.ratio;
-  if (ordinary.ratio.value > 0)
-    r.comparison(
-      'H1.3/comparison',
-      larger,
-      ordinary.ratio,
-      'The utilisation by H1.3, which decides here, is {difference} the one by H1.1.',
-      { title: 'H1.3 and H1.1', clause: clause('H1.3') },
-    );
+  r.comparison(
+    'H1.3/comparison',
+    larger,
+    ordinary.ratio,
+    'The utilisation by H1.3, which decides here, is {difference} the one by H1.1.',
+    { title: 'H1.3 and H1.1', clause: clause('H1.3') },
+  );
   return checks;
 }
 
